@@ -1,0 +1,2 @@
+/** The computing part of Rolltrace: a scenario flown through the roll equation. */
+package org.rolltrace.core;

@@ -1,0 +1,2 @@
+/** The entry point, which chooses the front end. */
+package org.rolltrace.ui.launch;
