@@ -1,0 +1,130 @@
+package org.rolltrace.core.aeroplane;
+
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.rolltrace.core.quantity.Check;
+
+/**
+ * An aeroplane without its derivatives.
+ *
+ * @param name what it is called on screens and in results
+ * @param span b, m, above 0
+ * @param wingArea S, m², above 0
+ * @param mass m, kg, above 0; empty when not known, which leaves only held slip
+ * @param inertia moments of inertia
+ * @param ailerons aileron travel; empty when not known, which leaves the stick unused
+ * @param rudder rudder travel; empty when not known, which leaves the pedals unused
+ * @param limits the aeroplane's own limits
+ */
+public record Aeroplane(
+    String name,
+    double span,
+    double wingArea,
+    OptionalDouble mass,
+    Inertia inertia,
+    Optional<Ailerons> ailerons,
+    Optional<Rudder> rudder,
+    Limits limits) {
+
+  /**
+   * Checks the values.
+   *
+   * @throws IllegalArgumentException when the name is blank, or span, area or mass is not above 0
+   */
+  public Aeroplane {
+    if (name.isBlank()) {
+      throw new IllegalArgumentException("aeroplane name is blank; expected some text");
+    }
+    Check.positive("span, m,", span);
+    Check.positive("wing area, m2,", wingArea);
+    if (mass.isPresent()) {
+      Check.positive("mass, kg,", mass.getAsDouble());
+    }
+  }
+
+  /**
+   * Starts an aeroplane from what every calculation needs.
+   *
+   * @param name what it is called
+   * @param span b, m
+   * @param wingArea S, m²
+   * @param inertia moments of inertia
+   * @return a builder with everything else still missing
+   */
+  public static Builder builder(String name, double span, double wingArea, Inertia inertia) {
+    return new Builder(name, span, wingArea, inertia);
+  }
+
+  /** Collects the parts that may be missing. */
+  public static final class Builder {
+    private final String name;
+    private final double span;
+    private final double wingArea;
+    private final Inertia inertia;
+    private OptionalDouble mass = OptionalDouble.empty();
+    private Optional<Ailerons> ailerons = Optional.empty();
+    private Optional<Rudder> rudder = Optional.empty();
+    private Limits limits = Limits.NONE;
+
+    private Builder(String name, double span, double wingArea, Inertia inertia) {
+      this.name = name;
+      this.span = span;
+      this.wingArea = wingArea;
+      this.inertia = inertia;
+    }
+
+    /**
+     * Sets the mass.
+     *
+     * @param value m, kg
+     * @return this builder
+     */
+    public Builder mass(double value) {
+      mass = OptionalDouble.of(value);
+      return this;
+    }
+
+    /**
+     * Sets the aileron travel.
+     *
+     * @param value the ailerons
+     * @return this builder
+     */
+    public Builder ailerons(Ailerons value) {
+      ailerons = Optional.of(value);
+      return this;
+    }
+
+    /**
+     * Sets the rudder travel.
+     *
+     * @param value the rudder
+     * @return this builder
+     */
+    public Builder rudder(Rudder value) {
+      rudder = Optional.of(value);
+      return this;
+    }
+
+    /**
+     * Sets the aeroplane's own limits.
+     *
+     * @param value the limits
+     * @return this builder
+     */
+    public Builder limits(Limits value) {
+      limits = value;
+      return this;
+    }
+
+    /**
+     * Makes the aeroplane.
+     *
+     * @return the aeroplane
+     * @throws IllegalArgumentException when a value is out of range
+     */
+    public Aeroplane build() {
+      return new Aeroplane(name, span, wingArea, mass, inertia, ailerons, rudder, limits);
+    }
+  }
+}

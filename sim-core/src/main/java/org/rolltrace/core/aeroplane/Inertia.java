@@ -1,0 +1,63 @@
+package org.rolltrace.core.aeroplane;
+
+import java.util.OptionalDouble;
+import org.rolltrace.core.quantity.Check;
+
+/**
+ * Moments of inertia about the stability axes.
+ *
+ * @param roll Ixx, kg m², above 0
+ * @param yaw Izz, kg m², above 0; empty when not known, which leaves only held slip
+ * @param product Ixz = ∫ x z dm, kg m², with Ixz² below Ixx Izz
+ */
+public record Inertia(double roll, OptionalDouble yaw, double product) {
+
+  /**
+   * Checks the values.
+   *
+   * @throws IllegalArgumentException when a moment is not above 0, when the product is too large for
+   *     the moments, or when it is given without a yaw inertia
+   */
+  public Inertia {
+    Check.positive("roll inertia, kg m2,", roll);
+    Check.finite("product of inertia, kg m2,", product);
+    if (yaw.isPresent()) {
+      double izz = Check.positive("yaw inertia, kg m2,", yaw.getAsDouble());
+      if (!(product * product < roll * izz)) {
+        throw new IllegalArgumentException(
+            "product of inertia is "
+                + product
+                + " kg m2; expected less than the root of roll times yaw inertia, "
+                + Math.sqrt(roll * izz)
+                + " kg m2, in size: no body has more");
+      }
+    } else if (product != 0) {
+      throw new IllegalArgumentException(
+          "product of inertia is "
+              + product
+              + " kg m2 without a yaw inertia; give the yaw inertia too");
+    }
+  }
+
+  /**
+   * Inertia about the roll axis alone, enough for held slip.
+   *
+   * @param roll Ixx, kg m²
+   * @return the inertia
+   */
+  public static Inertia ofRoll(double roll) {
+    return new Inertia(roll, OptionalDouble.empty(), 0);
+  }
+
+  /**
+   * Inertia about the roll and yaw axes.
+   *
+   * @param roll Ixx, kg m²
+   * @param yaw Izz, kg m²
+   * @param product Ixz, kg m²
+   * @return the inertia
+   */
+  public static Inertia of(double roll, double yaw, double product) {
+    return new Inertia(roll, OptionalDouble.of(yaw), product);
+  }
+}

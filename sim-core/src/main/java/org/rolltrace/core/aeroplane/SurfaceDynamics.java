@@ -1,0 +1,37 @@
+package org.rolltrace.core.aeroplane;
+
+import org.rolltrace.core.quantity.Check;
+
+/**
+ * How fast a surface follows its control: a largest rate, then a first-order lag.
+ *
+ * @param rateLimit the largest rate of the surface, rad/s, above 0; positive infinity for none
+ * @param lag the time constant of the first-order lag, s; 0 for none
+ */
+public record SurfaceDynamics(double rateLimit, double lag) {
+
+  /** A surface that moves with its control, as cables and rods make it. */
+  public static final SurfaceDynamics DIRECT = new SurfaceDynamics(Double.POSITIVE_INFINITY, 0);
+
+  /**
+   * Checks the values.
+   *
+   * @throws IllegalArgumentException when the rate limit is not above 0 or the lag is negative
+   */
+  public SurfaceDynamics {
+    if (!(rateLimit > 0)) {
+      throw new IllegalArgumentException(
+          "rate limit, rad/s, is " + rateLimit + "; expected a number above 0, or none at all");
+    }
+    Check.notNegative("lag, s,", lag);
+  }
+
+  /**
+   * Whether the surface is always exactly where its control puts it.
+   *
+   * @return true without rate limit and lag
+   */
+  public boolean isDirect() {
+    return rateLimit == Double.POSITIVE_INFINITY && lag == 0;
+  }
+}

@@ -1,0 +1,300 @@
+package org.rolltrace.core.flight;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.TreeSet;
+import java.util.stream.DoubleStream;
+import org.hipparchus.exception.MathRuntimeException;
+import org.hipparchus.ode.ODEState;
+import org.hipparchus.ode.ODEStateAndDerivative;
+import org.hipparchus.ode.OrdinaryDifferentialEquation;
+import org.hipparchus.ode.events.Action;
+import org.hipparchus.ode.nonstiff.DormandPrince853Integrator;
+import org.hipparchus.ode.sampling.ODEStateInterpolator;
+import org.rolltrace.core.history.Channel;
+import org.rolltrace.core.history.TimeHistory;
+import org.rolltrace.core.motion.CalculationException;
+import org.rolltrace.core.motion.LateralMotion;
+import org.rolltrace.core.pilot.Control;
+import org.rolltrace.core.pilot.PilotInput;
+
+/** Computes one manoeuvre. */
+public final class Flight {
+  /** Steps below this mean that the equations cannot be followed, s. */
+  private static final double SMALLEST_STEP = 1e-10;
+
+  private static final double LARGEST_STEP = 1;
+  private static final int MOST_EVALUATIONS = 20_000_000;
+  private static final int MOST_SAMPLES = 1_000_000;
+
+  /** Events are looked for at least this often, s, and this many times in a stretch. */
+  private static final double LOOK_EVERY = 0.05;
+
+  private static final int LOOKS_PER_STRETCH = 16;
+
+  /** A state beyond this has left every range in which the equations mean something, rad, rad/s. */
+  private static final double RANGE = 1e6;
+
+  /** Breakpoints are kept to this, s. */
+  private static final double NANOSECOND = 1e-9;
+
+  private final FlightPlan plan;
+  private final FlightSettings settings;
+  private final LateralMotion motion;
+  private final SurfaceDrive stick;
+  private final SurfaceDrive pedal;
+  private final Optional<PilotInput> leading;
+  private final DormandPrince853Integrator integrator;
+  private final TimeHistory.Recorder recorder;
+  private final List<FlightEvent> events = new ArrayList<>();
+  private final List<Double> openCaptures;
+  private final double[] scratch;
+  private OptionalDouble captureFrom = OptionalDouble.empty();
+  private int nextSample;
+  private double reached;
+
+  private Flight(FlightPlan plan, FlightSettings settings) {
+    this.plan = plan;
+    this.settings = settings;
+    this.motion = plan.motion();
+    this.leading = plan.programme().leading();
+    int states = motion.dimension();
+    this.stick =
+        new SurfaceDrive(
+            Control.STICK,
+            plan.stickRun(),
+            plan.programme().stick(),
+            plan.trim().stick().orElse(0),
+            plan.trim().aileron(),
+            states);
+    states += stick.hasState() ? 1 : 0;
+    this.pedal =
+        new SurfaceDrive(
+            Control.PEDAL,
+            plan.pedalRun(),
+            plan.programme().pedal(),
+            plan.trim().pedal().orElse(0),
+            plan.trim().rudder(),
+            states);
+    states += pedal.hasState() ? 1 : 0;
+    this.scratch = new double[states];
+    this.integrator =
+        new DormandPrince853Integrator(
+            SMALLEST_STEP,
+            LARGEST_STEP,
+            settings.absoluteTolerance(),
+            settings.relativeTolerance());
+    this.openCaptures = new ArrayList<>(plan.captures());
+    this.recorder =
+        TimeHistory.recorder(
+            settings.sampleRate(), (int) (plan.duration() * settings.sampleRate()) + 32);
+  }
+
+  /**
+   * Computes a manoeuvre.
+   *
+   * @param plan what is flown
+   * @param settings how finely
+   * @return its history and events
+   * @throws CalculationException when the step collapses, a state leaves the finite range, or the
+   *     history would be too long
+   */
+  public static Flown fly(FlightPlan plan, FlightSettings settings) {
+    if (plan.duration() * settings.sampleRate() > MOST_SAMPLES) {
+      throw new CalculationException(
+          "the history would have more than "
+              + MOST_SAMPLES
+              + " samples; shorten the duration or lower the sample rate");
+    }
+    return new Flight(plan, settings).run();
+  }
+
+  private Flown run() {
+    double[] state = new double[scratch.length];
+    state[LateralMotion.BANK] = plan.disturbance().bank();
+    state[LateralMotion.ROLL_RATE] = plan.disturbance().rollRate();
+    if (motion.dimension() > LateralMotion.SIDESLIP) {
+      state[LateralMotion.SIDESLIP] = plan.trim().sideslip() + plan.disturbance().sideslip();
+    }
+    stick.initialise(state);
+    pedal.initialise(state);
+
+    double start = 0;
+    for (double end : stretchEnds()) {
+      state = flyStretch(start, end, state);
+      start = end;
+    }
+    events.sort(Comparator.comparingDouble(FlightEvent::time));
+    return new Flown(recorder.finish(), events);
+  }
+
+  private TreeSet<Double> stretchEnds() {
+    TreeSet<Double> ends = new TreeSet<>();
+    DoubleStream.of(plan.programme().breakpoints())
+        .filter(time -> time > 0 && time < plan.duration())
+        .forEach(ends::add);
+    ends.add(plan.duration());
+    return ends;
+  }
+
+  private double[] flyStretch(double start, double end, double[] state) {
+    // At the end of the stretch a control that jumps there has not jumped yet.
+    double last = Math.nextDown(end);
+    if (leading.isPresent() && captureFrom.isEmpty() && start > leadingStart() - NANOSECOND) {
+      captureFrom = OptionalDouble.of(state[LateralMotion.BANK]);
+    }
+    begin(stick, start, state);
+    begin(pedal, start, state);
+    record(start, start, state);
+    recorder.dropIfRepeated();
+    if (nextSample / settings.sampleRate() <= start) {
+      nextSample++;
+    }
+
+    integrator.clearEventDetectors();
+    integrator.clearStepHandlers();
+    integrator.setMaxEvaluations(MOST_EVALUATIONS);
+    double look = Math.min(LOOK_EVERY, (end - start) / LOOKS_PER_STRETCH);
+    addDetectors(stick, look);
+    addDetectors(pedal, look);
+    captureFrom.ifPresent(bank -> addCaptures(bank, look));
+    integrator.addStepHandler(interpolator -> takeSamples(interpolator, end));
+
+    double[] reachedState;
+    try {
+      reachedState =
+          integrator
+              .integrate(new Stretch(last), new ODEState(start, state), end)
+              .getPrimaryState();
+    } catch (MathRuntimeException failure) {
+      throw new CalculationException(
+          "the integration could not go on after "
+              + reached
+              + " s: "
+              + failure.getMessage()
+              + "; look for a derivative or inertia that is wrong by orders of magnitude, or shorten"
+              + " the duration",
+          failure);
+    }
+    record(end, last, reachedState);
+    if (nextSample / settings.sampleRate() <= end) {
+      nextSample++;
+    }
+    return reachedState;
+  }
+
+  private double leadingStart() {
+    return leading.orElseThrow().shape().start();
+  }
+
+  private void begin(SurfaceDrive drive, double time, double[] state) {
+    boolean slewed = drive.isSlewing();
+    drive.chooseMode(time, state);
+    if (drive.isSlewing() != slewed) {
+      events.add(new FlightEvent.RateLimit(time, drive.control(), drive.isSlewing()));
+    }
+  }
+
+  private void addDetectors(SurfaceDrive drive, double look) {
+    if (drive.mayMeetStop()) {
+      integrator.addEventDetector(
+          new EventAt(
+              look,
+              s -> drive.beyondStop(s.getTime()),
+              (s, detector, increasing) -> {
+                events.add(new FlightEvent.Stop(s.getTime(), drive.control(), increasing));
+                return Action.RESET_DERIVATIVES;
+              }));
+    }
+    if (drive.hasRateLimit()) {
+      integrator.addEventDetector(
+          new EventAt(
+              look,
+              s -> drive.switching(s.getTime(), s.getPrimaryState()),
+              (s, detector, increasing) -> {
+                drive.switchMode(s.getTime(), s.getPrimaryState());
+                events.add(
+                    new FlightEvent.RateLimit(s.getTime(), drive.control(), drive.isSlewing()));
+                return Action.RESET_DERIVATIVES;
+              }));
+    }
+  }
+
+  private void addCaptures(double fromBank, double look) {
+    double direction = Math.signum(leading.orElseThrow().shape().size());
+    for (double change : openCaptures) {
+      integrator.addEventDetector(
+          new EventAt(
+              look,
+              s -> direction * (s.getPrimaryState()[LateralMotion.BANK] - fromBank) - change,
+              (s, detector, increasing) -> {
+                if (increasing && openCaptures.remove(change)) {
+                  events.add(new FlightEvent.BankCapture(s.getTime(), change));
+                }
+                return Action.CONTINUE;
+              }));
+    }
+  }
+
+  private void takeSamples(ODEStateInterpolator interpolator, double stretchEnd) {
+    ODEStateAndDerivative current = interpolator.getCurrentState();
+    for (double value : current.getPrimaryState()) {
+      if (!(Math.abs(value) <= RANGE)) {
+        throw new CalculationException(
+            "the motion leaves the finite range after "
+                + reached
+                + " s: the aeroplane diverges; look at its modes, or shorten the duration");
+      }
+    }
+    double time = nextSample / settings.sampleRate();
+    while (time <= current.getTime() && time < stretchEnd) {
+      record(time, time, interpolator.getInterpolatedState(time).getPrimaryState());
+      nextSample++;
+      time = nextSample / settings.sampleRate();
+    }
+    reached = current.getTime();
+  }
+
+  private void record(double time, double controlTime, double[] state) {
+    double aileron = stick.angle(controlTime, state);
+    double rudder = pedal.angle(controlTime, state);
+    motion.rates(state, aileron, rudder, scratch);
+    recorder.begin(time);
+    recorder.set(Channel.BANK, state[LateralMotion.BANK]);
+    recorder.set(Channel.ROLL_RATE, state[LateralMotion.ROLL_RATE]);
+    recorder.set(Channel.YAW_RATE, motion.yawRate(state, aileron, rudder));
+    recorder.set(Channel.SIDESLIP, motion.sideslip(state, aileron, rudder));
+    recorder.set(Channel.STICK, stick.position(controlTime));
+    recorder.set(Channel.PEDAL, pedal.position(controlTime));
+    recorder.set(Channel.AILERON, aileron);
+    recorder.set(Channel.RUDDER, rudder);
+    recorder.set(Channel.ROLL_ACCELERATION, scratch[LateralMotion.ROLL_RATE]);
+  }
+
+  /** The equations between two breakpoints. */
+  private final class Stretch implements OrdinaryDifferentialEquation {
+    private final double last;
+
+    Stretch(double last) {
+      this.last = last;
+    }
+
+    @Override
+    public int getDimension() {
+      return scratch.length;
+    }
+
+    @Override
+    public double[] computeDerivatives(double time, double[] state) {
+      double within = Math.min(time, last);
+      double[] rates = new double[state.length];
+      motion.rates(state, stick.angle(within, state), pedal.angle(within, state), rates);
+      stick.rate(within, state, rates);
+      pedal.rate(within, state, rates);
+      return rates;
+    }
+  }
+}

@@ -1,0 +1,44 @@
+package org.rolltrace.core.flight;
+
+import java.util.List;
+import java.util.Optional;
+import org.rolltrace.core.controls.ControlRun;
+import org.rolltrace.core.motion.LateralMotion;
+import org.rolltrace.core.motion.Trim;
+import org.rolltrace.core.pilot.PilotProgramme;
+import org.rolltrace.core.quantity.Check;
+
+/**
+ * All that a manoeuvre is computed from.
+ *
+ * @param motion the equations
+ * @param stickRun from the stick to the ailerons; empty when the stick is not used
+ * @param pedalRun from the pedals to the rudder; empty when the pedals are not used
+ * @param trim where the controls are before the manoeuvre
+ * @param disturbance what displaces the aeroplane at the start
+ * @param programme what the pilot does
+ * @param captures bank changes, from the first movement of the controls and in its direction, whose
+ *     instants are wanted, rad, each above 0
+ * @param duration s, above 0
+ */
+public record FlightPlan(
+    LateralMotion motion,
+    Optional<ControlRun> stickRun,
+    Optional<ControlRun> pedalRun,
+    Trim trim,
+    Disturbance disturbance,
+    PilotProgramme programme,
+    List<Double> captures,
+    double duration) {
+
+  /**
+   * Checks the values.
+   *
+   * @throws IllegalArgumentException when the duration or a capture is not above 0
+   */
+  public FlightPlan {
+    Check.positive("duration, s,", duration);
+    captures = List.copyOf(captures);
+    captures.forEach(angle -> Check.positive("bank change, rad,", angle));
+  }
+}

@@ -1,0 +1,18 @@
+package org.rolltrace.core.flight;
+
+import java.util.List;
+import org.rolltrace.core.history.TimeHistory;
+
+/**
+ * A manoeuvre that has been computed.
+ *
+ * @param history all channels against time
+ * @param events in the order of time
+ */
+public record Flown(TimeHistory history, List<FlightEvent> events) {
+
+  /** Keeps a copy of the events. */
+  public Flown {
+    events = List.copyOf(events);
+  }
+}

@@ -1,0 +1,184 @@
+package org.rolltrace.core.measures;
+
+import java.util.OptionalDouble;
+import org.rolltrace.core.history.Channel;
+import org.rolltrace.core.history.TimeHistory;
+
+/**
+ * A sampled quantity with its sampled slope, turned so that the wanted direction is positive. Between
+ * two samples it is the cubic that has their values and slopes.
+ */
+final class Curve {
+  /** Halvings after which an instant inside a sample interval is known to rounding. */
+  private static final int HALVINGS = 50;
+
+  private final TimeHistory history;
+  private final double[] values;
+  private final double[] slopes;
+
+  private Curve(TimeHistory history, double[] values, double[] slopes) {
+    this.history = history;
+    this.values = values;
+    this.slopes = slopes;
+  }
+
+  /** The roll rate times a factor. */
+  static Curve ofRollRate(TimeHistory history, double factor) {
+    return new Curve(
+        history,
+        scaled(history.values(Channel.ROLL_RATE), factor, 0),
+        scaled(history.values(Channel.ROLL_ACCELERATION), factor, 0));
+  }
+
+  /**
+   * The bank times a factor plus a constant, with the roll rate as its slope. In a climb the bank's
+   * slope differs a little from the roll rate, which moves nothing by more than the sampling does.
+   */
+  static Curve ofBank(TimeHistory history, double factor, double shift) {
+    return new Curve(
+        history,
+        scaled(history.values(Channel.BANK), factor, shift),
+        scaled(history.values(Channel.ROLL_RATE), factor, 0));
+  }
+
+  private static double[] scaled(double[] samples, double factor, double shift) {
+    for (int i = 0; i < samples.length; i++) {
+      samples[i] = factor * samples[i] + shift;
+    }
+    return samples;
+  }
+
+  int size() {
+    return values.length;
+  }
+
+  double time(int index) {
+    return history.time(index);
+  }
+
+  double value(int index) {
+    return values[index];
+  }
+
+  double slope(int index) {
+    return slopes[index];
+  }
+
+  /** The first sample at or after an instant; the one after the jump where it stands twice. */
+  int indexAt(double time) {
+    int index = history.lastAt(time);
+    return history.time(index) < time && index + 1 < size() ? index + 1 : index;
+  }
+
+  double at(double time) {
+    int index = history.lastAt(time);
+    return index + 1 < size() ? inInterval(index, time) : values[index];
+  }
+
+  private double inInterval(int index, double time) {
+    double h = time(index + 1) - time(index);
+    if (h <= 0) {
+      return values[index + 1];
+    }
+    double s = (time - time(index)) / h;
+    double rest = 1 - s;
+    return values[index] * (1 + 2 * s) * rest * rest
+        + h * slopes[index] * s * rest * rest
+        + values[index + 1] * (3 - 2 * s) * s * s
+        - h * slopes[index + 1] * s * s * rest;
+  }
+
+  /** The first instant in [from, to] at which the curve rises to a level, or is at or above it. */
+  OptionalDouble firstAtOrAbove(double level, double from, double to) {
+    if (at(from) >= level) {
+      return OptionalDouble.of(from);
+    }
+    for (int i = history.lastAt(from); i + 1 < size() && time(i) < to; i++) {
+      if (values[i + 1] >= level && time(i + 1) > from) {
+        double crossing = crossing(i, level, Math.max(from, time(i)));
+        return crossing <= to ? OptionalDouble.of(crossing) : OptionalDouble.empty();
+      }
+    }
+    return OptionalDouble.empty();
+  }
+
+  /** The first instant in [from, to] at which the curve falls to a level, or is at or below it. */
+  OptionalDouble firstAtOrBelow(double level, double from, double to) {
+    return negated().firstAtOrAbove(-level, from, to);
+  }
+
+  private Curve negated() {
+    return new Curve(history, scaled(values.clone(), -1, 0), scaled(slopes.clone(), -1, 0));
+  }
+
+  /** Where the curve passes a level between two samples that lie on either side of it. */
+  double crossing(int index, double level, double from) {
+    double low = from;
+    double high = time(index + 1);
+    boolean lowIsBelow = at(low) < level;
+    for (int i = 0; i < HALVINGS && high > low; i++) {
+      double middle = 0.5 * (low + high);
+      if (inInterval(index, middle) < level == lowIsBelow) {
+        low = middle;
+      } else {
+        high = middle;
+      }
+    }
+    return high;
+  }
+
+  /** The largest value in [from, to]. */
+  double largest(double from, double to) {
+    double best = Math.max(at(from), at(to));
+    for (int i = history.lastAt(from); i < size() && time(i) <= to; i++) {
+      if (time(i) >= from) {
+        best = Math.max(best, values[i]);
+      }
+      if (i + 1 < size() && slopes[i] > 0 && slopes[i + 1] < 0) {
+        best = Math.max(best, topInside(i, from, to));
+      }
+    }
+    return best;
+  }
+
+  /** The top of the cubic between two samples, by golden section: it has one there. */
+  private double topInside(int index, double from, double to) {
+    double low = Math.max(time(index), from);
+    double high = Math.min(time(index + 1), to);
+    double ratio = 0.5 * (Math.sqrt(5) - 1);
+    for (int i = 0; i < HALVINGS && high > low; i++) {
+      double one = high - ratio * (high - low);
+      double two = low + ratio * (high - low);
+      if (inInterval(index, one) > inInterval(index, two)) {
+        high = two;
+      } else {
+        low = one;
+      }
+    }
+    return high > low ? inInterval(index, 0.5 * (low + high)) : values[index];
+  }
+
+  /** The mean over [from, to], from &lt; to. */
+  double mean(double from, double to) {
+    double integral = 0;
+    for (int i = history.lastAt(from); i + 1 < size() && time(i) < to; i++) {
+      double begin = Math.max(from, time(i));
+      double end = Math.min(to, time(i + 1));
+      // Simpson's rule, which is exact for a cubic.
+      if (end > begin) {
+        integral +=
+            (end - begin)
+                / 6
+                * (inInterval(i, begin)
+                    + 4 * inInterval(i, 0.5 * (begin + end))
+                    + inInterval(i, end));
+      }
+    }
+    return integral / (to - from);
+  }
+
+  /** The largest less the smallest value in [from, to]. */
+  double spread(double from, double to) {
+    return largest(from, to) + negated().largest(from, to);
+  }
+}

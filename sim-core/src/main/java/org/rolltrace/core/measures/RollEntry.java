@@ -1,0 +1,241 @@
+package org.rolltrace.core.measures;
+
+import static org.rolltrace.core.measures.MeasureDefinition.*;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.rolltrace.core.flight.FlightEvent;
+import org.rolltrace.core.history.Channel;
+import org.rolltrace.core.motion.LateralModes;
+import org.rolltrace.core.motion.Mode;
+import org.rolltrace.core.pilot.InputShape;
+import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.pilot.PilotProgramme.HeldStretch;
+
+/** How the aeroplane enters a roll. */
+final class RollEntry {
+  private static final double STEADY_CHANGE = 0.01;
+  private static final double HOLD_FOR_STEADY = 5;
+  private static final double HOLD_FOR_MEAN = 3;
+  private static final double LEAST_SHARE_OF_HOLD = 0.1;
+
+  /** 1 − 1/e to the three figures in which the measure is defined. */
+  private static final double RESPONSE_LEVEL = 0.632;
+
+  private final Manoeuvre manoeuvre;
+  private final MeasureOptions options;
+
+  RollEntry(Manoeuvre manoeuvre, MeasureOptions options) {
+    this.manoeuvre = manoeuvre;
+    this.options = options;
+  }
+
+  List<Measure> measures() {
+    List<Measure> measures = new ArrayList<>();
+    Measure timeConstant = rollModeTimeConstant();
+    Optional<InputShape> leading = manoeuvre.programme().leading().map(PilotInput::shape);
+    if (leading.isEmpty() || leading.get().start() >= manoeuvre.duration()) {
+      String reason =
+          leading.isEmpty()
+              ? "no control moves in this scenario"
+              : "the first input starts after the end of the manoeuvre";
+      measures.add(Measure.missing(PEAK_ROLL_RATE, reason));
+      measures.add(Measure.missing(STEADY_ROLL_RATE, reason));
+      measures.add(timeConstant);
+      measures.add(Measure.missing(RESPONSE_TIME_CONSTANT, reason));
+      measures.add(Measure.missing(SETTLING_TIME, reason));
+      measures.add(Measure.missing(RISE_TIME, reason));
+      for (double degrees : options.bankChanges()) {
+        measures.add(Measure.missing(timeToBank(degrees), reason));
+      }
+      measures.add(Measure.missing(ROLL_ACCELERATION, reason));
+      measures.add(Measure.missing(HELIX_ANGLE_PEAK, reason));
+      measures.add(Measure.missing(HELIX_ANGLE_STEADY, reason));
+      return measures;
+    }
+    InputShape input = leading.get();
+    double direction = Math.signum(input.size());
+    Curve rate = Curve.ofRollRate(manoeuvre.flown().history(), direction);
+    Optional<HeldStretch> hold = manoeuvre.programme().firstHold(manoeuvre.duration());
+
+    Measure peak = peak(rate, input, direction);
+    Measure steady = steady(rate, hold, timeConstant, direction);
+    measures.add(peak);
+    measures.add(steady);
+    measures.add(timeConstant);
+    if (steady.value().isPresent()) {
+      double level = direction * steady.value().getAsDouble();
+      double release = hold.orElseThrow().to();
+      measures.add(responseTimeConstant(rate, input, level, release));
+      measures.add(settlingTime(rate, input, level, release));
+      measures.add(riseTime(rate, input, level, release));
+    } else {
+      String reason = "no steady roll rate: " + steady.remark();
+      measures.add(Measure.missing(RESPONSE_TIME_CONSTANT, reason));
+      measures.add(Measure.missing(SETTLING_TIME, reason));
+      measures.add(Measure.missing(RISE_TIME, reason));
+    }
+    for (double degrees : options.bankChanges()) {
+      measures.add(timeToBankChange(degrees, input.start()));
+    }
+    measures.add(rollAcceleration(input, direction));
+    measures.add(helix(HELIX_ANGLE_PEAK, peak));
+    measures.add(helix(HELIX_ANGLE_STEADY, steady));
+    return measures;
+  }
+
+  private Measure rollModeTimeConstant() {
+    LateralModes modes = manoeuvre.modes();
+    if (modes.rollSpiral().isPresent()) {
+      return Measure.missing(
+          ROLL_MODE_TIME_CONSTANT, "roll and spiral are coupled into one swinging mode");
+    }
+    Mode.Aperiodic roll = modes.roll().orElseThrow();
+    if (!(roll.root() < 0)) {
+      return Measure.missing(
+          ROLL_MODE_TIME_CONSTANT,
+          format("the roll is not damped: its root is %.4g 1/s", roll.root()));
+    }
+    return switch (manoeuvre.slip()) {
+      case FREE -> Measure.of(ROLL_MODE_TIME_CONSTANT, roll.timeConstant());
+      case HELD, SETTLED ->
+          Measure.of(
+              ROLL_MODE_TIME_CONSTANT,
+              roll.timeConstant(),
+              "of the equations with " + manoeuvre.slip().word() + " slip");
+    };
+  }
+
+  private Measure peak(Curve rate, InputShape input, double direction) {
+    double peak = rate.largest(input.start(), manoeuvre.duration());
+    return peak > 0
+        ? Measure.of(PEAK_ROLL_RATE, direction * peak)
+        : Measure.missing(PEAK_ROLL_RATE, "it never rolls in the commanded direction");
+  }
+
+  private Measure steady(
+      Curve rate, Optional<HeldStretch> hold, Measure timeConstant, double direction) {
+    if (hold.isEmpty()) {
+      return Measure.missing(STEADY_ROLL_RATE, "no held stick in this scenario");
+    }
+    if (timeConstant.value().isEmpty()) {
+      return Measure.missing(STEADY_ROLL_RATE, timeConstant.remark());
+    }
+    double tau = timeConstant.value().getAsDouble();
+    double length = hold.get().length();
+    double end = hold.get().to();
+    double window = Math.max(tau, LEAST_SHARE_OF_HOLD * length);
+    String change = "";
+    if (length >= HOLD_FOR_STEADY * tau) {
+      double mean = rate.mean(end - window, end);
+      double relative = rate.spread(end - window, end) / Math.abs(mean);
+      if (relative < STEADY_CHANGE) {
+        return Measure.of(STEADY_ROLL_RATE, direction * mean);
+      }
+      change = format("the roll rate still changes by %.2g %% at the end", 100 * relative);
+    }
+    OptionalDouble period = manoeuvre.dutchRollPeriod();
+    if (period.isPresent()
+        && length >= HOLD_FOR_MEAN * tau
+        && length >= period.getAsDouble()) {
+      double from = end - period.getAsDouble();
+      double mean = rate.mean(from, end);
+      double swing = 0.5 * rate.spread(from, end);
+      return Measure.of(
+          STEADY_ROLL_RATE,
+          direction * mean,
+          format(
+              "mean over the last dutch-roll period; it swings by ±%.2g deg/s",
+              Math.toDegrees(swing)));
+    }
+    return Measure.missing(
+        STEADY_ROLL_RATE,
+        change.isEmpty()
+            ? format(
+                "not reached: the stick is held for %.3g s, %.2g time constants",
+                length, length / tau)
+            : "not reached: " + change);
+  }
+
+  private static Measure responseTimeConstant(
+      Curve rate, InputShape input, double level, double release) {
+    double middle = input.start() + 0.5 * input.handTime();
+    return rate.firstAtOrAbove(RESPONSE_LEVEL * level, input.start(), release).stream()
+        .mapToObj(time -> Measure.of(RESPONSE_TIME_CONSTANT, time - middle))
+        .findFirst()
+        .orElse(Measure.missing(RESPONSE_TIME_CONSTANT, "63.2 % is never reached"));
+  }
+
+  private Measure settlingTime(Curve rate, InputShape input, double level, double release) {
+    double low = level - options.settlingBand() * Math.abs(level);
+    double high = level + options.settlingBand() * Math.abs(level);
+    int last = rate.indexAt(release);
+    if (rate.time(last) > release || !within(rate.value(last), low, high)) {
+      last--;
+    }
+    int index = last;
+    while (index >= 0 && rate.time(index) >= input.start() && within(rate.value(index), low, high)) {
+      index--;
+    }
+    if (index == last) {
+      return Measure.missing(SETTLING_TIME, "not settled at release");
+    }
+    if (index < 0 || rate.time(index) < input.start()) {
+      return Measure.of(SETTLING_TIME, 0);
+    }
+    double bound = rate.value(index) < low ? low : high;
+    return Measure.of(
+        SETTLING_TIME, rate.crossing(index, bound, rate.time(index)) - input.start());
+  }
+
+  private static boolean within(double value, double low, double high) {
+    return value >= low && value <= high;
+  }
+
+  private static Measure riseTime(Curve rate, InputShape input, double level, double release) {
+    OptionalDouble tenth = rate.firstAtOrAbove(0.1 * level, input.start(), release);
+    OptionalDouble ninth = rate.firstAtOrAbove(0.9 * level, input.start(), release);
+    return tenth.isPresent() && ninth.isPresent()
+        ? Measure.of(RISE_TIME, ninth.getAsDouble() - tenth.getAsDouble())
+        : Measure.missing(RISE_TIME, "90 % is never reached");
+  }
+
+  private Measure timeToBankChange(double degrees, double start) {
+    return manoeuvre.flown().events().stream()
+        .filter(FlightEvent.BankCapture.class::isInstance)
+        .map(FlightEvent.BankCapture.class::cast)
+        .filter(capture -> capture.change() == Math.toRadians(degrees))
+        .map(capture -> Measure.of(timeToBank(degrees), capture.time() - start))
+        .findFirst()
+        .orElse(Measure.missing(timeToBank(degrees), "not reached in this manoeuvre"));
+  }
+
+  private Measure rollAcceleration(InputShape input, double direction) {
+    double best = Double.NEGATIVE_INFINITY;
+    for (int i = 0; i < manoeuvre.flown().history().size(); i++) {
+      if (manoeuvre.flown().history().time(i) >= input.start()) {
+        best =
+            Math.max(
+                best,
+                direction * manoeuvre.flown().history().value(Channel.ROLL_ACCELERATION, i));
+      }
+    }
+    return best > 0
+        ? Measure.of(ROLL_ACCELERATION, direction * best)
+        : Measure.missing(
+            ROLL_ACCELERATION, "it never accelerates in the commanded direction");
+  }
+
+  private Measure helix(MeasureDefinition definition, Measure rate) {
+    return rate.value().isPresent()
+        ? Measure.of(definition, rate.value().getAsDouble() * manoeuvre.halfSpanOverSpeed())
+        : Measure.missing(definition, rate.remark());
+  }
+
+  private static String format(String pattern, Object... values) {
+    return String.format(Locale.ROOT, pattern, values);
+  }
+}

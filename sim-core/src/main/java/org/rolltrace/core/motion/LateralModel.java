@@ -1,0 +1,120 @@
+package org.rolltrace.core.motion;
+
+import static org.rolltrace.core.derivatives.Coefficient.*;
+
+import java.util.OptionalDouble;
+import org.rolltrace.core.aeroplane.Aeroplane;
+import org.rolltrace.core.aeroplane.Inertia;
+import org.rolltrace.core.atmosphere.FlightCondition;
+import org.rolltrace.core.derivatives.Coefficient;
+import org.rolltrace.core.derivatives.LateralDerivatives;
+import org.rolltrace.core.propeller.PropellerMoments;
+
+/**
+ * The dimensional constants of one aeroplane in one condition.
+ *
+ * @param speed V, true airspeed, m/s
+ * @param loadFactor n
+ * @param flightPathAngle γ, rad
+ * @param mass m, kg; empty when not known
+ * @param inertia kg m²
+ * @param sideForce Y, N
+ * @param rollMoment L, N m, with the propeller's
+ * @param yawMoment N, N m
+ */
+public record LateralModel(
+    double speed,
+    double loadFactor,
+    double flightPathAngle,
+    OptionalDouble mass,
+    Inertia inertia,
+    LinearLoad sideForce,
+    LinearLoad rollMoment,
+    LinearLoad yawMoment) {
+
+  /**
+   * Works out the constants.
+   *
+   * @param aeroplane span, area, mass and inertia
+   * @param derivatives non-dimensional derivatives
+   * @param condition speed and density
+   * @param propeller its moments
+   * @return the constants
+   */
+  public static LateralModel of(
+      Aeroplane aeroplane,
+      LateralDerivatives derivatives,
+      FlightCondition condition,
+      PropellerMoments propeller) {
+    double force = condition.dynamicPressure() * aeroplane.wingArea();
+    double moment = force * aeroplane.span();
+    double perRate = aeroplane.span() / (2 * condition.trueAirspeed());
+    return new LateralModel(
+        condition.trueAirspeed(),
+        condition.loadFactor(),
+        condition.flightPathAngle(),
+        aeroplane.mass(),
+        aeroplane.inertia(),
+        load(derivatives, force, perRate, 0, CY_BETA, CY_P, CY_R, CY_DA, CY_DR),
+        load(derivatives, moment, perRate, propeller.roll(), CL_BETA, CL_P, CL_R, CL_DA, CL_DR),
+        load(derivatives, moment, perRate, 0, CN_BETA, CN_P, CN_R, CN_DA, CN_DR));
+  }
+
+  private static LinearLoad load(
+      LateralDerivatives derivatives,
+      double scale,
+      double perRate,
+      double constant,
+      Coefficient beta,
+      Coefficient p,
+      Coefficient r,
+      Coefficient da,
+      Coefficient dr) {
+    return new LinearLoad(
+        scale * derivatives.value(beta),
+        scale * perRate * derivatives.value(p),
+        scale * perRate * derivatives.value(r),
+        scale * derivatives.value(da),
+        scale * derivatives.value(dr),
+        constant);
+  }
+
+  /**
+   * What is missing for sideslip and yaw to be worked out.
+   *
+   * @return words such as "mass, yaw inertia"; empty when nothing is missing
+   */
+  public String missingForSlip() {
+    if (mass.isEmpty()) {
+      return inertia.yaw().isEmpty() ? "mass and yaw inertia" : "mass";
+    }
+    return inertia.yaw().isEmpty() ? "yaw inertia" : "";
+  }
+
+  /**
+   * The root of the one-degree-of-freedom roll equation, L_p = q̄ S b² Cl_p/(2 V Ixx).
+   *
+   * @return 1/s, negative for a damped roll
+   */
+  public double rollDampingRoot() {
+    return rollMoment.perRollRate() / inertia.roll();
+  }
+
+  double massForSlip() {
+    return mass.orElseThrow(this::cannotSlip);
+  }
+
+  double yawInertiaForSlip() {
+    return inertia.yaw().orElseThrow(this::cannotSlip);
+  }
+
+  private IllegalArgumentException cannotSlip() {
+    return new IllegalArgumentException(
+        "settled and free slip need mass and yaw inertia; missing: " + missingForSlip());
+  }
+
+  /** g/V, 1/s. */
+  double gravityOverSpeed() {
+    return FlightCondition.STANDARD_GRAVITY / speed;
+  }
+}

@@ -1,0 +1,57 @@
+package org.rolltrace.core.pilot;
+
+/** The shape of one input on one control. */
+public interface InputShape {
+
+  /** How long a hand takes for a move when nothing is said, s. */
+  double DEFAULT_MOVEMENT = 0.1;
+
+  /**
+   * The name in scenario files and results, such as {@code step}.
+   *
+   * @return the name
+   */
+  String name();
+
+  /**
+   * When the hand begins to move.
+   *
+   * @return s
+   */
+  double start();
+
+  /**
+   * How long the hand takes for a move.
+   *
+   * @return s; 0 for a jump
+   */
+  double handTime();
+
+  /**
+   * The first position that the input reaches.
+   *
+   * @return fraction of travel, right positive, −1 to 1
+   */
+  double size();
+
+  /**
+   * When the input is over: back at the trimmed position for good, or never.
+   *
+   * @return s; positive infinity for an input that stays
+   */
+  double end();
+
+  /**
+   * Whether the input is meant to be held until a steady rate is reached; a doublet is not.
+   *
+   * @return true for a step and a hold
+   */
+  boolean isHeld();
+
+  /**
+   * The movement against time.
+   *
+   * @return the movement
+   */
+  Movement movement();
+}

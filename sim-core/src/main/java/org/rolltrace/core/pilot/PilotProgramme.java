@@ -1,0 +1,179 @@
+package org.rolltrace.core.pilot;
+
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.stream.DoubleStream;
+
+/** All inputs of a scenario. Inputs on the same control add up. */
+public final class PilotProgramme {
+  /** Below this a position counts as centred, fraction of travel: rounding, not a hand. */
+  private static final double CENTRED = 1e-9;
+
+  private final List<PilotInput> inputs;
+  private final Movement stick;
+  private final Movement pedal;
+
+  private PilotProgramme(List<PilotInput> inputs) {
+    this.inputs = List.copyOf(inputs);
+    this.stick = movementOf(Control.STICK);
+    this.pedal = movementOf(Control.PEDAL);
+  }
+
+  /**
+   * A programme of inputs.
+   *
+   * @param inputs in any order; may be empty
+   * @return the programme
+   */
+  public static PilotProgramme of(List<PilotInput> inputs) {
+    return new PilotProgramme(inputs);
+  }
+
+  private Movement movementOf(Control control) {
+    Movement[] parts =
+        inputs.stream()
+            .filter(input -> input.control() == control)
+            .map(input -> input.shape().movement())
+            .toArray(Movement[]::new);
+    return switch (parts.length) {
+      case 0 -> Movement.NONE;
+      case 1 -> parts[0];
+      default -> new SummedMovement(parts);
+    };
+  }
+
+  /**
+   * The inputs.
+   *
+   * @return as given
+   */
+  public List<PilotInput> inputs() {
+    return inputs;
+  }
+
+  /**
+   * The movement of the stick.
+   *
+   * @return the sum of all stick inputs
+   */
+  public Movement stick() {
+    return stick;
+  }
+
+  /**
+   * The movement of the pedals.
+   *
+   * @return the sum of all pedal inputs
+   */
+  public Movement pedal() {
+    return pedal;
+  }
+
+  /**
+   * The instants at which the integration has to start anew.
+   *
+   * @return breakpoints of stick and pedals, s, increasing
+   */
+  public double[] breakpoints() {
+    return DoubleStream.concat(
+            DoubleStream.of(stick.breakpoints()), DoubleStream.of(pedal.breakpoints()))
+        .sorted()
+        .distinct()
+        .toArray();
+  }
+
+  /**
+   * The input from which times count: the first that moves the stick, or the pedals where the stick
+   * stays still.
+   *
+   * @return the input, or empty when nothing moves
+   */
+  public Optional<PilotInput> leading() {
+    return firstOn(Control.STICK).or(() -> firstOn(Control.PEDAL));
+  }
+
+  private Optional<PilotInput> firstOn(Control control) {
+    return inputs.stream()
+        .filter(input -> input.control() == control && input.shape().size() != 0)
+        .min(Comparator.comparingDouble(input -> input.shape().start()));
+  }
+
+  /**
+   * The first stretch of time over which the stick is held still, away from its trimmed position, by
+   * inputs meant to be held.
+   *
+   * @param end the end of the manoeuvre, s
+   * @return the stretch, or empty when there is none
+   */
+  public Optional<HeldStretch> firstHold(double end) {
+    double[] breaks = stick.breakpoints();
+    for (int i = 0; i < breaks.length; i++) {
+      double from = breaks[i];
+      double position = stick.positionAt(from);
+      if (from >= end || !isRest(from) || Math.abs(position) < CENTRED || !onlyHeldInputsAt(from)) {
+        continue;
+      }
+      int next = i + 1;
+      while (next < breaks.length
+          && isRest(breaks[next])
+          && Math.abs(stick.positionAt(breaks[next]) - position) < CENTRED) {
+        next++;
+      }
+      return Optional.of(
+          new HeldStretch(from, next < breaks.length ? Math.min(breaks[next], end) : end));
+    }
+    return Optional.empty();
+  }
+
+  private boolean isRest(double time) {
+    return stick.rateAt(time) == 0;
+  }
+
+  private boolean onlyHeldInputsAt(double time) {
+    return inputs.stream()
+        .filter(input -> input.control() == Control.STICK)
+        .map(PilotInput::shape)
+        .filter(shape -> shape.start() <= time && time < shape.end())
+        .allMatch(InputShape::isHeld);
+  }
+
+  /**
+   * When the stick first begins a move that ends at its trimmed position.
+   *
+   * @return s, or empty when it never goes back
+   */
+  public OptionalDouble firstCentring() {
+    double[] breaks = stick.breakpoints();
+    for (int i = 0; i < breaks.length; i++) {
+      double before = stick.positionAt(Math.nextDown(breaks[i]));
+      boolean away = Math.abs(before) >= CENTRED;
+      boolean centredAtOnce = Math.abs(stick.positionAt(breaks[i])) < CENTRED;
+      boolean centredByNext =
+          i + 1 < breaks.length && Math.abs(stick.positionAt(breaks[i + 1])) < CENTRED;
+      if (away && (centredAtOnce || (centredByNext && !isRest(breaks[i])))) {
+        return OptionalDouble.of(breaks[i]);
+      }
+    }
+    return OptionalDouble.empty();
+  }
+
+  /**
+   * A stretch of time.
+   *
+   * @param from s
+   * @param to s
+   */
+  public record HeldStretch(double from, double to) {
+
+    /**
+     * How long it lasts.
+     *
+     * @return s
+     */
+    public double length() {
+      return to - from;
+    }
+  }
+}
