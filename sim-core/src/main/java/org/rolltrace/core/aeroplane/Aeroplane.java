@@ -26,11 +26,6 @@ public record Aeroplane(
     Optional<Rudder> rudder,
     Limits limits) {
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when the name is blank, or span, area or mass is not above 0
-   */
   public Aeroplane {
     if (name.isBlank()) {
       throw new IllegalArgumentException("aeroplane name is blank; expected some text");

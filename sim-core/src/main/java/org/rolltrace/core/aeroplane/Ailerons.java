@@ -12,11 +12,6 @@ import org.rolltrace.core.quantity.Check;
  */
 public record Ailerons(double up, double down, SurfaceDynamics dynamics) {
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when a travel is out of range
-   */
   public Ailerons {
     Check.positive("aileron travel up, rad,", up);
     Check.inRange("aileron travel up, rad,", up, 0, Math.PI / 2);

@@ -12,12 +12,6 @@ import org.rolltrace.core.quantity.Check;
  */
 public record Inertia(double roll, OptionalDouble yaw, double product) {
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when a moment is not above 0, when the product is too large for
-   *     the moments, or when it is given without a yaw inertia
-   */
   public Inertia {
     Check.positive("roll inertia, kg m2,", roll);
     Check.finite("product of inertia, kg m2,", product);

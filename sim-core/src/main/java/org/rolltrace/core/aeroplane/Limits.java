@@ -28,11 +28,6 @@ public record Limits(
           OptionalDouble.empty(),
           OptionalDouble.empty());
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when one is not above 0
-   */
   public Limits {
     checkPositive("manoeuvring speed, m/s,", manoeuvringSpeed);
     checkPositive("never-exceed speed, m/s,", neverExceedSpeed);

@@ -11,11 +11,6 @@ import org.rolltrace.core.quantity.Check;
  */
 public record Rudder(double left, double right, SurfaceDynamics dynamics) {
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when a travel is out of range
-   */
   public Rudder {
     Check.positive("rudder travel left, rad,", left);
     Check.inRange("rudder travel left, rad,", left, 0, Math.PI / 2);

@@ -13,11 +13,6 @@ public record SurfaceDynamics(double rateLimit, double lag) {
   /** A surface that moves with its control, as cables and rods make it. */
   public static final SurfaceDynamics DIRECT = new SurfaceDynamics(Double.POSITIVE_INFINITY, 0);
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when the rate limit is not above 0 or the lag is negative
-   */
   public SurfaceDynamics {
     if (!(rateLimit > 0)) {
       throw new IllegalArgumentException(

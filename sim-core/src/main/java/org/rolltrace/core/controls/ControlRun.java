@@ -14,11 +14,6 @@ import org.rolltrace.core.quantity.Check;
  */
 public record ControlRun(double angleAtPlus, double angleAtMinus, SurfaceDynamics dynamics) {
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when the angles are not of opposite sign
-   */
   public ControlRun {
     Check.finite("surface angle at +1, rad,", angleAtPlus);
     Check.finite("surface angle at -1, rad,", angleAtMinus);

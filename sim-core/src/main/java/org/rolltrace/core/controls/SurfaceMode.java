@@ -16,7 +16,9 @@ public enum SurfaceMode {
   /** Moving at the largest rate towards smaller angles. */
   SLEWING_DOWN;
 
-  /** A gap between demand and surface below this counts as none, rad: what finding an end leaves. */
+  /**
+   * A gap between demand and surface below this counts as none, rad: what finding an end leaves.
+   */
   private static final double CLOSED = 1e-9;
 
   /**

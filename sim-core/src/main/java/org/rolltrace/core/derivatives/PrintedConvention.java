@@ -12,8 +12,7 @@ public record PrintedConvention(
 
   /** The convention used inside: right-roll-positive mean aileron angle, per radian. */
   public static final PrintedConvention MODEL =
-      new PrintedConvention(
-          AileronSign.RIGHT_ROLL_POSITIVE, AngleUnit.RADIAN, AileronAngle.MEAN);
+      new PrintedConvention(AileronSign.RIGHT_ROLL_POSITIVE, AngleUnit.RADIAN, AileronAngle.MEAN);
 
   /** Which way a positive aileron angle rolls the aeroplane. */
   public enum AileronSign {

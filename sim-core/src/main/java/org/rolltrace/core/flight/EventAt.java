@@ -26,9 +26,7 @@ final class EventAt implements ODEEventDetector {
    * @param interval how often the function is looked at, s; two zeros between two looks stay unseen
    */
   EventAt(
-      double interval,
-      ToDoubleFunction<ODEStateAndDerivative> function,
-      ODEEventHandler handler) {
+      double interval, ToDoubleFunction<ODEStateAndDerivative> function, ODEEventHandler handler) {
     this.interval = AdaptableInterval.of(interval);
     this.function = function;
     this.handler = handler;

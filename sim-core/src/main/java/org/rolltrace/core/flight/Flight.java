@@ -3,6 +3,7 @@ package org.rolltrace.core.flight;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.NavigableSet;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeSet;
@@ -131,8 +132,8 @@ public final class Flight {
     return new Flown(recorder.finish(), events);
   }
 
-  private TreeSet<Double> stretchEnds() {
-    TreeSet<Double> ends = new TreeSet<>();
+  private NavigableSet<Double> stretchEnds() {
+    NavigableSet<Double> ends = new TreeSet<>();
     DoubleStream.of(plan.programme().breakpoints())
         .filter(time -> time > 0 && time < plan.duration())
         .forEach(ends::add);

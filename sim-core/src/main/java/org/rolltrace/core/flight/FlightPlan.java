@@ -3,6 +3,7 @@ package org.rolltrace.core.flight;
 import java.util.List;
 import java.util.Optional;
 import org.rolltrace.core.controls.ControlRun;
+import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.LateralMotion;
 import org.rolltrace.core.motion.Trim;
 import org.rolltrace.core.pilot.PilotProgramme;
@@ -31,11 +32,6 @@ public record FlightPlan(
     List<Double> captures,
     double duration) {
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when the duration or a capture is not above 0
-   */
   public FlightPlan {
     Check.positive("duration, s,", duration);
     captures = List.copyOf(captures);

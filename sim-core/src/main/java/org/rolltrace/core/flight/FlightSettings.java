@@ -15,11 +15,6 @@ public record FlightSettings(
   /** 1e-9 relative, 1e-10 rad absolute, 100 samples a second. */
   public static final FlightSettings DEFAULT = new FlightSettings(1e-9, 1e-10, 100);
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when one is out of range
-   */
   public FlightSettings {
     Check.inRange("relative tolerance", relativeTolerance, 1e-13, 1e-3);
     Check.inRange("absolute tolerance, rad,", absoluteTolerance, 1e-15, 1e-3);

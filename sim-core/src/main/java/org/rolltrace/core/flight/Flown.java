@@ -11,7 +11,6 @@ import org.rolltrace.core.history.TimeHistory;
  */
 public record Flown(TimeHistory history, List<FlightEvent> events) {
 
-  /** Keeps a copy of the events. */
   public Flown {
     events = List.copyOf(events);
   }

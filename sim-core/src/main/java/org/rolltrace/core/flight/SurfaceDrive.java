@@ -8,8 +8,8 @@ import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.Movement;
 
 /**
- * One control and its surface during a flight. A surface with a rate limit or a lag has its angle as a
- * state; one without is where the control puts it.
+ * One control and its surface during a flight. A surface with a rate limit or a lag has its angle
+ * as a state; one without is where the control puts it.
  */
 final class SurfaceDrive {
   /** Beyond a stop by less than this is at it, fraction of travel: rounding, not a hand. */
@@ -117,8 +117,7 @@ final class SurfaceDrive {
 
   void rate(double time, double[] state, double[] rates) {
     if (hasState()) {
-      rates[stateIndex] =
-          mode.rate(dynamics(), demand(time), demandRate(time), state[stateIndex]);
+      rates[stateIndex] = mode.rate(dynamics(), demand(time), demandRate(time), state[stateIndex]);
     }
   }
 }

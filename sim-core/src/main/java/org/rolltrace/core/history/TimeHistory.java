@@ -4,8 +4,8 @@ import java.util.Arrays;
 import java.util.EnumMap;
 
 /**
- * Samples of all channels against time. Times do not fall; an instant at which something jumps stands
- * twice, before and after the jump.
+ * Samples of all channels against time. Times do not fall; an instant at which something jumps
+ * stands twice, before and after the jump.
  */
 public final class TimeHistory {
   private final double sampleRate;
@@ -88,7 +88,8 @@ public final class TimeHistory {
   }
 
   /**
-   * The samples at k/sampleRate, k = 0, 1, …: of an instant that stands twice, the one after the jump.
+   * The samples at k/sampleRate, k = 0, 1, …: of an instant that stands twice, the one after the
+   * jump.
    *
    * @return their indices
    */

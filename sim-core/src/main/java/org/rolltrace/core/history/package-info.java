@@ -1,2 +1,4 @@
-/** What a manoeuvre, flown or computed, looked like against time: samples with name and unit, in SI. */
+/**
+ * What a manoeuvre, flown or computed, looked like against time: samples with name and unit, in SI.
+ */
 package org.rolltrace.core.history;

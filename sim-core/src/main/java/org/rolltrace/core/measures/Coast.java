@@ -21,7 +21,7 @@ final class Coast {
     if (start >= manoeuvre.duration()) {
       return Measure.missing(BANK_COAST, "the stick is centred after the end of the manoeuvre");
     }
-    TimeHistory history = manoeuvre.flown().history();
+    TimeHistory history = manoeuvre.history();
     double rateThen = Curve.ofRollRate(history, 1).at(start);
     if (rateThen == 0) {
       return Measure.missing(BANK_COAST, "it is not rolling when the stick is centred");

@@ -5,8 +5,8 @@ import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.history.TimeHistory;
 
 /**
- * A sampled quantity with its sampled slope, turned so that the wanted direction is positive. Between
- * two samples it is the cubic that has their values and slopes.
+ * A sampled quantity with its sampled slope, turned so that the wanted direction is positive.
+ * Between two samples it is the cubic that has their values and slopes.
  */
 final class Curve {
   /** Halvings after which an instant inside a sample interval is known to rounding. */

@@ -1,7 +1,8 @@
 package org.rolltrace.core.measures;
 
+import java.util.Map;
 import java.util.OptionalDouble;
-import org.rolltrace.core.flight.Flown;
+import org.rolltrace.core.history.TimeHistory;
 import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.pilot.PilotProgramme;
@@ -9,17 +10,20 @@ import org.rolltrace.core.pilot.PilotProgramme;
 /**
  * A manoeuvre to be measured.
  *
- * @param flown its history and events
+ * @param history all channels against time
+ * @param captures the instants, s, at which the bank had first changed by an angle, deg, in the
+ *     commanded direction
  * @param programme what the pilot did
  * @param slip the treatment of the slip
  * @param modes of the equations that were flown
- * @param dutchRollPeriod of the free equations, s; empty when they have no dutch roll or the data for
- *     them are missing
+ * @param dutchRollPeriod of the free equations, s; empty when they have no dutch roll or the data
+ *     for them are missing
  * @param halfSpanOverSpeed b/2V, s
  * @param duration s
  */
 public record Manoeuvre(
-    Flown flown,
+    TimeHistory history,
+    Map<Double, Double> captures,
     PilotProgramme programme,
     SlipTreatment slip,
     LateralModes modes,

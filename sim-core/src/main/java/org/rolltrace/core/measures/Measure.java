@@ -13,12 +13,6 @@ import org.rolltrace.core.quantity.Check;
  */
 public record Measure(MeasureDefinition definition, OptionalDouble value, String remark) {
 
-  /**
-   * Checks the value.
-   *
-   * @throws IllegalArgumentException when a value is not finite, or when there is neither value nor
-   *     reason
-   */
   public Measure {
     if (value.isPresent()) {
       Check.finite(definition.name(), value.getAsDouble());

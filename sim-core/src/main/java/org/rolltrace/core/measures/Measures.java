@@ -22,9 +22,8 @@ public final class Measures {
     List<Measure> measures = new ArrayList<>(new RollEntry(manoeuvre, options).measures());
     measures.add(Coast.of(manoeuvre));
     measures.addAll(WingsLevelReturn.of(manoeuvre));
-    TimeHistory history = manoeuvre.flown().history();
-    measures.add(
-        Measure.of(FINAL_BANK, history.value(Channel.BANK, history.size() - 1)));
+    TimeHistory history = manoeuvre.history();
+    measures.add(Measure.of(FINAL_BANK, history.value(Channel.BANK, history.size() - 1)));
     return measures;
   }
 }

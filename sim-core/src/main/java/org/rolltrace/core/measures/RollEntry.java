@@ -7,7 +7,6 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import org.rolltrace.core.flight.FlightEvent;
 import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.Mode;
@@ -58,7 +57,7 @@ final class RollEntry {
     }
     InputShape input = leading.get();
     double direction = Math.signum(input.size());
-    Curve rate = Curve.ofRollRate(manoeuvre.flown().history(), direction);
+    Curve rate = Curve.ofRollRate(manoeuvre.history(), direction);
     Optional<HeldStretch> hold = manoeuvre.programme().firstHold(manoeuvre.duration());
 
     Measure peak = peak(rate, input, direction);
@@ -138,9 +137,7 @@ final class RollEntry {
       change = format("the roll rate still changes by %.2g %% at the end", 100 * relative);
     }
     OptionalDouble period = manoeuvre.dutchRollPeriod();
-    if (period.isPresent()
-        && length >= HOLD_FOR_MEAN * tau
-        && length >= period.getAsDouble()) {
+    if (period.isPresent() && length >= HOLD_FOR_MEAN * tau && length >= period.getAsDouble()) {
       double from = end - period.getAsDouble();
       double mean = rate.mean(from, end);
       double swing = 0.5 * rate.spread(from, end);
@@ -177,7 +174,9 @@ final class RollEntry {
       last--;
     }
     int index = last;
-    while (index >= 0 && rate.time(index) >= input.start() && within(rate.value(index), low, high)) {
+    while (index >= 0
+        && rate.time(index) >= input.start()
+        && within(rate.value(index), low, high)) {
       index--;
     }
     if (index == last) {
@@ -187,8 +186,7 @@ final class RollEntry {
       return Measure.of(SETTLING_TIME, 0);
     }
     double bound = rate.value(index) < low ? low : high;
-    return Measure.of(
-        SETTLING_TIME, rate.crossing(index, bound, rate.time(index)) - input.start());
+    return Measure.of(SETTLING_TIME, rate.crossing(index, bound, rate.time(index)) - input.start());
   }
 
   private static boolean within(double value, double low, double high) {
@@ -204,29 +202,22 @@ final class RollEntry {
   }
 
   private Measure timeToBankChange(double degrees, double start) {
-    return manoeuvre.flown().events().stream()
-        .filter(FlightEvent.BankCapture.class::isInstance)
-        .map(FlightEvent.BankCapture.class::cast)
-        .filter(capture -> capture.change() == Math.toRadians(degrees))
-        .map(capture -> Measure.of(timeToBank(degrees), capture.time() - start))
-        .findFirst()
-        .orElse(Measure.missing(timeToBank(degrees), "not reached in this manoeuvre"));
+    Double time = manoeuvre.captures().get(degrees);
+    return time == null
+        ? Measure.missing(timeToBank(degrees), "not reached in this manoeuvre")
+        : Measure.of(timeToBank(degrees), time - start);
   }
 
   private Measure rollAcceleration(InputShape input, double direction) {
     double best = Double.NEGATIVE_INFINITY;
-    for (int i = 0; i < manoeuvre.flown().history().size(); i++) {
-      if (manoeuvre.flown().history().time(i) >= input.start()) {
-        best =
-            Math.max(
-                best,
-                direction * manoeuvre.flown().history().value(Channel.ROLL_ACCELERATION, i));
+    for (int i = 0; i < manoeuvre.history().size(); i++) {
+      if (manoeuvre.history().time(i) >= input.start()) {
+        best = Math.max(best, direction * manoeuvre.history().value(Channel.ROLL_ACCELERATION, i));
       }
     }
     return best > 0
         ? Measure.of(ROLL_ACCELERATION, direction * best)
-        : Measure.missing(
-            ROLL_ACCELERATION, "it never accelerates in the commanded direction");
+        : Measure.missing(ROLL_ACCELERATION, "it never accelerates in the commanded direction");
   }
 
   private Measure helix(MeasureDefinition definition, Measure rate) {

@@ -35,7 +35,7 @@ final class WingsLevelReturn {
               ? "a control stays away from trim"
               : "the controls are back at trim only after the end of the manoeuvre");
     }
-    TimeHistory history = manoeuvre.flown().history();
+    TimeHistory history = manoeuvre.history();
     double bankThen = Curve.ofBank(history, 1, 0).at(start);
     double turns = 2 * Math.PI * Math.rint(bankThen / (2 * Math.PI));
     double reduced = bankThen - turns;
@@ -76,8 +76,7 @@ final class WingsLevelReturn {
     if (last > size && spiral.isPresent() && spiral.get().root() > 0) {
       return Measure.missing(
           RETURN_TIME_TO_HALF,
-          format(
-              "diverging: the spiral doubles in %.3g s", spiral.get().timeToHalfOrDouble()));
+          format("diverging: the spiral doubles in %.3g s", spiral.get().timeToHalfOrDouble()));
     }
     return Measure.missing(
         RETURN_TIME_TO_HALF,

@@ -37,8 +37,7 @@ public final class FreeSlip extends LateralMotion {
     double yawing = yaw.at(slip, p, r, aileron, rudder);
     rates[BANK] = bankRate(state[BANK], p, r);
     rates[ROLL_RATE] = (izz * moment + ixz * yawing) / determinant;
-    rates[SIDESLIP] =
-        side.at(slip, p, r, aileron, rudder) / momentum + weightTurn(state[BANK]) - r;
+    rates[SIDESLIP] = side.at(slip, p, r, aileron, rudder) / momentum + weightTurn(state[BANK]) - r;
     rates[YAW_RATE] = (ixz * moment + ixx * yawing) / determinant;
   }
 
@@ -56,8 +55,7 @@ public final class FreeSlip extends LateralMotion {
   public double[][] linearised() {
     double[][] a = new double[4][4];
     double[] bankRow = bankRow(0, 0);
-    a[BANK] =
-        new double[] {bankRow[0], bankRow[1], 0, Math.tan(model().flightPathAngle())};
+    a[BANK] = new double[] {bankRow[0], bankRow[1], 0, Math.tan(model().flightPathAngle())};
     a[ROLL_RATE] =
         new double[] {
           0,

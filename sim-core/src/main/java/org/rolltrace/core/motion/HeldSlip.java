@@ -63,8 +63,7 @@ public final class HeldSlip extends LateralMotion {
     double needed =
         model().inertia().yaw().getAsDouble() * yawAcceleration
             - model().inertia().product() * rates[ROLL_RATE];
-    double others =
-        yaw.at(0, state[ROLL_RATE], yawRate(state, aileron, rudder), aileron, 0);
+    double others = yaw.at(0, state[ROLL_RATE], yawRate(state, aileron, rudder), aileron, 0);
     return (needed - others) / yaw.perRudder();
   }
 }

@@ -51,8 +51,7 @@ public record LateralModes(
 
     Optional<Mode.Oscillatory> dutchRoll = pair(yaw, scale);
     Optional<Mode.Oscillatory> rollSpiral = pair(bank, scale);
-    List<Mode.Aperiodic> slowFirst =
-        rollSpiral.isPresent() ? List.of() : reals(bank);
+    List<Mode.Aperiodic> slowFirst = rollSpiral.isPresent() ? List.of() : reals(bank);
     return new LateralModes(
         slowFirst.isEmpty() ? Optional.empty() : Optional.of(slowFirst.get(1)),
         slowFirst.isEmpty() ? Optional.empty() : Optional.of(slowFirst.get(0)),

@@ -1,8 +1,8 @@
 package org.rolltrace.core.motion;
 
 /**
- * The equations of motion for one treatment of the slip. The state is an array that begins with bank
- * φ [rad] and roll rate p [rad/s]; free slip adds sideslip β [rad] and yaw rate r [rad/s].
+ * The equations of motion for one treatment of the slip. The state is an array that begins with
+ * bank φ [rad] and roll rate p [rad/s]; free slip adds sideslip β [rad] and yaw rate r [rad/s].
  */
 public abstract sealed class LateralMotion permits HeldSlip, SettledSlip, FreeSlip {
   /** Index of the bank in the state. */

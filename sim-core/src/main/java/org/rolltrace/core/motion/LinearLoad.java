@@ -1,8 +1,8 @@
 package org.rolltrace.core.motion;
 
 /**
- * A force or moment that is linear in the lateral motion: at = β·sideslip + p·rollRate + r·yawRate +
- * δa·aileron + δr·rudder + constant.
+ * A force or moment that is linear in the lateral motion: at = β·sideslip + p·rollRate + r·yawRate
+ * + δa·aileron + δr·rudder + constant.
  *
  * @param perSideslip N or N m per rad
  * @param perRollRate N or N m per rad/s

@@ -11,7 +11,8 @@ public sealed interface Mode permits Mode.Aperiodic, Mode.Oscillatory {
   record Aperiodic(double root) implements Mode {
 
     /**
-     * The time in which the motion fades to 1/e, or for a growing one grows by e, as a negative time.
+     * The time in which the motion fades to 1/e, or for a growing one grows by e, as a negative
+     * time.
      *
      * @return −1/λ, s
      */

@@ -1,8 +1,8 @@
 package org.rolltrace.core.motion;
 
 /**
- * Sideslip and yaw rate in balance with bank, roll rate and controls at every instant: the side-force
- * equation with β̇ = 0 and the yawing moment N = 0, solved together.
+ * Sideslip and yaw rate in balance with bank, roll rate and controls at every instant: the
+ * side-force equation with β̇ = 0 and the yawing moment N = 0, solved together.
  */
 public final class SettledSlip extends LateralMotion {
   /** A determinant this small against its own terms is rounding: β and r are not determined. */

@@ -15,10 +15,10 @@ import org.rolltrace.core.controls.ControlRun;
  * @param aileron δa, rad
  * @param rudder δr, rad
  * @param sideslip β, rad
- * @param stick fraction of travel, beyond ±1 when the travel is not enough; empty when the aeroplane
- *     has no aileron travel given
- * @param pedal fraction of travel, beyond ±1 when the travel is not enough; empty when the aeroplane
- *     has no rudder travel given
+ * @param stick fraction of travel, beyond ±1 when the travel is not enough; empty when the
+ *     aeroplane has no aileron travel given
+ * @param pedal fraction of travel, beyond ±1 when the travel is not enough; empty when the
+ *     aeroplane has no rudder travel given
  */
 public record Trim(
     double aileron, double rudder, double sideslip, OptionalDouble stick, OptionalDouble pedal) {
@@ -43,8 +43,7 @@ public record Trim(
       LateralModel model,
       Optional<ControlRun> stickRun,
       Optional<ControlRun> pedalRun) {
-    double[] balance =
-        slip == SlipTreatment.HELD ? balanceOfRoll(model) : balanceOfAllThree(model);
+    double[] balance = slip == SlipTreatment.HELD ? balanceOfRoll(model) : balanceOfAllThree(model);
     return new Trim(
         balance[0],
         balance[1],
@@ -105,7 +104,8 @@ public record Trim(
   /**
    * What is not enough for this trim.
    *
-   * @return sentences such as "not enough aileron: 112 % needed"; empty when all is within the stops
+   * @return sentences such as "not enough aileron: 112 % needed"; empty when all is within the
+   *     stops
    */
   public List<String> shortfalls() {
     List<String> sentences = new ArrayList<>();

@@ -2,9 +2,9 @@
  * The lateral equations of motion as pure functions; nothing here steps through time.
  *
  * <p>States: bank φ [rad], roll rate p [rad/s], sideslip β [rad], yaw rate r [rad/s], in stability
- * axes (x forward along the flight path, y right, z down), all positive to the right; β positive with
- * the wind from the right. Inputs: aileron angle δa and rudder angle δr [rad]. True airspeed V, load
- * factor n and flight-path angle γ stay constant; p̂ = pb/2V, r̂ = rb/2V, q̄ = ½ρV².
+ * axes (x forward along the flight path, y right, z down), all positive to the right; β positive
+ * with the wind from the right. Inputs: aileron angle δa and rudder angle δr [rad]. True airspeed
+ * V, load factor n and flight-path angle γ stay constant; p̂ = pb/2V, r̂ = rb/2V, q̄ = ½ρV².
  *
  * <pre>
  * L = q̄ S b (Cl_β β + Cl_p p̂ + Cl_r r̂ + Cl_δa δa + Cl_δr δr) + L_prop
@@ -18,8 +18,8 @@
  * held:    β = 0, r = (g/V) sin φ cos γ;   Ixx ṗ = L
  * </pre>
  *
- * <p>The relations are the usual small-perturbation ones of flight dynamics (B. Etkin and L.D. Reid,
- * Dynamics of Flight, 3rd ed. 1996, ch. 4 to 6; R.C. Nelson, Flight Stability and Automatic Control,
- * 2nd ed. 1998, ch. 5), with the weight term kept at any bank.
+ * <p>The relations are the usual small-perturbation ones of flight dynamics (B. Etkin and L.D.
+ * Reid, Dynamics of Flight, 3rd ed. 1996, ch. 4 to 6; R.C. Nelson, Flight Stability and Automatic
+ * Control, 2nd ed. 1998, ch. 5), with the weight term kept at any bank.
  */
 package org.rolltrace.core.motion;

@@ -12,11 +12,6 @@ package org.rolltrace.core.pilot;
 public record DoubletInput(double start, double size, double width, double handTime)
     implements InputShape {
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when one is out of range
-   */
   public DoubletInput {
     ShapeCheck.common(start, size, handTime);
     ShapeCheck.longerThanMovement("width, s,", width, handTime);

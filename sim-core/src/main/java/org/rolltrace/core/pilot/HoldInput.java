@@ -11,11 +11,6 @@ package org.rolltrace.core.pilot;
 public record HoldInput(double start, double size, double duration, double handTime)
     implements InputShape {
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when one is out of range
-   */
   public HoldInput {
     ShapeCheck.common(start, size, handTime);
     ShapeCheck.longerThanMovement("duration, s,", duration, handTime);

@@ -101,8 +101,8 @@ public final class PilotProgramme {
   }
 
   /**
-   * The first stretch of time over which the stick is held still, away from its trimmed position, by
-   * inputs meant to be held.
+   * The first stretch of time over which the stick is held still, away from its trimmed position,
+   * by inputs meant to be held.
    *
    * @param end the end of the manoeuvre, s
    * @return the stretch, or empty when there is none

@@ -16,7 +16,12 @@ final class ShapeCheck {
     Check.positive(role, time);
     if (!(time >= movement)) {
       throw new IllegalArgumentException(
-          role + " is " + time + "; expected at least the movement of the hand, " + movement + " s");
+          role
+              + " is "
+              + time
+              + "; expected at least the movement of the hand, "
+              + movement
+              + " s");
     }
   }
 }

@@ -9,11 +9,6 @@ package org.rolltrace.core.pilot;
  */
 public record StepInput(double start, double size, double handTime) implements InputShape {
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when one is out of range
-   */
   public StepInput {
     ShapeCheck.common(start, size, handTime);
   }

@@ -12,11 +12,6 @@ public record PropellerMoments(double roll) {
   /** No propeller moment. */
   public static final PropellerMoments NONE = new PropellerMoments(0);
 
-  /**
-   * Checks the value.
-   *
-   * @throws IllegalArgumentException when it is not finite
-   */
   public PropellerMoments {
     Check.finite("propeller roll moment, N m,", roll);
   }

@@ -1,4 +1,4 @@
-package org.rolltrace.core.flight;
+package org.rolltrace.core.motion;
 
 import org.rolltrace.core.quantity.Check;
 
@@ -14,11 +14,6 @@ public record Disturbance(double bank, double rollRate, double sideslip) {
   /** The trimmed state itself. */
   public static final Disturbance NONE = new Disturbance(0, 0, 0);
 
-  /**
-   * Checks the values.
-   *
-   * @throws IllegalArgumentException when one is not finite
-   */
   public Disturbance {
     Check.finite("start bank, rad,", bank);
     Check.finite("start roll rate, rad/s,", rollRate);
