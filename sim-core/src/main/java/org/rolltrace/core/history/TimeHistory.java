@@ -120,13 +120,15 @@ public final class TimeHistory {
   public static final class Recorder {
     private final double sampleRate;
     private double[] times;
-    private final double[][] values;
+    private final EnumMap<Channel, double[]> values = new EnumMap<>(Channel.class);
     private int size;
 
     private Recorder(double sampleRate, int capacity) {
       this.sampleRate = sampleRate;
       this.times = new double[Math.max(capacity, 4)];
-      this.values = new double[Channel.values().length][times.length];
+      for (Channel channel : Channel.values()) {
+        values.put(channel, new double[times.length]);
+      }
     }
 
     /**
@@ -141,9 +143,7 @@ public final class TimeHistory {
       }
       if (size == times.length) {
         times = Arrays.copyOf(times, 2 * size);
-        for (int c = 0; c < values.length; c++) {
-          values[c] = Arrays.copyOf(values[c], 2 * size);
-        }
+        values.replaceAll((channel, samples) -> Arrays.copyOf(samples, 2 * size));
       }
       times[size++] = time;
     }
@@ -159,7 +159,7 @@ public final class TimeHistory {
         throw new IllegalArgumentException(
             channel.label() + " is " + value + " at " + times[size - 1] + " s; expected a number");
       }
-      values[channel.ordinal()][size - 1] = value;
+      values.get(channel)[size - 1] = value;
     }
 
     /** Takes the last sample back when it repeats the one before it in time and every channel. */
@@ -167,8 +167,8 @@ public final class TimeHistory {
       if (size < 2 || times[size - 1] != times[size - 2]) {
         return;
       }
-      for (double[] channel : values) {
-        if (channel[size - 1] != channel[size - 2]) {
+      for (double[] samples : values.values()) {
+        if (samples[size - 1] != samples[size - 2]) {
           return;
         }
       }
@@ -181,11 +181,9 @@ public final class TimeHistory {
      * @return the history
      */
     public TimeHistory finish() {
-      EnumMap<Channel, double[]> map = new EnumMap<>(Channel.class);
-      for (Channel channel : Channel.values()) {
-        map.put(channel, Arrays.copyOf(values[channel.ordinal()], size));
-      }
-      return new TimeHistory(sampleRate, Arrays.copyOf(times, size), map);
+      EnumMap<Channel, double[]> taken = new EnumMap<>(values);
+      taken.replaceAll((channel, samples) -> Arrays.copyOf(samples, size));
+      return new TimeHistory(sampleRate, Arrays.copyOf(times, size), taken);
     }
   }
 }
