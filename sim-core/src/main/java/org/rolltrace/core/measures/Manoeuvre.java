@@ -11,7 +11,7 @@ import org.rolltrace.core.pilot.PilotProgramme;
  * A manoeuvre to be measured.
  *
  * @param history all channels against time
- * @param captures the instants, s, at which the bank had first changed by an angle, deg, in the
+ * @param captures the instants, s, at which the bank had first changed by an angle, rad, in the
  *     commanded direction
  * @param programme what the pilot did
  * @param slip the treatment of the slip

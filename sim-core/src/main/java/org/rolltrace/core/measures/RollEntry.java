@@ -202,7 +202,7 @@ final class RollEntry {
   }
 
   private Measure timeToBankChange(double degrees, double start) {
-    Double time = manoeuvre.captures().get(degrees);
+    Double time = manoeuvre.captures().get(Math.toRadians(degrees));
     return time == null
         ? Measure.missing(timeToBank(degrees), "not reached in this manoeuvre")
         : Measure.of(timeToBank(degrees), time - start);

@@ -1,0 +1,105 @@
+package org.rolltrace.core.files;
+
+import java.io.BufferedWriter;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.io.Writer;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.AtomicMoveNotSupportedException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import org.rolltrace.core.run.RunResult;
+
+/**
+ * Writes the files of a result into a folder: all of them whole, or none. Each is first written
+ * beside its place under another name, and takes its place only when all are complete.
+ */
+public final class ResultFolder {
+  private ResultFolder() {}
+
+  /** Writes one file. */
+  @FunctionalInterface
+  private interface Content {
+    void write(Writer out) throws IOException;
+  }
+
+  /**
+   * Writes {@code history.csv} and {@code result.json}.
+   *
+   * @param folder made when it does not exist
+   * @param result what is written
+   * @param producedBy the program and its version
+   * @return the files written
+   * @throws UncheckedIOException when the folder or a file cannot be written; its message says what
+   *     to do
+   */
+  public static List<Path> write(Path folder, RunResult result, String producedBy) {
+    Map<String, Content> contents = new LinkedHashMap<>();
+    contents.put("history.csv", out -> HistoryCsv.write(result.history(), out));
+    contents.put("result.json", out -> ResultJson.write(result, producedBy, out));
+    return writeAll(folder, contents);
+  }
+
+  private static List<Path> writeAll(Path folder, Map<String, Content> contents) {
+    Map<Path, Path> places = new LinkedHashMap<>();
+    String writer = ProcessHandle.current().pid() + "-" + System.nanoTime();
+    try {
+      Files.createDirectories(folder);
+      for (Map.Entry<String, Content> entry : contents.entrySet()) {
+        Path draft = folder.resolve("." + entry.getKey() + "." + writer + ".part");
+        places.put(draft, folder.resolve(entry.getKey()));
+        try (BufferedWriter out = Files.newBufferedWriter(draft, StandardCharsets.UTF_8)) {
+          entry.getValue().write(out);
+        }
+      }
+      for (Map.Entry<Path, Path> place : places.entrySet()) {
+        move(place.getKey(), place.getValue());
+      }
+      return new ArrayList<>(places.values());
+    } catch (IOException failure) {
+      deleteDrafts(places);
+      throw new UncheckedIOException(
+          "cannot write the result into "
+              + folder
+              + ": "
+              + reason(failure)
+              + "; choose a folder that you may write to, with room on its disk",
+          failure);
+    }
+  }
+
+  private static void move(Path draft, Path place) throws IOException {
+    try {
+      Files.move(draft, place, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
+    } catch (AtomicMoveNotSupportedException plainMove) {
+      Files.move(draft, place, StandardCopyOption.REPLACE_EXISTING);
+    }
+  }
+
+  private static void deleteDrafts(Map<Path, Path> places) {
+    for (Path draft : places.keySet()) {
+      try {
+        Files.deleteIfExists(draft);
+      } catch (IOException stays) {
+        // The failure that is being reported says what is wrong with the folder.
+      }
+    }
+  }
+
+  private static String reason(IOException failure) {
+    String what =
+        switch (failure.getClass().getSimpleName()) {
+          case "FileAlreadyExistsException" -> "there is a file of that name";
+          case "AccessDeniedException" -> "it is not allowed";
+          case "NotDirectoryException" -> "it is not a folder";
+          case "ReadOnlyFileSystemException" -> "the disk is read only";
+          default -> "";
+        };
+    return what.isEmpty() ? String.valueOf(failure.getMessage()) : what;
+  }
+}

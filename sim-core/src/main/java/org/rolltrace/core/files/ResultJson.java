@@ -1,0 +1,270 @@
+package org.rolltrace.core.files;
+
+import com.fasterxml.jackson.core.JsonFactory;
+import com.fasterxml.jackson.core.JsonGenerator;
+import com.fasterxml.jackson.core.StreamWriteFeature;
+import com.fasterxml.jackson.core.util.DefaultIndenter;
+import com.fasterxml.jackson.core.util.DefaultPrettyPrinter;
+import java.io.IOException;
+import java.io.Writer;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.rolltrace.core.atmosphere.FlightCondition;
+import org.rolltrace.core.derivatives.Coefficient;
+import org.rolltrace.core.derivatives.LateralDerivatives;
+import org.rolltrace.core.flight.FlightEvent;
+import org.rolltrace.core.measures.Measure;
+import org.rolltrace.core.motion.LateralModes;
+import org.rolltrace.core.motion.Mode;
+import org.rolltrace.core.motion.Trim;
+import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.run.RunResult;
+import org.rolltrace.core.run.Safety;
+import org.rolltrace.core.scenario.Scenario;
+
+/**
+ * A result as JSON, format {@code rolltrace-result/1}: SI units and radians, positive to the right;
+ * no number that is not finite, a {@code reason} instead.
+ */
+public final class ResultJson {
+  /** Below this a root neither grows nor fades within any flight, 1/s. */
+  private static final double NEUTRAL = 1e-9;
+
+  private final JsonGenerator json;
+  private final RunResult result;
+
+  private ResultJson(JsonGenerator json, RunResult result) {
+    this.json = json;
+    this.result = result;
+  }
+
+  /**
+   * Writes a result.
+   *
+   * @param result what is written
+   * @param producedBy the program and its version
+   * @param out receives the text; is flushed, not closed
+   * @throws IOException when {@code out} fails
+   */
+  public static void write(RunResult result, String producedBy, Writer out) throws IOException {
+    DefaultPrettyPrinter printer =
+        new DefaultPrettyPrinter()
+            .withObjectIndenter(new DefaultIndenter("  ", "\n"))
+            .withArrayIndenter(new DefaultIndenter("  ", "\n"));
+    JsonFactory factory =
+        JsonFactory.builder().disable(StreamWriteFeature.AUTO_CLOSE_TARGET).build();
+    try (JsonGenerator json = factory.createGenerator(out)) {
+      json.setPrettyPrinter(printer);
+      new ResultJson(json, result).writeDocument(producedBy);
+    }
+    out.append('\n');
+    out.flush();
+  }
+
+  private void writeDocument(String producedBy) throws IOException {
+    json.writeStartObject();
+    json.writeStringField("format", "rolltrace-result/1");
+    json.writeStringField("producedBy", producedBy);
+    json.writeStringField("notice", Safety.NOTICE);
+    writeScenario(result.scenario());
+    writeCondition(result.scenario().condition());
+    writeDerivatives(result.scenario().data().derivatives());
+    writeTrim(result.trim());
+    writeModes();
+    writeMeasures();
+    writeEvents();
+    json.writeArrayFieldStart("requirements");
+    json.writeEndArray();
+    json.writeArrayFieldStart("cautions");
+    for (String caution : result.cautions()) {
+      json.writeString(caution);
+    }
+    json.writeEndArray();
+    json.writeEndObject();
+  }
+
+  private void number(String name, double value) throws IOException {
+    if (!(Math.abs(value) <= Double.MAX_VALUE)) {
+      throw new IllegalStateException(name + " is " + value + "; expected a finite number");
+    }
+    json.writeNumberField(name, value);
+  }
+
+  private void number(String name, OptionalDouble value) throws IOException {
+    if (value.isPresent()) {
+      number(name, value.getAsDouble());
+    }
+  }
+
+  private void writeScenario(Scenario scenario) throws IOException {
+    json.writeObjectFieldStart("scenario");
+    json.writeStringField("title", scenario.title());
+    json.writeStringField("aeroplane", scenario.data().aeroplane().name());
+    json.writeStringField("derivativesSource", scenario.data().derivatives().source());
+    json.writeStringField("slip", scenario.slip().word());
+    json.writeObjectFieldStart("start");
+    number("bank", scenario.start().disturbance().bank());
+    number("rollRate", scenario.start().disturbance().rollRate());
+    number("sideslip", scenario.start().disturbance().sideslip());
+    number("trimmedWithPropellerRollMoment", scenario.start().trimmedWith().roll());
+    json.writeEndObject();
+    json.writeArrayFieldStart("inputs");
+    for (PilotInput input : scenario.programme().inputs()) {
+      json.writeStartObject();
+      json.writeStringField("control", input.control().word());
+      json.writeStringField("shape", input.shape().name());
+      number("start", input.shape().start());
+      number("size", input.shape().size());
+      number("movement", input.shape().handTime());
+      if (input.shape().end() < Double.POSITIVE_INFINITY) {
+        number("end", input.shape().end());
+      }
+      json.writeEndObject();
+    }
+    json.writeEndArray();
+    number("duration", scenario.duration());
+    number("relativeTolerance", result.settings().relativeTolerance());
+    number("absoluteTolerance", result.settings().absoluteTolerance());
+    json.writeEndObject();
+  }
+
+  private void writeCondition(FlightCondition condition) throws IOException {
+    json.writeObjectFieldStart("condition");
+    number("pressureAltitude", condition.pressureAltitude());
+    number("temperature", condition.temperature());
+    number("pressure", condition.pressure());
+    number("density", condition.density());
+    number("speedOfSound", condition.speedOfSound());
+    number("trueAirspeed", condition.trueAirspeed());
+    number("equivalentAirspeed", condition.equivalentAirspeed());
+    number("calibratedAirspeed", condition.calibratedAirspeed());
+    number("mach", condition.mach());
+    number("dynamicPressure", condition.dynamicPressure());
+    number("loadFactor", condition.loadFactor());
+    number("flightPathAngle", condition.flightPathAngle());
+    number("liftCoefficient", result.liftCoefficient());
+    number("propellerRollMoment", result.scenario().propeller().roll());
+    json.writeEndObject();
+  }
+
+  private void writeDerivatives(LateralDerivatives derivatives) throws IOException {
+    json.writeObjectFieldStart("derivatives");
+    for (Coefficient coefficient : Coefficient.values()) {
+      json.writeObjectFieldStart(coefficient.symbol());
+      number("value", derivatives.value(coefficient));
+      json.writeStringField("origin", derivatives.origin(coefficient).word());
+      json.writeEndObject();
+    }
+    json.writeEndObject();
+  }
+
+  private void writeTrim(Trim trim) throws IOException {
+    json.writeObjectFieldStart("trim");
+    json.writeStringField("state", "wings-level");
+    number("aileron", trim.aileron());
+    number("rudder", trim.rudder());
+    number("sideslip", trim.sideslip());
+    number("stick", trim.stick());
+    number("pedal", trim.pedal());
+    json.writeArrayFieldStart("shortfalls");
+    for (String shortfall : trim.shortfalls()) {
+      json.writeString(shortfall);
+    }
+    json.writeEndArray();
+    json.writeEndObject();
+  }
+
+  private void writeModes() throws IOException {
+    json.writeObjectFieldStart("modes");
+    if (result.modes().isPresent()) {
+      LateralModes modes = result.modes().get();
+      writeAperiodic("roll", modes.roll());
+      writeAperiodic("spiral", modes.spiral());
+      writeOscillatory("rollSpiral", modes.rollSpiral());
+      writeOscillatory("dutchRoll", modes.dutchRoll());
+      if (modes.dutchRoll().isEmpty()) {
+        List<Mode.Aperiodic> roots = modes.aperiodicYaw();
+        json.writeObjectFieldStart("dutchRoll");
+        json.writeStringField(
+            "reason",
+            "slip and yaw do not swing: their roots are "
+                + roots.get(0).root()
+                + " and "
+                + roots.get(1).root()
+                + " 1/s");
+        json.writeEndObject();
+      }
+    } else {
+      json.writeStringField("reason", result.modesRemark());
+    }
+    json.writeEndObject();
+  }
+
+  private void writeAperiodic(String name, Optional<Mode.Aperiodic> mode) throws IOException {
+    if (mode.isEmpty()) {
+      return;
+    }
+    double root = mode.get().root();
+    json.writeObjectFieldStart(name);
+    number("root", root);
+    if (Math.abs(root) < NEUTRAL) {
+      json.writeStringField("reason", "neutral: it neither fades nor grows");
+    } else {
+      number("timeConstant", mode.get().timeConstant());
+      number(root < 0 ? "timeToHalf" : "timeToDouble", mode.get().timeToHalfOrDouble());
+    }
+    json.writeEndObject();
+  }
+
+  private void writeOscillatory(String name, Optional<Mode.Oscillatory> mode) throws IOException {
+    if (mode.isEmpty()) {
+      return;
+    }
+    json.writeObjectFieldStart(name);
+    number("real", mode.get().real());
+    number("imaginary", mode.get().imaginary());
+    number("naturalFrequency", mode.get().naturalFrequency());
+    number("dampingRatio", mode.get().dampingRatio());
+    number("period", mode.get().period());
+    json.writeEndObject();
+  }
+
+  private void writeMeasures() throws IOException {
+    json.writeObjectFieldStart("measures");
+    for (Measure measure : result.measures()) {
+      json.writeObjectFieldStart(measure.definition().name());
+      if (measure.value().isPresent()) {
+        number("value", measure.value().getAsDouble());
+        json.writeStringField("unit", measure.definition().unit());
+        if (!measure.remark().isEmpty()) {
+          json.writeStringField("remark", measure.remark());
+        }
+      } else {
+        json.writeStringField("reason", measure.remark());
+      }
+      json.writeEndObject();
+    }
+    json.writeEndObject();
+  }
+
+  private void writeEvents() throws IOException {
+    json.writeArrayFieldStart("events");
+    for (FlightEvent event : result.events()) {
+      json.writeStartObject();
+      number("time", event.time());
+      if (event instanceof FlightEvent.BankCapture capture) {
+        json.writeStringField("kind", "bank change");
+        number("bankChange", capture.change());
+      } else if (event instanceof FlightEvent.Stop stop) {
+        json.writeStringField("kind", stop.reached() ? "stop reached" : "stop left");
+        json.writeStringField("control", stop.control().word());
+      } else if (event instanceof FlightEvent.RateLimit limit) {
+        json.writeStringField("kind", limit.began() ? "rate limit reached" : "rate limit left");
+        json.writeStringField("control", limit.control().word());
+      }
+      json.writeEndObject();
+    }
+    json.writeEndArray();
+  }
+}

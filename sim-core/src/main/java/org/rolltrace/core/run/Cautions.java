@@ -1,0 +1,237 @@
+package org.rolltrace.core.run;
+
+import static org.rolltrace.core.measures.MeasureDefinition.PEDAL_TO_HOLD_SLIP;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.stream.Collectors;
+import org.rolltrace.core.aeroplane.Limits;
+import org.rolltrace.core.atmosphere.FlightCondition;
+import org.rolltrace.core.derivatives.Coefficient;
+import org.rolltrace.core.flight.FlightEvent;
+import org.rolltrace.core.flight.Flown;
+import org.rolltrace.core.history.Channel;
+import org.rolltrace.core.measures.Measure;
+import org.rolltrace.core.motion.LateralModel;
+import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.motion.Trim;
+import org.rolltrace.core.scenario.Scenario;
+
+/**
+ * The limits that a result met: the aeroplane's own, those of the model, and what the data leave
+ * open. The thresholds without a source are common practice.
+ */
+final class Cautions {
+  private static final double KNOT = 1852.0 / 3600;
+  private static final double FULL_TRAVEL = 1 - 1e-6;
+
+  /** Share of aileron travel for which an aeroplane is built at its design dive speed. */
+  private static final double SHARE_AT_DIVE_SPEED = 1.0 / 3;
+
+  private static final double LARGEST_SLIP = Math.toRadians(15);
+  private static final double LARGEST_BANK_AT_CONSTANT_SPEED = Math.toRadians(60);
+  private static final double LONGEST_AT_CONSTANT_SPEED = 10;
+  private static final double LARGEST_MACH = 0.7;
+  private static final double LIFT_COEFFICIENT_AWAY = 0.1;
+  private static final double MACH_AWAY = 0.05;
+
+  private final Scenario scenario;
+  private final Flown flown;
+  private final List<String> sentences = new ArrayList<>();
+
+  private Cautions(Scenario scenario, Flown flown) {
+    this.scenario = scenario;
+    this.flown = flown;
+  }
+
+  static List<String> of(
+      Scenario scenario, LateralModel model, Trim trim, Flown flown, List<Measure> measures) {
+    Cautions cautions = new Cautions(scenario, flown);
+    cautions.addTrim(trim);
+    cautions.addOwnLimits();
+    cautions.addStops();
+    cautions.addModelLimits(model);
+    cautions.addDerivatives();
+    cautions.addHeldSlip(measures);
+    return cautions.sentences;
+  }
+
+  private void addTrim(Trim trim) {
+    for (String shortfall : trim.shortfalls()) {
+      add("wings-level trim: %s; the manoeuvre starts at the stop and out of trim", shortfall);
+    }
+  }
+
+  private void addOwnLimits() {
+    Limits limits = scenario.data().aeroplane().limits();
+    double speed = scenario.condition().calibratedAirspeed();
+    double stick = largest(Channel.STICK);
+    if (exceeds(speed, limits.manoeuvringSpeed()) && stick >= FULL_TRAVEL) {
+      add(
+          "full stick at %.1f kt CAS, above the manoeuvring speed of %.1f kt",
+          speed / KNOT, limits.manoeuvringSpeed().getAsDouble() / KNOT);
+    }
+    if (exceeds(speed, limits.neverExceedSpeed())) {
+      add(
+          "%.1f kt CAS is above the never-exceed speed of %.1f kt",
+          speed / KNOT, limits.neverExceedSpeed().getAsDouble() / KNOT);
+      if (stick > SHARE_AT_DIVE_SPEED) {
+        add("more than a third of the stick above the never-exceed speed");
+      }
+    }
+    if (exceeds(scenario.condition().loadFactor(), limits.rollingLoadFactor())) {
+      add(
+          "load factor %.2f is above the rolling limit of %.2f",
+          scenario.condition().loadFactor(), limits.rollingLoadFactor().getAsDouble());
+    }
+    double rate = largest(Channel.ROLL_RATE);
+    if (exceeds(rate, limits.rollRate())) {
+      add(
+          "roll rate of %.1f deg/s is above the aeroplane's limit of %.1f deg/s",
+          Math.toDegrees(rate), Math.toDegrees(limits.rollRate().getAsDouble()));
+    }
+    double bank = largest(Channel.BANK);
+    if (exceeds(bank, limits.bank())) {
+      add(
+          "bank of %.1f deg is above the aeroplane's limit of %.1f deg",
+          Math.toDegrees(bank), Math.toDegrees(limits.bank().getAsDouble()));
+    }
+  }
+
+  private void addStops() {
+    addStop("stick", Channel.STICK);
+    addStop("pedal", Channel.PEDAL);
+    flown.events().stream()
+        .filter(FlightEvent.RateLimit.class::isInstance)
+        .map(FlightEvent.RateLimit.class::cast)
+        .filter(FlightEvent.RateLimit::began)
+        .findFirst()
+        .ifPresent(
+            event ->
+                add(
+                    "the surface moved by the %s is at its largest rate from %.2f s",
+                    event.control().word(), event.time()));
+  }
+
+  private void addStop(String control, Channel channel) {
+    for (int i = 0; i < flown.history().size(); i++) {
+      if (Math.abs(flown.history().value(channel, i)) >= FULL_TRAVEL) {
+        add("the %s is on its stop from %.2f s", control, flown.history().time(i));
+        return;
+      }
+    }
+  }
+
+  private void addModelLimits(LateralModel model) {
+    double slip = largest(Channel.SIDESLIP);
+    if (slip > LARGEST_SLIP) {
+      add(
+          "sideslip reaches %.1f deg; beyond 15 deg derivatives no longer hold",
+          Math.toDegrees(slip));
+    }
+    double mach = scenario.condition().mach();
+    if (mach > LARGEST_MACH) {
+      add("Mach %.3f is above 0.7; the model has no compressibility beyond given values", mach);
+    }
+    addCoupling(model);
+    double bank = largest(Channel.BANK);
+    List<String> why = new ArrayList<>();
+    if (bank > LARGEST_BANK_AT_CONSTANT_SPEED) {
+      why.add(format("the bank reaches %.0f deg", Math.toDegrees(bank)));
+    }
+    if (scenario.duration() > LONGEST_AT_CONSTANT_SPEED) {
+      why.add(format("the manoeuvre lasts %.0f s", scenario.duration()));
+    }
+    if (!why.isEmpty()) {
+      add(
+          "speed and load factor are held constant, although %s",
+          why.stream().collect(Collectors.joining(" and ")));
+    }
+  }
+
+  /**
+   * Roll coupling: W.H. Phillips, Effect of Steady Rolling on Longitudinal and Directional
+   * Stability, NACA TN 1627, 1948 (from memory): a steady roll rate beyond the lower of the natural
+   * frequencies in pitch and yaw may diverge. Only the one in yaw is known here.
+   */
+  private void addCoupling(LateralModel model) {
+    OptionalDouble yawInertia = model.inertia().yaw();
+    double stiffness = model.yawMoment().perSideslip();
+    if (yawInertia.isEmpty() || !(stiffness > 0)) {
+      return;
+    }
+    double frequency = Math.sqrt(stiffness / yawInertia.getAsDouble());
+    double rate = largest(Channel.ROLL_RATE);
+    if (rate > frequency) {
+      add(
+          "roll rate of %.0f deg/s is above the natural frequency in yaw, %.0f deg/s: roll coupling,"
+              + " which is not modelled, may matter",
+          Math.toDegrees(rate), Math.toDegrees(frequency));
+    }
+  }
+
+  private void addDerivatives() {
+    Optional<FlightCondition> validAt = scenario.data().derivatives().validAt();
+    if (validAt.isEmpty()) {
+      add("the aeroplane file does not say at which condition its derivatives hold");
+    } else {
+      FlightCondition here = scenario.condition();
+      FlightCondition there = validAt.get();
+      double liftRatio =
+          here.loadFactor()
+              * there.dynamicPressure()
+              / (there.loadFactor() * here.dynamicPressure());
+      if (Math.abs(liftRatio - 1) > LIFT_COEFFICIENT_AWAY) {
+        add(
+            "derivatives are flown off their condition: the lift coefficient is %.2f times that for"
+                + " which they hold",
+            liftRatio);
+      }
+      if (Math.abs(here.mach() - there.mach()) > MACH_AWAY) {
+        add(
+            "derivatives are flown off their condition: Mach %.2f instead of %.2f",
+            here.mach(), there.mach());
+      }
+    }
+    if (scenario.slip() != SlipTreatment.HELD) {
+      List<Coefficient> absent = scenario.data().derivatives().absentAmong(FreeModes.NEEDED);
+      if (!absent.isEmpty()) {
+        add(
+            "absent and taken as 0: %s; sideslip and yaw mean little without them",
+            absent.stream().map(Coefficient::symbol).collect(Collectors.joining(", ")));
+      }
+    }
+  }
+
+  private void addHeldSlip(List<Measure> measures) {
+    measures.stream()
+        .filter(measure -> measure.definition().equals(PEDAL_TO_HOLD_SLIP))
+        .filter(measure -> measure.value().isPresent())
+        .mapToDouble(measure -> Math.abs(measure.value().getAsDouble()))
+        .filter(pedal -> pedal > 1)
+        .forEach(pedal -> add("holding the slip needs %.0f %% of the pedal travel", 100 * pedal));
+  }
+
+  private static boolean exceeds(double value, OptionalDouble limit) {
+    return limit.isPresent() && value > limit.getAsDouble();
+  }
+
+  private double largest(Channel channel) {
+    double largest = 0;
+    for (int i = 0; i < flown.history().size(); i++) {
+      largest = Math.max(largest, Math.abs(flown.history().value(channel, i)));
+    }
+    return largest;
+  }
+
+  private void add(String pattern, Object... values) {
+    sentences.add(format(pattern, values));
+  }
+
+  private static String format(String pattern, Object... values) {
+    return String.format(Locale.ROOT, pattern, values);
+  }
+}

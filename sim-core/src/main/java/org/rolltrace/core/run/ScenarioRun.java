@@ -1,0 +1,144 @@
+package org.rolltrace.core.run;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.rolltrace.core.aeroplane.Aeroplane;
+import org.rolltrace.core.controls.ControlRun;
+import org.rolltrace.core.flight.Flight;
+import org.rolltrace.core.flight.FlightEvent;
+import org.rolltrace.core.flight.FlightPlan;
+import org.rolltrace.core.flight.FlightSettings;
+import org.rolltrace.core.flight.Flown;
+import org.rolltrace.core.measures.Manoeuvre;
+import org.rolltrace.core.measures.Measure;
+import org.rolltrace.core.measures.Measures;
+import org.rolltrace.core.motion.CalculationException;
+import org.rolltrace.core.motion.LateralModel;
+import org.rolltrace.core.motion.LateralModes;
+import org.rolltrace.core.motion.LateralMotion;
+import org.rolltrace.core.motion.Mode;
+import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.motion.Trim;
+import org.rolltrace.core.propeller.PropellerMoments;
+import org.rolltrace.core.scenario.Scenario;
+
+/** Flies a scenario. */
+public final class ScenarioRun {
+  private ScenarioRun() {}
+
+  /**
+   * Flies a scenario with the usual tolerances and 100 samples a second.
+   *
+   * @param scenario which aeroplane, in which condition, flown how
+   * @return all that came of it
+   * @throws CalculationException when trim or integration has no answer
+   */
+  public static RunResult execute(Scenario scenario) {
+    return execute(scenario, FlightSettings.DEFAULT);
+  }
+
+  /**
+   * Flies a scenario.
+   *
+   * @param scenario which aeroplane, in which condition, flown how
+   * @param settings how finely
+   * @return all that came of it
+   * @throws CalculationException when trim or integration has no answer
+   */
+  public static RunResult execute(Scenario scenario, FlightSettings settings) {
+    LateralModel model = model(scenario, scenario.propeller());
+    LateralMotion motion = motion(scenario.slip(), model);
+    FreeModes free = FreeModes.of(model, scenario.data().derivatives());
+    Trim trim = trim(scenario, scenario.slip());
+    Flown flown = Flight.fly(plan(scenario, motion, trim), settings);
+
+    Manoeuvre manoeuvre =
+        new Manoeuvre(
+            flown.history(),
+            captures(flown),
+            scenario.programme(),
+            scenario.slip(),
+            LateralModes.of(motion),
+            dutchRollPeriod(free),
+            scenario.data().aeroplane().span() / (2 * scenario.condition().trueAirspeed()),
+            scenario.duration());
+    List<Measure> measures = new ArrayList<>(Measures.of(manoeuvre, scenario.measures()));
+    measures.addAll(SlipAssumption.measures(scenario, motion, free, flown.history(), settings));
+    return new RunResult(
+        scenario,
+        settings,
+        trim,
+        free.modes(),
+        free.remark(),
+        flown.history(),
+        flown.events(),
+        measures,
+        Cautions.of(scenario, model, trim, flown, measures));
+  }
+
+  static LateralModel model(Scenario scenario, PropellerMoments propeller) {
+    return LateralModel.of(
+        scenario.data().aeroplane(),
+        scenario.data().derivatives(),
+        scenario.condition(),
+        propeller);
+  }
+
+  private static LateralMotion motion(SlipTreatment slip, LateralModel model) {
+    try {
+      return LateralMotion.of(slip, model);
+    } catch (IllegalArgumentException undetermined) {
+      throw new CalculationException(undetermined.getMessage(), undetermined);
+    }
+  }
+
+  static Trim trim(Scenario scenario, SlipTreatment slip) {
+    return Trim.wingsLevel(
+        slip,
+        model(scenario, scenario.start().trimmedWith()),
+        stickRun(scenario.data().aeroplane()),
+        pedalRun(scenario.data().aeroplane()));
+  }
+
+  static FlightPlan plan(Scenario scenario, LateralMotion motion, Trim trim) {
+    return new FlightPlan(
+        motion,
+        stickRun(scenario.data().aeroplane()),
+        pedalRun(scenario.data().aeroplane()),
+        trim,
+        scenario.start().disturbance(),
+        scenario.programme(),
+        scenario.measures().bankChanges().stream().map(Math::toRadians).toList(),
+        scenario.duration());
+  }
+
+  private static Optional<ControlRun> stickRun(Aeroplane aeroplane) {
+    return aeroplane.ailerons().map(ControlRun::of);
+  }
+
+  private static Optional<ControlRun> pedalRun(Aeroplane aeroplane) {
+    return aeroplane.rudder().map(ControlRun::of);
+  }
+
+  private static Map<Double, Double> captures(Flown flown) {
+    Map<Double, Double> times = new HashMap<>();
+    for (FlightEvent event : flown.events()) {
+      if (event instanceof FlightEvent.BankCapture capture) {
+        times.put(capture.change(), capture.time());
+      }
+    }
+    return times;
+  }
+
+  private static OptionalDouble dutchRollPeriod(FreeModes free) {
+    return free.modes()
+        .flatMap(LateralModes::dutchRoll)
+        .map(Mode.Oscillatory::period)
+        .map(OptionalDouble::of)
+        .orElse(OptionalDouble.empty());
+  }
+}

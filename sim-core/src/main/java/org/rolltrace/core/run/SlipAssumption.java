@@ -1,0 +1,111 @@
+package org.rolltrace.core.run;
+
+import static org.rolltrace.core.measures.MeasureDefinition.FREE_SLIP_BANK_DIFFERENCE;
+import static org.rolltrace.core.measures.MeasureDefinition.FREE_SLIP_ROLL_RATE_DIFFERENCE;
+import static org.rolltrace.core.measures.MeasureDefinition.PEDAL_TO_HOLD_SLIP;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.rolltrace.core.controls.ControlRun;
+import org.rolltrace.core.flight.Flight;
+import org.rolltrace.core.flight.FlightPlan;
+import org.rolltrace.core.flight.FlightSettings;
+import org.rolltrace.core.history.Channel;
+import org.rolltrace.core.history.TimeHistory;
+import org.rolltrace.core.measures.Measure;
+import org.rolltrace.core.motion.CalculationException;
+import org.rolltrace.core.motion.HeldSlip;
+import org.rolltrace.core.motion.LateralMotion;
+import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.scenario.Scenario;
+
+/** What held or settled slip assumes, and how far that is from free slip. */
+final class SlipAssumption {
+  private SlipAssumption() {}
+
+  static List<Measure> measures(
+      Scenario scenario,
+      LateralMotion motion,
+      FreeModes free,
+      TimeHistory history,
+      FlightSettings settings) {
+    List<Measure> measures = new ArrayList<>();
+    if (motion instanceof HeldSlip held) {
+      measures.add(pedalToHold(scenario, held, history));
+    }
+    if (scenario.slip() != SlipTreatment.FREE) {
+      measures.addAll(distanceFromFree(scenario, motion, free, history, settings));
+    }
+    return measures;
+  }
+
+  private static Measure pedalToHold(Scenario scenario, HeldSlip held, TimeHistory history) {
+    Optional<ControlRun> run = scenario.data().aeroplane().rudder().map(ControlRun::of);
+    if (run.isEmpty()) {
+      return Measure.missing(PEDAL_TO_HOLD_SLIP, "the aeroplane gives no rudder travel");
+    }
+    double largest = 0;
+    double[] state = new double[2];
+    for (int i = 0; i < history.size(); i++) {
+      state[LateralMotion.BANK] = history.value(Channel.BANK, i);
+      state[LateralMotion.ROLL_RATE] = history.value(Channel.ROLL_RATE, i);
+      double rudder =
+          held.rudderToHold(
+              state, history.value(Channel.AILERON, i), history.value(Channel.RUDDER, i));
+      if (Double.isNaN(rudder)) {
+        return Measure.missing(
+            PEDAL_TO_HOLD_SLIP, "the aeroplane gives no yaw inertia or no Cn_dr");
+      }
+      double pedal = run.get().positionFor(rudder);
+      largest = Math.abs(pedal) > Math.abs(largest) ? pedal : largest;
+    }
+    return Measure.of(
+        PEDAL_TO_HOLD_SLIP,
+        largest,
+        Math.abs(largest) > 1 ? "more than the travel: the slip cannot be held" : "");
+  }
+
+  private static List<Measure> distanceFromFree(
+      Scenario scenario,
+      LateralMotion motion,
+      FreeModes free,
+      TimeHistory history,
+      FlightSettings settings) {
+    if (free.modes().isEmpty()) {
+      return unknown(free.remark());
+    }
+    TimeHistory other;
+    try {
+      FlightPlan plan =
+          ScenarioRun.plan(
+              scenario,
+              LateralMotion.of(SlipTreatment.FREE, motion.model()),
+              ScenarioRun.trim(scenario, SlipTreatment.FREE));
+      other = Flight.fly(plan, settings).history();
+    } catch (CalculationException noAnswer) {
+      return unknown("with free slip there is no answer: " + noAnswer.getMessage());
+    }
+    return List.of(
+        Measure.of(FREE_SLIP_BANK_DIFFERENCE, largestDifference(Channel.BANK, history, other)),
+        Measure.of(
+            FREE_SLIP_ROLL_RATE_DIFFERENCE, largestDifference(Channel.ROLL_RATE, history, other)));
+  }
+
+  private static List<Measure> unknown(String reason) {
+    return List.of(
+        Measure.missing(FREE_SLIP_BANK_DIFFERENCE, reason),
+        Measure.missing(FREE_SLIP_ROLL_RATE_DIFFERENCE, reason));
+  }
+
+  private static double largestDifference(Channel channel, TimeHistory one, TimeHistory two) {
+    int[] ones = one.evenSamples();
+    int[] twos = two.evenSamples();
+    double largest = 0;
+    for (int i = 0; i < Math.min(ones.length, twos.length); i++) {
+      largest =
+          Math.max(largest, Math.abs(one.value(channel, ones[i]) - two.value(channel, twos[i])));
+    }
+    return largest;
+  }
+}

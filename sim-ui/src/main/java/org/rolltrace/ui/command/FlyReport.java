@@ -1,0 +1,283 @@
+package org.rolltrace.ui.command;
+
+import java.io.PrintWriter;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.rolltrace.core.atmosphere.FlightCondition;
+import org.rolltrace.core.derivatives.Coefficient;
+import org.rolltrace.core.derivatives.LateralDerivatives;
+import org.rolltrace.core.derivatives.Origin;
+import org.rolltrace.core.measures.Measure;
+import org.rolltrace.core.motion.Disturbance;
+import org.rolltrace.core.motion.LateralModes;
+import org.rolltrace.core.motion.Mode;
+import org.rolltrace.core.motion.Trim;
+import org.rolltrace.core.pilot.InputShape;
+import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.quantity.Quantity;
+import org.rolltrace.core.run.RunResult;
+import org.rolltrace.core.run.Safety;
+import org.rolltrace.core.scenario.Scenario;
+
+/** A result as text in aligned columns, in the units that engineers read beside SI. */
+final class FlyReport {
+  private static final int LABEL = 32;
+  private static final int VALUE = 12;
+  private static final int WIDTH = 96;
+
+  private final RunResult result;
+  private final StringBuilder text = new StringBuilder();
+
+  FlyReport(RunResult result) {
+    this.result = result;
+  }
+
+  void print(PrintWriter out) {
+    Scenario scenario = result.scenario();
+    line(scenario.title());
+    addAeroplane(scenario);
+    addCondition(scenario.condition());
+    addManoeuvre(scenario);
+    addDerivatives(scenario.data().derivatives());
+    addTrim();
+    addModes();
+    addMeasures();
+    line("");
+    wrapped("", Safety.NOTICE);
+    out.print(text);
+  }
+
+  private void addAeroplane(Scenario scenario) {
+    row("  aeroplane", scenario.data().aeroplane().name());
+    if (!scenario.data().derivatives().source().isBlank()) {
+      wrapped(padded("  derivatives from", 20), scenario.data().derivatives().source());
+    }
+  }
+
+  private void addCondition(FlightCondition condition) {
+    row(
+        "  pressure altitude",
+        format(
+            "%.0f ft (%.0f m), %.1f K, density %.4f kg/m3",
+            Quantity.toUnit(condition.pressureAltitude(), "ft"),
+            condition.pressureAltitude(),
+            condition.temperature(),
+            condition.density()));
+    row(
+        "  airspeed",
+        format(
+            "%.1f kt true, %.1f kt equivalent, %.1f kt calibrated (%.2f m/s true), M %.3f",
+            Quantity.toUnit(condition.trueAirspeed(), "kt"),
+            Quantity.toUnit(condition.equivalentAirspeed(), "kt"),
+            Quantity.toUnit(condition.calibratedAirspeed(), "kt"),
+            condition.trueAirspeed(),
+            condition.mach()));
+    OptionalDouble lift = result.liftCoefficient();
+    row(
+        "  load factor",
+        format("%.3f", condition.loadFactor())
+            + (lift.isPresent() ? format(", lift coefficient %.3f", lift.getAsDouble()) : "")
+            + (condition.flightPathAngle() == 0
+                ? ""
+                : format(", flight path %+.2f deg", Math.toDegrees(condition.flightPathAngle()))));
+    if (result.scenario().propeller().roll() != 0) {
+      row("  propeller moment", format("%+.1f N m in roll", result.scenario().propeller().roll()));
+    }
+  }
+
+  private void addManoeuvre(Scenario scenario) {
+    row("  slip", scenario.slip().word());
+    Disturbance disturbance = scenario.start().disturbance();
+    if (!disturbance.isNone()) {
+      row(
+          "  start",
+          format(
+              "bank %+.1f deg, roll rate %+.1f deg/s, sideslip %+.1f deg from trim",
+              Math.toDegrees(disturbance.bank()),
+              Math.toDegrees(disturbance.rollRate()),
+              Math.toDegrees(disturbance.sideslip())));
+    }
+    for (PilotInput input : scenario.programme().inputs()) {
+      row("  input", describe(input));
+    }
+    row("  duration", format("%.4g s", scenario.duration()));
+  }
+
+  private static String describe(PilotInput input) {
+    InputShape shape = input.shape();
+    return format(
+        "%s %s, %.4g %% %s at %.4g s, hand takes %.4g s",
+        input.control().word(),
+        shape.name(),
+        100 * Math.abs(shape.size()),
+        shape.size() < 0 ? "left" : "right",
+        shape.start(),
+        shape.handTime());
+  }
+
+  private void addDerivatives(LateralDerivatives derivatives) {
+    line("");
+    line("Derivatives, per rad and per pb/2V or rb/2V");
+    line(format("  %-8s%10s%10s%10s%10s%10s", "", "beta", "p", "r", "da", "dr"));
+    StringBuilder row = new StringBuilder();
+    for (Coefficient coefficient : Coefficient.values()) {
+      if (row.isEmpty()) {
+        String axis = coefficient.symbol().substring(0, coefficient.symbol().indexOf('_'));
+        row.append(format("  %-8s", axis));
+      }
+      row.append(
+          derivatives.origin(coefficient) == Origin.ABSENT
+              ? format("%10s", "absent")
+              : format("%10.4f", derivatives.value(coefficient)));
+      if (coefficient.symbol().endsWith("_dr")) {
+        line(row.toString());
+        row.setLength(0);
+      }
+    }
+  }
+
+  private void addTrim() {
+    line("");
+    line("Trim, wings level");
+    Trim trim = result.trim();
+    surface("aileron", trim.aileron(), "stick", trim.stick());
+    surface("rudder", trim.rudder(), "pedal", trim.pedal());
+    two("sideslip", format("%.2f deg", Math.toDegrees(trim.sideslip())), "");
+    for (String shortfall : trim.shortfalls()) {
+      line("  " + shortfall);
+    }
+  }
+
+  private void surface(String name, double angle, String control, OptionalDouble position) {
+    two(
+        name,
+        format("%.2f deg", Math.toDegrees(angle)),
+        position.isPresent()
+            ? format("%s %.1f %%", control, 100 * position.getAsDouble())
+            : "no travel given");
+  }
+
+  private void addModes() {
+    line("");
+    line("Modes of the free equations");
+    if (result.modes().isEmpty()) {
+      wrapped("  not available: ", result.modesRemark());
+      return;
+    }
+    LateralModes modes = result.modes().get();
+    modes.roll().ifPresent(mode -> aperiodic("roll", mode));
+    modes.spiral().ifPresent(mode -> aperiodic("spiral", mode));
+    oscillatory("coupled roll and spiral", modes.rollSpiral());
+    oscillatory("dutch roll", modes.dutchRoll());
+    modes.aperiodicYaw().forEach(mode -> aperiodic("slip and yaw, no swing", mode));
+  }
+
+  private void aperiodic(String name, Mode.Aperiodic mode) {
+    two(
+        name,
+        format("%.4g 1/s", mode.root()),
+        mode.root() == 0
+            ? "neutral"
+            : format(
+                "%s, time constant %.4g s",
+                format(
+                    mode.root() < 0 ? "halves in %.4g s" : "doubles in %.4g s",
+                    mode.timeToHalfOrDouble()),
+                mode.timeConstant()));
+  }
+
+  private void oscillatory(String name, Optional<Mode.Oscillatory> mode) {
+    mode.ifPresent(
+        m ->
+            two(
+                name,
+                format("%.4g rad/s", m.naturalFrequency()),
+                format("damping ratio %.3f, period %.4g s", m.dampingRatio(), m.period())));
+  }
+
+  private void addMeasures() {
+    line("");
+    line("Measures, right positive");
+    for (Measure measure : result.measures()) {
+      String title = measure.definition().title();
+      if (measure.value().isEmpty()) {
+        wrapped("  " + padded(title, LABEL) + "  - ", measure.remark());
+        continue;
+      }
+      double value = measure.value().getAsDouble();
+      String remark = measure.remark();
+      switch (measure.definition().unit()) {
+        case "rad" -> measured(title, Math.toDegrees(value), "deg", value, "rad", remark);
+        case "rad/s" -> measured(title, Math.toDegrees(value), "deg/s", value, "rad/s", remark);
+        case "rad/s2" -> measured(title, Math.toDegrees(value), "deg/s2", value, "rad/s2", remark);
+        case "1" -> measured(title, 100 * value, "%", value, "", remark);
+        default -> wrappedMeasure(title, number(value), measure.definition().unit(), "", remark);
+      }
+    }
+  }
+
+  private void measured(
+      String title, double shown, String unit, double si, String siUnit, String remark) {
+    wrappedMeasure(title, number(shown), unit, (number(si) + " " + siUnit).strip(), remark);
+  }
+
+  private void wrappedMeasure(String title, String value, String unit, String si, String remark) {
+    String start = "  " + padded(title, LABEL) + format("%" + VALUE + "s %-7s", value, unit);
+    if (remark.isEmpty()) {
+      line((start + si).stripTrailing());
+    } else {
+      wrapped(start + padded(si, 16), remark);
+    }
+  }
+
+  /** Four figures, which is what the data behind them are worth at best. */
+  private static String number(double value) {
+    double size = Math.abs(value);
+    if (size == 0) {
+      return "0";
+    }
+    if (size < 1e-4 || size >= 1e6) {
+      return format("%.3e", value);
+    }
+    int decimals = (int) Math.max(0, Math.min(6, 3 - Math.floor(Math.log10(size))));
+    return format("%." + decimals + "f", value);
+  }
+
+  private void two(String label, String value, String more) {
+    line(("  " + padded(label, LABEL) + padded(value, VALUE + 8) + more).stripTrailing());
+  }
+
+  private void row(String label, String value) {
+    line(padded(label, 20) + value);
+  }
+
+  /** Breaks a text into lines that stand under each other behind a label. */
+  private void wrapped(String label, String words) {
+    StringBuilder row = new StringBuilder(label);
+    int start = label.length();
+    for (String word : words.split(" ", -1)) {
+      if (row.length() > start && row.length() + 1 + word.length() > WIDTH) {
+        line(row.toString());
+        row.setLength(0);
+        row.append(" ".repeat(start));
+      } else if (row.length() > start) {
+        row.append(' ');
+      }
+      row.append(word);
+    }
+    line(row.toString());
+  }
+
+  private static String padded(String words, int width) {
+    return words.length() >= width ? words + " " : words + " ".repeat(width - words.length());
+  }
+
+  private void line(String words) {
+    text.append(words).append('\n');
+  }
+
+  private static String format(String pattern, Object... values) {
+    return String.format(Locale.ROOT, pattern, values);
+  }
+}
