@@ -159,8 +159,8 @@ public final class Flight {
     integrator.clearStepHandlers();
     integrator.setMaxEvaluations(MOST_EVALUATIONS);
     double look = Math.min(LOOK_EVERY, (end - start) / LOOKS_PER_STRETCH);
-    addDetectors(stick, look);
-    addDetectors(pedal, look);
+    addDetectors(stick, look, last);
+    addDetectors(pedal, look, last);
     captureFrom.ifPresent(bank -> addCaptures(bank, look));
     integrator.addStepHandler(interpolator -> takeSamples(interpolator, end));
 
@@ -199,12 +199,12 @@ public final class Flight {
     }
   }
 
-  private void addDetectors(SurfaceDrive drive, double look) {
+  private void addDetectors(SurfaceDrive drive, double look, double last) {
     if (drive.mayMeetStop()) {
       integrator.addEventDetector(
           new EventAt(
               look,
-              s -> drive.beyondStop(s.getTime()),
+              s -> drive.beyondStop(Math.min(s.getTime(), last)),
               (s, detector, increasing) -> {
                 events.add(new FlightEvent.Stop(s.getTime(), drive.control(), increasing));
                 return Action.RESET_DERIVATIVES;
@@ -214,9 +214,9 @@ public final class Flight {
       integrator.addEventDetector(
           new EventAt(
               look,
-              s -> drive.switching(s.getTime(), s.getPrimaryState()),
+              s -> drive.switching(Math.min(s.getTime(), last), s.getPrimaryState()),
               (s, detector, increasing) -> {
-                drive.switchMode(s.getTime(), s.getPrimaryState());
+                drive.switchMode(Math.min(s.getTime(), last), s.getPrimaryState());
                 events.add(
                     new FlightEvent.RateLimit(s.getTime(), drive.control(), drive.isSlewing()));
                 return Action.RESET_DERIVATIVES;

@@ -1,0 +1,78 @@
+package org.rolltrace.core.pilot;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import java.util.List;
+import org.junit.jupiter.api.Test;
+
+class PilotProgrammeTest {
+  private static PilotProgramme stick(InputShape... shapes) {
+    return PilotProgramme.of(
+        List.of(shapes).stream().map(shape -> new PilotInput(Control.STICK, shape)).toList());
+  }
+
+  @Test
+  void inputsOnOneControlAddUp() {
+    PilotProgramme programme = stick(new StepInput(1, 0.5, 0), new StepInput(2, 0.25, 0));
+    assertThat(programme.stick().positionAt(3)).isEqualTo(0.75);
+    assertThat(programme.stick().largestPosition()).isEqualTo(0.75);
+    assertThat(programme.pedal()).isSameAs(Movement.NONE);
+  }
+
+  @Test
+  void breakpointsOfBothControlsComeInOrderAndOnce() {
+    PilotProgramme programme =
+        PilotProgramme.of(
+            List.of(
+                new PilotInput(Control.PEDAL, new StepInput(2, 0.5, 0.1)),
+                new PilotInput(Control.STICK, new StepInput(1, 0.5, 1.0))));
+    assertThat(programme.breakpoints()).containsExactly(1, 2, 2.1);
+  }
+
+  @Test
+  void theStickLeadsEvenWhenThePedalsMoveFirst() {
+    PilotInput pedal = new PilotInput(Control.PEDAL, new StepInput(0, 0.5, 0.1));
+    PilotInput stick = new PilotInput(Control.STICK, new StepInput(1, -0.5, 0.1));
+    assertThat(PilotProgramme.of(List.of(pedal, stick)).leading()).contains(stick);
+    assertThat(PilotProgramme.of(List.of(pedal)).leading()).contains(pedal);
+    assertThat(PilotProgramme.of(List.of()).leading()).isEmpty();
+    assertThat(stick(new StepInput(0, 0, 0.1)).leading()).isEmpty();
+  }
+
+  @Test
+  void aStepIsHeldToTheEndAndNeverCentred() {
+    PilotProgramme programme = stick(new StepInput(1, 0.5, 0.2));
+    assertThat(programme.firstHold(10)).contains(new PilotProgramme.HeldStretch(1.2, 10));
+    assertThat(programme.firstCentring()).isEmpty();
+  }
+
+  @Test
+  void aHoldEndsWhereItsReturnBegins() {
+    PilotProgramme programme = stick(new HoldInput(1, -0.5, 3, 0.2));
+    assertThat(programme.firstHold(10)).contains(new PilotProgramme.HeldStretch(1.2, 4));
+    assertThat(programme.firstCentring()).hasValue(4);
+    assertThat(programme.firstHold(3)).contains(new PilotProgramme.HeldStretch(1.2, 3));
+  }
+
+  @Test
+  void jumpsAreHeldAndCentredToo() {
+    PilotProgramme programme = stick(new HoldInput(1, 1, 3, 0));
+    assertThat(programme.firstHold(10)).contains(new PilotProgramme.HeldStretch(1, 4));
+    assertThat(programme.firstCentring()).hasValue(4);
+  }
+
+  @Test
+  void twoStepsThatCancelAreAHold() {
+    PilotProgramme programme = stick(new StepInput(1, 0.5, 0.1), new StepInput(5, -0.5, 0.1));
+    assertThat(programme.firstHold(10)).contains(new PilotProgramme.HeldStretch(1.1, 5));
+    assertThat(programme.firstCentring()).hasValue(5);
+  }
+
+  @Test
+  void aDoubletHasNoHoldAndIsCentredAtItsEnd() {
+    PilotProgramme programme = stick(new DoubletInput(1, 1, 2, 0.1));
+    assertThat(programme.firstHold(20)).isEmpty();
+    assertThat(programme.firstCentring().orElseThrow()).isCloseTo(5, within(1e-12));
+  }
+}
