@@ -216,6 +216,10 @@ public final class Flight {
               look,
               s -> drive.switching(Math.min(s.getTime(), last), s.getPrimaryState()),
               (s, detector, increasing) -> {
+                // A surface that begins to slew starts at the zero of its own end.
+                if (increasing == drive.isSlewing()) {
+                  return Action.CONTINUE;
+                }
                 drive.switchMode(Math.min(s.getTime(), last), s.getPrimaryState());
                 events.add(
                     new FlightEvent.RateLimit(s.getTime(), drive.control(), drive.isSlewing()));
