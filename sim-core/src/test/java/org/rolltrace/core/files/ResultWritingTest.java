@@ -1,0 +1,174 @@
+package org.rolltrace.core.files;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatExceptionOfType;
+import static org.assertj.core.api.Assertions.within;
+import static org.rolltrace.core.testing.Scenarios.oneDegree;
+import static org.rolltrace.core.testing.Scenarios.seaLevel;
+import static org.rolltrace.core.testing.Scenarios.stick;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import java.io.IOException;
+import java.io.StringWriter;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Locale;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.MethodSource;
+import org.rolltrace.core.history.Channel;
+import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.pilot.HoldInput;
+import org.rolltrace.core.run.RunResult;
+import org.rolltrace.core.run.Safety;
+import org.rolltrace.core.run.ScenarioRun;
+import org.rolltrace.core.testing.Scenarios;
+import org.rolltrace.core.testing.Shipped;
+
+class ResultWritingTest {
+  @TempDir Path folder;
+
+  private static RunResult small() {
+    return ScenarioRun.execute(
+        Scenarios.of(
+            oneDegree(0.4, 8),
+            seaLevel(50),
+            SlipTreatment.HELD,
+            2,
+            stick(new HoldInput(0.5, 1, 1, 0))));
+  }
+
+  static List<Path> shipped() {
+    return Shipped.scenarioFiles();
+  }
+
+  private static JsonNode json(RunResult result) throws IOException {
+    StringWriter out = new StringWriter();
+    ResultJson.write(result, "test", out);
+    return new ObjectMapper().readTree(out.toString());
+  }
+
+  @ParameterizedTest
+  @MethodSource("shipped")
+  void everyShippedScenarioGivesACompleteResult(Path file) throws IOException {
+    RunResult result = ScenarioRun.execute(ScenarioFile.read(file));
+    JsonNode json = json(result);
+    assertThat(json.get("format").asText()).isEqualTo("rolltrace-result/1");
+    assertThat(json.get("notice").asText()).isEqualTo(Safety.NOTICE);
+    assertThat(json.at("/condition/density").isNumber()).isTrue();
+    assertThat(json.at("/condition/dynamicPressure").isNumber()).isTrue();
+    assertThat(json.at("/derivatives/Cl_p/origin").asText()).isEqualTo("given");
+    assertThat(json.get("requirements").isArray()).isTrue();
+    assertThat(json.get("cautions").isArray()).isTrue();
+    for (JsonNode measure : json.get("measures")) {
+      assertThat(measure.has("value")).isNotEqualTo(measure.has("reason"));
+      assertThat(measure.has("value")).isEqualTo(measure.has("unit"));
+    }
+    assertThat(json.toString()).doesNotContain("NaN").doesNotContain("Infinity");
+  }
+
+  @Test
+  void modesAreNamedAsTheFormatSays() throws IOException {
+    JsonNode modes =
+        json(ScenarioRun.execute(Shipped.scenario("light-single-roll-entry"))).get("modes");
+    assertThat(modes.at("/roll/root").asDouble()).isCloseTo(-8.43, within(0.01));
+    assertThat(modes.at("/roll/timeConstant").asDouble()).isCloseTo(0.1186, within(1e-4));
+    assertThat(modes.at("/spiral/timeToHalf").asDouble()).isCloseTo(84.6, within(0.1));
+    assertThat(modes.at("/spiral").has("timeToDouble")).isFalse();
+    assertThat(modes.at("/dutchRoll/naturalFrequency").asDouble()).isCloseTo(2.397, within(1e-3));
+    assertThat(modes.at("/dutchRoll/dampingRatio").asDouble()).isCloseTo(0.203, within(1e-3));
+    JsonNode diverging =
+        json(ScenarioRun.execute(Shipped.scenario("four-engine-jet-approach-roll-entry")));
+    assertThat(diverging.at("/modes/spiral/timeToDouble").asDouble()).isPositive();
+  }
+
+  @Test
+  void historyHasItsHeaderAndARowEveryHundredth() throws IOException {
+    RunResult result = small();
+    StringBuilder out = new StringBuilder();
+    HistoryCsv.write(result.history(), out);
+    List<String> lines = out.toString().lines().toList();
+    assertThat(lines.get(0))
+        .isEqualTo(
+            "time[s],bank[deg],rollRate[deg/s],yawRate[deg/s],sideslip[deg],stick[-],pedal[-],"
+                + "aileron[deg],rudder[deg],rollAcceleration[deg/s2]");
+    assertThat(lines).hasSize(202);
+    for (int k = 0; k <= 200; k++) {
+      String[] cells = lines.get(k + 1).split(",");
+      assertThat(cells).hasSize(10);
+      assertThat(Double.parseDouble(cells[0])).isEqualTo(k / 100.0);
+    }
+    // full precision: what is read back is what was computed
+    String[] cells = lines.get(101).split(",");
+    int index = result.history().lastAt(1.0);
+    assertThat(Double.parseDouble(cells[2]))
+        .isEqualTo(Math.toDegrees(result.history().value(Channel.ROLL_RATE, index)));
+    // at a jump the row holds what follows
+    assertThat(Double.parseDouble(lines.get(51).split(",")[5])).isEqualTo(1);
+  }
+
+  @Test
+  void numbersDoNotDependOnTheLocale() throws IOException {
+    Locale before = Locale.getDefault();
+    try {
+      StringBuilder plain = new StringBuilder();
+      HistoryCsv.write(small().history(), plain);
+      String json = json(small()).toString();
+      Locale.setDefault(Locale.GERMANY);
+      StringBuilder german = new StringBuilder();
+      HistoryCsv.write(small().history(), german);
+      assertThat(german.toString()).isEqualTo(plain.toString());
+      assertThat(json(small()).toString()).isEqualTo(json);
+    } finally {
+      Locale.setDefault(before);
+    }
+  }
+
+  @Test
+  void filesAreWrittenIntoAFolderThatIsMade() throws IOException {
+    Path into = folder.resolve("a").resolve("b");
+    assertThat(ResultFolder.write(into, small(), "test"))
+        .containsExactly(into.resolve("history.csv"), into.resolve("result.json"));
+    assertThat(namesIn(into)).containsExactly("history.csv", "result.json");
+    byte[] csv = Files.readAllBytes(into.resolve("history.csv"));
+    assertThat((char) csv[0]).isEqualTo('t'); // no byte-order mark
+  }
+
+  @Test
+  void olderResultsAreReplacedWhole() throws IOException {
+    Files.writeString(folder.resolve("history.csv"), "old");
+    ResultFolder.write(folder, small(), "test");
+    assertThat(Files.readString(folder.resolve("history.csv"))).startsWith("time[s]");
+    assertThat(namesIn(folder)).containsExactly("history.csv", "result.json");
+  }
+
+  @Test
+  void aFileInPlaceOfTheFolderIsAFailedWrite() throws IOException {
+    Path file = Files.writeString(folder.resolve("taken"), "mine");
+    assertThatExceptionOfType(UncheckedIOException.class)
+        .isThrownBy(() -> ResultFolder.write(file, small(), "test"))
+        .withMessageContaining("cannot write the result into " + file)
+        .withMessageContaining("choose a folder");
+    assertThat(Files.readString(file)).isEqualTo("mine");
+  }
+
+  /** A folder in the place of one of the files: nothing is left half done. */
+  @Test
+  void whenOneFileCannotTakeItsPlaceNoDraftIsLeft() throws IOException {
+    Files.createDirectories(folder.resolve("history.csv").resolve("full"));
+    assertThatExceptionOfType(UncheckedIOException.class)
+        .isThrownBy(() -> ResultFolder.write(folder, small(), "test"));
+    assertThat(namesIn(folder)).containsExactly("history.csv");
+  }
+
+  private static List<String> namesIn(Path folder) throws IOException {
+    try (Stream<Path> files = Files.list(folder)) {
+      return files.map(file -> file.getFileName().toString()).sorted().toList();
+    }
+  }
+}

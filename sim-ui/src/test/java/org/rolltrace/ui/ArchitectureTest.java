@@ -1,0 +1,42 @@
+package org.rolltrace.ui;
+
+import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noClasses;
+import static com.tngtech.archunit.library.dependencies.SlicesRuleDefinition.slices;
+
+import com.tngtech.archunit.core.importer.ImportOption;
+import com.tngtech.archunit.junit.AnalyzeClasses;
+import com.tngtech.archunit.junit.ArchTest;
+import com.tngtech.archunit.lang.ArchRule;
+
+/** What the front ends may know of each other and of the libraries beneath. */
+@AnalyzeClasses(packages = "org.rolltrace.ui", importOptions = ImportOption.DoNotIncludeTests.class)
+class ArchitectureTest {
+  @ArchTest
+  static final ArchRule NO_CYCLES =
+      slices().matching("org.rolltrace.ui.(*)..").should().beFreeOfCycles();
+
+  @ArchTest
+  static final ArchRule FILES_ARE_READ_IN_CORE =
+      noClasses().should().dependOnClassesThat().resideInAPackage("com.fasterxml.jackson..");
+
+  @ArchTest
+  static final ArchRule EQUATIONS_ARE_INTEGRATED_IN_CORE =
+      noClasses().should().dependOnClassesThat().resideInAPackage("org.hipparchus..");
+
+  @ArchTest
+  static final ArchRule COMMANDS_OPEN_NO_WINDOW =
+      noClasses()
+          .that()
+          .resideInAnyPackage("org.rolltrace.ui.command..", "org.rolltrace.ui.launch..")
+          .should()
+          .dependOnClassesThat()
+          .resideInAnyPackage("javafx..", "java.awt..", "javax.swing..");
+
+  @ArchTest
+  static final ArchRule ONLY_THE_LAUNCHER_ENDS_THE_PROGRAM =
+      noClasses()
+          .that()
+          .resideOutsideOfPackage("org.rolltrace.ui.launch")
+          .should()
+          .callMethod(System.class, "exit", int.class);
+}
