@@ -91,6 +91,6 @@ public record ControlRun(double angleAtPlus, double angleAtMinus, SurfaceDynamic
    */
   public double positionFor(double angle) {
     double position = angle / angleAtPlus;
-    return position >= 0 ? position : -angle / angleAtMinus;
+    return position > 0 ? position : 0.0 - angle / angleAtMinus;
   }
 }

@@ -29,7 +29,6 @@ import org.rolltrace.core.testing.Scenarios;
 /** Each caution appears when its limit is met, and not before. */
 class CautionsTest {
   private static final FlightCondition AT_60 = condition(60);
-  private double inertiaScale = 1;
   private Limits limits = Limits.NONE;
   private FlightCondition flownAt = AT_60;
   private SlipTreatment slip = SlipTreatment.FREE;
@@ -61,7 +60,7 @@ class CautionsTest {
 
   private List<String> cautions(PilotInput... inputs) {
     Aeroplane aeroplane =
-        Aeroplane.builder("test", 10, 15, Inertia.of(1500 * inertiaScale, 2500, 0))
+        Aeroplane.builder("test", 10, 15, Inertia.of(1500, 2500, 0))
             .mass(900)
             .ailerons(new Ailerons(0.35, 0.3, dynamics))
             .rudder(Rudder.of(0.4, 0.4))
@@ -156,8 +155,8 @@ class CautionsTest {
 
   @Test
   void rollCoupling() {
-    inertiaScale = 0.2;
     values.put(Coefficient.CN_BETA, 0.01);
+    values.put(Coefficient.CL_DA, 0.3);
     assertThat(cautions(1.0)).anyMatch(c -> c.contains("above the natural frequency in yaw"));
   }
 

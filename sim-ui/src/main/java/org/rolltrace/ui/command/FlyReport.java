@@ -1,7 +1,13 @@
 package org.rolltrace.ui.command;
 
 import java.io.PrintWriter;
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.rolltrace.core.atmosphere.FlightCondition;
@@ -101,19 +107,24 @@ final class FlyReport {
     for (PilotInput input : scenario.programme().inputs()) {
       row("  input", describe(input));
     }
-    row("  duration", format("%.4g s", scenario.duration()));
+    row("  duration", plain(scenario.duration()) + " s");
   }
 
   private static String describe(PilotInput input) {
     InputShape shape = input.shape();
     return format(
-        "%s %s, %.4g %% %s at %.4g s, hand takes %.4g s",
+        "%s %s, %s %% %s at %s s, hand takes %s s",
         input.control().word(),
         shape.name(),
-        100 * Math.abs(shape.size()),
+        plain(100 * Math.abs(shape.size())),
         shape.size() < 0 ? "left" : "right",
-        shape.start(),
-        shape.handTime());
+        plain(shape.start()),
+        plain(shape.handTime()));
+  }
+
+  /** As it would be written by hand: up to six figures, no zeros behind. */
+  private static String plain(double value) {
+    return new BigDecimal(value).round(new MathContext(6)).stripTrailingZeros().toPlainString();
   }
 
   private void addDerivatives(LateralDerivatives derivatives) {
@@ -199,36 +210,42 @@ final class FlyReport {
   private void addMeasures() {
     line("");
     line("Measures, right positive");
+    Map<String, List<String>> missing = new LinkedHashMap<>();
     for (Measure measure : result.measures()) {
       String title = measure.definition().title();
       if (measure.value().isEmpty()) {
-        wrapped("  " + padded(title, LABEL) + "  - ", measure.remark());
+        missing.computeIfAbsent(measure.remark(), reason -> new ArrayList<>()).add(title);
         continue;
       }
       double value = measure.value().getAsDouble();
-      String remark = measure.remark();
       switch (measure.definition().unit()) {
-        case "rad" -> measured(title, Math.toDegrees(value), "deg", value, "rad", remark);
-        case "rad/s" -> measured(title, Math.toDegrees(value), "deg/s", value, "rad/s", remark);
-        case "rad/s2" -> measured(title, Math.toDegrees(value), "deg/s2", value, "rad/s2", remark);
-        case "1" -> measured(title, 100 * value, "%", value, "", remark);
-        default -> wrappedMeasure(title, number(value), measure.definition().unit(), "", remark);
+        case "rad" -> measured(title, Math.toDegrees(value), "deg", value, "rad");
+        case "rad/s" -> measured(title, Math.toDegrees(value), "deg/s", value, "rad/s");
+        case "rad/s2" -> measured(title, Math.toDegrees(value), "deg/s2", value, "rad/s2");
+        case "1" -> measured(title, 100 * value, "%", value, "");
+        default -> line(measureRow(title, value, measure.definition().unit()).stripTrailing());
+      }
+      if (!measure.remark().isEmpty()) {
+        wrapped(" ".repeat(LABEL + 2), measure.remark());
       }
     }
-  }
-
-  private void measured(
-      String title, double shown, String unit, double si, String siUnit, String remark) {
-    wrappedMeasure(title, number(shown), unit, (number(si) + " " + siUnit).strip(), remark);
-  }
-
-  private void wrappedMeasure(String title, String value, String unit, String si, String remark) {
-    String start = "  " + padded(title, LABEL) + format("%" + VALUE + "s %-7s", value, unit);
-    if (remark.isEmpty()) {
-      line((start + si).stripTrailing());
-    } else {
-      wrapped(start + padded(si, 16), remark);
+    if (!missing.isEmpty()) {
+      line("");
+      line("Not to be had from this manoeuvre");
+      missing.forEach(
+          (reason, titles) -> {
+            wrapped("  ", String.join("; ", titles));
+            wrapped("    - ", reason);
+          });
     }
+  }
+
+  private void measured(String title, double shown, String unit, double si, String siUnit) {
+    line((measureRow(title, shown, unit) + number(si) + " " + siUnit).stripTrailing());
+  }
+
+  private static String measureRow(String title, double value, String unit) {
+    return "  " + padded(title, LABEL) + format("%" + VALUE + "s %-8s", number(value), unit);
   }
 
   /** Four figures, which is what the data behind them are worth at best. */
