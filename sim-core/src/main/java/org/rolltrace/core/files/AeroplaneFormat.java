@@ -1,0 +1,168 @@
+package org.rolltrace.core.files;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.rolltrace.core.aeroplane.Aeroplane;
+import org.rolltrace.core.aeroplane.Ailerons;
+import org.rolltrace.core.aeroplane.Inertia;
+import org.rolltrace.core.aeroplane.Limits;
+import org.rolltrace.core.aeroplane.Rudder;
+import org.rolltrace.core.aeroplane.SurfaceDynamics;
+import org.rolltrace.core.derivatives.LateralDerivatives;
+import org.rolltrace.core.quantity.Dimension;
+import org.rolltrace.core.scenario.AeroplaneData;
+
+/** An aeroplane with its derivatives, in a file of its own or inside a scenario. */
+final class AeroplaneFormat {
+  static final int LONGEST_NAME = 200;
+
+  private static final Range TRAVEL =
+      Range.aboveZeroTo(Math.PI / 2, "a travel above 0 and at most 90 deg");
+  private static final Range TRAVEL_OR_NONE = Range.fromTo(0, Math.PI / 2, "from 0 to 90 deg");
+
+  static final Keys IN_FILE = withTheRest(Keys.of("an aeroplane").required(FormatName.KEY));
+  static final Keys INLINE = withTheRest(Keys.of("an aeroplane").optional(FormatName.KEY));
+  static final Keys INERTIA = Keys.of("the inertia").required("roll").optional("yaw", "product");
+  static final Keys AILERONS =
+      Keys.of("the ailerons").required("up", "down").optional("rateLimit", "lag");
+  static final Keys RUDDER =
+      Keys.of("the rudder").required("left", "right").optional("rateLimit", "lag");
+  static final Keys LIMITS =
+      Keys.of("the limits")
+          .optional(
+              "manoeuvringSpeed", "neverExceedSpeed", "rollingLoadFactor", "rollRate", "bank");
+
+  private AeroplaneFormat() {}
+
+  private static Keys withTheRest(Keys format) {
+    return format
+        .required("name", "span", "wingArea", "inertia", "derivatives")
+        .optional("mass", "ailerons", "rudder", "axes", "limits", "note");
+  }
+
+  static Optional<AeroplaneData> read(JsonValue.ObjectValue object, Keys keys, Faults faults) {
+    if (!FormatName.mayBe(FormatName.AEROPLANE, object, faults)) {
+      return Optional.empty();
+    }
+    ObjectCursor in = ObjectCursor.of(object, keys, faults);
+    Optional<String> name = in.text("name", LONGEST_NAME);
+    double span = in.quantity("span", Dimension.LENGTH, Range.ABOVE_ZERO);
+    double wingArea = in.quantity("wingArea", Dimension.AREA, Range.ABOVE_ZERO);
+    OptionalDouble mass = in.optionalQuantity("mass", Dimension.MASS, Range.ABOVE_ZERO);
+    checkAxes(in);
+    in.freeText("note", JsonTree.LONGEST_TEXT);
+    Optional<Inertia> inertia = inertia(in);
+    Optional<Ailerons> ailerons = ailerons(in);
+    Optional<Rudder> rudder = rudder(in);
+    Limits limits = limits(in);
+    Optional<LateralDerivatives> derivatives = Optional.empty();
+    Optional<ObjectCursor> set = in.object("derivatives", DerivativesFormat.DERIVATIVES);
+    if (set.isPresent()) {
+      derivatives = DerivativesFormat.read(set.get());
+    }
+    if (!in.isSound()) {
+      return Optional.empty();
+    }
+    return Optional.of(
+        new AeroplaneData(
+            new Aeroplane(
+                name.orElseThrow(),
+                span,
+                wingArea,
+                mass,
+                inertia.orElseThrow(),
+                ailerons,
+                rudder,
+                limits),
+            derivatives.orElseThrow()));
+  }
+
+  private static void checkAxes(ObjectCursor in) {
+    Optional<JsonValue> axes = in.value("axes");
+    if (axes.isPresent()
+        && axes.get() instanceof JsonValue.Text text
+        && text.text().equals("body")) {
+      in.refuse(
+          "axes",
+          "body axes are not read yet; expected \"stability\". Turn inertias and derivatives to"
+              + " stability axes by the angle of attack");
+    } else {
+      in.word("axes", List.of("stability"));
+    }
+  }
+
+  private static Optional<Inertia> inertia(ObjectCursor aeroplane) {
+    Optional<ObjectCursor> object = aeroplane.object("inertia", INERTIA);
+    if (object.isEmpty()) {
+      return Optional.empty();
+    }
+    ObjectCursor in = object.get();
+    double roll = in.quantity("roll", Dimension.INERTIA, Range.ABOVE_ZERO);
+    OptionalDouble yaw = in.optionalQuantity("yaw", Dimension.INERTIA, Range.ABOVE_ZERO);
+    double product = in.quantity("product", Dimension.INERTIA, Range.ANY, 0);
+    boolean usable =
+        !Double.isNaN(roll) && !Double.isNaN(product) && in.has("yaw") == yaw.isPresent();
+    if (!usable) {
+      return Optional.empty();
+    }
+    try {
+      return Optional.of(new Inertia(roll, yaw, product));
+    } catch (IllegalArgumentException e) {
+      in.refuse("product", e); // each by itself is in range
+      return Optional.empty();
+    }
+  }
+
+  private static Optional<Ailerons> ailerons(ObjectCursor aeroplane) {
+    Optional<ObjectCursor> object = aeroplane.object("ailerons", AILERONS);
+    if (object.isEmpty()) {
+      return Optional.empty();
+    }
+    ObjectCursor in = object.get();
+    double up = in.quantity("up", Dimension.ANGLE, TRAVEL);
+    double down = in.quantity("down", Dimension.ANGLE, TRAVEL_OR_NONE);
+    Optional<SurfaceDynamics> dynamics = dynamics(in);
+    return in.isSound()
+        ? Optional.of(new Ailerons(up, down, dynamics.orElseThrow()))
+        : Optional.empty();
+  }
+
+  private static Optional<Rudder> rudder(ObjectCursor aeroplane) {
+    Optional<ObjectCursor> object = aeroplane.object("rudder", RUDDER);
+    if (object.isEmpty()) {
+      return Optional.empty();
+    }
+    ObjectCursor in = object.get();
+    double left = in.quantity("left", Dimension.ANGLE, TRAVEL);
+    double right = in.quantity("right", Dimension.ANGLE, TRAVEL);
+    Optional<SurfaceDynamics> dynamics = dynamics(in);
+    return in.isSound()
+        ? Optional.of(new Rudder(left, right, dynamics.orElseThrow()))
+        : Optional.empty();
+  }
+
+  private static Optional<SurfaceDynamics> dynamics(ObjectCursor in) {
+    double rate =
+        in.quantity(
+            "rateLimit", Dimension.ANGULAR_RATE, Range.ABOVE_ZERO, Double.POSITIVE_INFINITY);
+    double lag = in.quantity("lag", Dimension.TIME, Range.ZERO_OR_MORE, 0);
+    return Double.isNaN(rate) || Double.isNaN(lag)
+        ? Optional.empty()
+        : Optional.of(new SurfaceDynamics(rate, lag));
+  }
+
+  private static Limits limits(ObjectCursor aeroplane) {
+    Optional<ObjectCursor> object = aeroplane.object("limits", LIMITS);
+    if (object.isEmpty()) {
+      return Limits.NONE;
+    }
+    ObjectCursor in = object.get();
+    return new Limits(
+        in.optionalQuantity("manoeuvringSpeed", Dimension.SPEED, Range.ABOVE_ZERO),
+        in.optionalQuantity("neverExceedSpeed", Dimension.SPEED, Range.ABOVE_ZERO),
+        in.optionalNumber("rollingLoadFactor", Range.ABOVE_ZERO),
+        in.optionalQuantity("rollRate", Dimension.ANGULAR_RATE, Range.ABOVE_ZERO),
+        in.optionalQuantity("bank", Dimension.ANGLE, Range.ABOVE_ZERO));
+  }
+}

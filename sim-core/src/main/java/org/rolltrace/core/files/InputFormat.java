@@ -1,0 +1,101 @@
+package org.rolltrace.core.files;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.rolltrace.core.pilot.Control;
+import org.rolltrace.core.pilot.InputShape;
+import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.quantity.Dimension;
+
+/** One input of the pilot. A further shape is one more entry in {@link #SHAPES}. */
+final class InputFormat {
+  private static final String CONTROL = "control";
+  private static final String SHAPE = "shape";
+  private static final String START = "start";
+  private static final String SIZE = "size";
+  private static final String MOVEMENT = "movement";
+
+  private static final Range FRACTION =
+      Range.fromTo(-1, 1, "from -1 to 1, a fraction of the travel, right positive");
+
+  /** The keys that all shapes share. */
+  static final Keys COMMON =
+      Keys.of("an input").required(CONTROL, SHAPE, START, SIZE).optional(MOVEMENT);
+
+  static final List<ShapeFormat> SHAPES =
+      List.of(new StepFormat(), new HoldFormat(), new DoubletFormat());
+
+  private InputFormat() {}
+
+  static Optional<PilotInput> read(JsonValue.ObjectValue object, Faults faults) {
+    Optional<ShapeFormat> format = format(object);
+    ObjectCursor in =
+        format.isPresent()
+            ? ObjectCursor.of(object, format.get().keys(), keysOfShapes(), faults)
+            // Of an unknown shape the other keys cannot be judged: all are let pass.
+            : ObjectCursor.of(object, keysOfAnyShape(), faults);
+    if (format.isEmpty()) {
+      in.word(SHAPE, words());
+    }
+    Optional<Control> control = control(in);
+    ShapeFormat.Common common =
+        new ShapeFormat.Common(
+            in.quantity(START, Dimension.TIME, Range.ZERO_OR_MORE),
+            in.number(SIZE, FRACTION),
+            in.quantity(MOVEMENT, Dimension.TIME, Range.ZERO_OR_MORE, InputShape.DEFAULT_MOVEMENT));
+    if (format.isEmpty()) {
+      return Optional.empty();
+    }
+    Optional<InputShape> shape = format.get().read(in, common);
+    return shape.isPresent() && in.isSound()
+        ? Optional.of(new PilotInput(control.orElseThrow(), shape.get()))
+        : Optional.empty();
+  }
+
+  private static Optional<ShapeFormat> format(JsonValue.ObjectValue object) {
+    JsonValue.Member member = object.members().get(SHAPE);
+    if (member != null && member.value() instanceof JsonValue.Text text) {
+      for (ShapeFormat format : SHAPES) {
+        if (format.word().equals(text.text())) {
+          return Optional.of(format);
+        }
+      }
+    }
+    return Optional.empty();
+  }
+
+  private static List<String> words() {
+    List<String> words = new ArrayList<>();
+    for (ShapeFormat format : SHAPES) {
+      words.add(format.word());
+    }
+    return words;
+  }
+
+  private static List<Keys> keysOfShapes() {
+    List<Keys> all = new ArrayList<>();
+    for (ShapeFormat format : SHAPES) {
+      all.add(format.keys());
+    }
+    return all;
+  }
+
+  private static Keys keysOfAnyShape() {
+    Keys any = COMMON;
+    for (Keys keys : keysOfShapes()) {
+      for (String key : keys.all()) {
+        any = any.has(key) ? any : any.optional(key);
+      }
+    }
+    return any;
+  }
+
+  private static Optional<Control> control(ObjectCursor in) {
+    Optional<String> word = in.word(CONTROL, List.of(Control.STICK.word(), Control.PEDAL.word()));
+    if (word.isEmpty()) {
+      return Optional.empty();
+    }
+    return Optional.of(word.get().equals(Control.STICK.word()) ? Control.STICK : Control.PEDAL);
+  }
+}

@@ -1,0 +1,249 @@
+package org.rolltrace.core.files;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.InvalidPathException;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.rolltrace.core.atmosphere.FlightCondition;
+import org.rolltrace.core.measures.MeasureOptions;
+import org.rolltrace.core.motion.Disturbance;
+import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.pilot.PilotProgramme;
+import org.rolltrace.core.propeller.PropellerMoments;
+import org.rolltrace.core.quantity.Dimension;
+import org.rolltrace.core.quantity.Quantity;
+import org.rolltrace.core.scenario.AeroplaneData;
+import org.rolltrace.core.scenario.Scenario;
+import org.rolltrace.core.scenario.ScenarioFault;
+import org.rolltrace.core.scenario.Start;
+
+/** A scenario. */
+final class ScenarioFormat {
+  static final String PROPELLER_ROLL_MOMENT = "propellerRollMoment";
+  static final int LONGEST_TITLE = 200;
+  static final int MOST_INPUTS = 200;
+  static final int MOST_BANK_ANGLES = 100;
+
+  private static final String AEROPLANE = "aeroplane";
+  private static final String INPUTS = "inputs";
+  private static final String BANK_ANGLES = "bankAngles";
+
+  private static final Range DURATION =
+      Range.aboveZeroTo(Scenario.LONGEST, "a duration above 0 and at most 3600 s");
+  private static final Range BAND = Range.fromTo(0.001, 0.5, "a fraction from 0.001 to 0.5");
+  private static final double LARGEST_BANK_CHANGE = 3600;
+
+  static final Keys SCENARIO =
+      Keys.of("a scenario")
+          .required(FormatName.KEY, "title", AEROPLANE, "condition", "slip", "duration")
+          .optional("start", INPUTS, "measures", "note");
+
+  static final Keys START = Keys.of("the start").optional("bank", "rollRate", "sideslip", "trim");
+  static final Keys TRIM = Keys.of("the trim").optional("state", PROPELLER_ROLL_MOMENT);
+  static final Keys MEASURES = Keys.of("the measures").optional("settlingBand", BANK_ANGLES);
+
+  private ScenarioFormat() {}
+
+  static Optional<Scenario> read(JsonValue.ObjectValue object, Faults faults) {
+    if (!FormatName.mayBe(FormatName.SCENARIO, object, faults)) {
+      return Optional.empty();
+    }
+    ObjectCursor in = ObjectCursor.of(object, SCENARIO, faults);
+    Optional<String> title = in.text("title", LONGEST_TITLE);
+    in.freeText("note", JsonTree.LONGEST_TEXT);
+    Optional<AeroplaneData> data = aeroplane(in);
+    Optional<FlightCondition> condition = Optional.empty();
+    PropellerMoments propeller = PropellerMoments.NONE;
+    Optional<ObjectCursor> air = in.object("condition", ConditionFormat.CONDITION);
+    if (air.isPresent()) {
+      condition = ConditionFormat.read(air.get());
+      propeller = propeller(air.get(), PropellerMoments.NONE);
+    }
+    Optional<SlipTreatment> slip = slip(in);
+    Optional<Start> start = start(in, propeller);
+    Optional<PilotProgramme> programme = programme(in);
+    double duration = in.quantity("duration", Dimension.TIME, DURATION);
+    Optional<MeasureOptions> measures = measures(in);
+
+    if (data.isPresent() && slip.isPresent()) {
+      addWhatDoesNotFit(
+          in,
+          Scenario.faults(
+              data.get(),
+              slip.get(),
+              start.orElse(new Start(PropellerMoments.NONE, Disturbance.NONE)),
+              programme.orElse(PilotProgramme.of(List.of()))));
+    }
+    if (faults.count() > 0) {
+      return Optional.empty();
+    }
+    return Optional.of(
+        new Scenario(
+            title.orElseThrow(),
+            data.orElseThrow(),
+            condition.orElseThrow(),
+            propeller,
+            slip.orElseThrow(),
+            start.orElseThrow(),
+            programme.orElseThrow(),
+            duration,
+            measures.orElseThrow()));
+  }
+
+  private static Optional<AeroplaneData> aeroplane(ObjectCursor in) {
+    Optional<JsonValue> value = in.value(AEROPLANE);
+    if (value.isEmpty()) {
+      return Optional.empty();
+    }
+    if (value.get() instanceof JsonValue.ObjectValue object) {
+      return AeroplaneFormat.read(object, AeroplaneFormat.INLINE, in.faults());
+    }
+    if (value.get() instanceof JsonValue.Text text) {
+      return aeroplaneFile(in, text.text());
+    }
+    in.addWrongType(
+        value.get(), "the path of an aeroplane file in quotation marks, or the aeroplane itself");
+    return Optional.empty();
+  }
+
+  private static Optional<AeroplaneData> aeroplaneFile(ObjectCursor in, String name) {
+    if (name.isBlank()) {
+      in.refuse(AEROPLANE, "the path is blank; expected one from here to an aeroplane file");
+      return Optional.empty();
+    }
+    Path scenario = in.faults().file();
+    Path file;
+    byte[] bytes;
+    try {
+      file = scenario.resolveSibling(name);
+      if (isSameFile(file, scenario)) {
+        in.refuse(
+            AEROPLANE,
+            Shown.text(name) + " is this scenario itself; expected the path of an aeroplane file");
+        return Optional.empty();
+      }
+      bytes = TextFile.bytes(file);
+    } catch (InvalidPathException e) {
+      in.refuse(AEROPLANE, Shown.text(name) + " is no path; expected one to an aeroplane file");
+      return Optional.empty();
+    } catch (UnusableFileException e) {
+      in.refuse(
+          AEROPLANE,
+          "the aeroplane file "
+              + Shown.text(name)
+              + " "
+              + e.getMessage()
+              + ". The path counts from the directory of the scenario");
+      return Optional.empty();
+    }
+    return AeroplaneFile.read(bytes, in.faults().of(file));
+  }
+
+  private static boolean isSameFile(Path one, Path other) {
+    try {
+      return Files.isSameFile(one, other);
+    } catch (IOException e) {
+      return false; // what is wrong with it shows when it is read
+    }
+  }
+
+  private static PropellerMoments propeller(ObjectCursor in, PropellerMoments fallback) {
+    double roll = in.quantity(PROPELLER_ROLL_MOMENT, Dimension.MOMENT, Range.ANY, fallback.roll());
+    return Double.isNaN(roll) ? fallback : new PropellerMoments(roll);
+  }
+
+  private static Optional<SlipTreatment> slip(ObjectCursor in) {
+    List<String> words = new ArrayList<>();
+    for (SlipTreatment treatment : SlipTreatment.values()) {
+      words.add(treatment.word());
+    }
+    String word = in.word("slip", words).orElse("");
+    for (SlipTreatment treatment : SlipTreatment.values()) {
+      if (treatment.word().equals(word)) {
+        return Optional.of(treatment);
+      }
+    }
+    return Optional.empty();
+  }
+
+  private static Optional<Start> start(ObjectCursor scenario, PropellerMoments propeller) {
+    if (!scenario.has("start")) {
+      return Optional.of(new Start(propeller, Disturbance.NONE));
+    }
+    Optional<ObjectCursor> object = scenario.object("start", START);
+    if (object.isEmpty()) {
+      return Optional.empty();
+    }
+    ObjectCursor in = object.get();
+    double bank = in.quantity("bank", Dimension.ANGLE, Range.ANY, 0);
+    double rollRate = in.quantity("rollRate", Dimension.ANGULAR_RATE, Range.ANY, 0);
+    double sideslip = in.quantity("sideslip", Dimension.ANGLE, Range.ANY, 0);
+    PropellerMoments trimmedWith = propeller;
+    Optional<ObjectCursor> trim = in.object("trim", TRIM);
+    if (trim.isPresent()) {
+      trim.get().word("state", List.of("wings-level"));
+      trimmedWith = propeller(trim.get(), propeller);
+    }
+    return in.isSound()
+        ? Optional.of(new Start(trimmedWith, new Disturbance(bank, rollRate, sideslip)))
+        : Optional.empty();
+  }
+
+  private static Optional<PilotProgramme> programme(ObjectCursor in) {
+    List<JsonValue> elements = in.list(INPUTS, MOST_INPUTS);
+    List<PilotInput> inputs = new ArrayList<>();
+    for (JsonValue element : elements) {
+      if (element instanceof JsonValue.ObjectValue object) {
+        Optional<PilotInput> input = InputFormat.read(object, in.faults());
+        if (input.isPresent()) {
+          inputs.add(input.get());
+        }
+      } else {
+        in.addWrongType(element, "an input in braces { }");
+      }
+    }
+    return inputs.size() == elements.size()
+        ? Optional.of(PilotProgramme.of(inputs))
+        : Optional.empty();
+  }
+
+  private static Optional<MeasureOptions> measures(ObjectCursor scenario) {
+    Optional<ObjectCursor> object = scenario.object("measures", MEASURES);
+    if (object.isEmpty()) {
+      return Optional.of(MeasureOptions.DEFAULT);
+    }
+    ObjectCursor in = object.get();
+    double band = in.number("settlingBand", BAND, MeasureOptions.DEFAULT.settlingBand());
+    List<Double> changes = new ArrayList<>(MeasureOptions.DEFAULT.bankChanges());
+    Range range =
+        Range.aboveZeroTo(
+            Quantity.parse("3600 deg", Dimension.ANGLE), "a change above 0 and at most 3600 deg");
+    for (JsonValue element : in.list(BANK_ANGLES, MOST_BANK_ANGLES)) {
+      double change = in.quantity(element, Dimension.ANGLE, range);
+      if (!Double.isNaN(change)) {
+        changes.add(inDegrees(change));
+      }
+    }
+    return in.isSound() ? Optional.of(new MeasureOptions(band, changes)) : Optional.empty();
+  }
+
+  /** Whole again where it was written whole, so that 45 deg is the same as the default. */
+  private static double inDegrees(double angle) {
+    double fine = 1e9;
+    double degrees = Math.round(Quantity.toUnit(angle, "deg") * fine) / fine;
+    return degrees > 0 ? Math.min(degrees, LARGEST_BANK_CHANGE) : Quantity.toUnit(angle, "deg");
+  }
+
+  private static void addWhatDoesNotFit(ObjectCursor scenario, List<ScenarioFault> faults) {
+    for (ScenarioFault fault : faults) {
+      JsonValue.Place place = scenario.placeAt(fault.path());
+      scenario
+          .faults()
+          .add(new JsonValue.Place(fault.path(), place.line(), place.column()), fault.message());
+    }
+  }
+}

@@ -1,0 +1,26 @@
+package org.rolltrace.core.files;
+
+import java.util.Optional;
+import org.rolltrace.core.pilot.InputShape;
+
+/** How one shape of input is written. */
+interface ShapeFormat {
+
+  /** The word that stands for it. */
+  String word();
+
+  /** All its keys. */
+  Keys keys();
+
+  /**
+   * Makes the shape of its own keys and of what all shapes share.
+   *
+   * @param in the input; what is wrong is added to its faults
+   * @param common start, size and movement
+   * @return the shape, or empty when something is wrong
+   */
+  Optional<InputShape> read(ObjectCursor in, Common common);
+
+  /** What all shapes share, s and fraction of travel; NaN where it was refused. */
+  record Common(double start, double size, double movement) {}
+}

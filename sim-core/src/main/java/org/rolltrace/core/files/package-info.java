@@ -1,0 +1,110 @@
+/**
+ * Every file that is read or written.
+ *
+ * <p>{@link org.rolltrace.core.files.ScenarioFile} and {@link
+ * org.rolltrace.core.files.AeroplaneFile} turn files into values in SI units and radians, or refuse
+ * them with a {@link org.rolltrace.core.files.FileFaultsException} that lists everything that is
+ * wrong, each with file, path, line and the way out. {@link org.rolltrace.core.files.Schemas} hands
+ * out the same formats as JSON Schemas.
+ *
+ * <h2>Common to all</h2>
+ *
+ * <p>JSON by RFC 8259 in UTF-8, one object a file; a byte-order mark is skipped. Nothing more is
+ * forgiven: no comments, no trailing commas, nothing after the closing brace, no key twice. A file
+ * has at most 1 MiB, 32 levels of nesting and 20 000 values, a text at most 2000 characters. At
+ * most 200 faults are listed; the rest is counted.
+ *
+ * <p>A quantity is text: a decimal number, a space, a unit, by the grammar of {@link
+ * org.rolltrace.core.quantity}. A bare number stands only where the quantity has no unit. What is
+ * marked * must be there.
+ *
+ * <h2>Scenario, {@code rolltrace-scenario/1}</h2>
+ *
+ * <table>
+ *   <caption>Keys of a scenario</caption>
+ *   <tr><th>key</th><th>value</th></tr>
+ *   <tr><td>format*</td><td>{@code rolltrace-scenario/1}</td></tr>
+ *   <tr><td>title*</td><td>text, up to 200 characters</td></tr>
+ *   <tr><td>note</td><td>text, not looked at</td></tr>
+ *   <tr><td>aeroplane*</td><td>the path of an aeroplane file from the directory of the scenario, or
+ *       the aeroplane itself</td></tr>
+ *   <tr><td>condition*</td><td>a condition, below</td></tr>
+ *   <tr><td>slip*</td><td>{@code held}, {@code settled} or {@code free}</td></tr>
+ *   <tr><td>start</td><td>{@code bank} (right wing down positive), {@code rollRate} (rolling right),
+ *       {@code sideslip} (wind from the right): displacements from the trimmed state, 0 when absent;
+ *       {@code trim}: {@code state}, so far only {@code wings-level}, and {@code
+ *       propellerRollMoment}, the one trimmed with, that of the condition when absent</td></tr>
+ *   <tr><td>inputs</td><td>list of inputs, below; up to 200, none when absent; those on one control
+ *       add up</td></tr>
+ *   <tr><td>duration*</td><td>time above 0, up to 3600 s</td></tr>
+ *   <tr><td>measures</td><td>{@code settlingBand}: number, 0.001 to 0.5, 0.05 when absent; {@code
+ *       bankAngles}: list of up to 100 angles above 0, up to 3600 deg, beside 30, 45, 60 and 90
+ *       deg</td></tr>
+ * </table>
+ *
+ * <table>
+ *   <caption>Keys of a condition</caption>
+ *   <tr><th>key</th><th>value</th></tr>
+ *   <tr><td>pressureAltitude*</td><td>length, −5000 m to 20 000 m</td></tr>
+ *   <tr><td>temperatureOffset</td><td>temperature difference from the standard day; 0 K when
+ *       absent</td></tr>
+ *   <tr><td>density</td><td>density, instead of temperatureOffset</td></tr>
+ *   <tr><td>trueAirspeed, equivalentAirspeed, calibratedAirspeed</td><td>speed above 0 and below
+ *       Mach 1; exactly one of the three*</td></tr>
+ *   <tr><td>loadFactor</td><td>number; the cosine of the flight-path angle when absent</td></tr>
+ *   <tr><td>flightPathAngle</td><td>angle inside ±90 deg, positive climbing; 0 when absent</td></tr>
+ *   <tr><td>propellerRollMoment</td><td>moment, right wing down positive; 0 when absent. Not in
+ *       {@code validAt} of derivatives</td></tr>
+ * </table>
+ *
+ * <table>
+ *   <caption>Keys of an input</caption>
+ *   <tr><th>key</th><th>value</th></tr>
+ *   <tr><td>control*</td><td>{@code stick} or {@code pedal}</td></tr>
+ *   <tr><td>shape*</td><td>{@code step} (stays), {@code hold} (and then back), {@code doublet} (to
+ *       one side, the other, and back)</td></tr>
+ *   <tr><td>start*</td><td>time of the first movement, 0 or more</td></tr>
+ *   <tr><td>size*</td><td>number, −1 to 1: fraction of the travel, right positive</td></tr>
+ *   <tr><td>movement</td><td>time that the hand takes for a move, 0 or more; 0.1 s when absent, 0 s
+ *       for a jump</td></tr>
+ *   <tr><td>duration*, of hold only</td><td>time from the start to the beginning of the return, not
+ *       below the movement</td></tr>
+ *   <tr><td>width*, of doublet only</td><td>time from one move to the next, not below the
+ *       movement</td></tr>
+ * </table>
+ *
+ * <h2>Aeroplane, {@code rolltrace-aeroplane/1}</h2>
+ *
+ * <table>
+ *   <caption>Keys of an aeroplane</caption>
+ *   <tr><th>key</th><th>value</th></tr>
+ *   <tr><td>format*</td><td>{@code rolltrace-aeroplane/1}; may be absent inside a scenario</td></tr>
+ *   <tr><td>name*</td><td>text, up to 200 characters</td></tr>
+ *   <tr><td>note</td><td>text, not looked at</td></tr>
+ *   <tr><td>span*, wingArea*, mass</td><td>length, area, mass; above 0. Settled and free slip need
+ *       the mass</td></tr>
+ *   <tr><td>inertia*</td><td>{@code roll}* Ixx and {@code yaw} Izz, above 0, {@code product} Ixz with
+ *       Ixz² &lt; Ixx Izz, 0 when absent. Settled and free slip need yaw</td></tr>
+ *   <tr><td>ailerons</td><td>{@code up}* above 0 and {@code down}* from 0, up to 90 deg: travel of
+ *       each; {@code rateLimit}: angular rate above 0; {@code lag}: time, 0 or more</td></tr>
+ *   <tr><td>rudder</td><td>{@code left}*, {@code right}* above 0, up to 90 deg; {@code rateLimit},
+ *       {@code lag}</td></tr>
+ *   <tr><td>axes</td><td>{@code stability}</td></tr>
+ *   <tr><td>limits</td><td>{@code manoeuvringSpeed}, {@code neverExceedSpeed} (calibrated
+ *       airspeeds), {@code rollingLoadFactor} (number), {@code rollRate}, {@code bank}; above
+ *       0</td></tr>
+ *   <tr><td>derivatives*</td><td>{@code source}*: text; {@code values}*: numbers by name,
+ *       C{Y,l,n}_{beta,p,r,da,dr}, 0 when absent; {@code per}: {@code radian} (default) or {@code
+ *       degree}, for beta, da and dr; {@code aileronSign}: {@code right-roll-positive} (default) or
+ *       {@code left-roll-positive}; {@code aileronAngle}: {@code mean} (default), {@code total} or
+ *       {@code one-side}; {@code validAt}: a condition</td></tr>
+ * </table>
+ *
+ * <h2>How reading goes</h2>
+ *
+ * <p>Bytes become text, text a tree of values that know their place, and a cursor walks each object
+ * by its table of keys. A fault is noted and reading goes on; values are made only of what is
+ * sound. What domain values refuse is noted at the key that brought it in. A key of an object is
+ * one word in its table, a shape of input one class and one entry in a list.
+ */
+package org.rolltrace.core.files;

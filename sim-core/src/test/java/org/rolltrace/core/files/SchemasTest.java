@@ -1,0 +1,341 @@
+package org.rolltrace.core.files;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatIllegalArgumentException;
+
+import com.fasterxml.jackson.core.JsonPointer;
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import com.networknt.schema.Error;
+import com.networknt.schema.InputFormat;
+import com.networknt.schema.Schema;
+import com.networknt.schema.SchemaLocation;
+import com.networknt.schema.SchemaRegistry;
+import com.networknt.schema.SpecificationVersion;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.IdentityHashMap;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.Arguments;
+import org.junit.jupiter.params.provider.MethodSource;
+import org.rolltrace.core.quantity.Dimension;
+import org.rolltrace.core.quantity.Quantity;
+import org.rolltrace.core.quantity.Unit;
+
+/** Schemas and readers agree; judged by a JSON Schema library that is no part of the program. */
+class SchemasTest {
+  private static final ObjectMapper JSON = new ObjectMapper();
+  private static final SchemaRegistry REGISTRY =
+      SchemaRegistry.withDefaultDialect(SpecificationVersion.DRAFT_2020_12);
+  private static final Schema SCENARIO = REGISTRY.getSchema(Schemas.text("scenario"));
+  private static final Schema AEROPLANE = REGISTRY.getSchema(Schemas.text("aeroplane"));
+
+  @TempDir Path directory;
+
+  /** Where the schemas describe the objects that the reader knows. */
+  private static Map<String, Keys> scenarioObjects() {
+    Map<String, Keys> objects = new LinkedHashMap<>();
+    objects.put("", ScenarioFormat.SCENARIO);
+    objects.put("/properties/start", ScenarioFormat.START);
+    objects.put("/properties/start/properties/trim", ScenarioFormat.TRIM);
+    objects.put("/properties/measures", ScenarioFormat.MEASURES);
+    objects.put("/$defs/condition", ConditionFormat.CONDITION);
+    for (ShapeFormat shape : org.rolltrace.core.files.InputFormat.SHAPES) {
+      objects.put("/$defs/" + shape.word(), shape.keys());
+    }
+    objects.put("/$defs/aeroplane", AeroplaneFormat.INLINE);
+    objects.putAll(aeroplaneParts());
+    return objects;
+  }
+
+  private static Map<String, Keys> aeroplaneParts() {
+    Map<String, Keys> objects = new LinkedHashMap<>();
+    objects.put("/$defs/aeroplane/properties/inertia", AeroplaneFormat.INERTIA);
+    objects.put("/$defs/aeroplane/properties/ailerons", AeroplaneFormat.AILERONS);
+    objects.put("/$defs/aeroplane/properties/rudder", AeroplaneFormat.RUDDER);
+    objects.put("/$defs/aeroplane/properties/limits", AeroplaneFormat.LIMITS);
+    objects.put("/$defs/derivatives", DerivativesFormat.DERIVATIVES);
+    objects.put("/$defs/derivatives/properties/values", DerivativesFormat.COEFFICIENTS);
+    objects.put("/$defs/validAt", ConditionFormat.VALID_AT);
+    return objects;
+  }
+
+  private static JsonNode tree(String name) {
+    try {
+      return JSON.readTree(Schemas.text(name));
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
+    }
+  }
+
+  @Test
+  void everyObjectOfTheScenarioSchemaHasTheKeysOfTheReader() {
+    JsonNode schema = tree("scenario");
+    Map<String, Keys> objects = scenarioObjects();
+    objects.forEach((pointer, keys) -> assertSameKeys(schema, pointer, keys));
+    assertThat(objectsIn(schema)).hasSize(objects.size());
+  }
+
+  @Test
+  void everyObjectOfTheAeroplaneSchemaHasTheKeysOfTheReader() {
+    JsonNode schema = tree("aeroplane");
+    Map<String, Keys> objects = aeroplaneParts();
+    objects.forEach((pointer, keys) -> assertSameKeys(schema, pointer, keys));
+    assertSameKeys(schema, "/$defs/aeroplane", AeroplaneFormat.INLINE);
+    // In a file of its own the aeroplane also has to say what it is.
+    assertThat(schema.at("/$ref").asText()).isEqualTo("#/$defs/aeroplane");
+    List<String> required = texts(schema.at("/required"));
+    required.addAll(texts(schema.at("/$defs/aeroplane/required")));
+    assertThat(required).containsExactlyInAnyOrderElementsOf(AeroplaneFormat.IN_FILE.required());
+    assertThat(objectsIn(schema)).hasSize(objects.size() + 1);
+  }
+
+  private static void assertSameKeys(JsonNode schema, String pointer, Keys keys) {
+    JsonNode object = schema.at(JsonPointer.compile(pointer));
+    List<String> properties = new ArrayList<>();
+    object.path("properties").fieldNames().forEachRemaining(properties::add);
+    assertThat(properties).as(pointer).containsExactlyInAnyOrderElementsOf(keys.all());
+    assertThat(texts(object.path("required")))
+        .as(pointer)
+        .containsExactlyInAnyOrderElementsOf(keys.required());
+    assertThat(object.path("additionalProperties").isBoolean()).as(pointer).isTrue();
+    assertThat(object.path("additionalProperties").asBoolean()).as(pointer).isFalse();
+  }
+
+  private static List<String> texts(JsonNode array) {
+    List<String> texts = new ArrayList<>();
+    array.forEach(element -> texts.add(element.asText()));
+    return texts;
+  }
+
+  /** The descriptions of objects, which have properties. */
+  private static Set<JsonNode> objectsIn(JsonNode schema) {
+    Set<JsonNode> objects = Collections.newSetFromMap(new IdentityHashMap<>());
+    if (schema.path("properties").isObject() && schema.path("type").asText().equals("object")) {
+      objects.add(schema);
+    }
+    schema.forEach(child -> objects.addAll(objectsIn(child)));
+    return objects;
+  }
+
+  @Test
+  void bothSchemasDescribeAnAeroplaneAlike() {
+    JsonNode scenario = tree("scenario").path("$defs");
+    JsonNode aeroplane = tree("aeroplane").path("$defs");
+    aeroplane
+        .fieldNames()
+        .forEachRemaining(
+            name -> assertThat(scenario.path(name)).as(name).isEqualTo(aeroplane.path(name)));
+    assertThat(aeroplane.size()).isGreaterThan(10);
+  }
+
+  @Test
+  void everyKeyIsDescribed() {
+    for (String name : Schemas.names()) {
+      for (JsonNode object : objectsIn(tree(name))) {
+        object
+            .path("properties")
+            .properties()
+            .forEach(
+                property ->
+                    assertThat(
+                            property.getValue().has("description")
+                                || property.getValue().has("$ref"))
+                        .as(property.getKey())
+                        .isTrue());
+      }
+    }
+  }
+
+  @Test
+  void schemasFollowTheirOwnSchema() throws IOException {
+    Schema metaSchema =
+        REGISTRY.getSchema(SchemaLocation.of("https://json-schema.org/draft/2020-12/schema"));
+    for (String name : Schemas.names()) {
+      assertThat(metaSchema.validate(Schemas.text(name), InputFormat.JSON)).isEmpty();
+    }
+    assertThat(metaSchema.validate("{ \"type\": \"thing\" }", InputFormat.JSON)).isNotEmpty();
+  }
+
+  @Test
+  void samplesAreAccepted() {
+    assertAccepted(SCENARIO, Samples.SCENARIO);
+    assertAccepted(SCENARIO, Samples.SCENARIO_WITH_EVERY_KEY);
+    assertAccepted(AEROPLANE, Samples.AEROPLANE);
+    assertAccepted(AEROPLANE, Samples.AEROPLANE_WITH_EVERY_KEY);
+  }
+
+  private static void assertAccepted(Schema schema, String text) {
+    List<Error> errors = schema.validate(text, InputFormat.JSON);
+    assertThat(errors).isEmpty();
+  }
+
+  @Test
+  void theSamplesHaveEveryKeyBetweenThem() throws IOException {
+    JsonNode scenario = JSON.readTree(Samples.SCENARIO_WITH_EVERY_KEY);
+    JsonNode aeroplane = JSON.readTree(Samples.AEROPLANE_WITH_EVERY_KEY);
+    assertThat(keysOf(scenario)).containsExactlyInAnyOrderElementsOf(ScenarioFormat.SCENARIO.all());
+    assertThat(keysOf(scenario.path("start")))
+        .containsExactlyInAnyOrderElementsOf(ScenarioFormat.START.all());
+    assertThat(keysOf(scenario.path("measures")))
+        .containsExactlyInAnyOrderElementsOf(ScenarioFormat.MEASURES.all());
+    assertThat(scenario.path("inputs")).hasSize(org.rolltrace.core.files.InputFormat.SHAPES.size());
+    assertThat(keysOf(aeroplane))
+        .containsExactlyInAnyOrderElementsOf(AeroplaneFormat.IN_FILE.all());
+    assertThat(keysOf(aeroplane.path("derivatives")))
+        .containsExactlyInAnyOrderElementsOf(DerivativesFormat.DERIVATIVES.all());
+    assertThat(keysOf(aeroplane.at("/derivatives/values")))
+        .containsExactlyInAnyOrderElementsOf(DerivativesFormat.COEFFICIENTS.all());
+  }
+
+  private static List<String> keysOf(JsonNode object) {
+    List<String> keys = new ArrayList<>();
+    object.fieldNames().forEachRemaining(keys::add);
+    return keys;
+  }
+
+  static Stream<Arguments> structuralFaults() {
+    return Stream.of(
+        Arguments.of("\"title\": \"Every key\",", ""),
+        Arguments.of("\"Every key\"", "\" \""),
+        Arguments.of("\"Every key\"", "\"" + "x".repeat(201) + "\""),
+        Arguments.of("\"Every key\"", "7"),
+        Arguments.of("\"title\": \"Every key\"", "\"titel\": \"Every key\""),
+        Arguments.of("rolltrace-scenario/1", "rolltrace-scenario/2"),
+        Arguments.of("rolltrace-aeroplane/1", "rolltrace-aeroplane/2"),
+        Arguments.of("\"slip\": \"free\"", "\"slip\": \"none\""),
+        Arguments.of("\"slip\": \"free\"", "\"slip\": null"),
+        Arguments.of("\"0.5 min\"", "30"),
+        Arguments.of("\"0.5 min\"", "\"30\""),
+        Arguments.of("\"0.5 min\"", "\"30s\""),
+        Arguments.of("\"0.5 min\"", "\"30,5 s\""),
+        Arguments.of("\"0.5 min\"", "\" 30 s\""),
+        Arguments.of("\"0.5 min\"", "\"thirty s\""),
+        Arguments.of("\"span\": \"10 m\"", "\"span\": 10"),
+        Arguments.of("\"span\": \"10 m\",", ""),
+        Arguments.of("\"span\": \"10 m\"", "\"span\": \"10 m\", \"chord\": \"1 m\""),
+        Arguments.of("\"roll\": \"1000 kg m2\", ", ""),
+        Arguments.of("\"up\": \"20 deg\", ", ""),
+        Arguments.of("\"left\": \"25 deg\", ", ""),
+        Arguments.of("\"source\": \"made up\", ", ""),
+        Arguments.of("\"Cl_p\": -0.5", "\"Cl_p\": \"-0.5\""),
+        Arguments.of("\"Cl_p\": -0.5", "\"CL_p\": -0.5"),
+        Arguments.of("\"source\": \"made up\"", "\"source\": \"made up\", \"per\": \"grad\""),
+        Arguments.of("\"source\": \"made up\"", "\"source\": \"x\", \"aileronSign\": \"left\""),
+        Arguments.of("\"name\": \"Inline\"", "\"name\": \"Inline\", \"axes\": \"body\""),
+        Arguments.of("\"pressureAltitude\": \"1000 m\",", ""),
+        Arguments.of("\"trueAirspeed\": \"216 km/h\",", ""),
+        Arguments.of("\"216 km/h\"", "\"216 km/h\", \"equivalentAirspeed\": \"50 m/s\""),
+        Arguments.of("\"9 degF\"", "\"9 degF\", \"density\": \"1.1 kg/m3\""),
+        Arguments.of("\"loadFactor\": 1.5", "\"loadFactor\": \"1.5\""),
+        Arguments.of("\"wings-level\"", "\"steady-turn\""),
+        Arguments.of("\"stick\", \"shape\": \"step\"", "\"yoke\", \"shape\": \"step\""),
+        Arguments.of("\"shape\": \"step\"", "\"shape\": \"ramp\""),
+        Arguments.of("\"shape\": \"step\"", "\"shape\": \"step\", \"width\": \"1 s\""),
+        Arguments.of("\"shape\": \"step\"", "\"shape\": \"step\", \"duration\": \"1 s\""),
+        Arguments.of(", \"duration\": \"2 s\"", ""),
+        Arguments.of(", \"width\": \"0.5 s\"", ""),
+        Arguments.of("\"size\": -1 ", "\"size\": -1.01 "),
+        Arguments.of("\"size\": -1 ", "\"size\": \"-1\" "),
+        Arguments.of("0.02", "0.51"),
+        Arguments.of("0.02", "0.0009"),
+        Arguments.of("\"50 deg\"", "50"),
+        Arguments.of("[\"50 deg\", \"45 deg\", \"360 deg\"]", "\"50 deg\""),
+        Arguments.of("\"note\": \"a note", "\"remark\": \"a note"),
+        Arguments.of("\"a note\\non two lines\"", "[]"));
+  }
+
+  @ParameterizedTest
+  @MethodSource("structuralFaults")
+  void whatIsStructurallyWrongIsRefusedBySchemaAndReader(String part, String replacement) {
+    String text = Samples.with(Samples.SCENARIO_WITH_EVERY_KEY, part, replacement);
+    assertThat(SCENARIO.validate(text, InputFormat.JSON)).isNotEmpty();
+    Path file = Samples.writeScenario(directory, text);
+    assertThat(Samples.refusalOfScenario(file).faults()).isNotEmpty();
+  }
+
+  @Test
+  void anAeroplaneFileWithoutFormatIsRefusedBySchemaAndReader() {
+    String text = Samples.with(Samples.AEROPLANE, "\"format\": \"rolltrace-aeroplane/1\",", "");
+    assertThat(AEROPLANE.validate(text, InputFormat.JSON)).isNotEmpty();
+    Path file = Samples.write(directory, "a.json", text);
+    assertThat(Samples.only(Samples.refusalOfAeroplane(file)).jsonPath()).isEqualTo("$.format");
+  }
+
+  @Test
+  void theSchemaRefusesNoQuantityThatTheReaderAccepts() {
+    List<String> numbers = List.of("1", "+1.5", "1.", ".5", "1e-3", "2.5E+2", "1  ");
+    List<String> units = new ArrayList<>(Unit.symbolsOf(Dimension.TIME));
+    units.addAll(List.of("m s/m", "1/Hz", "s2*s-1", "ft/kt"));
+    for (String number : numbers) {
+      for (String unit : units) {
+        String quantity = "\"" + number + " " + unit + "\"";
+        String text =
+            Samples.with(Samples.SCENARIO_WITH_EVERY_KEY, "\"0.5 s\"", quantity)
+                .replace("\"movement\": \"200 ms\", ", "\"movement\": \"0 s\", ");
+        assertAccepted(SCENARIO, text);
+        assertThat(ScenarioFile.read(Samples.writeScenario(directory, text)))
+            .as(quantity)
+            .isNotNull();
+      }
+    }
+  }
+
+  @Test
+  void examplesInTheSchemasAreQuantitiesOfTheirDimension() {
+    Map<String, Dimension> dimensions =
+        Map.ofEntries(
+            Map.entry("length", Dimension.LENGTH),
+            Map.entry("area", Dimension.AREA),
+            Map.entry("mass", Dimension.MASS),
+            Map.entry("time", Dimension.TIME),
+            Map.entry("temperatureDifference", Dimension.TEMPERATURE_DIFFERENCE),
+            Map.entry("angle", Dimension.ANGLE),
+            Map.entry("speed", Dimension.SPEED),
+            Map.entry("angularRate", Dimension.ANGULAR_RATE),
+            Map.entry("inertia", Dimension.INERTIA),
+            Map.entry("moment", Dimension.MOMENT),
+            Map.entry("density", Dimension.DENSITY));
+    JsonNode definitions = tree("scenario").path("$defs");
+    dimensions.forEach(
+        (name, dimension) -> {
+          JsonNode definition = definitions.path(name);
+          assertThat(definition.path("examples")).as(name).isNotEmpty();
+          definition
+              .path("examples")
+              .forEach(
+                  example -> assertThat(Quantity.parse(example.asText(), dimension)).isFinite());
+          // The description lists the units that messages offer.
+          assertThat(definition.path("description").asText())
+              .contains(String.join(", ", Unit.symbolsOf(dimension)));
+        });
+  }
+
+  @Test
+  void textsAreThoseBesideTheScenarios() throws IOException {
+    for (String name : Schemas.names()) {
+      Path file = Path.of("..", "scenarios", name + ".schema.json");
+      assertThat(Schemas.text(name)).isEqualTo(Files.readString(file));
+    }
+  }
+
+  @Test
+  void unknownSchemasAreRefused() {
+    assertThatIllegalArgumentException()
+        .isThrownBy(() -> Schemas.text("senario"))
+        .withMessage(
+            "no schema is called \"senario\"; expected one of scenario, aeroplane; did you mean"
+                + " \"scenario\"?");
+  }
+}

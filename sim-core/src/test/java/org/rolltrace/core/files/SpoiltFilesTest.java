@@ -1,0 +1,881 @@
+package org.rolltrace.core.files;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.nio.file.Path;
+import java.util.List;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.MethodSource;
+
+/** Each sample has one thing wrong, and nothing else is reported. */
+class SpoiltFilesTest {
+  @TempDir Path directory;
+
+  record Spoilt(String text, String path, int line, String message) {
+    @Override
+    public String toString() {
+      return path + ": " + message;
+    }
+  }
+
+  private static Spoilt spoilt(
+      String sample, String part, String replacement, String path, int line, String message) {
+    return new Spoilt(Samples.with(sample, part, replacement), path, line, message);
+  }
+
+  static Stream<Spoilt> scenarios() {
+    return Stream.of(
+        // missing keys
+        spoilt(
+            Samples.SCENARIO,
+            "\"title\": \"Roll entry at cruise\",",
+            "",
+            "$.title",
+            1,
+            "the key \"title\" is missing; a scenario must have it"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"slip\": \"free\",",
+            "",
+            "$.slip",
+            1,
+            "the key \"slip\" is missing; a scenario must have it"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"pressureAltitude\": \"3000 ft\", ",
+            "",
+            "$.condition.pressureAltitude",
+            5,
+            "the key \"pressureAltitude\" is missing; a condition must have it"),
+        spoilt(
+            Samples.SCENARIO,
+            ", \"calibratedAirspeed\": \"120 kt\"",
+            "",
+            "$.condition",
+            5,
+            "no speed is given; expected exactly one of trueAirspeed, equivalentAirspeed, calibratedAirspeed"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"step\"",
+            "\"doublet\"",
+            "$.inputs[0].width",
+            8,
+            "the key \"width\" is missing; shape \"doublet\" must have it"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"shape\": \"step\", ",
+            "",
+            "$.inputs[0].shape",
+            8,
+            "the key \"shape\" is missing; an input must have it"),
+        // unknown and duplicate keys
+        spoilt(
+            Samples.SCENARIO,
+            "\"duration\"",
+            "\"note\": \"\", \"durations\": 3, \"duration\"",
+            "$.durations",
+            9,
+            "unknown key \"durations\"; did you mean \"duration\"? The keys of a scenario are format, title, aeroplane, condition, slip, duration, start, inputs, measures, note"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"duration\"",
+            "\"odd key\": 3, \"duration\"",
+            "$[\"odd key\"]",
+            9,
+            "unknown key \"odd key\". The keys of a scenario are format, title, aeroplane, condition, slip, duration, start, inputs, measures, note"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"size\": 1.0",
+            "\"size\": 1.0, \"width\": \"1 s\"",
+            "$.inputs[0].width",
+            8,
+            "unknown key \"width\"; shape \"step\" has none, but shape \"doublet\" has. The keys of shape \"step\" are control, shape, start, size, movement"),
+        spoilt(
+            Samples.SCENARIO_WITH_EVERY_KEY,
+            "\"sideslip\": \"0.05 rad\"",
+            "\"sideslip\": \"0.05 rad\", \"yawRate\": \"1 deg/s\"",
+            "$.start.yawRate",
+            28,
+            "unknown key \"yawRate\". The keys of the start are bank, rollRate, sideslip, trim"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"duration\"",
+            "\"title\": \"again\", \"duration\"",
+            "$.title",
+            9,
+            "the key \"title\" stands here again; it was on line 3. Keep one of the two"),
+        // wrong types
+        spoilt(
+            Samples.SCENARIO,
+            "\"Roll entry at cruise\"",
+            "7",
+            "$.title",
+            3,
+            "found the number 7; expected text in double quotation marks"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"free\"",
+            "null",
+            "$.slip",
+            6,
+            "found null; expected one of the words \"held\", \"settled\", \"free\". Where there is nothing to say, leave the key out"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"10 s\"",
+            "true",
+            "$.duration",
+            9,
+            "found true; expected a quantity with its unit in quotation marks, such as \"1 s\""),
+        spoilt(
+            Samples.SCENARIO,
+            "1.0",
+            "\"1.0\"",
+            "$.inputs[0].size",
+            8,
+            "found the text \"1.0\"; expected a plain number such as 0.5, without unit and quotation marks"),
+        spoilt(
+            Samples.SCENARIO,
+            "{ \"bank\": \"0 deg\" }",
+            "[]",
+            "$.start",
+            7,
+            "found a list; expected an object in braces { }"),
+        spoilt(
+            Samples.SCENARIO,
+            "[ { \"control\"",
+            "[ 7, { \"control\"",
+            "$.inputs[0]",
+            8,
+            "found the number 7; expected an input in braces { }"),
+        spoilt(
+            Samples.SCENARIO_WITH_EVERY_KEY,
+            "[\"50 deg\", \"45 deg\", \"360 deg\"]",
+            "{}",
+            "$.measures.bankAngles",
+            37,
+            "found an object; expected a list in brackets [ ]"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"aeroplanes/some-aeroplane.json\"",
+            "5",
+            "$.aeroplane",
+            4,
+            "found the number 5; expected the path of an aeroplane file in quotation marks, or the aeroplane itself"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"duration\"",
+            "\"note\": 5, \"duration\"",
+            "$.note",
+            9,
+            "found the number 5; expected text in double quotation marks"),
+        // units
+        spoilt(
+            Samples.SCENARIO,
+            "\"10 s\"",
+            "10",
+            "$.duration",
+            9,
+            "the number stands bare: \"10\" has no unit; expected a time such as \"10 s\" (s, ms, min, h)"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"10 s\"",
+            "\"10\"",
+            "$.duration",
+            9,
+            "\"10\" has no unit; expected a time such as \"10 s\" (s, ms, min, h)"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"10 s\"",
+            "\"10 m\"",
+            "$.duration",
+            9,
+            "\"10 m\" is a length; expected a time (s, ms, min, h)"),
+        spoilt(
+            Samples.SCENARIO_WITH_EVERY_KEY,
+            "\"50 deg\"",
+            "50",
+            "$.measures.bankAngles[0]",
+            37,
+            "the number stands bare: \"50\" has no unit; expected an angle such as \"50 deg\" (deg, rad, mrad, rev)"),
+        // ranges
+        spoilt(
+            Samples.SCENARIO,
+            "\"10 s\"",
+            "\"3601 s\"",
+            "$.duration",
+            9,
+            "\"3601 s\" is out of range; expected a duration above 0 and at most 3600 s"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"10 s\"",
+            "\"0 s\"",
+            "$.duration",
+            9,
+            "\"0 s\" is out of range; expected a duration above 0 and at most 3600 s"),
+        spoilt(
+            Samples.SCENARIO,
+            "1.0",
+            "-1.0000001",
+            "$.inputs[0].size",
+            8,
+            "-1.0000001 is out of range; expected from -1 to 1, a fraction of the travel, right positive"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"1 s\"",
+            "\"-1 s\"",
+            "$.inputs[0].start",
+            8,
+            "\"-1 s\" is out of range; expected 0 or more"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"0.15 s\"",
+            "\"-1 ms\"",
+            "$.inputs[0].movement",
+            8,
+            "\"-1 ms\" is out of range; expected 0 or more"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"step\"",
+            "\"hold\", \"duration\": \"0.1 s\"",
+            "$.inputs[0].duration",
+            8,
+            "\"0.1 s\": duration, s, is 0.1; expected at least the movement of the hand, 0.15 s"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"step\"",
+            "\"doublet\", \"width\": \"0 s\"",
+            "$.inputs[0].width",
+            8,
+            "\"0 s\" is out of range; expected a value above 0"),
+        spoilt(
+            Samples.SCENARIO_WITH_EVERY_KEY,
+            "0.02",
+            "0.6",
+            "$.measures.settlingBand",
+            37,
+            "0.6 is out of range; expected a fraction from 0.001 to 0.5"),
+        spoilt(
+            Samples.SCENARIO_WITH_EVERY_KEY,
+            "\"50 deg\"",
+            "\"-50 deg\"",
+            "$.measures.bankAngles[0]",
+            37,
+            "\"-50 deg\" is out of range; expected a change above 0 and at most 3600 deg"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"10 s\"",
+            "NaN",
+            "$.duration",
+            9,
+            "NaN is no number in JSON; expected a decimal number"),
+        spoilt(
+            Samples.SCENARIO,
+            "1.0",
+            "-Infinity",
+            "$.inputs[0].size",
+            8,
+            "-Infinity is no number in JSON; expected a decimal number"),
+        spoilt(
+            Samples.SCENARIO,
+            "1.0",
+            "1e999",
+            "$.inputs[0].size",
+            8,
+            "\"1e999\" is too large to be computed with; expected a plain number such as \"12\""),
+        spoilt(
+            Samples.SCENARIO,
+            "\"10 s\"",
+            "\"1e999 s\"",
+            "$.duration",
+            9,
+            "\"1e999 s\" is too large to be computed with; expected a time such as \"12 s\" (s, ms, min, h)"),
+        spoilt(
+            Samples.SCENARIO,
+            "Roll entry at cruise",
+            " \\t ",
+            "$.title",
+            3,
+            "the text is blank; expected some words"),
+        // words
+        spoilt(
+            Samples.SCENARIO,
+            "\"free\"",
+            "\"fre\"",
+            "$.slip",
+            6,
+            "unknown slip \"fre\"; expected one of \"held\", \"settled\", \"free\"; did you mean \"free\"?"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"step\"",
+            "\"stepp\"",
+            "$.inputs[0].shape",
+            8,
+            "unknown shape \"stepp\"; expected one of \"step\", \"hold\", \"doublet\"; did you mean \"step\"?"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"stick\"",
+            "\"yoke\"",
+            "$.inputs[0].control",
+            8,
+            "unknown control \"yoke\"; expected one of \"stick\", \"pedal\""),
+        spoilt(
+            Samples.SCENARIO,
+            "{ \"bank\": \"0 deg\" }",
+            "{ \"trim\": { \"state\": \"steady-turn\" } }",
+            "$.start.trim.state",
+            7,
+            "unknown state \"steady-turn\"; expected \"wings-level\""),
+        spoilt(
+            Samples.SCENARIO,
+            "rolltrace-scenario/1",
+            "rolltrace-scenario/2",
+            "$.format",
+            2,
+            "found the text \"rolltrace-scenario/2\"; expected \"rolltrace-scenario/1\""),
+        spoilt(
+            Samples.SCENARIO,
+            "rolltrace-scenario/1",
+            "rolltrace-aeroplane/1",
+            "$.format",
+            2,
+            "found the text \"rolltrace-aeroplane/1\"; expected \"rolltrace-scenario/1\". This is an aeroplane, where a scenario is expected"),
+        // the air and the speed
+        spoilt(
+            Samples.SCENARIO,
+            "\"3000 ft\"",
+            "\"30 km\"",
+            "$.condition.pressureAltitude",
+            5,
+            "\"30 km\": pressure or geopotential altitude, m, is 30000.0; expected a number from -5000.0 to 20000.0"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"0 K\"",
+            "\"0 K\", \"density\": \"1 kg/m3\"",
+            "$.condition.density",
+            5,
+            "density and temperatureOffset stand together; keep one, it fixes the other"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"calibratedAirspeed\": \"120 kt\"",
+            "\"trueAirspeed\": \"80 kt\", \"calibratedAirspeed\": \"120 kt\"",
+            "$.condition.calibratedAirspeed",
+            5,
+            "trueAirspeed and calibratedAirspeed stand together; expected exactly one speed"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"120 kt\"",
+            "\"0 kt\"",
+            "$.condition.calibratedAirspeed",
+            5,
+            "\"0 kt\" is out of range; expected a value above 0"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"0 K\"",
+            "\"0 K\", \"flightPathAngle\": \"90 deg\"",
+            "$.condition.flightPathAngle",
+            5,
+            "\"90 deg\" is out of range; expected inside 90 deg either way"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"0 K\"",
+            "\"0 K\", \"loadFactor\": \"1 m/s2\"",
+            "$.condition.loadFactor",
+            5,
+            "found the text \"1 m/s2\"; expected a plain number such as 0.5, without unit and quotation marks"),
+        // what does not fit together
+        spoilt(
+            Samples.SCENARIO_WITH_EVERY_KEY,
+            "\"slip\": \"free\"",
+            "\"slip\": \"settled\"",
+            "$.start.sideslip",
+            28,
+            "a sideslip at the start needs free slip, where it is a state of its own; the slip is settled"),
+        spoilt(
+            Samples.SCENARIO_WITH_EVERY_KEY,
+            "\"mass\": \"1000 kg\",",
+            "",
+            "$.slip",
+            24,
+            "free slip needs mass, which the aeroplane does not give; give it, or choose held slip"),
+        spoilt(
+            Samples.SCENARIO_WITH_EVERY_KEY,
+            ", \"yaw\": \"2500 kg m2\"",
+            "",
+            "$.slip",
+            24,
+            "free slip needs inertia.yaw, which the aeroplane does not give; give it, or choose held slip"),
+        spoilt(
+            Samples.SCENARIO_WITH_EVERY_KEY,
+            "\"rudder\": { \"left\": \"25 deg\", \"right\": \"20 deg\" },",
+            "",
+            "$.inputs[2].control",
+            34,
+            "the pedals move, but the aeroplane does not give the travel of its rudder; add \"rudder\""),
+        spoilt(
+            Samples.SCENARIO_WITH_EVERY_KEY,
+            "\"Cl_p\": -0.5, ",
+            "",
+            "$.aeroplane",
+            5,
+            "Cl_p is missing; every roll needs it"),
+        // the path of the aeroplane
+        spoilt(
+            Samples.SCENARIO,
+            "aeroplanes/some-aeroplane.json",
+            "./scenario.json",
+            "$.aeroplane",
+            4,
+            "\"./scenario.json\" is this scenario itself; expected the path of an aeroplane file"),
+        spoilt(
+            Samples.SCENARIO,
+            "aeroplanes/some-aeroplane.json",
+            "aeroplanes",
+            "$.aeroplane",
+            4,
+            "the aeroplane file \"aeroplanes\" is a directory; expected a file. The path counts from the directory of the scenario"),
+        spoilt(
+            Samples.SCENARIO,
+            "aeroplanes/some-aeroplane.json",
+            "none.json",
+            "$.aeroplane",
+            4,
+            "the aeroplane file \"none.json\" does not exist; check its name and directory. The path counts from the directory of the scenario"),
+        spoilt(
+            Samples.SCENARIO,
+            "aeroplanes/some-aeroplane.json",
+            "/dev/null",
+            "$.aeroplane",
+            4,
+            "the aeroplane file \"/dev/null\" is a device or pipe; expected a file. The path counts from the directory of the scenario"),
+        spoilt(
+            Samples.SCENARIO,
+            "aeroplanes/some-aeroplane.json",
+            " ",
+            "$.aeroplane",
+            4,
+            "the path is blank; expected one from here to an aeroplane file"),
+        spoilt(
+            Samples.SCENARIO,
+            "aeroplanes/some-aeroplane.json",
+            "a\\u0000b",
+            "$.aeroplane",
+            4,
+            "\"a\\u0000b\" is no path; expected one to an aeroplane file"));
+  }
+
+  static Stream<Spoilt> aeroplanes() {
+    return Stream.of(
+        // keys
+        spoilt(
+            Samples.AEROPLANE,
+            "\"format\": \"rolltrace-aeroplane/1\",",
+            "",
+            "$.format",
+            1,
+            "the key \"format\" is missing; an aeroplane must have it"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"source\": \"where they are from\",",
+            "",
+            "$.derivatives.source",
+            8,
+            "the key \"source\" is missing; a set of derivatives must have it"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"roll\": \"1048 slug ft2\", ",
+            "",
+            "$.inertia.roll",
+            5,
+            "the key \"roll\" is missing; the inertia must have it"),
+        spoilt(
+            Samples.AEROPLANE,
+            ", \"down\": \"20 deg\"",
+            "",
+            "$.ailerons.down",
+            6,
+            "the key \"down\" is missing; the ailerons must have it"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"rudder\"",
+            "\"chord\": \"1 m\", \"rudder\"",
+            "$.chord",
+            7,
+            "unknown key \"chord\". The keys of an aeroplane are format, name, span, wingArea, inertia, derivatives, mass, ailerons, rudder, axes, limits, note"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"Cl_p\"",
+            "\"CL_p\"",
+            "$.derivatives.values.CL_p",
+            9,
+            "unknown key \"CL_p\"; did you mean \"Cl_p\"? The keys of the values are CY_beta, CY_p, CY_r, CY_da, CY_dr, Cl_beta, Cl_p, Cl_r, Cl_da, Cl_dr, Cn_beta, Cn_p, Cn_r, Cn_da, Cn_dr"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"Cl_p\": -0.41",
+            "\"Cl_p\": -0.41, \"Cl_p\": -0.41",
+            "$.derivatives.values.Cl_p",
+            9,
+            "the key \"Cl_p\" stands here again; it was on line 9. Keep one of the two"),
+        spoilt(
+            Samples.AEROPLANE_WITH_EVERY_KEY,
+            "\"density\": \"1.1 kg/m3\"",
+            "\"density\": \"1.1 kg/m3\", \"propellerRollMoment\": \"1 N m\"",
+            "$.derivatives.validAt.propellerRollMoment",
+            30,
+            "unknown key \"propellerRollMoment\". The keys of the condition of derivatives are pressureAltitude, temperatureOffset, density, trueAirspeed, equivalentAirspeed, calibratedAirspeed, loadFactor, flightPathAngle"),
+        // units and types
+        spoilt(
+            Samples.AEROPLANE,
+            "\"33.4 ft\"",
+            "33.4",
+            "$.span",
+            4,
+            "the number stands bare: \"33.4\" has no unit; expected a length such as \"33.4 ft\" (m, ft, in, km, cm, ...)"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"33.4 ft\"",
+            "\"33.4 lb\"",
+            "$.span",
+            4,
+            "\"33.4 lb\" is a mass; expected a length (m, ft, in, km, cm, ...)"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"33.4 ft\"",
+            "\"33.4 feet\"",
+            "$.span",
+            4,
+            "\"33.4 feet\" is not a length (m, ft, in, km, cm, ...): unknown unit 'feet'; did you mean 'ft'?"),
+        spoilt(
+            Samples.AEROPLANE,
+            "-0.41",
+            "\"-0.41\"",
+            "$.derivatives.values.Cl_p",
+            9,
+            "found the text \"-0.41\"; expected a plain number such as 0.5, without unit and quotation marks"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"where they are from\"",
+            "\"\"",
+            "$.derivatives.source",
+            8,
+            "the text is blank; expected some words"),
+        // ranges
+        spoilt(
+            Samples.AEROPLANE,
+            "\"33.4 ft\"",
+            "\"-33.4 ft\"",
+            "$.span",
+            4,
+            "\"-33.4 ft\" is out of range; expected a value above 0"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"1048 slug ft2\"",
+            "\"0 slug ft2\"",
+            "$.inertia.roll",
+            5,
+            "\"0 slug ft2\" is out of range; expected a value above 0"),
+        spoilt(
+            Samples.AEROPLANE_WITH_EVERY_KEY,
+            "\"-100 kg m2\"",
+            "\"-1600 kg m2\"",
+            "$.inertia.product",
+            11,
+            "\"-1600 kg m2\": product of inertia is -1600.0 kg m2; expected less than the root of roll times yaw inertia, 1581.1388300841897 kg m2, in size: no body has more"),
+        spoilt(
+            Samples.AEROPLANE_WITH_EVERY_KEY,
+            "\"yaw\": \"2500 kg m2\",",
+            "",
+            "$.inertia.product",
+            11,
+            "\"-100 kg m2\": product of inertia is -100.0 kg m2 without a yaw inertia; give the yaw inertia too"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"up\": \"20 deg\"",
+            "\"up\": \"0 deg\"",
+            "$.ailerons.up",
+            6,
+            "\"0 deg\" is out of range; expected a travel above 0 and at most 90 deg"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"down\": \"20 deg\"",
+            "\"down\": \"90.1 deg\"",
+            "$.ailerons.down",
+            6,
+            "\"90.1 deg\" is out of range; expected from 0 to 90 deg"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"left\": \"25 deg\"",
+            "\"left\": \"-25 deg\"",
+            "$.rudder.left",
+            7,
+            "\"-25 deg\" is out of range; expected a travel above 0 and at most 90 deg"),
+        spoilt(
+            Samples.AEROPLANE_WITH_EVERY_KEY,
+            "\"1 rad/s\"",
+            "\"0 rad/s\"",
+            "$.ailerons.rateLimit",
+            13,
+            "\"0 rad/s\" is out of range; expected a value above 0"),
+        spoilt(
+            Samples.AEROPLANE_WITH_EVERY_KEY,
+            "\"50 ms\"",
+            "\"-50 ms\"",
+            "$.ailerons.lag",
+            13,
+            "\"-50 ms\" is out of range; expected 0 or more"),
+        spoilt(
+            Samples.AEROPLANE_WITH_EVERY_KEY,
+            "2.5,",
+            "0,",
+            "$.limits.rollingLoadFactor",
+            19,
+            "0 is out of range; expected a value above 0"),
+        spoilt(
+            Samples.AEROPLANE,
+            "-0.41",
+            "-1e400",
+            "$.derivatives.values.Cl_p",
+            9,
+            "\"-1e400\" is too large to be computed with; expected a plain number such as \"12\""),
+        spoilt(
+            Samples.AEROPLANE,
+            "-0.41",
+            "1e-400",
+            "$.derivatives.values.Cl_p",
+            9,
+            "\"1e-400\" is too small to be told from 0; expected a plain number such as \"0\""),
+        spoilt(
+            Samples.AEROPLANE_WITH_EVERY_KEY,
+            "\"CY_beta\": -0.01",
+            "\"CY_beta\": 1e307",
+            "$.derivatives.values.CY_beta",
+            36,
+            "1.0E307 is too large to be computed with; expected a number below 1e300"),
+        // words
+        spoilt(
+            Samples.AEROPLANE,
+            "right-roll-positive",
+            "right-positive",
+            "$.derivatives.aileronSign",
+            8,
+            "unknown aileronSign \"right-positive\"; expected one of \"right-roll-positive\", \"left-roll-positive\"; did you mean \"right-roll-positive\"?"),
+        spoilt(
+            Samples.AEROPLANE_WITH_EVERY_KEY,
+            "\"degree\"",
+            "\"deg\"",
+            "$.derivatives.per",
+            26,
+            "unknown per \"deg\"; expected one of \"radian\", \"degree\""),
+        spoilt(
+            Samples.AEROPLANE_WITH_EVERY_KEY,
+            "\"total\"",
+            "\"sum\"",
+            "$.derivatives.aileronAngle",
+            27,
+            "unknown aileronAngle \"sum\"; expected one of \"mean\", \"total\", \"one-side\""),
+        spoilt(
+            Samples.AEROPLANE_WITH_EVERY_KEY,
+            "\"stability\"",
+            "\"body\"",
+            "$.axes",
+            15,
+            "body axes are not read yet; expected \"stability\". Turn inertias and derivatives to stability axes by the angle of attack"),
+        spoilt(
+            Samples.AEROPLANE_WITH_EVERY_KEY,
+            "\"stability\"",
+            "\"wind\"",
+            "$.axes",
+            15,
+            "unknown axes \"wind\"; expected \"stability\""));
+  }
+
+  @ParameterizedTest
+  @MethodSource("scenarios")
+  void aFaultOfAScenarioIsReportedWhereItStands(Spoilt spoilt) {
+    Path file = Samples.writeScenario(directory, spoilt.text());
+    check(spoilt, file, Samples.refusalOfScenario(file));
+  }
+
+  @ParameterizedTest
+  @MethodSource("aeroplanes")
+  void aFaultOfAnAeroplaneIsReportedWhereItStands(Spoilt spoilt) {
+    Path file = Samples.write(directory, "aeroplane.json", spoilt.text());
+    check(spoilt, file, Samples.refusalOfAeroplane(file));
+  }
+
+  private static void check(Spoilt spoilt, Path file, FileFaultsException refusal) {
+    FileFault fault = Samples.only(refusal);
+    assertThat(fault.message()).isEqualTo(spoilt.message());
+    assertThat(fault.jsonPath()).isEqualTo(spoilt.path());
+    assertThat(fault.line()).isEqualTo(spoilt.line());
+    assertThat(fault.column()).isPositive();
+    assertThat(refusal)
+        .hasMessage(file + ":" + spoilt.line() + ": " + spoilt.path() + ": " + spoilt.message());
+  }
+
+  @Test
+  void refusalsOfTheAirNameTheKeyThatIsTheCause() {
+    String scenario = Samples.SCENARIO;
+    assertAt(Samples.with(scenario, "\"0 K\"", "\"288 K\""), "temperatureOffset", "\"288 K\": ");
+    assertAt(
+        Samples.with(scenario, "\"temperatureOffset\": \"0 K\"", "\"density\": \"1 lb/ft3\""),
+        "density",
+        "\"1 lb/ft3\": ");
+    assertAt(Samples.with(scenario, "120 kt", "700 kt"), "calibratedAirspeed", "\"700 kt\": ");
+    assertAt(
+        Samples.with(
+            scenario, "\"calibratedAirspeed\": \"120 kt\"", "\"trueAirspeed\": \"800 kt\""),
+        "trueAirspeed",
+        "\"800 kt\": ");
+    assertAt(
+        Samples.with(
+            scenario, "\"calibratedAirspeed\": \"120 kt\"", "\"equivalentAirspeed\": \"800 kt\""),
+        "equivalentAirspeed",
+        "\"800 kt\": ");
+  }
+
+  private void assertAt(String text, String key, String beginning) {
+    FileFault fault =
+        Samples.only(Samples.refusalOfScenario(Samples.writeScenario(directory, text)));
+    assertThat(fault.jsonPath()).isEqualTo("$.condition." + key);
+    assertThat(fault.line()).isEqualTo(5);
+    assertThat(fault.message()).startsWith(beginning).contains("; expected ");
+  }
+
+  @Test
+  void allFaultsOfBothFilesAreReportedAtOnceByFileAndLine() {
+    Path aeroplane =
+        Samples.write(
+            directory,
+            "bad.json",
+            Samples.with(
+                Samples.with(Samples.AEROPLANE, "\"33.4 ft\"", "33.4"), "-0.41", "\"-0.41\""));
+    String text = Samples.with(Samples.SCENARIO, "aeroplanes/some-aeroplane.json", "bad.json");
+    text = Samples.with(text, "\"10 s\"", "\"10 m\"");
+    text = Samples.with(text, "\"title\"", "\"titel\"");
+    text = Samples.with(text, "1.0", "2.0");
+    Path scenario = Samples.writeScenario(directory, text);
+
+    FileFaultsException refusal = Samples.refusalOfScenario(scenario);
+
+    assertThat(refusal.faults())
+        .extracting(fault -> fault.file() + ":" + fault.line() + fault.jsonPath())
+        .containsExactly(
+            scenario + ":1$.title",
+            scenario + ":3$.titel",
+            scenario + ":8$.inputs[0].size",
+            scenario + ":9$.duration",
+            aeroplane + ":4$.span",
+            aeroplane + ":9$.derivatives.values.Cl_p");
+    assertThat(refusal.omitted()).isZero();
+    assertThat(refusal.getMessage().lines()).hasSize(6).allMatch(line -> line.contains(".json:"));
+  }
+
+  @Test
+  void faultsThatDoNotHangTogetherDoNotHideEachOther() {
+    // Without a title, and with a spoilt input, the slip still does not fit the aeroplane.
+    String text = Samples.with(Samples.SCENARIO_WITH_EVERY_KEY, "\"mass\": \"1000 kg\",", "");
+    text = Samples.with(text, "\"title\": \"Every key\",", "");
+    text = Samples.with(text, "\"size\": -1 ", "\"size\": -2 ");
+    assertThat(Samples.refusalOfScenario(Samples.writeScenario(directory, text)).faults())
+        .extracting(FileFault::jsonPath)
+        .containsExactly("$.title", "$.slip", "$.inputs[0].size");
+  }
+
+  @Test
+  void aFileOfAnotherKindIsNotPickedToPieces() {
+    Samples.write(directory, "other.json", Samples.SCENARIO);
+    String text = Samples.with(Samples.SCENARIO, "aeroplanes/some-aeroplane.json", "other.json");
+    FileFault fault =
+        Samples.only(Samples.refusalOfScenario(Samples.writeScenario(directory, text)));
+    assertThat(fault.file()).isEqualTo(directory.resolve("other.json"));
+    assertThat(fault.line()).isEqualTo(2);
+    assertThat(fault.message())
+        .isEqualTo(
+            "found the text \"rolltrace-scenario/1\"; expected \"rolltrace-aeroplane/1\". This is a"
+                + " scenario, where an aeroplane is expected");
+  }
+
+  @Test
+  void aBrokenAeroplaneFileIsReportedInItself() {
+    Path aeroplane = Samples.write(directory, "other.json", "{\n  \"format\": oops }");
+    String text = Samples.with(Samples.SCENARIO, "aeroplanes/some-aeroplane.json", "other.json");
+    FileFault fault =
+        Samples.only(Samples.refusalOfScenario(Samples.writeScenario(directory, text)));
+    assertThat(fault.file()).isEqualTo(aeroplane);
+    assertThat(fault.line()).isEqualTo(2);
+    assertThat(fault.column()).isEqualTo(13);
+    assertThat(fault.jsonPath()).isEqualTo("$.format");
+  }
+
+  @Test
+  void longTextsAreRefusedWhereverTheyStand() {
+    String longText = "x".repeat(2001);
+    String message = "the text has 2001 characters; expected at most 2000";
+    for (String part :
+        List.of(
+            "Roll entry at cruise",
+            "rolltrace-scenario/1",
+            "aeroplanes/some-aeroplane.json",
+            "120 kt",
+            "step",
+            "stick",
+            "0 deg")) {
+      String text = Samples.with(Samples.SCENARIO, '"' + part + '"', '"' + longText + '"');
+      FileFaultsException refusal =
+          Samples.refusalOfScenario(Samples.writeScenario(directory, text));
+      assertThat(refusal.faults()).as(part).extracting(FileFault::message).contains(message);
+    }
+    String fits = Samples.with(Samples.SCENARIO, "Roll entry at cruise", "x".repeat(200));
+    assertThat(ScenarioFile.read(Samples.writeScenario(directory, fits)).title()).hasSize(200);
+    String titleTooLong = Samples.with(Samples.SCENARIO, "Roll entry at cruise", "x".repeat(201));
+    assertThat(
+            Samples.only(Samples.refusalOfScenario(Samples.writeScenario(directory, titleTooLong)))
+                .message())
+        .isEqualTo("the text has 201 characters; expected at most 200");
+  }
+
+  @Test
+  void noMoreInputsThanAreAccepted() {
+    String input =
+        "{ \"control\": \"stick\", \"shape\": \"step\", \"start\": \"1 s\", \"size\": 0.001 }";
+    String one =
+        "{ \"control\": \"stick\", \"shape\": \"step\", \"start\": \"1 s\", \"size\": 1.0,"
+            + " \"movement\": \"0.15 s\" }";
+    String most = Samples.with(Samples.SCENARIO, one, input + (", " + input).repeat(199));
+    assertThat(ScenarioFile.read(Samples.writeScenario(directory, most)).programme().inputs())
+        .hasSize(200);
+    String more = Samples.with(Samples.SCENARIO, one, input + (", " + input).repeat(200));
+    FileFault fault =
+        Samples.only(Samples.refusalOfScenario(Samples.writeScenario(directory, more)));
+    assertThat(fault.jsonPath()).isEqualTo("$.inputs");
+    assertThat(fault.message()).isEqualTo("the list has 201 elements; expected at most 200");
+  }
+
+  @Test
+  void moreThanTwoHundredFaultsAreCounted() {
+    StringBuilder unknown = new StringBuilder();
+    for (int i = 0; i < 250; i++) {
+      unknown.append("\"unknown").append(i).append("\": ").append(i).append(",\n");
+    }
+    String text = Samples.with(Samples.SCENARIO, "\"title\"", unknown + "\"title\"");
+    FileFaultsException refusal = Samples.refusalOfScenario(Samples.writeScenario(directory, text));
+    assertThat(refusal.faults()).hasSize(200);
+    assertThat(refusal.omitted()).isEqualTo(50);
+    assertThat(refusal.getMessage().lines()).hasSize(201).last().isEqualTo("and 50 more");
+  }
+
+  @Test
+  void whatIsShownOfAFileIsShortAndVisible() {
+    String text =
+        Samples.with(
+            Samples.SCENARIO, "\"free\"", "\"\\u001b[31m\\u202e\\ud800" + "x".repeat(100) + '"');
+    FileFault fault =
+        Samples.only(Samples.refusalOfScenario(Samples.writeScenario(directory, text)));
+    assertThat(fault.message())
+        .startsWith(
+            "unknown slip \"\\u001b[31m\\u202e\\ud800" + "x".repeat(33) + "...\"; expected");
+  }
+}
