@@ -10,6 +10,10 @@ import java.io.Writer;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.rolltrace.core.aeroplane.Aeroplane;
+import org.rolltrace.core.aeroplane.Ailerons;
+import org.rolltrace.core.aeroplane.Rudder;
+import org.rolltrace.core.aeroplane.SurfaceDynamics;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.derivatives.LateralDerivatives;
@@ -68,6 +72,7 @@ public final class ResultJson {
     json.writeStringField("producedBy", producedBy);
     json.writeStringField("notice", Safety.NOTICE);
     writeScenario(result.scenario());
+    writeAeroplane(result.scenario().data().aeroplane());
     writeCondition(result.scenario().condition());
     writeDerivatives(result.scenario().data().derivatives());
     writeTrim(result.trim());
@@ -127,6 +132,43 @@ public final class ResultJson {
     number("relativeTolerance", result.settings().relativeTolerance());
     number("absoluteTolerance", result.settings().absoluteTolerance());
     json.writeEndObject();
+  }
+
+  private void writeAeroplane(Aeroplane aeroplane) throws IOException {
+    json.writeObjectFieldStart("aeroplane");
+    json.writeStringField("name", aeroplane.name());
+    number("span", aeroplane.span());
+    number("wingArea", aeroplane.wingArea());
+    number("mass", aeroplane.mass());
+    json.writeObjectFieldStart("inertia");
+    number("roll", aeroplane.inertia().roll());
+    number("yaw", aeroplane.inertia().yaw());
+    number("product", aeroplane.inertia().product());
+    json.writeEndObject();
+    if (aeroplane.ailerons().isPresent()) {
+      Ailerons ailerons = aeroplane.ailerons().get();
+      json.writeObjectFieldStart("ailerons");
+      number("up", ailerons.up());
+      number("down", ailerons.down());
+      writeDynamics(ailerons.dynamics());
+      json.writeEndObject();
+    }
+    if (aeroplane.rudder().isPresent()) {
+      Rudder rudder = aeroplane.rudder().get();
+      json.writeObjectFieldStart("rudder");
+      number("left", rudder.left());
+      number("right", rudder.right());
+      writeDynamics(rudder.dynamics());
+      json.writeEndObject();
+    }
+    json.writeEndObject();
+  }
+
+  private void writeDynamics(SurfaceDynamics dynamics) throws IOException {
+    if (dynamics.rateLimit() < Double.POSITIVE_INFINITY) {
+      number("rateLimit", dynamics.rateLimit());
+    }
+    number("lag", dynamics.lag());
   }
 
   private void writeCondition(FlightCondition condition) throws IOException {
@@ -237,6 +279,7 @@ public final class ResultJson {
       if (measure.value().isPresent()) {
         number("value", measure.value().getAsDouble());
         json.writeStringField("unit", measure.definition().unit());
+        json.writeStringField("definition", measure.definition().definition());
         if (!measure.remark().isEmpty()) {
           json.writeStringField("remark", measure.remark());
         }

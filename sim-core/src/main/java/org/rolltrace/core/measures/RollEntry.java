@@ -65,14 +65,19 @@ final class RollEntry {
     measures.add(peak);
     measures.add(steady);
     measures.add(timeConstant);
-    if (steady.value().isPresent()) {
-      double level = direction * steady.value().getAsDouble();
+    double level = direction * steady.value().orElse(0);
+    if (steady.value().isPresent() && level <= 0) {
+      String reason = "the steady rate is against the commanded direction";
+      measures.add(Measure.missing(RESPONSE_TIME_CONSTANT, reason));
+      measures.add(Measure.missing(SETTLING_TIME, reason));
+      measures.add(Measure.missing(RISE_TIME, reason));
+    } else if (steady.value().isPresent()) {
       double release = hold.orElseThrow().to();
       measures.add(responseTimeConstant(rate, input, level, release));
       measures.add(settlingTime(rate, input, level, release));
       measures.add(riseTime(rate, input, level, release));
     } else {
-      String reason = "no steady roll rate: " + steady.remark();
+      String reason = "no steady roll rate to compare with";
       measures.add(Measure.missing(RESPONSE_TIME_CONSTANT, reason));
       measures.add(Measure.missing(SETTLING_TIME, reason));
       measures.add(Measure.missing(RISE_TIME, reason));
@@ -132,7 +137,8 @@ final class RollEntry {
       double mean = rate.mean(end - window, end);
       double relative = rate.spread(end - window, end) / Math.abs(mean);
       if (relative < STEADY_CHANGE) {
-        return Measure.of(STEADY_ROLL_RATE, direction * mean);
+        return Measure.of(
+            STEADY_ROLL_RATE, direction * mean, "mean " + windowWords(end - window, end));
       }
       change = format("the roll rate still changes by %.2g %% at the end", 100 * relative);
     }
@@ -145,8 +151,9 @@ final class RollEntry {
           STEADY_ROLL_RATE,
           direction * mean,
           format(
-              "mean over the last dutch-roll period; it swings by ±%.2g deg/s",
-              Math.toDegrees(swing)));
+              "mean over the last dutch-roll period of the free equations, %s; it swings by"
+                  + " ±%.2g deg/s",
+              windowWords(from, end), Math.toDegrees(swing)));
     }
     return Measure.missing(
         STEADY_ROLL_RATE,
@@ -155,6 +162,16 @@ final class RollEntry {
                 "not reached: the stick is held for %.3g s, %.2g time constants",
                 length, length / tau)
             : "not reached: " + change);
+  }
+
+  /**
+   * Where a mean was taken: the bank there shows how far the weight and the turn take part in it.
+   */
+  private String windowWords(double from, double to) {
+    Curve bank = Curve.ofBank(manoeuvre.history(), 1, 0);
+    return format(
+        "from %.2f to %.2f s, at banks from %.0f to %.0f deg",
+        from, to, Math.toDegrees(bank.at(from)), Math.toDegrees(bank.at(to)));
   }
 
   private static Measure responseTimeConstant(
@@ -180,7 +197,7 @@ final class RollEntry {
       index--;
     }
     if (index == last) {
-      return Measure.missing(SETTLING_TIME, "not settled at release");
+      return Measure.missing(SETTLING_TIME, "not settled by the release or the end");
     }
     if (index < 0 || rate.time(index) < input.start()) {
       return Measure.of(SETTLING_TIME, 0);

@@ -29,6 +29,12 @@ final class WingsLevelReturn {
     if (manoeuvre.slip() == SlipTreatment.HELD) {
       return none("held slip cannot return by itself; choose settled or free slip");
     }
+    boolean shaken =
+        manoeuvre.programme().inputs().stream()
+            .anyMatch(input -> input.shape().size() != 0 && !input.shape().isHeld());
+    if (shaken) {
+      return none("a doublet leaves the aeroplane swinging, not with a wing down");
+    }
     if (start >= manoeuvre.duration()) {
       return none(
           start == Double.POSITIVE_INFINITY

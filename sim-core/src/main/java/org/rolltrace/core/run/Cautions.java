@@ -18,6 +18,7 @@ import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.motion.LateralModel;
 import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.motion.Trim;
+import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.scenario.Scenario;
 
 /**
@@ -52,6 +53,8 @@ final class Cautions {
     Cautions cautions = new Cautions(scenario, flown);
     cautions.addTrim(trim);
     cautions.addOwnLimits();
+    cautions.addSigns(model);
+    cautions.addLateInputs();
     cautions.addStops();
     cautions.addModelLimits(model);
     cautions.addDerivatives();
@@ -99,6 +102,31 @@ final class Cautions {
           "bank of %.1f deg is above the aeroplane's limit of %.1f deg",
           Math.toDegrees(bank), Math.toDegrees(limits.bank().getAsDouble()));
     }
+  }
+
+  private void addSigns(LateralModel model) {
+    boolean stick =
+        scenario.programme().inputs().stream().anyMatch(input -> input.control() == Control.STICK);
+    if (stick && !(model.rollMoment().perAileron() > 0)) {
+      add(
+          "right stick does not roll right: Cl_da is %.4g; look at the aileron sign of the set",
+          scenario.data().derivatives().value(Coefficient.CL_DA));
+    }
+    if (!(model.rollMoment().perRollRate() < 0)) {
+      add(
+          "the roll is not damped: Cl_p is %.4g",
+          scenario.data().derivatives().value(Coefficient.CL_P));
+    }
+  }
+
+  private void addLateInputs() {
+    scenario.programme().inputs().stream()
+        .filter(input -> input.shape().start() >= scenario.duration())
+        .forEach(
+            input ->
+                add(
+                    "the %s input at %.4g s starts after the end of the manoeuvre",
+                    input.control().word(), input.shape().start()));
   }
 
   private void addStops() {
@@ -186,7 +214,7 @@ final class Cautions {
               / (there.loadFactor() * here.dynamicPressure());
       if (Math.abs(liftRatio - 1) > LIFT_COEFFICIENT_AWAY) {
         add(
-            "derivatives are flown off their condition: the lift coefficient is %.2f times that for"
+            "derivatives are flown off their condition: the lift coefficient is %.3g times that for"
                 + " which they hold",
             liftRatio);
       }

@@ -42,7 +42,8 @@ final class FlyCommand implements Callable<Integer> {
   @Option(
       names = "--rate",
       paramLabel = "HZ",
-      description = "Samples a second in the history, 1 to 10000; 100 unless given.")
+      description =
+          "Samples a second in the history, 1 to 10000, at most a million in all; 100 unless given.")
   private Double sampleRate;
 
   @Option(
@@ -91,6 +92,10 @@ final class FlyCommand implements Callable<Integer> {
   }
 
   private Path path(String text) {
+    if (text.isBlank()) {
+      throw new CommandLine.ParameterException(
+          spec.commandLine(), "An empty path; expected the name of a file or folder.");
+    }
     try {
       return Path.of(text);
     } catch (InvalidPathException noPath) {

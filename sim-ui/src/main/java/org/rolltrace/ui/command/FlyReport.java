@@ -10,6 +10,8 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.rolltrace.core.aeroplane.Aeroplane;
+import org.rolltrace.core.aeroplane.SurfaceDynamics;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.derivatives.LateralDerivatives;
@@ -19,6 +21,8 @@ import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.Mode;
 import org.rolltrace.core.motion.Trim;
+import org.rolltrace.core.pilot.DoubletInput;
+import org.rolltrace.core.pilot.HoldInput;
 import org.rolltrace.core.pilot.InputShape;
 import org.rolltrace.core.pilot.PilotInput;
 import org.rolltrace.core.quantity.Quantity;
@@ -28,7 +32,7 @@ import org.rolltrace.core.scenario.Scenario;
 
 /** A result as text in aligned columns, in the units that engineers read beside SI. */
 final class FlyReport {
-  private static final int LABEL = 32;
+  private static final int LABEL = 34;
   private static final int VALUE = 12;
   private static final int WIDTH = 96;
 
@@ -55,10 +59,64 @@ final class FlyReport {
   }
 
   private void addAeroplane(Scenario scenario) {
-    row("  aeroplane", scenario.data().aeroplane().name());
+    Aeroplane aeroplane = scenario.data().aeroplane();
+    row("  aeroplane", aeroplane.name());
+    row("  size and mass", sizeAndMass(aeroplane));
+    row("  control travel", travel(aeroplane));
     if (!scenario.data().derivatives().source().isBlank()) {
       wrapped(padded("  derivatives from", 20), scenario.data().derivatives().source());
     }
+  }
+
+  private static String sizeAndMass(Aeroplane aeroplane) {
+    StringBuilder words = new StringBuilder();
+    words.append(format("span %.4g m, area %.4g m2", aeroplane.span(), aeroplane.wingArea()));
+    aeroplane.mass().ifPresent(mass -> words.append(format(", mass %.5g kg", mass)));
+    words.append(format(", inertia in roll %.5g kg m2", aeroplane.inertia().roll()));
+    aeroplane.inertia().yaw().ifPresent(yaw -> words.append(format(", yaw %.5g kg m2", yaw)));
+    if (aeroplane.inertia().product() != 0) {
+      words.append(format(", product %.4g kg m2", aeroplane.inertia().product()));
+    }
+    return words.toString();
+  }
+
+  private static String travel(Aeroplane aeroplane) {
+    String ailerons =
+        aeroplane
+            .ailerons()
+            .map(
+                a ->
+                    "ailerons "
+                        + plain(Math.toDegrees(a.up()))
+                        + " deg up, "
+                        + plain(Math.toDegrees(a.down()))
+                        + " deg down"
+                        + dynamics(a.dynamics()))
+            .orElse("no ailerons given");
+    String rudder =
+        aeroplane
+            .rudder()
+            .map(
+                r ->
+                    "rudder "
+                        + plain(Math.toDegrees(r.left()))
+                        + " deg left, "
+                        + plain(Math.toDegrees(r.right()))
+                        + " deg right"
+                        + dynamics(r.dynamics()))
+            .orElse("no rudder given");
+    return ailerons + "; " + rudder;
+  }
+
+  private static String dynamics(SurfaceDynamics dynamics) {
+    String words = "";
+    if (dynamics.rateLimit() < Double.POSITIVE_INFINITY) {
+      words += ", at most " + plain(Math.toDegrees(dynamics.rateLimit())) + " deg/s";
+    }
+    if (dynamics.lag() > 0) {
+      words += ", lag " + plain(dynamics.lag()) + " s";
+    }
+    return words;
   }
 
   private void addCondition(FlightCondition condition) {
@@ -99,10 +157,10 @@ final class FlyReport {
       row(
           "  start",
           format(
-              "bank %+.1f deg, roll rate %+.1f deg/s, sideslip %+.1f deg from trim",
-              Math.toDegrees(disturbance.bank()),
-              Math.toDegrees(disturbance.rollRate()),
-              Math.toDegrees(disturbance.sideslip())));
+              "displaced from trim by bank %s deg, roll rate %s deg/s, sideslip %s deg",
+              plain(Math.toDegrees(disturbance.bank())),
+              plain(Math.toDegrees(disturbance.rollRate())),
+              plain(Math.toDegrees(disturbance.sideslip()))));
     }
     for (PilotInput input : scenario.programme().inputs()) {
       row("  input", describe(input));
@@ -113,13 +171,24 @@ final class FlyReport {
   private static String describe(PilotInput input) {
     InputShape shape = input.shape();
     return format(
-        "%s %s, %s %% %s at %s s, hand takes %s s",
+        "%s %s, %s %% %s at %s s%s, hand takes %s s",
         input.control().word(),
         shape.name(),
         plain(100 * Math.abs(shape.size())),
         shape.size() < 0 ? "left" : "right",
         plain(shape.start()),
+        length(shape),
         plain(shape.handTime()));
+  }
+
+  private static String length(InputShape shape) {
+    if (shape instanceof HoldInput hold) {
+      return " for " + plain(hold.duration()) + " s";
+    }
+    if (shape instanceof DoubletInput doublet) {
+      return ", width " + plain(doublet.width()) + " s";
+    }
+    return "";
   }
 
   /** As it would be written by hand: up to six figures, no zeros behind. */
@@ -140,7 +209,7 @@ final class FlyReport {
       row.append(
           derivatives.origin(coefficient) == Origin.ABSENT
               ? format("%10s", "absent")
-              : format("%10.4f", derivatives.value(coefficient)));
+              : format("%10s", number(derivatives.value(coefficient))));
       if (coefficient.symbol().endsWith("_dr")) {
         line(row.toString());
         row.setLength(0);
@@ -150,7 +219,11 @@ final class FlyReport {
 
   private void addTrim() {
     line("");
-    line("Trim, wings level");
+    double trimmedWith = result.scenario().start().trimmedWith().roll();
+    line(
+        trimmedWith == result.scenario().propeller().roll()
+            ? "Trim, wings level"
+            : format("Trim, wings level, with a propeller moment of %+.1f N m", trimmedWith));
     Trim trim = result.trim();
     surface("aileron", trim.aileron(), "stick", trim.stick());
     surface("rudder", trim.rudder(), "pedal", trim.pedal());
@@ -219,7 +292,13 @@ final class FlyReport {
       }
       double value = measure.value().getAsDouble();
       switch (measure.definition().unit()) {
-        case "rad" -> measured(title, Math.toDegrees(value), "deg", value, "rad");
+        case "rad" -> {
+          if (measure.definition().name().startsWith("helix")) {
+            measured(title, value, "rad", Math.toDegrees(value), "deg");
+          } else {
+            measured(title, Math.toDegrees(value), "deg", value, "rad");
+          }
+        }
         case "rad/s" -> measured(title, Math.toDegrees(value), "deg/s", value, "rad/s");
         case "rad/s2" -> measured(title, Math.toDegrees(value), "deg/s2", value, "rad/s2");
         case "1" -> measured(title, 100 * value, "%", value, "");
@@ -290,8 +369,13 @@ final class FlyReport {
     return words.length() >= width ? words + " " : words + " ".repeat(width - words.length());
   }
 
+  /** Titles and names come from files: what would steer a terminal is not passed on to it. */
   private void line(String words) {
-    text.append(words).append('\n');
+    for (int i = 0; i < words.length(); i++) {
+      char c = words.charAt(i);
+      text.append(Character.isISOControl(c) ? ' ' : c);
+    }
+    text.append('\n');
   }
 
   private static String format(String pattern, Object... values) {
