@@ -92,6 +92,15 @@ public record MeasureDefinition(String name, String title, String unit, String d
           "rad",
           "steady roll rate times span over 2 V");
 
+  /** What the rolling adds to the incidence of the wing tip. */
+  public static final MeasureDefinition TIP_INCIDENCE =
+      new MeasureDefinition(
+          "tipIncidence",
+          "Tip incidence of the roll, peak",
+          "rad",
+          "arc tangent of the peak helix angle: what the rolling adds to the incidence of the tip"
+              + " that goes down");
+
   /** How long half the return takes. */
   public static final MeasureDefinition RETURN_TIME_TO_HALF =
       new MeasureDefinition(

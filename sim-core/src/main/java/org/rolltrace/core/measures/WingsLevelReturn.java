@@ -23,6 +23,7 @@ final class WingsLevelReturn {
     double start =
         manoeuvre.programme().inputs().stream()
             .filter(input -> input.shape().size() != 0)
+            .filter(input -> input.shape().start() < manoeuvre.duration())
             .mapToDouble(input -> input.shape().end())
             .max()
             .orElse(0);
