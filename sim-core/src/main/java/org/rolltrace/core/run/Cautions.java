@@ -174,6 +174,9 @@ final class Cautions {
   }
 
   private void addDerivatives() {
+    if (scenario.data().derivatives().source().isBlank()) {
+      add("the aeroplane file does not say where its derivatives are from");
+    }
     Optional<FlightCondition> validAt = scenario.data().derivatives().validAt();
     if (validAt.isEmpty()) {
       add("the aeroplane file does not say at which condition its derivatives hold");

@@ -192,4 +192,23 @@ class CautionsTest {
     assertThat(ScenarioRun.execute(Scenarios.of(data, AT_60, SlipTreatment.HELD, 1)).cautions())
         .anyMatch(c -> c.contains("does not say at which condition"));
   }
+
+  @Test
+  void derivativesWithoutASourceCarryACaution() {
+    AeroplaneData known = Scenarios.oneDegree(0.4, 8);
+    String caution = "the aeroplane file does not say where its derivatives are from";
+    assertThat(cautionsOf(known)).doesNotContain(caution);
+    Map<Coefficient, Double> values = new EnumMap<>(Coefficient.class);
+    values.put(Coefficient.CL_P, known.derivatives().value(Coefficient.CL_P));
+    values.put(Coefficient.CL_DA, known.derivatives().value(Coefficient.CL_DA));
+    assertThat(
+            cautionsOf(
+                new AeroplaneData(known.aeroplane(), LateralDerivatives.ofGiven(values, ""))))
+        .contains(caution);
+  }
+
+  private static List<String> cautionsOf(AeroplaneData data) {
+    return ScenarioRun.execute(Scenarios.of(data, Scenarios.seaLevel(50), SlipTreatment.HELD, 1))
+        .cautions();
+  }
 }
