@@ -24,6 +24,9 @@ final class RollEntry {
   /** 1 − 1/e to the three figures in which the measure is defined. */
   private static final double RESPONSE_LEVEL = 0.632;
 
+  /** Movements are kept to the nanosecond; a hold this close behind one follows from it, s. */
+  private static final double MOVE_ENDS_WITHIN = 1e-6;
+
   private static final String ALREADY_ROLLING =
       "the roll rate is at that level already when the control first moves";
 
@@ -71,7 +74,10 @@ final class RollEntry {
     measures.add(steady);
     measures.add(timeConstant);
     double level = direction * steady.value().orElse(0);
-    if (level > 0) {
+    boolean oneMove =
+        hold.isPresent()
+            && hold.get().from() <= input.start() + input.handTime() + MOVE_ENDS_WITHIN;
+    if (level > 0 && oneMove) {
       double release = hold.orElseThrow().to();
       measures.add(responseTimeConstant(rate, input, level, release));
       measures.add(settlingTime(rate, input, level, release));
@@ -80,7 +86,9 @@ final class RollEntry {
       String reason =
           steady.value().isEmpty()
               ? "no steady roll rate: " + steady.remark()
-              : "the steady roll rate is against the commanded direction";
+              : level > 0
+                  ? "the first movement of the stick is not the one that leads to the hold"
+                  : "the steady roll rate is against the commanded direction";
       measures.add(Measure.missing(RESPONSE_TIME_CONSTANT, reason));
       measures.add(Measure.missing(SETTLING_TIME, reason));
       measures.add(Measure.missing(RISE_TIME, reason));

@@ -161,6 +161,16 @@ class MeasuresTest {
     assertThat(reason(result, "steadyRollRate")).isEqualTo("no held stick in this scenario");
   }
 
+  /** The times of an entry count from its own movement, not from an earlier one. */
+  @Test
+  void aHoldAfterADoubletHasASteadyRateButNoTimesFromTheDoublet() {
+    RunResult result = fly(20, new DoubletInput(1, 0.5, 1, 0.1), new StepInput(8, 1, 0.1));
+    assertThat(value(result, "steadyRollRate")).isCloseTo(STEADY, within(1e-8));
+    for (String name : List.of("responseTimeConstant", "settlingTime", "riseTime")) {
+      assertThat(reason(result, name)).contains("not the one that leads to the hold");
+    }
+  }
+
   @Test
   void aScenarioWithoutInputsSaysSo() {
     RunResult result = fly(5);
