@@ -65,7 +65,7 @@ public record ControlRun(double angleAtPlus, double angleAtMinus, SurfaceDynamic
    */
   public double angleAt(double position) {
     double held = atStops(position);
-    return held >= 0 ? angleAtPlus * held : -angleAtMinus * held;
+    return 0.0 + (held >= 0 ? angleAtPlus : -angleAtMinus) * held; // no -0
   }
 
   /**

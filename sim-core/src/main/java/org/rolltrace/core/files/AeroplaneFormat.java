@@ -17,6 +17,8 @@ import org.rolltrace.core.scenario.AeroplaneData;
 final class AeroplaneFormat {
   static final int LONGEST_NAME = 200;
 
+  private static final String UNNAMED = "Unnamed aeroplane";
+
   private static final Range TRAVEL =
       Range.aboveZeroTo(Math.PI / 2, "a travel above 0 and at most 90 deg");
   private static final Range TRAVEL_OR_NONE = Range.fromTo(0, Math.PI / 2, "from 0 to 90 deg");
@@ -37,8 +39,8 @@ final class AeroplaneFormat {
 
   private static Keys withTheRest(Keys format) {
     return format
-        .required("name", "span", "wingArea", "inertia", "derivatives")
-        .optional("mass", "ailerons", "rudder", "axes", "limits", "note");
+        .required("span", "wingArea", "inertia", "derivatives")
+        .optional("name", "mass", "ailerons", "rudder", "axes", "limits", "note");
   }
 
   static Optional<AeroplaneData> read(JsonValue.ObjectValue object, Keys keys, Faults faults) {
@@ -67,7 +69,7 @@ final class AeroplaneFormat {
     return Optional.of(
         new AeroplaneData(
             new Aeroplane(
-                name.orElseThrow(),
+                name.orElse(UNNAMED),
                 span,
                 wingArea,
                 mass,

@@ -26,7 +26,7 @@ final class DerivativesFormat {
   static final List<String> ANGLES = List.of("mean", "total", "one-side");
 
   static final Keys DERIVATIVES =
-      Keys.of("a set of derivatives").required(SOURCE, VALUES).optional(SIGN, PER, ANGLE, VALID_AT);
+      Keys.of("a set of derivatives").required(VALUES).optional(SOURCE, SIGN, PER, ANGLE, VALID_AT);
 
   static final Keys COEFFICIENTS = Keys.of("the values").optional(symbols());
 
@@ -71,7 +71,7 @@ final class DerivativesFormat {
     if (!in.isSound()) {
       return Optional.empty();
     }
-    LateralDerivatives set = LateralDerivatives.ofGiven(values, source.orElseThrow());
+    LateralDerivatives set = LateralDerivatives.ofGiven(values, source.orElse(""));
     return Optional.of(validAt.isPresent() ? set.validAt(validAt.get()) : set);
   }
 

@@ -6,6 +6,7 @@ import java.io.UncheckedIOException;
 import java.io.Writer;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.AtomicMoveNotSupportedException;
+import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
@@ -57,12 +58,16 @@ public final class ResultFolder {
           entry.getValue().write(out);
         }
       }
+      for (Path place : places.values()) {
+        if (Files.isDirectory(place)) {
+          throw new FileSystemException(place.toString(), null, place + " is a folder");
+        }
+      }
       for (Map.Entry<Path, Path> place : places.entrySet()) {
         move(place.getKey(), place.getValue());
       }
       return new ArrayList<>(places.values());
     } catch (IOException failure) {
-      deleteDrafts(places);
       throw new UncheckedIOException(
           "cannot write the result into "
               + folder
@@ -70,6 +75,8 @@ public final class ResultFolder {
               + reason(failure)
               + "; choose a folder that you may write to, with room on its disk",
           failure);
+    } finally {
+      deleteDrafts(places);
     }
   }
 
@@ -97,9 +104,17 @@ public final class ResultFolder {
           case "FileAlreadyExistsException" -> "there is a file of that name";
           case "AccessDeniedException" -> "it is not allowed";
           case "NotDirectoryException" -> "it is not a folder";
+          case "NoSuchFileException" -> "it cannot be made there";
           case "ReadOnlyFileSystemException" -> "the disk is read only";
           default -> "";
         };
-    return what.isEmpty() ? String.valueOf(failure.getMessage()) : what;
+    if (!what.isEmpty()) {
+      return what;
+    }
+    String said =
+        failure instanceof FileSystemException f && f.getReason() != null
+            ? f.getReason()
+            : failure.getMessage();
+    return said == null ? failure.getClass().getSimpleName() : said;
   }
 }

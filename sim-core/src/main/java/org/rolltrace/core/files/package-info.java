@@ -79,7 +79,7 @@
  *   <caption>Keys of an aeroplane</caption>
  *   <tr><th>key</th><th>value</th></tr>
  *   <tr><td>format*</td><td>{@code rolltrace-aeroplane/1}; may be absent inside a scenario</td></tr>
- *   <tr><td>name*</td><td>text, up to 200 characters</td></tr>
+ *   <tr><td>name</td><td>text, up to 200 characters</td></tr>
  *   <tr><td>note</td><td>text, not looked at</td></tr>
  *   <tr><td>span*, wingArea*, mass</td><td>length, area, mass; above 0. Settled and free slip need
  *       the mass</td></tr>
@@ -93,7 +93,7 @@
  *   <tr><td>limits</td><td>{@code manoeuvringSpeed}, {@code neverExceedSpeed} (calibrated
  *       airspeeds), {@code rollingLoadFactor} (number), {@code rollRate}, {@code bank}; above
  *       0</td></tr>
- *   <tr><td>derivatives*</td><td>{@code source}*: text; {@code values}*: numbers by name,
+ *   <tr><td>derivatives*</td><td>{@code source}: text; {@code values}*: numbers by name,
  *       C{Y,l,n}_{beta,p,r,da,dr}, 0 when absent; {@code per}: {@code radian} (default) or {@code
  *       degree}, for beta, da and dr; {@code aileronSign}: {@code right-roll-positive} (default) or
  *       {@code left-roll-positive}; {@code aileronAngle}: {@code mean} (default), {@code total} or

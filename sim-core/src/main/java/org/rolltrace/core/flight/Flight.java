@@ -31,6 +31,9 @@ public final class Flight {
   private static final int MOST_EVALUATIONS = 20_000_000;
   private static final int MOST_SAMPLES = 1_000_000;
 
+  /** Measures are read off at least this many samples a second, however few are asked for. */
+  private static final double LEAST_RATE = 100;
+
   /** Events are looked for at least this often, s, and this many times in a stretch. */
   private static final double LOOK_EVERY = 0.05;
 
@@ -39,7 +42,7 @@ public final class Flight {
   /** A state beyond this has left every range in which the equations mean something, rad, rad/s. */
   private static final double RANGE = 1e6;
 
-  /** Breakpoints are kept to this, s. */
+  /** Breakpoints are kept to this, s; one that is closer to the end is taken for the end. */
   private static final double NANOSECOND = 1e-9;
 
   private final FlightPlan plan;
@@ -54,6 +57,7 @@ public final class Flight {
   private final List<Double> openCaptures;
   private final double[] scratch;
   private OptionalDouble captureFrom = OptionalDouble.empty();
+  private final int samplesPerEven;
   private int nextSample;
   private double reached;
 
@@ -61,7 +65,7 @@ public final class Flight {
     this.plan = plan;
     this.settings = settings;
     this.motion = plan.motion();
-    this.leading = plan.programme().leading();
+    this.leading = plan.programme().leading(plan.duration());
     int states = motion.dimension();
     this.stick =
         new SurfaceDrive(
@@ -89,9 +93,11 @@ public final class Flight {
             settings.absoluteTolerance(),
             settings.relativeTolerance());
     this.openCaptures = new ArrayList<>(plan.captures());
+    this.samplesPerEven = samplesPerEven(settings);
     this.recorder =
         TimeHistory.recorder(
-            settings.sampleRate(), (int) (plan.duration() * settings.sampleRate()) + 32);
+            settings.sampleRate(),
+            (int) (plan.duration() * settings.sampleRate() * samplesPerEven) + 32);
   }
 
   /**
@@ -104,13 +110,25 @@ public final class Flight {
    *     history would be too long
    */
   public static Flown fly(FlightPlan plan, FlightSettings settings) {
-    if (plan.duration() * settings.sampleRate() > MOST_SAMPLES) {
+    if (plan.duration() * settings.sampleRate() * samplesPerEven(settings) > MOST_SAMPLES) {
       throw new CalculationException(
           "the history would have more than "
               + MOST_SAMPLES
               + " samples; shorten the duration or lower the sample rate");
     }
     return new Flight(plan, settings).run();
+  }
+
+  private static int samplesPerEven(FlightSettings settings) {
+    return (int) Math.max(1, Math.ceil(LEAST_RATE / settings.sampleRate()));
+  }
+
+  /** When the next sample is due; every {@code samplesPerEven}-th is exactly an even one. */
+  private double nextSampleTime() {
+    int even = nextSample / samplesPerEven;
+    return nextSample == even * samplesPerEven
+        ? even / settings.sampleRate()
+        : nextSample / (samplesPerEven * settings.sampleRate());
   }
 
   private Flown run() {
@@ -135,7 +153,7 @@ public final class Flight {
   private NavigableSet<Double> stretchEnds() {
     NavigableSet<Double> ends = new TreeSet<>();
     DoubleStream.of(plan.programme().breakpoints())
-        .filter(time -> time > 0 && time < plan.duration())
+        .filter(time -> time > 0 && time < plan.duration() - NANOSECOND)
         .forEach(ends::add);
     ends.add(plan.duration());
     return ends;
@@ -151,7 +169,7 @@ public final class Flight {
     begin(pedal, start, state);
     record(start, start, state);
     recorder.dropIfRepeated();
-    if (nextSample / settings.sampleRate() <= start) {
+    if (nextSampleTime() <= start) {
       nextSample++;
     }
 
@@ -181,7 +199,7 @@ public final class Flight {
           failure);
     }
     record(end, last, reachedState);
-    if (nextSample / settings.sampleRate() <= end) {
+    if (nextSampleTime() <= end) {
       nextSample++;
     }
     return reachedState;
@@ -192,6 +210,9 @@ public final class Flight {
   }
 
   private void begin(SurfaceDrive drive, double time, double[] state) {
+    if (drive.meetsOrLeavesStop(time)) {
+      events.add(new FlightEvent.Stop(time, drive.control(), drive.isOnStop()));
+    }
     boolean slewed = drive.isSlewing();
     drive.chooseMode(time, state);
     if (drive.isSlewing() != slewed) {
@@ -206,6 +227,8 @@ public final class Flight {
               look,
               s -> drive.beyondStop(Math.min(s.getTime(), last)),
               (s, detector, increasing) -> {
+                recordEvent(s, last);
+                drive.setOnStop(increasing);
                 events.add(new FlightEvent.Stop(s.getTime(), drive.control(), increasing));
                 return Action.RESET_DERIVATIVES;
               }));
@@ -220,6 +243,7 @@ public final class Flight {
                 if (increasing == drive.isSlewing()) {
                   return Action.CONTINUE;
                 }
+                recordEvent(s, last);
                 drive.switchMode(Math.min(s.getTime(), last), s.getPrimaryState());
                 events.add(
                     new FlightEvent.RateLimit(s.getTime(), drive.control(), drive.isSlewing()));
@@ -254,13 +278,19 @@ public final class Flight {
                 + " s: the aeroplane diverges; look at its modes, or shorten the duration");
       }
     }
-    double time = nextSample / settings.sampleRate();
+    double time = nextSampleTime();
     while (time <= current.getTime() && time < stretchEnd) {
       record(time, time, interpolator.getInterpolatedState(time).getPrimaryState());
       nextSample++;
-      time = nextSample / settings.sampleRate();
+      time = nextSampleTime();
     }
     reached = current.getTime();
+  }
+
+  /** Takes a sample where a slope breaks: the largest roll acceleration is often just there. */
+  private void recordEvent(ODEStateAndDerivative at, double last) {
+    record(at.getTime(), Math.min(at.getTime(), last), at.getPrimaryState());
+    recorder.dropIfRepeated();
   }
 
   private void record(double time, double controlTime, double[] state) {

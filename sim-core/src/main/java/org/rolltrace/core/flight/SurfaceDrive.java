@@ -22,6 +22,7 @@ final class SurfaceDrive {
   private final double trimAngle;
   private final int stateIndex;
   private SurfaceMode mode = SurfaceMode.FOLLOWING;
+  private boolean onStop;
 
   /**
    * A drive.
@@ -64,6 +65,21 @@ final class SurfaceDrive {
   /** Above 0 while the hand wants more than the travel. */
   double beyondStop(double time) {
     return Math.abs(wanted(time)) - 1 - ROUNDING;
+  }
+
+  boolean isOnStop() {
+    return onStop;
+  }
+
+  void setOnStop(boolean reached) {
+    onStop = reached;
+  }
+
+  /** Whether a jump has just put the control on its stop, or taken it off. */
+  boolean meetsOrLeavesStop(double time) {
+    boolean before = onStop;
+    onStop = mayMeetStop() && beyondStop(time) > 0;
+    return onStop != before;
   }
 
   private double wanted(double time) {

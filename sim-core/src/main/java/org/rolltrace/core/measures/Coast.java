@@ -32,10 +32,9 @@ final class Coast {
     double faded = FADED * Math.abs(rateThen);
     for (int i = rate.indexAt(start); i + 1 < rate.size(); i++) {
       boolean fades = rate.value(i + 1) <= faded;
-      boolean bottoms = rate.slope(i) < 0 && rate.slope(i + 1) > 0;
+      boolean bottoms = rate.slope(i) < 0 && rate.slope(i + 1) >= 0;
       if (fades || bottoms) {
-        double end =
-            fades ? rate.crossing(i, faded, rate.time(i)) : 0.5 * (rate.time(i) + rate.time(i + 1));
+        double end = fades ? rate.crossing(i, faded, rate.time(i)) : bottom(rate, i);
         return Measure.of(
             BANK_COAST,
             bank.at(end) - bank.at(start),
@@ -47,5 +46,11 @@ final class Coast {
       }
     }
     return Measure.missing(BANK_COAST, "the roll rate has not faded by the end of the manoeuvre");
+  }
+
+  /** Where the slope, taken as straight between two samples, passes through zero. */
+  private static double bottom(Curve rate, int index) {
+    double share = rate.slope(index) / (rate.slope(index) - rate.slope(index + 1));
+    return rate.time(index) + share * (rate.time(index + 1) - rate.time(index));
   }
 }

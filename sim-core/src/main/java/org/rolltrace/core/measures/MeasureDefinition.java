@@ -43,7 +43,7 @@ public record MeasureDefinition(String name, String title, String unit, String d
   public static final MeasureDefinition RESPONSE_TIME_CONSTANT =
       new MeasureDefinition(
           "responseTimeConstant",
-          "Time to 63 % of steady rate",
+          "Time to 63 % of steady",
           "s",
           "from the middle of the stick's movement to the first crossing of 63.2 % of the steady"
               + " roll rate");
@@ -82,21 +82,30 @@ public record MeasureDefinition(String name, String title, String unit, String d
   /** Peak pb/2V. */
   public static final MeasureDefinition HELIX_ANGLE_PEAK =
       new MeasureDefinition(
-          "helixAnglePeak", "Helix angle pb/2V, peak", "rad", "peak roll rate times span over 2 V");
+          "helixAnglePeak", "Helix angle, peak pb/2V", "rad", "peak roll rate times span over 2 V");
 
   /** Steady pb/2V. */
   public static final MeasureDefinition HELIX_ANGLE_STEADY =
       new MeasureDefinition(
           "helixAngleSteady",
-          "Helix angle pb/2V, steady",
+          "Helix angle, steady pb/2V",
           "rad",
           "steady roll rate times span over 2 V");
+
+  /** What the rolling adds to the incidence of the wing tip. */
+  public static final MeasureDefinition TIP_INCIDENCE =
+      new MeasureDefinition(
+          "tipIncidence",
+          "Tip incidence of the roll, peak",
+          "rad",
+          "arc tangent of the peak helix angle: what the rolling adds to the incidence of the tip"
+              + " that goes down");
 
   /** How long half the return takes. */
   public static final MeasureDefinition RETURN_TIME_TO_HALF =
       new MeasureDefinition(
           "returnTimeToHalf",
-          "Return: time to half the bank",
+          "Return: to half the bank",
           "s",
           "from the instant at which all controls are at trim for good until the bank, modulo"
               + " 360 deg, is first half of what it was then");
@@ -105,7 +114,7 @@ public record MeasureDefinition(String name, String title, String unit, String d
   public static final MeasureDefinition RETURN_TIME_TO_FIVE_DEGREES =
       new MeasureDefinition(
           "returnTimeToFiveDegrees",
-          "Return: time to within 5 deg",
+          "Return: to within 5 deg",
           "s",
           "from the instant at which all controls are at trim for good until the bank, modulo"
               + " 360 deg, stays within 5 deg until the end");
@@ -127,7 +136,7 @@ public record MeasureDefinition(String name, String title, String unit, String d
   public static final MeasureDefinition PEDAL_TO_HOLD_SLIP =
       new MeasureDefinition(
           "pedalToHoldSlip",
-          "Pedal needed to hold the slip",
+          "Pedal to hold the slip",
           "1",
           "largest pedal position, as a fraction of travel, that the yawing moments need for the"
               + " held slip");
@@ -136,7 +145,7 @@ public record MeasureDefinition(String name, String title, String unit, String d
   public static final MeasureDefinition FREE_SLIP_BANK_DIFFERENCE =
       new MeasureDefinition(
           "freeSlipBankDifference",
-          "Bank, away from free slip by",
+          "Bank, from free slip by",
           "rad",
           "largest difference in bank from the same manoeuvre with free slip");
 
@@ -144,7 +153,7 @@ public record MeasureDefinition(String name, String title, String unit, String d
   public static final MeasureDefinition FREE_SLIP_ROLL_RATE_DIFFERENCE =
       new MeasureDefinition(
           "freeSlipRollRateDifference",
-          "Roll rate, away from free slip by",
+          "Roll rate, from free slip by",
           "rad/s",
           "largest difference in roll rate from the same manoeuvre with free slip");
 
@@ -161,7 +170,7 @@ public record MeasureDefinition(String name, String title, String unit, String d
             : String.format(Locale.ROOT, "%s", degrees);
     return new MeasureDefinition(
         "timeToBank" + angle,
-        "Time to " + angle + " deg of bank change",
+        "Time to " + angle + " deg of bank",
         "s",
         "first crossing of a bank change of " + angle + " deg in the commanded direction");
   }

@@ -24,6 +24,12 @@ final class RollEntry {
   /** 1 − 1/e to the three figures in which the measure is defined. */
   private static final double RESPONSE_LEVEL = 0.632;
 
+  /** Movements are kept to the nanosecond; a hold this close behind one follows from it, s. */
+  private static final double MOVE_ENDS_WITHIN = 1e-6;
+
+  private static final String ALREADY_ROLLING =
+      "the roll rate is at that level already when the control first moves";
+
   private final Manoeuvre manoeuvre;
   private final MeasureOptions options;
 
@@ -35,10 +41,11 @@ final class RollEntry {
   List<Measure> measures() {
     List<Measure> measures = new ArrayList<>();
     Measure timeConstant = rollModeTimeConstant();
-    Optional<InputShape> leading = manoeuvre.programme().leading().map(PilotInput::shape);
-    if (leading.isEmpty() || leading.get().start() >= manoeuvre.duration()) {
+    Optional<InputShape> leading =
+        manoeuvre.programme().leading(manoeuvre.duration()).map(PilotInput::shape);
+    if (leading.isEmpty()) {
       String reason =
-          leading.isEmpty()
+          manoeuvre.programme().leading(Double.POSITIVE_INFINITY).isEmpty()
               ? "no control moves in this scenario"
               : "the first input starts after the end of the manoeuvre";
       measures.add(Measure.missing(PEAK_ROLL_RATE, reason));
@@ -53,6 +60,7 @@ final class RollEntry {
       measures.add(Measure.missing(ROLL_ACCELERATION, reason));
       measures.add(Measure.missing(HELIX_ANGLE_PEAK, reason));
       measures.add(Measure.missing(HELIX_ANGLE_STEADY, reason));
+      measures.add(Measure.missing(TIP_INCIDENCE, reason));
       return measures;
     }
     InputShape input = leading.get();
@@ -66,18 +74,21 @@ final class RollEntry {
     measures.add(steady);
     measures.add(timeConstant);
     double level = direction * steady.value().orElse(0);
-    if (steady.value().isPresent() && level <= 0) {
-      String reason = "the steady rate is against the commanded direction";
-      measures.add(Measure.missing(RESPONSE_TIME_CONSTANT, reason));
-      measures.add(Measure.missing(SETTLING_TIME, reason));
-      measures.add(Measure.missing(RISE_TIME, reason));
-    } else if (steady.value().isPresent()) {
+    boolean oneMove =
+        hold.isPresent()
+            && hold.get().from() <= input.start() + input.handTime() + MOVE_ENDS_WITHIN;
+    if (level > 0 && oneMove) {
       double release = hold.orElseThrow().to();
       measures.add(responseTimeConstant(rate, input, level, release));
       measures.add(settlingTime(rate, input, level, release));
       measures.add(riseTime(rate, input, level, release));
     } else {
-      String reason = "no steady roll rate to compare with";
+      String reason =
+          steady.value().isEmpty()
+              ? "no steady roll rate to compare with"
+              : level > 0
+                  ? "the first movement of the stick is not the one that leads to the hold"
+                  : "the steady roll rate is against the commanded direction";
       measures.add(Measure.missing(RESPONSE_TIME_CONSTANT, reason));
       measures.add(Measure.missing(SETTLING_TIME, reason));
       measures.add(Measure.missing(RISE_TIME, reason));
@@ -88,6 +99,7 @@ final class RollEntry {
     measures.add(rollAcceleration(input, direction));
     measures.add(helix(HELIX_ANGLE_PEAK, peak));
     measures.add(helix(HELIX_ANGLE_STEADY, steady));
+    measures.add(tipIncidence(helix(HELIX_ANGLE_PEAK, peak)));
     return measures;
   }
 
@@ -176,6 +188,9 @@ final class RollEntry {
 
   private static Measure responseTimeConstant(
       Curve rate, InputShape input, double level, double release) {
+    if (rate.at(input.start()) >= RESPONSE_LEVEL * level) {
+      return Measure.missing(RESPONSE_TIME_CONSTANT, ALREADY_ROLLING);
+    }
     double middle = input.start() + 0.5 * input.handTime();
     return rate.firstAtOrAbove(RESPONSE_LEVEL * level, input.start(), release).stream()
         .mapToObj(time -> Measure.of(RESPONSE_TIME_CONSTANT, time - middle))
@@ -187,7 +202,7 @@ final class RollEntry {
     double low = level - options.settlingBand() * Math.abs(level);
     double high = level + options.settlingBand() * Math.abs(level);
     int last = rate.indexAt(release);
-    if (rate.time(last) > release || !within(rate.value(last), low, high)) {
+    if (rate.time(last) > release) {
       last--;
     }
     int index = last;
@@ -211,6 +226,9 @@ final class RollEntry {
   }
 
   private static Measure riseTime(Curve rate, InputShape input, double level, double release) {
+    if (rate.at(input.start()) >= 0.1 * level) {
+      return Measure.missing(RISE_TIME, ALREADY_ROLLING);
+    }
     OptionalDouble tenth = rate.firstAtOrAbove(0.1 * level, input.start(), release);
     OptionalDouble ninth = rate.firstAtOrAbove(0.9 * level, input.start(), release);
     return tenth.isPresent() && ninth.isPresent()
@@ -241,6 +259,12 @@ final class RollEntry {
     return rate.value().isPresent()
         ? Measure.of(definition, rate.value().getAsDouble() * manoeuvre.halfSpanOverSpeed())
         : Measure.missing(definition, rate.remark());
+  }
+
+  private static Measure tipIncidence(Measure helix) {
+    return helix.value().isPresent()
+        ? Measure.of(TIP_INCIDENCE, Math.atan(helix.value().getAsDouble()))
+        : Measure.missing(TIP_INCIDENCE, helix.remark());
   }
 
   private static String format(String pattern, Object... values) {

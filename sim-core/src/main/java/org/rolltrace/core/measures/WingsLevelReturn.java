@@ -23,6 +23,7 @@ final class WingsLevelReturn {
     double start =
         manoeuvre.programme().inputs().stream()
             .filter(input -> input.shape().size() != 0)
+            .filter(input -> input.shape().start() < manoeuvre.duration())
             .mapToDouble(input -> input.shape().end())
             .max()
             .orElse(0);
@@ -69,7 +70,8 @@ final class WingsLevelReturn {
       Manoeuvre manoeuvre, Curve bank, double start, double end, double size) {
     OptionalDouble half = bank.firstAtOrBelow(0.5 * size, start, end);
     if (half.isPresent()) {
-      return Measure.of(RETURN_TIME_TO_HALF, half.getAsDouble() - start);
+      return Measure.of(
+          RETURN_TIME_TO_HALF, half.getAsDouble() - start, "with the controls held at trim");
     }
     double last = bank.at(end);
     OptionalDouble doubled = bank.firstAtOrAbove(2 * size, start, end);

@@ -93,14 +93,27 @@ public record LateralModes(
     return best;
   }
 
-  /** Orders roots by their share in yaw, largest first, keeping the two of a pair side by side. */
+  /**
+   * Orders roots by their share in yaw, largest first, keeping the two of a pair side by side and
+   * in the same half: a lone pair between two real roots comes first, so that it is the dutch roll.
+   */
   private static List<Root> pairsTogether(List<Root> roots) {
-    return roots.stream()
-        .sorted(
-            Comparator.comparingDouble((Root root) -> -pairShare(root, roots))
-                .thenComparingDouble(root -> root.value().getRealPart())
-                .thenComparingDouble(root -> Math.abs(root.value().getImaginaryPart())))
-        .toList();
+    List<Root> ordered =
+        new ArrayList<>(
+            roots.stream()
+                .sorted(
+                    Comparator.comparingDouble((Root root) -> -pairShare(root, roots))
+                        .thenComparingDouble(root -> root.value().getRealPart())
+                        .thenComparingDouble(root -> Math.abs(root.value().getImaginaryPart())))
+                .toList());
+    boolean pairAcrossTheHalves =
+        ordered.size() == 4
+            && ordered.get(0).value().getImaginaryPart() == 0
+            && ordered.get(1).value().getImaginaryPart() != 0;
+    if (pairAcrossTheHalves) {
+      ordered.add(2, ordered.remove(0));
+    }
+    return ordered;
   }
 
   private static double pairShare(Root root, List<Root> roots) {

@@ -88,15 +88,17 @@ public final class PilotProgramme {
    * The input from which times count: the first that moves the stick, or the pedals where the stick
    * stays still.
    *
+   * @param end the end of the manoeuvre, s; what starts then or later does not count
    * @return the input, or empty when nothing moves
    */
-  public Optional<PilotInput> leading() {
-    return firstOn(Control.STICK).or(() -> firstOn(Control.PEDAL));
+  public Optional<PilotInput> leading(double end) {
+    return firstOn(Control.STICK, end).or(() -> firstOn(Control.PEDAL, end));
   }
 
-  private Optional<PilotInput> firstOn(Control control) {
+  private Optional<PilotInput> firstOn(Control control, double end) {
     return inputs.stream()
         .filter(input -> input.control() == control && input.shape().size() != 0)
+        .filter(input -> input.shape().start() < end)
         .min(Comparator.comparingDouble(input -> input.shape().start()));
   }
 

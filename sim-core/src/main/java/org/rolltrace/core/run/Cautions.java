@@ -125,7 +125,7 @@ final class Cautions {
         .forEach(
             input ->
                 add(
-                    "the %s input at %.4g s starts after the end of the manoeuvre",
+                    "the %s input at %.2f s starts after the end of the manoeuvre",
                     input.control().word(), input.shape().start()));
   }
 
@@ -202,6 +202,9 @@ final class Cautions {
   }
 
   private void addDerivatives() {
+    if (scenario.data().derivatives().source().isBlank()) {
+      add("the aeroplane file does not say where its derivatives are from");
+    }
     Optional<FlightCondition> validAt = scenario.data().derivatives().validAt();
     if (validAt.isEmpty()) {
       add("the aeroplane file does not say at which condition its derivatives hold");

@@ -21,6 +21,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
+import org.junit.jupiter.params.provider.ValueSource;
 import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.pilot.HoldInput;
@@ -158,12 +159,14 @@ class ResultWritingTest {
   }
 
   /** A folder in the place of one of the files: nothing is left half done. */
-  @Test
-  void whenOneFileCannotTakeItsPlaceNoDraftIsLeft() throws IOException {
-    Files.createDirectories(folder.resolve("history.csv").resolve("full"));
+  @ParameterizedTest
+  @ValueSource(strings = {"history.csv", "result.json"})
+  void whenOneFileCannotTakeItsPlaceNothingIsWritten(String taken) throws IOException {
+    Files.createDirectories(folder.resolve(taken).resolve("full"));
     assertThatExceptionOfType(UncheckedIOException.class)
-        .isThrownBy(() -> ResultFolder.write(folder, small(), "test"));
-    assertThat(namesIn(folder)).containsExactly("history.csv");
+        .isThrownBy(() -> ResultFolder.write(folder, small(), "test"))
+        .withMessageContaining(taken + " is a folder");
+    assertThat(namesIn(folder)).containsExactly(taken);
   }
 
   private static List<String> namesIn(Path folder) throws IOException {

@@ -86,9 +86,9 @@ class ScenarioFileTest {
               "format": "rolltrace-scenario/1",
               "title": "As little as there can be",
               "aeroplane": {
-                "name": "Bare", "span": "10 m", "wingArea": "15 m2",
+                "span": "10 m", "wingArea": "15 m2",
                 "inertia": { "roll": "1000 kg m2" },
-                "derivatives": { "source": "made up", "values": { "Cl_p": -0.5, "Cl_da": 0.1 } }
+                "derivatives": { "values": { "Cl_p": -0.5, "Cl_da": 0.1 } }
               },
               "condition": { "pressureAltitude": "0 m", "equivalentAirspeed": "60 m/s",
                              "flightPathAngle": "0.5 rad", "propellerRollMoment": "7 N m" },
@@ -102,6 +102,8 @@ class ScenarioFileTest {
     assertThat(scenario.start()).isEqualTo(new Start(new PropellerMoments(7), Disturbance.NONE));
     // Straight flight along the path.
     assertThat(scenario.condition().loadFactor()).isEqualTo(Math.cos(0.5));
+    assertThat(scenario.data().aeroplane().name()).isEqualTo("Unnamed aeroplane");
+    assertThat(scenario.data().derivatives().source()).isEmpty();
     assertThat(scenario.data().aeroplane().mass()).isEmpty();
     assertThat(scenario.data().aeroplane().ailerons()).isEmpty();
     assertThat(scenario.data().aeroplane().inertia().yaw()).isEmpty();

@@ -228,7 +228,7 @@ class SchemasTest {
         Arguments.of("\"roll\": \"1000 kg m2\", ", ""),
         Arguments.of("\"up\": \"20 deg\", ", ""),
         Arguments.of("\"left\": \"25 deg\", ", ""),
-        Arguments.of("\"source\": \"made up\", ", ""),
+        Arguments.of("\"source\": \"made up\", ", "\"source\": 3, "),
         Arguments.of("\"Cl_p\": -0.5", "\"Cl_p\": \"-0.5\""),
         Arguments.of("\"Cl_p\": -0.5", "\"CL_p\": -0.5"),
         Arguments.of("\"source\": \"made up\"", "\"source\": \"made up\", \"per\": \"grad\""),

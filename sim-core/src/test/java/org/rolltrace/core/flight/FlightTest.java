@@ -31,6 +31,7 @@ import org.rolltrace.core.motion.LateralModel;
 import org.rolltrace.core.motion.LateralMotion;
 import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.pilot.Control;
+import org.rolltrace.core.pilot.DoubletInput;
 import org.rolltrace.core.pilot.HoldInput;
 import org.rolltrace.core.pilot.PilotInput;
 import org.rolltrace.core.pilot.StepInput;
@@ -288,6 +289,19 @@ class FlightTest {
   }
 
   @Test
+  void aJumpOntoTheStopAndOffItIsSaidToo() {
+    PilotInput[] inputs = {stick(new StepInput(1, 0.8, 0)), stick(new HoldInput(2, 0.6, 1, 0))};
+    RunResult result =
+        ScenarioRun.execute(
+            Scenarios.of(oneDegree(0.4, 8), seaLevel(50), SlipTreatment.HELD, 5, inputs));
+    assertThat(result.events())
+        .filteredOn(e -> e instanceof FlightEvent.Stop)
+        .containsExactly(
+            new FlightEvent.Stop(2, Control.STICK, true),
+            new FlightEvent.Stop(3, Control.STICK, false));
+  }
+
+  @Test
   void everyHundredthHasItsRowFromZeroToTheEnd() {
     RunResult result =
         ScenarioRun.execute(
@@ -313,6 +327,50 @@ class FlightTest {
             .history();
     assertThat(history.time(history.size() - 1)).isEqualTo(duration);
     assertThat(history.evenSamples()).hasSize((int) (duration * 100) + 1);
+  }
+
+  /** A movement that ends a rounding before the duration leaves nothing to be integrated. */
+  @Test
+  void aBreakpointAtTheEndDoesNotStopTheFlight() {
+    TimeHistory history =
+        ScenarioRun.execute(
+                Scenarios.of(
+                    oneDegree(0.4, 8),
+                    seaLevel(50),
+                    SlipTreatment.HELD,
+                    Math.nextUp(4.2),
+                    stick(new StepInput(4, 1, 0.2))))
+            .history();
+    assertThat(history.time(history.size() - 1)).isEqualTo(Math.nextUp(4.2));
+  }
+
+  /** Every kind of break in one manoeuvre: a kink at unequal rudder travel, a jump, both stops. */
+  @Test
+  void usualToleranceHoldsForPedalAndStickTogether() {
+    double allowed = Math.toRadians(5e-3); // stated for every sample, deg and deg/s
+    for (long seed = 0; seed < 20; seed++) {
+      RandomAeroplane any = RandomAeroplane.of(seed);
+      Scenario scenario =
+          Scenarios.of(
+              any.data(),
+              any.condition(),
+              SlipTreatment.FREE,
+              8,
+              pedal(new DoubletInput(0.503, 1, 0.8, 0.317)),
+              stick(new DoubletInput(0.7, -0.9, 0.8, 0)),
+              stick(new HoldInput(1, -0.4, 3, 0.2)));
+      TimeHistory usual = ScenarioRun.execute(scenario).history();
+      TimeHistory finest =
+          ScenarioRun.execute(scenario, FlightSettings.DEFAULT.withTolerance(1e-12)).history();
+      int[] here = usual.evenSamples();
+      int[] there = finest.evenSamples();
+      for (int i = 0; i < here.length; i++) {
+        for (Channel channel : List.of(Channel.BANK, Channel.ROLL_RATE, Channel.YAW_RATE)) {
+          assertThat(usual.value(channel, here[i]))
+              .isCloseTo(finest.value(channel, there[i]), within(allowed / 10));
+        }
+      }
+    }
   }
 
   @Test

@@ -9,10 +9,19 @@ import static org.rolltrace.core.testing.Scenarios.pedal;
 import static org.rolltrace.core.testing.Scenarios.seaLevel;
 import static org.rolltrace.core.testing.Scenarios.stick;
 
+import java.util.EnumMap;
 import java.util.List;
+import java.util.Map;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
+import org.rolltrace.core.aeroplane.Aeroplane;
+import org.rolltrace.core.aeroplane.Ailerons;
+import org.rolltrace.core.aeroplane.Inertia;
+import org.rolltrace.core.aeroplane.SurfaceDynamics;
+import org.rolltrace.core.derivatives.Coefficient;
+import org.rolltrace.core.derivatives.LateralDerivatives;
+import org.rolltrace.core.flight.FlightSettings;
 import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.pilot.DoubletInput;
@@ -23,6 +32,8 @@ import org.rolltrace.core.pilot.StepInput;
 import org.rolltrace.core.propeller.PropellerMoments;
 import org.rolltrace.core.run.RunResult;
 import org.rolltrace.core.run.ScenarioRun;
+import org.rolltrace.core.scenario.AeroplaneData;
+import org.rolltrace.core.scenario.Scenario;
 import org.rolltrace.core.testing.RandomAeroplane;
 import org.rolltrace.core.testing.Scenarios;
 
@@ -112,7 +123,7 @@ class MeasuresTest {
     RunResult result = fly(5, new HoldInput(1, 1, 0.8, 0));
     assertThat(reason(result, "steadyRollRate"))
         .isEqualTo("not reached: the stick is held for 0.800 s, 2.0 time constants");
-    assertThat(reason(result, "settlingTime")).startsWith("no steady roll rate: not reached");
+    assertThat(reason(result, "settlingTime")).isEqualTo("no steady roll rate to compare with");
     assertThat(value(result, "peakRollRate"))
         .isCloseTo(STEADY * -Math.expm1(-0.8 / T), within(CLOSE));
   }
@@ -123,7 +134,7 @@ class MeasuresTest {
         Scenarios.of(
             oneDegree(T, K), seaLevel(50), SlipTreatment.HELD, 10, stick(new StepInput(1, 1, 0)));
     var scenario =
-        new org.rolltrace.core.scenario.Scenario(
+        new Scenario(
             base.title(),
             base.data(),
             base.condition(),
@@ -148,6 +159,16 @@ class MeasuresTest {
   void aDoubletHasNoSteadyRate() {
     RunResult result = fly(20, new DoubletInput(1, 1, 5, 0.1));
     assertThat(reason(result, "steadyRollRate")).isEqualTo("no held stick in this scenario");
+  }
+
+  /** The times of an entry count from its own movement, not from an earlier one. */
+  @Test
+  void aHoldAfterADoubletHasASteadyRateButNoTimesFromTheDoublet() {
+    RunResult result = fly(20, new DoubletInput(1, 0.5, 1, 0.1), new StepInput(8, 1, 0.1));
+    assertThat(value(result, "steadyRollRate")).isCloseTo(STEADY, within(1e-8));
+    for (String name : List.of("responseTimeConstant", "settlingTime", "riseTime")) {
+      assertThat(reason(result, name)).contains("not the one that leads to the hold");
+    }
   }
 
   @Test
@@ -251,13 +272,138 @@ class MeasuresTest {
     assertThat(reason(result, "steadyRollRate")).isEqualTo("no held stick in this scenario");
   }
 
-  /** A wing of 14.44 m at 120 deg/s moves its tip at 15 m/s; at 370 km/h that is 8.4 deg. */
+  /**
+   * A wing of 14.44 m at 120 deg/s moves its tip at 15 m/s; at 370 km/h that is 8.4 deg of
+   * incidence (common practice, no source).
+   */
   @Test
-  void helixAngleArithmetic() {
-    double tip = Math.toRadians(120) * 14.44 / 2;
-    assertThat(tip).isCloseTo(15, within(0.5)); // two figures; common practice, no source
+  void helixAngleAndTipIncidenceOfAFastRoll() {
+    double span = 14.44;
     double speed = 370 / 3.6;
-    assertThat(Math.toDegrees(Math.atan(tip / speed))).isCloseTo(8.4, within(0.05));
+    double tipSpeed = Math.toRadians(120) * span / 2;
+    Map<Coefficient, Double> values = new EnumMap<>(Coefficient.class);
+    values.put(Coefficient.CL_P, -0.5);
+    // in a steady roll Cl_p p̂ + Cl_δa δa = 0
+    values.put(Coefficient.CL_DA, 0.5 * tipSpeed / speed / FULL_AILERON);
+    AeroplaneData data =
+        new AeroplaneData(
+            Aeroplane.builder("fast roll", span, 20, Inertia.ofRoll(3000))
+                .ailerons(Ailerons.of(FULL_AILERON, FULL_AILERON))
+                .build(),
+            LateralDerivatives.ofGiven(values, "test"));
+    RunResult result =
+        ScenarioRun.execute(
+            Scenarios.of(
+                data, seaLevel(speed), SlipTreatment.HELD, 10, stick(new StepInput(0, 1, 0))));
+    assertThat(Math.toDegrees(value(result, "steadyRollRate"))).isCloseTo(120, within(1e-6));
+    assertThat(value(result, "helixAngleSteady") * speed).isCloseTo(15, within(0.5)); // two figures
+    // two figures of 8.4
+    assertThat(Math.toDegrees(value(result, "tipIncidence"))).isCloseTo(8.4, within(0.05));
+  }
+
+  /** What is read off does not depend on how many rows the history is to have. */
+  @Test
+  void measuresDoNotDependOnTheSampleRate() {
+    RandomAeroplane any = RandomAeroplane.of(4);
+    Scenario scenario =
+        Scenarios.of(
+            any.data(),
+            any.condition(),
+            SlipTreatment.FREE,
+            12,
+            stick(new HoldInput(1.003, 0.4, 6, 0.15)));
+    RunResult usual = ScenarioRun.execute(scenario);
+    for (double rate : new double[] {1, 33.3, 1000}) {
+      RunResult other = ScenarioRun.execute(scenario, FlightSettings.DEFAULT.withSampleRate(rate));
+      assertThat(other.history().evenSamples()).hasSize((int) (12 * rate) + 1);
+      for (Measure measure : usual.measures()) {
+        Measure there = other.measure(measure.definition().name()).orElseThrow();
+        assertThat(there.value().isPresent()).isEqualTo(measure.value().isPresent());
+        if (measure.value().isPresent()) {
+          // a cubic over 0.01 s is off by its fourth power, some 1e-6 of what changes within 0.1 s;
+          // the largest acceleration is taken from the samples themselves, off by their square
+          double share = measure.definition().name().equals("rollAcceleration") ? 1e-3 : 1e-4;
+          assertThat(there.value().getAsDouble())
+              .as(measure.definition().name() + " at " + rate)
+              .isCloseTo(
+                  measure.value().getAsDouble(),
+                  within(share * Math.abs(measure.value().getAsDouble())));
+        }
+      }
+    }
+  }
+
+  /** With a rate limit R the roll accelerates most just when the surface arrives, at δ/R. */
+  @Test
+  void theLargestAccelerationIsFoundWhereTheSurfaceStops() {
+    double limit = Math.toRadians(63.7);
+    RunResult result =
+        ScenarioRun.execute(
+            Scenarios.of(
+                oneDegree(T, K, new SurfaceDynamics(limit, 0)),
+                seaLevel(50),
+                SlipTreatment.HELD,
+                5,
+                stick(new StepInput(1, 1, 0))));
+    // ṗ + p/T = K R t from rest has ṗ = K R T (1 − e^(−t/T))
+    assertThat(value(result, "rollAcceleration"))
+        .isCloseTo(-K * limit * T * Math.expm1(-FULL_AILERON / limit / T), within(1e-8));
+  }
+
+  @Test
+  void aRollThatIsThereAlreadyHasNoRiseTime() {
+    RunResult result =
+        ScenarioRun.execute(
+            Scenarios.of(
+                oneDegree(T, K),
+                seaLevel(50),
+                SlipTreatment.HELD,
+                new Disturbance(0, 0.9 * STEADY, 0),
+                PropellerMoments.NONE,
+                10,
+                stick(new StepInput(0, 1, 0.1))));
+    assertThat(value(result, "steadyRollRate")).isCloseTo(STEADY, within(1e-8));
+    assertThat(reason(result, "riseTime")).contains("already");
+    assertThat(reason(result, "responseTimeConstant")).contains("already");
+  }
+
+  @Test
+  void anInputAfterTheEndNeitherLeadsNorHindersTheReturn() {
+    RandomAeroplane any = stableSpiral();
+    RunResult result =
+        ScenarioRun.execute(
+            Scenarios.of(
+                any.data(),
+                any.condition(),
+                SlipTreatment.FREE,
+                new Disturbance(Math.toRadians(20), 0, 0),
+                PropellerMoments.NONE,
+                300,
+                stick(new StepInput(400, 1, 0.1)),
+                pedal(new HoldInput(1, 0.01, 1, 0.1))));
+    assertThat(value(result, "peakRollRate")).isPositive();
+    assertThat(value(result, "returnTimeToHalf")).isPositive();
+  }
+
+  /** The first minimum of the roll rate after release, found between samples. */
+  @Test
+  void theCoastEndsAtTheFirstMinimumWhereTheRateDoesNotFade() {
+    RandomAeroplane any = RandomAeroplane.of(2);
+    // a second push takes over while the rate of the first still fades
+    PilotInput[] inputs = {
+      stick(new HoldInput(1, 1, 2, 0)), stick(new StepInput(3.0537, 0.8, 0.2))
+    };
+    double[] coasts = new double[2];
+    for (int i = 0; i < 2; i++) {
+      coasts[i] =
+          value(
+              ScenarioRun.execute(
+                  Scenarios.of(any.data(), any.condition(), SlipTreatment.FREE, 6, inputs),
+                  FlightSettings.DEFAULT.withSampleRate(i == 0 ? 100 : 5000)),
+              "bankCoast");
+    }
+    // the rate at the bottom, under 1 rad/s, times what straight slopes miss of its instant
+    assertThat(coasts[0]).isCloseTo(coasts[1], within(2e-4));
   }
 
   @Test

@@ -8,6 +8,7 @@ import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Random;
 import org.ejml.data.Complex_F64;
 import org.ejml.simple.SimpleMatrix;
 import org.junit.jupiter.api.Test;
@@ -44,6 +45,35 @@ class LateralModesTest {
         assertThat(found.get(i)[0]).isCloseTo(expected.get(i).getReal(), within(1e-10));
         assertThat(found.get(i)[1]).isCloseTo(expected.get(i).getImaginary(), within(1e-10));
       }
+    }
+  }
+
+  /**
+   * Odd aeroplanes too keep all four roots, whichever they are called: their sum is the trace of
+   * the matrix (linear algebra).
+   */
+  @Test
+  void noRootIsLostOrNamedTwice() {
+    for (long seed = 0; seed < 500; seed++) {
+      RandomAeroplane any = RandomAeroplane.of(seed);
+      Random random = new Random(seed);
+      Map<Coefficient, Double> values = new EnumMap<>(Coefficient.class);
+      for (Coefficient c : Coefficient.values()) {
+        values.put(c, any.data().derivatives().value(c));
+      }
+      values.put(Coefficient.CL_P, -0.6 * random.nextDouble());
+      values.put(Coefficient.CN_BETA, -0.1 + 0.2 * random.nextDouble());
+      values.put(Coefficient.CL_BETA, -0.2 + 0.3 * random.nextDouble());
+      values.put(Coefficient.CN_R, -0.15 * random.nextDouble());
+      LateralMotion motion =
+          LateralMotion.of(
+              SlipTreatment.FREE, model(any, LateralDerivatives.ofGiven(values, "test")));
+      List<double[]> found = roots(LateralModes.of(motion));
+      assertThat(found).hasSize(4);
+      double[][] a = motion.linearised();
+      // a few roots of up to 30 1/s, each to about 1e-14 of the largest
+      assertThat(found.stream().mapToDouble(root -> root[0]).sum())
+          .isCloseTo(a[0][0] + a[1][1] + a[2][2] + a[3][3], within(1e-10));
     }
   }
 

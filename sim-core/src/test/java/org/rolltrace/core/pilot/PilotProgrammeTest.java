@@ -34,10 +34,11 @@ class PilotProgrammeTest {
   void theStickLeadsEvenWhenThePedalsMoveFirst() {
     PilotInput pedal = new PilotInput(Control.PEDAL, new StepInput(0, 0.5, 0.1));
     PilotInput stick = new PilotInput(Control.STICK, new StepInput(1, -0.5, 0.1));
-    assertThat(PilotProgramme.of(List.of(pedal, stick)).leading()).contains(stick);
-    assertThat(PilotProgramme.of(List.of(pedal)).leading()).contains(pedal);
-    assertThat(PilotProgramme.of(List.of()).leading()).isEmpty();
-    assertThat(stick(new StepInput(0, 0, 0.1)).leading()).isEmpty();
+    assertThat(PilotProgramme.of(List.of(pedal, stick)).leading(9)).contains(stick);
+    assertThat(PilotProgramme.of(List.of(pedal)).leading(9)).contains(pedal);
+    assertThat(PilotProgramme.of(List.of()).leading(9)).isEmpty();
+    assertThat(stick(new StepInput(0, 0, 0.1)).leading(9)).isEmpty();
+    assertThat(stick(new StepInput(9, 1, 0.1)).leading(9)).isEmpty();
   }
 
   @Test

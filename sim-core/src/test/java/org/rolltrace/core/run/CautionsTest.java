@@ -138,7 +138,7 @@ class CautionsTest {
     flownAt = condition(245);
     assertThat(cautions())
         .anyMatch(c -> c.startsWith("Mach 0.720 is above 0.7"))
-        .anyMatch(c -> c.contains("the lift coefficient is 0.06 times"))
+        .anyMatch(c -> c.contains("the lift coefficient is 0.0600 times"))
         .anyMatch(c -> c.contains("Mach 0.72 instead of 0.18"));
   }
 
@@ -191,5 +191,38 @@ class CautionsTest {
             Scenarios.oneDegree(0.4, 8).aeroplane(), Scenarios.oneDegree(0.4, 8).derivatives());
     assertThat(ScenarioRun.execute(Scenarios.of(data, AT_60, SlipTreatment.HELD, 1)).cautions())
         .anyMatch(c -> c.contains("does not say at which condition"));
+  }
+
+  @Test
+  void derivativesWithoutASourceCarryACaution() {
+    AeroplaneData known = Scenarios.oneDegree(0.4, 8);
+    String caution = "the aeroplane file does not say where its derivatives are from";
+    assertThat(cautionsOf(known)).doesNotContain(caution);
+    Map<Coefficient, Double> values = new EnumMap<>(Coefficient.class);
+    values.put(Coefficient.CL_P, known.derivatives().value(Coefficient.CL_P));
+    values.put(Coefficient.CL_DA, known.derivatives().value(Coefficient.CL_DA));
+    assertThat(
+            cautionsOf(
+                new AeroplaneData(known.aeroplane(), LateralDerivatives.ofGiven(values, ""))))
+        .contains(caution);
+  }
+
+  private static List<String> cautionsOf(AeroplaneData data) {
+    return ScenarioRun.execute(Scenarios.of(data, Scenarios.seaLevel(50), SlipTreatment.HELD, 1))
+        .cautions();
+  }
+
+  @Test
+  void wrongSignsOfAileronAndDamping() {
+    values.put(Coefficient.CL_DA, -0.12);
+    assertThat(cautions(0.2)).anyMatch(c -> c.startsWith("right stick does not roll right"));
+    values.put(Coefficient.CL_P, 0.01);
+    assertThat(cautions()).anyMatch(c -> c.startsWith("the roll is not damped"));
+  }
+
+  @Test
+  void anInputAfterTheEnd() {
+    assertThat(cautions(stick(new StepInput(5, 0.2, 0.1))))
+        .anyMatch(c -> c.equals("the stick input at 5.00 s starts after the end of the manoeuvre"));
   }
 }

@@ -44,10 +44,23 @@ public final class CommandLineProgram implements Runnable {
     commandLine.setParameterExceptionHandler(CommandLineProgram::badArguments);
     commandLine.setExecutionExceptionHandler(
         (failure, command, parsed) -> failed(failure, command.getErr()));
-    int exitCode = commandLine.execute(arguments);
-    out.flush();
+    int exitCode = execute(commandLine, arguments, err);
+    if (out.checkError()) {
+      err.println("the result cannot be printed: standard output takes no more");
+      exitCode = ExitCode.FAILED;
+    }
     err.flush();
-    return out.checkError() ? ExitCode.FAILED : exitCode;
+    return exitCode;
+  }
+
+  private static int execute(CommandLine commandLine, String[] arguments, PrintWriter err) {
+    try {
+      return commandLine.execute(arguments);
+    } catch (VirtualMachineError exhausted) {
+      // picocli lets errors pass, and Java would end with 1 and a stack trace.
+      err.println("The program ran out of memory (" + exhausted + "). Give Java more with -Xmx.");
+      return ExitCode.FAILED;
+    }
   }
 
   private static int badArguments(CommandLine.ParameterException fault, String[] arguments) {

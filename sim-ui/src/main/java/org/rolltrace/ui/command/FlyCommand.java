@@ -100,7 +100,11 @@ final class FlyCommand implements Callable<Integer> {
       return Path.of(text);
     } catch (InvalidPathException noPath) {
       throw new CommandLine.ParameterException(
-          spec.commandLine(), "'" + text + "' is not a path on this system.");
+          spec.commandLine(),
+          "'"
+              + text
+              + "' is not a path on this system. Letters beyond ASCII in it need a locale that has"
+              + " them, such as LC_ALL=C.UTF-8.");
     }
   }
 

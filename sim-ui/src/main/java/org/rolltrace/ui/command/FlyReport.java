@@ -209,12 +209,16 @@ final class FlyReport {
       row.append(
           derivatives.origin(coefficient) == Origin.ABSENT
               ? format("%10s", "absent")
-              : format("%10s", number(derivatives.value(coefficient))));
+              : format("%10s", derivative(derivatives.value(coefficient))));
       if (coefficient.symbol().endsWith("_dr")) {
         line(row.toString());
         row.setLength(0);
       }
     }
+  }
+
+  private static String derivative(double value) {
+    return value == 0 || Math.abs(value) >= 1e-3 ? format("%.5f", value) : number(value);
   }
 
   private void addTrim() {

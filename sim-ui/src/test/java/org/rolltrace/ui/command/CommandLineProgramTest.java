@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.StringWriter;
+import java.io.Writer;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -213,6 +214,29 @@ class CommandLineProgramTest {
     assertThat(answer.exitCode()).isZero();
     assertThat(answer.out())
         .isEqualTo(Files.readString(SCENARIOS.resolve(format + ".schema.json")));
+  }
+
+  /** A full disk behind standard output. */
+  @Test
+  void aResultThatCannotBePrintedEndsWithThree() {
+    Writer full =
+        new Writer() {
+          @Override
+          public void write(char[] text, int from, int length) throws IOException {
+            throw new IOException("no room");
+          }
+
+          @Override
+          public void flush() {}
+
+          @Override
+          public void close() {}
+        };
+    StringWriter err = new StringWriter();
+    String[] arguments = {"fly", ROLL_ENTRY, "--json"};
+    assertThat(CommandLineProgram.run(arguments, new PrintWriter(full), new PrintWriter(err)))
+        .isEqualTo(3);
+    assertThat(err.toString()).contains("the result cannot be printed");
   }
 
   @Test

@@ -103,4 +103,19 @@ class RunnableJarIT {
     assertThat(java(List.of(), "fly", ROLL_ENTRY, "--out", taken.toString()).exitCode())
         .isEqualTo(3);
   }
+
+  /** A history of a million samples, some 80 MB, in a quarter of that. */
+  @Test
+  void tooLittleMemoryEndsWithThreeAndASentence() throws IOException, InterruptedException {
+    Answer answer =
+        java(
+            List.of("-Xmx24m"),
+            "fly",
+            Path.of("..", "scenarios", "light-single-held-stick.json").toString(),
+            "--rate",
+            "3000");
+    assertThat(answer.exitCode()).isEqualTo(3);
+    assertThat(answer.err()).contains("out of memory").doesNotContain("\tat ");
+    assertThat(answer.out()).isEmpty();
+  }
 }
