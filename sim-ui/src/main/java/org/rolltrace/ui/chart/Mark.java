@@ -8,6 +8,15 @@ import java.util.List;
 public sealed interface Mark {
 
   /**
+   * The mark somewhere else.
+   *
+   * @param dx px to the right
+   * @param dy px down
+   * @return the mark, moved
+   */
+  Mark movedBy(double dx, double dy);
+
+  /**
    * A straight line.
    *
    * @param x1 its beginning
@@ -16,7 +25,12 @@ public sealed interface Mark {
    * @param y2 its end
    * @param stroke how it is drawn; ends cut square
    */
-  record Line(double x1, double y1, double x2, double y2, Stroke stroke) implements Mark {}
+  record Line(double x1, double y1, double x2, double y2, Stroke stroke) implements Mark {
+    @Override
+    public Mark movedBy(double dx, double dy) {
+      return new Line(x1 + dx, y1 + dy, x2 + dx, y2 + dy, stroke);
+    }
+  }
 
   /**
    * A line through points.
@@ -28,6 +42,11 @@ public sealed interface Mark {
   record Polyline(double[] x, double[] y, Stroke stroke) implements Mark {
     public Polyline {
       checkLengths(x, y);
+    }
+
+    @Override
+    public Mark movedBy(double dx, double dy) {
+      return new Polyline(shifted(x, dx), shifted(y, dy), stroke);
     }
   }
 
@@ -43,6 +62,11 @@ public sealed interface Mark {
     public Area {
       checkLengths(x, y);
     }
+
+    @Override
+    public Mark movedBy(double dx, double dy) {
+      return new Area(shifted(x, dx), shifted(y, dy), ink, opacity);
+    }
   }
 
   /**
@@ -56,7 +80,12 @@ public sealed interface Mark {
    * @param ink its colour
    */
   record Label(double x, double y, String text, Anchor anchor, TypeSize size, Ink ink)
-      implements Mark {}
+      implements Mark {
+    @Override
+    public Mark movedBy(double dx, double dy) {
+      return new Label(x + dx, y + dy, text, anchor, size, ink);
+    }
+  }
 
   /**
    * A round dot.
@@ -65,9 +94,18 @@ public sealed interface Mark {
    * @param y of its centre
    * @param radius px
    * @param ink its colour
-   * @param filled whether it is a disc; else a ring of line width 1.5 filled with the ground
+   * @param filled whether it is a disc; else a ring of line width {@link #RING} filled with the
+   *     ground
    */
-  record Dot(double x, double y, double radius, Ink ink, boolean filled) implements Mark {}
+  record Dot(double x, double y, double radius, Ink ink, boolean filled) implements Mark {
+    /** The line width of a ring, px. */
+    public static final double RING = 1.5;
+
+    @Override
+    public Mark movedBy(double dx, double dy) {
+      return new Dot(x + dx, y + dy, radius, ink, filled);
+    }
+  }
 
   /**
    * Marks of which only what lies in a rectangle is seen.
@@ -82,6 +120,12 @@ public sealed interface Mark {
     public Clip {
       marks = List.copyOf(marks);
     }
+
+    @Override
+    public Mark movedBy(double dx, double dy) {
+      return new Clip(
+          x + dx, y + dy, width, height, marks.stream().map(mark -> mark.movedBy(dx, dy)).toList());
+    }
   }
 
   private static void checkLengths(double[] x, double[] y) {
@@ -89,5 +133,13 @@ public sealed interface Mark {
       throw new IllegalArgumentException(
           x.length + " values of x and " + y.length + " of y; expected as many");
     }
+  }
+
+  private static double[] shifted(double[] values, double by) {
+    double[] shifted = new double[values.length];
+    for (int i = 0; i < values.length; i++) {
+      shifted[i] = values[i] + by;
+    }
+    return shifted;
   }
 }

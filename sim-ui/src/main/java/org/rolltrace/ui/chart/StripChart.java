@@ -1,5 +1,6 @@
 package org.rolltrace.ui.chart;
 
+import java.util.ArrayList;
 import java.util.List;
 
 /** Strips below each other on one time axis. */
@@ -8,7 +9,13 @@ public final class StripChart {
   public static final double LEFT = 124;
 
   /** A right margin, px, with room for the names of curves. */
-  public static final double RIGHT = 84;
+  public static final double RIGHT = 96;
+
+  /** Above each strip, for the words of its markers. */
+  static final double WORDS = 18;
+
+  /** Below the last strip, for the time axis. */
+  static final double FOOT = 22;
 
   private StripChart() {}
 
@@ -72,6 +79,59 @@ public final class StripChart {
       double height,
       double left,
       double right) {
-    return new Drawing(new Sheet(width, height, List.of()), List.of());
+    int count = strips.size();
+    if (count == 0 || ranges.size() != count) {
+      throw new IllegalArgumentException(
+          count + " strips and " + ranges.size() + " ranges; expected at least one, and as many");
+    }
+    double each = (height - FOOT) / count - WORDS;
+    double across = width - left - right;
+    if (!(each >= 1 && across >= 1)) {
+      throw new IllegalArgumentException(
+          "the chart is "
+              + width
+              + " by "
+              + height
+              + " px; expected room for "
+              + count
+              + " strips beside its margins");
+    }
+    List<Mark> marks = new ArrayList<>();
+    List<PlotArea> areas = new ArrayList<>();
+    for (int i = 0; i < count; i++) {
+      ValueRange range = ranges.get(i);
+      PlotArea area =
+          new PlotArea(
+              left, i * (each + WORDS) + WORDS, across, each, window, range.low(), range.high());
+      areas.add(area);
+      new StripDrawing(strips.get(i), area, width, marks).draw();
+    }
+    addTimeAxis(areas.get(count - 1), marks);
+    return new Drawing(new Sheet(width, height, marks), areas);
+  }
+
+  private static void addTimeAxis(PlotArea lowest, List<Mark> marks) {
+    double base = lowest.y() + lowest.height() + 16;
+    TimeWindow window = lowest.time();
+    Ticks ticks = Ticks.ofTime(window, lowest.width());
+    for (int i = 0; i < ticks.size(); i++) {
+      marks.add(
+          new Mark.Label(
+              lowest.xOf(ticks.value(i)),
+              base,
+              ticks.figure(i),
+              Anchor.MIDDLE,
+              TypeSize.SMALL,
+              Ink.QUIET));
+    }
+    marks.add(new Mark.Label(0, base, "Time", Anchor.START, TypeSize.NORMAL, Ink.TEXT));
+    marks.add(
+        new Mark.Label(
+            TypeWidths.of("Time ", TypeSize.NORMAL),
+            base,
+            "s",
+            Anchor.START,
+            TypeSize.SMALL,
+            Ink.QUIET));
   }
 }

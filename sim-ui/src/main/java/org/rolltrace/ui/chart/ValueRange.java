@@ -8,6 +8,15 @@ package org.rolltrace.ui.chart;
  */
 public record ValueRange(double low, double high) {
 
+  /** What is smaller is drawn as nothing: a tenth of a degree, or of a per cent. */
+  private static final double SMALLEST = 0.2;
+
+  /** Into how many steps a range is cut to find its round ends. */
+  private static final double STEPS = 7;
+
+  /** What is left free beyond a peak. */
+  private static final double AIR = 0.04;
+
   public ValueRange {
     if (!(high > low)) {
       throw new IllegalArgumentException(
@@ -23,7 +32,30 @@ public record ValueRange(double low, double high) {
    * @return the range
    */
   public static ValueRange of(Strip strip, TimeWindow window) {
-    return new ValueRange(-1, 1);
+    double least = 0;
+    double most = 0;
+    for (Curve curve : strip.curves()) {
+      double[] value = curve.value();
+      int end = Decimation.end(curve.time(), window);
+      for (int i = Decimation.start(curve.time(), window); i < end; i++) {
+        least = Math.min(least, value[i]);
+        most = Math.max(most, value[i]);
+      }
+    }
+    if (most - least < SMALLEST) {
+      least = Math.min(least, -0.5 * SMALLEST);
+      most = Math.max(most, 0.5 * SMALLEST);
+    }
+    double step = Ticks.step((most - least) / STEPS, isAngle(strip.unit()));
+    return new ValueRange(roundedDown(least, step), -roundedDown(-most, step));
+  }
+
+  private static double roundedDown(double value, double step) {
+    return value < 0 ? Math.floor(value * (1 + AIR) / step) * step : 0;
+  }
+
+  static boolean isAngle(String unit) {
+    return unit.equals("deg");
   }
 
   /**
