@@ -61,10 +61,15 @@ final class Decimation {
       int first = i;
       int least = i;
       int most = i;
+      double low = value[i];
+      double high = low;
       for (i++; i < end && time[i] < untilTime; i++) {
-        if (value[i] < value[least]) {
+        double one = value[i];
+        if (one < low) {
+          low = one;
           least = i;
-        } else if (value[i] > value[most]) {
+        } else if (one > high) {
+          high = one;
           most = i;
         }
       }

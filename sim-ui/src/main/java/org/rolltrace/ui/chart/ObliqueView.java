@@ -10,9 +10,9 @@ package org.rolltrace.ui.chart;
  */
 record ObliqueView(double middle, double halfSpan) {
   /** What a length towards the reader takes to the left, and down. */
-  private static final double ACROSS = 0.26;
+  private static final double ACROSS = 0.28;
 
-  private static final double DOWN = 0.30;
+  private static final double DOWN = 0.2;
 
   /** The view that fills a height, whatever the bank. */
   static ObliqueView filling(double height, double edge) {

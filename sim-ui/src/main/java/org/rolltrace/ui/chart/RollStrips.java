@@ -8,6 +8,7 @@ import org.rolltrace.core.flight.FlightEvent;
 import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.history.TimeHistory;
 import org.rolltrace.core.measures.Measure;
+import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.InputShape;
 import org.rolltrace.core.pilot.PilotInput;
@@ -69,22 +70,20 @@ public final class RollStrips {
    * The ink of the side that a run rolls to.
    *
    * @param result the run
-   * @return {@link Ink#LEFT} when its leading input is to the left or, without one, when it starts
-   *     to the left; else {@link Ink#RIGHT}
+   * @return {@link Ink#LEFT} or {@link Ink#RIGHT}, by its leading input; without one by how it starts,
+   *     and else by where it ends
    */
   public static Ink side(RunResult result) {
     Scenario scenario = result.scenario();
-    double side =
-        scenario
-            .programme()
-            .leading()
-            .map(input -> input.shape().size())
-            .orElseGet(
-                () -> {
-                  double bank = scenario.start().disturbance().bank();
-                  return bank != 0 ? bank : scenario.start().disturbance().rollRate();
-                });
-    return side < 0 ? Ink.LEFT : Ink.RIGHT;
+    Disturbance start = scenario.start().disturbance();
+    double input = scenario.programme().leading().map(first -> first.shape().size()).orElse(0.0);
+    double end = result.history().value(Channel.BANK, result.history().size() - 1);
+    for (double side : new double[] {input, start.bank(), start.rollRate(), end}) {
+      if (side != 0) {
+        return side < 0 ? Ink.LEFT : Ink.RIGHT;
+      }
+    }
+    return Ink.RIGHT;
   }
 
   private static List<Curve> curves(List<Run> runs, Channel... channels) {

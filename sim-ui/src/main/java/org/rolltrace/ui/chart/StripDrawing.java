@@ -26,6 +26,9 @@ final class StripDrawing {
   /** Beyond this a thing that had to move is tied to its place by a line. */
   private static final double TIED = 4;
 
+  /** The least distance of figures at the axis, px. */
+  private static final double TICKS = 20;
+
   /** The space that a figure at the axis takes. */
   private static final double FIGURES = 40;
 
@@ -75,7 +78,7 @@ final class StripDrawing {
         Ticks.of(
             area.low(),
             area.high(),
-            Math.max(1, area.height() / 24),
+            Math.max(1, area.height() / TICKS),
             ValueRange.isAngle(strip.unit()));
     for (int i = 0; i < values.size(); i++) {
       double y = area.yOf(values.value(i));
@@ -124,11 +127,11 @@ final class StripDrawing {
       double x = area.xOf(marker.time());
       marks.add(new Mark.Line(x, area.y(), x, bottom(), EVENT));
     }
-    while (!seen.isEmpty() && sum(lengths(seen)) > sheetWidth - area.x()) {
+    while (!seen.isEmpty() && sum(lengths(seen)) > sheetWidth - area.x() + FIGURES) {
       seen.remove(seen.size() - 1);
     }
     double[] wanted = seen.stream().mapToDouble(marker -> area.xOf(marker.time())).toArray();
-    double[] placed = Spread.apart(wanted, lengths(seen), area.x() - WORD_GAP, sheetWidth);
+    double[] placed = Spread.apart(wanted, lengths(seen), area.x() - FIGURES, sheetWidth);
     double base = area.y() - WORD_LIFT;
     for (int i = 0; i < placed.length; i++) {
       marks.add(

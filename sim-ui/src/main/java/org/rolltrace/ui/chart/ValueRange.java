@@ -8,8 +8,8 @@ package org.rolltrace.ui.chart;
  */
 public record ValueRange(double low, double high) {
 
-  /** What is smaller is drawn as nothing: a tenth of a degree, or of a per cent. */
-  private static final double SMALLEST = 0.2;
+  /** The least that an axis covers: one degree, or per cent, to either side. */
+  private static final double SMALLEST = 2;
 
   /** Into how many steps a range is cut to find its round ends. */
   private static final double STEPS = 7;
@@ -38,8 +38,12 @@ public record ValueRange(double low, double high) {
       double[] value = curve.value();
       int end = Decimation.end(curve.time(), window);
       for (int i = Decimation.start(curve.time(), window); i < end; i++) {
-        least = Math.min(least, value[i]);
-        most = Math.max(most, value[i]);
+        double one = value[i];
+        if (one < least) {
+          least = one;
+        } else if (one > most) {
+          most = one;
+        }
       }
     }
     if (most - least < SMALLEST) {

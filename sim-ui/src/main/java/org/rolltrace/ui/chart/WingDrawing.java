@@ -64,6 +64,18 @@ final class WingDrawing {
             area.x() + area.width(),
             view.middle(),
             Stroke.of(Ink.AXIS, 1)));
+    // Where the tips are with wings level: against these a small bank shows, and its side.
+    for (double side : new double[] {LEFT_SIDE, RIGHT_SIDE}) {
+      double y = view.y(side, 0);
+      double aside = view.aside(side, 0);
+      marks.add(
+          new Mark.Line(
+              area.x() + aside,
+              y,
+              area.x() + area.width() + aside,
+              y,
+              new Stroke(Ink.AXIS, 1, Dash.DOTTED, 1)));
+    }
   }
 
   void addGhost(RunResult ghost) {
@@ -108,7 +120,7 @@ final class WingDrawing {
 
   void addRearView(RunResult result, double instant) {
     double bank = BankPath.of(result).at(instant);
-    double size = Math.min(area.x() - view.reach() - 12, area.height() - 84);
+    double size = Math.min(area.x() - view.reach() - 20, area.height() - 84);
     if (size < 24) {
       return;
     }
