@@ -1,7 +1,9 @@
 package org.rolltrace.core.files;
 
-import java.io.BufferedWriter;
+import java.io.BufferedOutputStream;
 import java.io.IOException;
+import java.io.OutputStream;
+import java.io.OutputStreamWriter;
 import java.io.UncheckedIOException;
 import java.io.Writer;
 import java.nio.charset.StandardCharsets;
@@ -25,8 +27,14 @@ public final class ResultFolder {
 
   /** Writes one file. */
   @FunctionalInterface
-  private interface Content {
-    void write(Writer out) throws IOException;
+  public interface Content {
+    /**
+     * Writes it.
+     *
+     * @param out receives the bytes, closed by the caller
+     * @throws IOException when {@code out} fails
+     */
+    void write(OutputStream out) throws IOException;
   }
 
   /**
@@ -41,12 +49,35 @@ public final class ResultFolder {
    */
   public static List<Path> write(Path folder, RunResult result, String producedBy) {
     Map<String, Content> contents = new LinkedHashMap<>();
-    contents.put("history.csv", out -> HistoryCsv.write(result.history(), out));
-    contents.put("result.json", out -> ResultJson.write(result, producedBy, out));
-    return writeAll(folder, contents);
+    contents.put("history.csv", text(out -> HistoryCsv.write(result.history(), out)));
+    contents.put("result.json", text(out -> ResultJson.write(result, producedBy, out)));
+    return write(folder, contents);
   }
 
-  private static List<Path> writeAll(Path folder, Map<String, Content> contents) {
+  /** Writes a text. */
+  @FunctionalInterface
+  private interface Text {
+    void write(Writer out) throws IOException;
+  }
+
+  private static Content text(Text text) {
+    return out -> {
+      Writer writer = new OutputStreamWriter(out, StandardCharsets.UTF_8);
+      text.write(writer);
+      writer.flush();
+    };
+  }
+
+  /**
+   * Writes files of any content.
+   *
+   * @param folder made when it does not exist
+   * @param contents by file name, written in the order of the map
+   * @return the files written
+   * @throws UncheckedIOException when the folder or a file cannot be written; its message says what
+   *     to do
+   */
+  public static List<Path> write(Path folder, Map<String, Content> contents) {
     Map<Path, Path> places = new LinkedHashMap<>();
     String writer = ProcessHandle.current().pid() + "-" + System.nanoTime();
     try {
@@ -54,7 +85,7 @@ public final class ResultFolder {
       for (Map.Entry<String, Content> entry : contents.entrySet()) {
         Path draft = folder.resolve("." + entry.getKey() + "." + writer + ".part");
         places.put(draft, folder.resolve(entry.getKey()));
-        try (BufferedWriter out = Files.newBufferedWriter(draft, StandardCharsets.UTF_8)) {
+        try (OutputStream out = new BufferedOutputStream(Files.newOutputStream(draft))) {
           entry.getValue().write(out);
         }
       }

@@ -13,6 +13,7 @@ import org.rolltrace.core.flight.FlightSettings;
 import org.rolltrace.core.run.RunResult;
 import org.rolltrace.core.run.ScenarioRun;
 import org.rolltrace.core.scenario.Scenario;
+import org.rolltrace.ui.chart.ChartFiles;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
@@ -40,6 +41,13 @@ final class FlyCommand implements Callable<Integer> {
   private String folder;
 
   @Option(
+      names = "--charts",
+      paramLabel = "DIR",
+      description =
+          "Draw the result as stage.svg and stage.png in DIR, which is made when missing.")
+  private String chartFolder;
+
+  @Option(
       names = "--rate",
       paramLabel = "HZ",
       description =
@@ -60,11 +68,17 @@ final class FlyCommand implements Callable<Integer> {
     PrintWriter err = spec.commandLine().getErr();
     FlightSettings settings = settings();
     Path into = folder == null ? null : path(folder);
+    Path chartsInto = chartFolder == null ? null : path(chartFolder);
 
     Scenario flown = ScenarioFile.read(path(scenario));
     RunResult result = ScenarioRun.execute(flown, settings);
     if (into != null) {
       for (Path written : ResultFolder.write(into, result, Program.identity())) {
+        err.println("wrote " + written);
+      }
+    }
+    if (chartsInto != null) {
+      for (Path written : ChartFiles.write(chartsInto, result)) {
         err.println("wrote " + written);
       }
     }
