@@ -31,4 +31,15 @@ public final class ScenarioFile {
     }
     return scenario.get();
   }
+
+  /**
+   * Writes a scenario.
+   *
+   * @param file where to
+   * @param document what
+   * @return the document as it stands there
+   */
+  public static ScenarioDocument write(Path file, ScenarioDocument document) {
+    return document.at(file);
+  }
 }
