@@ -5,10 +5,8 @@ import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.io.Writer;
 import java.nio.charset.StandardCharsets;
-import java.nio.file.AtomicMoveNotSupportedException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -58,7 +56,7 @@ public final class ResultFolder {
         }
       }
       for (Map.Entry<Path, Path> place : places.entrySet()) {
-        move(place.getKey(), place.getValue());
+        WholeFile.move(place.getKey(), place.getValue());
       }
       return new ArrayList<>(places.values());
     } catch (IOException failure) {
@@ -67,17 +65,9 @@ public final class ResultFolder {
           "cannot write the result into "
               + folder
               + ": "
-              + reason(failure)
+              + WholeFile.reason(failure)
               + "; choose a folder that you may write to, with room on its disk",
           failure);
-    }
-  }
-
-  private static void move(Path draft, Path place) throws IOException {
-    try {
-      Files.move(draft, place, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
-    } catch (AtomicMoveNotSupportedException plainMove) {
-      Files.move(draft, place, StandardCopyOption.REPLACE_EXISTING);
     }
   }
 
@@ -89,17 +79,5 @@ public final class ResultFolder {
         // The failure that is being reported says what is wrong with the folder.
       }
     }
-  }
-
-  private static String reason(IOException failure) {
-    String what =
-        switch (failure.getClass().getSimpleName()) {
-          case "FileAlreadyExistsException" -> "there is a file of that name";
-          case "AccessDeniedException" -> "it is not allowed";
-          case "NotDirectoryException" -> "it is not a folder";
-          case "ReadOnlyFileSystemException" -> "the disk is read only";
-          default -> "";
-        };
-    return what.isEmpty() ? String.valueOf(failure.getMessage()) : what;
   }
 }
