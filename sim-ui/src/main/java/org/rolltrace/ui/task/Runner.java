@@ -7,8 +7,8 @@ import java.util.function.Supplier;
 /** Does work, perhaps on another thread, and hands over what came of it. */
 public interface Runner {
   /**
-   * Does work soon. Work that waits when newer work comes is dropped; results are handed over in
-   * the order of the calls.
+   * Does work soon. Work that still waits when newer work comes is dropped, what has begun is not;
+   * results are handed over in the order of the calls.
    *
    * @param work makes the result
    * @param done takes the result, on the thread that owns the state
