@@ -33,6 +33,31 @@ class ArchitectureTest {
           .resideInAnyPackage("javafx..", "java.awt..", "javax.swing..");
 
   @ArchTest
+  static final ArchRule THE_SESSION_HAS_NO_NODES =
+      noClasses()
+          .that()
+          .resideInAPackage("org.rolltrace.ui.session..")
+          .should()
+          .dependOnClassesThat()
+          .resideInAnyPackage(
+              "javafx.application..",
+              "javafx.scene..",
+              "javafx.stage..",
+              "javafx.animation..",
+              "javafx.concurrent..",
+              "java.awt..",
+              "javax.swing..");
+
+  @ArchTest
+  static final ArchRule WORK_KNOWS_NOTHING_OF_THE_WINDOW =
+      noClasses()
+          .that()
+          .resideInAPackage("org.rolltrace.ui.task..")
+          .should()
+          .dependOnClassesThat()
+          .resideInAnyPackage("javafx..", "java.awt..", "javax.swing..", "org.rolltrace.core..");
+
+  @ArchTest
   static final ArchRule ONLY_THE_LAUNCHER_ENDS_THE_PROGRAM =
       noClasses()
           .that()

@@ -29,7 +29,8 @@ class DocumentsTest {
     CommandLineProgram.run(
         new String[] {"fly", "../scenarios/light-single-held-stick.json"},
         new PrintWriter(out),
-        new PrintWriter(err));
+        new PrintWriter(err),
+        file -> {});
     assertThat(read("README.md"))
         .contains("fly scenarios/light-single-held-stick.json\"")
         .contains("```\n" + out + "```")

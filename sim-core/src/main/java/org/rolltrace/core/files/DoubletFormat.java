@@ -1,5 +1,6 @@
 package org.rolltrace.core.files;
 
+import java.util.Map;
 import java.util.Optional;
 import org.rolltrace.core.pilot.DoubletInput;
 import org.rolltrace.core.pilot.InputShape;
@@ -17,6 +18,11 @@ final class DoubletFormat implements ShapeFormat {
   @Override
   public Keys keys() {
     return InputFormat.COMMON.named("shape \"doublet\"").required(WIDTH);
+  }
+
+  @Override
+  public Map<String, String> usual() {
+    return Map.of(WIDTH, "1 s");
   }
 
   @Override

@@ -52,6 +52,12 @@ final class Faults {
   }
 
   FileFaultsException toException() {
+    List<FileFault> sorted = sorted();
+    return new FileFaultsException(sorted, collection.count - sorted.size());
+  }
+
+  /** Those that were kept, each file's by line, the file that was asked for first. */
+  List<FileFault> sorted() {
     List<Path> files = new ArrayList<>();
     files.add(file);
     for (FileFault fault : collection.kept) {
@@ -64,7 +70,7 @@ final class Faults {
         Comparator.comparingInt((FileFault fault) -> files.indexOf(fault.file()))
             .thenComparingInt(FileFault::line)
             .thenComparingInt(FileFault::column));
-    return new FileFaultsException(sorted, collection.count - sorted.size());
+    return sorted;
   }
 
   private static final class Collection {

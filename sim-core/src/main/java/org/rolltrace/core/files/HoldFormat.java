@@ -1,5 +1,6 @@
 package org.rolltrace.core.files;
 
+import java.util.Map;
 import java.util.Optional;
 import org.rolltrace.core.pilot.HoldInput;
 import org.rolltrace.core.pilot.InputShape;
@@ -17,6 +18,11 @@ final class HoldFormat implements ShapeFormat {
   @Override
   public Keys keys() {
     return InputFormat.COMMON.named("shape \"hold\"").required(DURATION);
+  }
+
+  @Override
+  public Map<String, String> usual() {
+    return Map.of(DURATION, "2 s");
   }
 
   @Override

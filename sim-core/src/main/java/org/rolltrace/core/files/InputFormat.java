@@ -65,7 +65,7 @@ final class InputFormat {
     return Optional.empty();
   }
 
-  private static List<String> words() {
+  static List<String> words() {
     List<String> words = new ArrayList<>();
     for (ShapeFormat format : SHAPES) {
       words.add(format.word());

@@ -175,7 +175,9 @@ final class JsonTree {
     String text = parser.getText();
     if (text.length() > LONGEST_TEXT) {
       return new JsonValue.Refused(
-          place, "the text has " + text.length() + " characters; expected at most " + LONGEST_TEXT);
+          place,
+          "the text has " + text.length() + " characters; expected at most " + LONGEST_TEXT,
+          new JsonValue.Text(place, text));
     }
     return new JsonValue.Text(place, text);
   }
@@ -183,7 +185,9 @@ final class JsonTree {
   private JsonValue number(JsonValue.Place place) throws IOException {
     if (parser.isNaN()) {
       return new JsonValue.Refused(
-          place, parser.getText() + " is no number in JSON; expected a decimal number");
+          place,
+          parser.getText() + " is no number in JSON; expected a decimal number",
+          new JsonValue.Word(place, parser.getText()));
     }
     return new JsonValue.Numeral(place, parser.getText());
   }

@@ -88,8 +88,12 @@ sealed interface JsonValue {
     }
   }
 
-  /** Something that cannot be used whatever key it stands at, and why. */
-  record Refused(Place place, String reason) implements JsonValue {
+  /**
+   * Something that cannot be used whatever key it stands at, and why.
+   *
+   * @param written what stands there
+   */
+  record Refused(Place place, String reason, JsonValue written) implements JsonValue {
     @Override
     public String described() {
       return "something that cannot be used";

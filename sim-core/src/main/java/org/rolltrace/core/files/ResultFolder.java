@@ -7,11 +7,9 @@ import java.io.OutputStreamWriter;
 import java.io.UncheckedIOException;
 import java.io.Writer;
 import java.nio.charset.StandardCharsets;
-import java.nio.file.AtomicMoveNotSupportedException;
 import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -95,7 +93,7 @@ public final class ResultFolder {
         }
       }
       for (Map.Entry<Path, Path> place : places.entrySet()) {
-        move(place.getKey(), place.getValue());
+        WholeFile.move(place.getKey(), place.getValue());
       }
       return new ArrayList<>(places.values());
     } catch (IOException failure) {
@@ -103,19 +101,11 @@ public final class ResultFolder {
           "cannot write the result into "
               + folder
               + ": "
-              + reason(failure)
+              + WholeFile.reason(failure)
               + "; choose a folder that you may write to, with room on its disk",
           failure);
     } finally {
       deleteDrafts(places);
-    }
-  }
-
-  private static void move(Path draft, Path place) throws IOException {
-    try {
-      Files.move(draft, place, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
-    } catch (AtomicMoveNotSupportedException plainMove) {
-      Files.move(draft, place, StandardCopyOption.REPLACE_EXISTING);
     }
   }
 
@@ -127,25 +117,5 @@ public final class ResultFolder {
         // The failure that is being reported says what is wrong with the folder.
       }
     }
-  }
-
-  private static String reason(IOException failure) {
-    String what =
-        switch (failure.getClass().getSimpleName()) {
-          case "FileAlreadyExistsException" -> "there is a file of that name";
-          case "AccessDeniedException" -> "it is not allowed";
-          case "NotDirectoryException" -> "it is not a folder";
-          case "NoSuchFileException" -> "it cannot be made there";
-          case "ReadOnlyFileSystemException" -> "the disk is read only";
-          default -> "";
-        };
-    if (!what.isEmpty()) {
-      return what;
-    }
-    String said =
-        failure instanceof FileSystemException f && f.getReason() != null
-            ? f.getReason()
-            : failure.getMessage();
-    return said == null ? failure.getClass().getSimpleName() : said;
   }
 }

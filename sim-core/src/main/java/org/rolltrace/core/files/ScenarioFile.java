@@ -4,7 +4,10 @@ import java.nio.file.Path;
 import java.util.Optional;
 import org.rolltrace.core.scenario.Scenario;
 
-/** Reads scenario files, with the aeroplane files they name. The package page has the format. */
+/**
+ * Reads and writes scenario files, with the aeroplane files they name. The package page has the
+ * format.
+ */
 public final class ScenarioFile {
   private ScenarioFile() {}
 
@@ -19,10 +22,7 @@ public final class ScenarioFile {
     Faults faults = new Faults(file);
     Optional<Scenario> scenario = Optional.empty();
     try {
-      Optional<JsonValue.ObjectValue> object = JsonTree.read(TextFile.bytes(file), faults);
-      if (object.isPresent()) {
-        scenario = ScenarioFormat.read(object.get(), faults);
-      }
+      scenario = read(TextFile.bytes(file), faults);
     } catch (UnusableFileException e) {
       faults.addForWholeFile(e.getMessage());
     }
@@ -30,5 +30,25 @@ public final class ScenarioFile {
       throw faults.toException();
     }
     return scenario.get();
+  }
+
+  static Optional<Scenario> read(byte[] bytes, Faults faults) {
+    Optional<JsonValue.ObjectValue> object = JsonTree.read(bytes, faults);
+    return object.isPresent() ? ScenarioFormat.read(object.get(), faults) : Optional.empty();
+  }
+
+  /**
+   * Writes a scenario: whole, or not at all. The path of its aeroplane file is written so that it
+   * leads there from the new place.
+   *
+   * @param file where to; one that stands there is replaced
+   * @param document what; it may have faults
+   * @return the document as it stands there
+   * @throws java.io.UncheckedIOException when it cannot be written; its message says what to do
+   */
+  public static ScenarioDocument write(Path file, ScenarioDocument document) {
+    ScenarioDocument written = document.at(file);
+    WholeFile.write(file, written.json());
+    return written;
   }
 }

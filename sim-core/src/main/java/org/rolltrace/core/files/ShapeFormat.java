@@ -1,5 +1,6 @@
 package org.rolltrace.core.files;
 
+import java.util.Map;
 import java.util.Optional;
 import org.rolltrace.core.pilot.InputShape;
 
@@ -11,6 +12,9 @@ interface ShapeFormat {
 
   /** All its keys. */
   Keys keys();
+
+  /** What its own keys say in a new input. */
+  Map<String, String> usual();
 
   /**
    * Makes the shape of its own keys and of what all shapes share.

@@ -1,5 +1,6 @@
 package org.rolltrace.core.files;
 
+import java.util.Map;
 import java.util.Optional;
 import org.rolltrace.core.pilot.InputShape;
 import org.rolltrace.core.pilot.StepInput;
@@ -14,6 +15,11 @@ final class StepFormat implements ShapeFormat {
   @Override
   public Keys keys() {
     return InputFormat.COMMON.named("shape \"step\"");
+  }
+
+  @Override
+  public Map<String, String> usual() {
+    return Map.of();
   }
 
   @Override

@@ -57,7 +57,7 @@ final class TextFile {
     }
   }
 
-  private static UnusableFileException tooLarge(String found) {
+  static UnusableFileException tooLarge(String found) {
     return new UnusableFileException(
         "is too large: expected at most " + LARGEST + " bytes (1 MiB), found " + found);
   }

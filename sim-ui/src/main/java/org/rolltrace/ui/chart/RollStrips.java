@@ -17,6 +17,9 @@ import org.rolltrace.core.scenario.Scenario;
 
 /** The strips of a roll: bank, roll rate, sideslip with yaw rate, stick with pedal, surfaces. */
 public final class RollStrips {
+  /** Title of the strip of stick and pedal, which the lanes of the window show in its place. */
+  public static final String HANDS = "Stick, pedal";
+
   private static final double WIDTH = 1.8;
   private static final double GHOST_WIDTH = 1.4;
   private static final double GHOST_OPACITY = 0.6;
@@ -45,7 +48,7 @@ public final class RollStrips {
             curves(runs, Channel.SIDESLIP, Channel.YAW_RATE),
             List.of()),
         new Strip(
-            "Stick, pedal",
+            HANDS,
             "% of travel",
             curves(runs, Channel.STICK, Channel.PEDAL),
             controlMarkers(result)),
@@ -70,13 +73,18 @@ public final class RollStrips {
    * The ink of the side that a run rolls to.
    *
    * @param result the run
-   * @return {@link Ink#LEFT} or {@link Ink#RIGHT}, by its leading input; without one by how it starts,
-   *     and else by where it ends
+   * @return {@link Ink#LEFT} or {@link Ink#RIGHT}, by its leading input; without one by how it
+   *     starts, and else by where it ends
    */
   public static Ink side(RunResult result) {
     Scenario scenario = result.scenario();
     Disturbance start = scenario.start().disturbance();
-    double input = scenario.programme().leading().map(first -> first.shape().size()).orElse(0.0);
+    double input =
+        scenario
+            .programme()
+            .leading(scenario.duration())
+            .map(first -> first.shape().size())
+            .orElse(0.0);
     double end = result.history().value(Channel.BANK, result.history().size() - 1);
     for (double side : new double[] {input, start.bank(), start.rollRate(), end}) {
       if (side != 0) {
@@ -115,7 +123,7 @@ public final class RollStrips {
     result
         .scenario()
         .programme()
-        .leading()
+        .leading(result.scenario().duration())
         .map(PilotInput::shape)
         .ifPresent(
             input -> {

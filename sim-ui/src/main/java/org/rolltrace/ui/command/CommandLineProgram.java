@@ -33,11 +33,13 @@ public final class CommandLineProgram implements Runnable {
    * @param arguments the words after the program's name
    * @param out receives results
    * @param err receives progress, cautions and faults
+   * @param opener opens the window
    * @return the exit code
    */
-  public static int run(String[] arguments, PrintWriter out, PrintWriter err) {
+  public static int run(String[] arguments, PrintWriter out, PrintWriter err, WindowOpener opener) {
     Locale.setDefault(Locale.ROOT);
     CommandLine commandLine = new CommandLine(new CommandLineProgram());
+    commandLine.addSubcommand(new WindowCommand(opener));
     commandLine.setOut(out);
     commandLine.setErr(err);
     commandLine.setColorScheme(CommandLine.Help.defaultColorScheme(CommandLine.Help.Ansi.OFF));

@@ -6,6 +6,7 @@ import java.io.OutputStreamWriter;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
 import org.rolltrace.ui.command.CommandLineProgram;
+import org.rolltrace.ui.desk.DeskLauncher;
 
 /** Starts the program. */
 public final class Main {
@@ -20,7 +21,7 @@ public final class Main {
     // Standard output and error in UTF-8 whatever the locale: under LANG=C others print "?".
     PrintWriter out = utf8(FileDescriptor.out);
     PrintWriter err = utf8(FileDescriptor.err);
-    int exitCode = CommandLineProgram.run(arguments, out, err);
+    int exitCode = CommandLineProgram.run(arguments, out, err, DeskLauncher::open);
     out.flush();
     err.flush();
     System.exit(exitCode);

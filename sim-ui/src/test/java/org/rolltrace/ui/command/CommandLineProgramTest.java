@@ -30,7 +30,8 @@ class CommandLineProgramTest {
   private static Answer run(String... arguments) {
     StringWriter out = new StringWriter();
     StringWriter err = new StringWriter();
-    int exitCode = CommandLineProgram.run(arguments, new PrintWriter(out), new PrintWriter(err));
+    int exitCode =
+        CommandLineProgram.run(arguments, new PrintWriter(out), new PrintWriter(err), file -> {});
     assertThat(err.toString()).doesNotContain("\tat ").doesNotContain("Exception");
     return new Answer(exitCode, out.toString(), err.toString());
   }
@@ -234,7 +235,9 @@ class CommandLineProgramTest {
         };
     StringWriter err = new StringWriter();
     String[] arguments = {"fly", ROLL_ENTRY, "--json"};
-    assertThat(CommandLineProgram.run(arguments, new PrintWriter(full), new PrintWriter(err)))
+    assertThat(
+            CommandLineProgram.run(
+                arguments, new PrintWriter(full), new PrintWriter(err), file -> {}))
         .isEqualTo(3);
     assertThat(err.toString()).contains("the result cannot be printed");
   }

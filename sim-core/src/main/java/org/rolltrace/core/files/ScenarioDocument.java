@@ -1,0 +1,431 @@
+package org.rolltrace.core.files;
+
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Optional;
+import java.util.regex.Pattern;
+import org.rolltrace.core.scenario.Scenario;
+
+/**
+ * A scenario file as it is written, to be edited: what stands in it, right or wrong, in its order,
+ * with its digits and units. Immutable.
+ *
+ * <p>Paths lead to values as they do in faults: {@code $.condition.trueAirspeed}, {@code
+ * $.inputs[0].size}. Methods that take one throw {@link IllegalArgumentException} for text that is
+ * no path, and {@link IndexOutOfBoundsException} for an index beyond the end of a list.
+ *
+ * <p>Two documents are equal when they would be written alike into the same file.
+ */
+public final class ScenarioDocument {
+  private static final String AEROPLANE = "$.aeroplane";
+  private static final String INPUTS = "$.inputs";
+
+  private static final Pattern NUMBER =
+      Pattern.compile("-?(0|[1-9]\\d*)(\\.\\d+)?([eE][+-]?\\d+)?");
+
+  private final Path file;
+  private final JsonNode.Group root;
+  private final String json;
+  private final NamedAeroplane named;
+
+  private ScenarioDocument(Path file, JsonNode.Group root, NamedAeroplane named) {
+    this.file = file;
+    this.root = root;
+    this.json = JsonPrinter.print(root);
+    this.named = named;
+  }
+
+  /**
+   * What reading makes of a document.
+   *
+   * @param scenario the scenario; empty when there is a fault
+   * @param faults all faults, at most 200, those of the document first, then those of the aeroplane
+   *     file it names; lines are those of {@link ScenarioDocument#json}
+   */
+  public record Check(Optional<Scenario> scenario, List<FileFault> faults) {
+    public Check {
+      faults = List.copyOf(faults);
+    }
+  }
+
+  /**
+   * Opens a scenario file.
+   *
+   * @param file where it is
+   * @return what stands in it; it may have faults
+   * @throws FileFaultsException if it cannot be read as a JSON object
+   */
+  public static ScenarioDocument open(Path file) {
+    return new ScenarioDocument(file, NamedAeroplane.read(file), new NamedAeroplane());
+  }
+
+  /**
+   * A document that is in no file yet.
+   *
+   * @param json its text
+   * @param directory from where the path of an aeroplane file counts
+   * @return what stands in the text; it may have faults
+   * @throws FileFaultsException if it cannot be read as a JSON object
+   */
+  public static ScenarioDocument ofText(String json, Path directory) {
+    return ofText(json, directory.resolve("unsaved scenario"), new NamedAeroplane());
+  }
+
+  /**
+   * A document that belongs to a file, whatever stands there now.
+   *
+   * @param json its text
+   * @param file the file
+   * @return what stands in the text; it may have faults
+   * @throws FileFaultsException if it cannot be read as a JSON object
+   */
+  public static ScenarioDocument ofFileText(String json, Path file) {
+    return ofText(json, file, new NamedAeroplane());
+  }
+
+  private static ScenarioDocument ofText(String json, Path file, NamedAeroplane named) {
+    Faults faults = new Faults(file);
+    Optional<JsonValue.ObjectValue> object =
+        JsonTree.read(json.getBytes(StandardCharsets.UTF_8), faults);
+    return new ScenarioDocument(
+        file, JsonNode.group(object.orElseThrow(faults::toException)), named);
+  }
+
+  private ScenarioDocument of(JsonNode newRoot) {
+    return newRoot.equals(root)
+        ? this
+        : new ScenarioDocument(file, (JsonNode.Group) newRoot, named);
+  }
+
+  private ScenarioDocument with(String path, JsonNode value) {
+    return of(JsonNode.with(root, JsonPath.steps(path), value));
+  }
+
+  private Optional<JsonNode> find(String path) {
+    return JsonNode.find(root, JsonPath.steps(path));
+  }
+
+  private Optional<JsonNode.Group> group(String path, boolean isList) {
+    return find(path)
+        .flatMap(
+            node ->
+                node instanceof JsonNode.Group group && group.isList() == isList
+                    ? Optional.of(group)
+                    : Optional.empty());
+  }
+
+  private static Optional<String> written(JsonNode node) {
+    if (node instanceof JsonNode.Text text) {
+      return Optional.of(text.text());
+    }
+    return node instanceof JsonNode.Bare bare ? Optional.of(bare.written()) : Optional.empty();
+  }
+
+  /**
+   * A value as it stands in the document.
+   *
+   * @param path where
+   * @return text without its quotation marks, a number with its digits; empty for an object, a
+   *     list, and where there is nothing
+   */
+  public Optional<String> text(String path) {
+    return find(path).flatMap(ScenarioDocument::written);
+  }
+
+  /**
+   * The same with another text.
+   *
+   * @param path where; objects on the way are made when they are missing
+   * @param text a quantity or words, as people write them; it is not judged here
+   * @return the edited document
+   */
+  public ScenarioDocument with(String path, String text) {
+    return with(path, new JsonNode.Text(text));
+  }
+
+  /**
+   * The same with another number.
+   *
+   * @param path where; objects on the way are made when they are missing
+   * @param digits the number; what JSON does not know as one is written as text, so that reading
+   *     finds its fault
+   * @return the edited document
+   */
+  public ScenarioDocument withNumber(String path, String digits) {
+    return with(
+        path,
+        NUMBER.matcher(digits).matches() ? new JsonNode.Bare(digits) : new JsonNode.Text(digits));
+  }
+
+  /**
+   * The same without a value.
+   *
+   * @param path where; it may lead nowhere
+   * @return the edited document
+   */
+  public ScenarioDocument without(String path) {
+    return of(JsonNode.without(root, JsonPath.steps(path)));
+  }
+
+  /**
+   * How many inputs there are.
+   *
+   * @return 0 also when there is no list of them
+   */
+  public int inputCount() {
+    return group(INPUTS, true).map(list -> list.items().size()).orElse(0);
+  }
+
+  private static String input(int index) {
+    return INPUTS + "[" + index + "]";
+  }
+
+  private String existingInput(int index) {
+    if (index < 0 || index >= inputCount()) {
+      throw new IndexOutOfBoundsException(
+          "input " + index + " of " + inputCount() + "; expected one from 0");
+    }
+    return input(index);
+  }
+
+  /**
+   * The same with one more input, behind the others: half the travel to the right, with the usual
+   * time for the hand and lengths.
+   *
+   * @param control such as {@code stick}
+   * @param shape such as {@code step}
+   * @param startSeconds when it starts, s, from 0; written to the millisecond
+   * @return the edited document
+   * @throws IllegalArgumentException if there is no such shape, or the start is no time
+   */
+  public ScenarioDocument withInputAdded(String control, String shape, double startSeconds) {
+    if (!(startSeconds >= 0 && startSeconds < Double.POSITIVE_INFINITY)) {
+      throw new IllegalArgumentException(
+          "the start is " + startSeconds + " s; expected a time of 0 s or later");
+    }
+    String at = input(inputCount());
+    return with(at + ".control", control)
+        .with(at + ".shape", shape)
+        .with(at + ".start", seconds(startSeconds))
+        .withNumber(at + ".size", "0.5")
+        .with(at + ".movement", "0.15 s")
+        .withInputShape(inputCount(), shape);
+  }
+
+  private static String seconds(double time) {
+    String digits = String.format(Locale.ROOT, "%.3f", time);
+    return digits.replaceFirst("\\.?0+$", "") + " s";
+  }
+
+  /**
+   * The same without an input.
+   *
+   * @param index which, from 0
+   * @return the edited document
+   */
+  public ScenarioDocument withoutInput(int index) {
+    return without(existingInput(index));
+  }
+
+  /**
+   * The same with an input of another shape. What all shapes share stays; what only others have is
+   * left out, and what only the new one has is as usual.
+   *
+   * @param index which input, from 0
+   * @param shape such as {@code hold}
+   * @return the edited document
+   * @throws IllegalArgumentException if there is no such shape
+   */
+  public ScenarioDocument withInputShape(int index, String shape) {
+    String at = existingInput(index);
+    ShapeFormat format = format(shape);
+    ScenarioDocument changed = this;
+    for (ShapeFormat other : InputFormat.SHAPES) {
+      for (String key : other.usual().keySet()) {
+        if (!format.keys().has(key)) {
+          changed = changed.without(at + "." + key);
+        }
+      }
+    }
+    changed = changed.with(at + ".shape", shape);
+    for (Map.Entry<String, String> usual : format.usual().entrySet()) {
+      String path = at + "." + usual.getKey();
+      if (changed.find(path).isEmpty()) {
+        changed = changed.with(path, usual.getValue());
+      }
+    }
+    return changed;
+  }
+
+  private static ShapeFormat format(String shape) {
+    for (ShapeFormat format : InputFormat.SHAPES) {
+      if (format.word().equals(shape)) {
+        return format;
+      }
+    }
+    throw new IllegalArgumentException(
+        "the shape is " + Shown.text(shape) + "; expected one of " + InputFormat.words());
+  }
+
+  /**
+   * The same with every input to the other side.
+   *
+   * @return the edited document; sizes that are no numbers stay
+   */
+  public ScenarioDocument mirrored() {
+    ScenarioDocument changed = this;
+    for (int i = 0; i < inputCount(); i++) {
+      String size = input(i) + ".size";
+      Optional<JsonNode> written = find(size);
+      if (written.isPresent()
+          && written.get() instanceof JsonNode.Bare number
+          && NUMBER.matcher(number.written()).matches()) {
+        changed = changed.withNumber(size, negated(number.written()));
+      }
+    }
+    return changed;
+  }
+
+  private static String negated(String digits) {
+    if (Double.parseDouble(digits) == 0) {
+      return digits;
+    }
+    return digits.startsWith("-") ? digits.substring(1) : "-" + digits;
+  }
+
+  /**
+   * Whether the aeroplane stands in the scenario itself.
+   *
+   * @return false when a path leads to its file, and when there is none
+   */
+  public boolean aeroplaneIsInline() {
+    return group(AEROPLANE, false).isPresent();
+  }
+
+  /**
+   * The same with the aeroplane in it, copied from its file, so that it can be edited. The file
+   * stays as it is.
+   *
+   * @return the edited document; this one when the aeroplane is in it already, or none is named
+   * @throws FileFaultsException if the aeroplane file cannot be read as a JSON object
+   */
+  public ScenarioDocument withAeroplaneInline() {
+    Optional<String> name = aeroplaneName();
+    return name.isEmpty() ? this : with(AEROPLANE, named.object(file, name.get()));
+  }
+
+  private Optional<String> aeroplaneName() {
+    return find(AEROPLANE)
+        .flatMap(
+            node ->
+                node instanceof JsonNode.Text text ? Optional.of(text.text()) : Optional.empty());
+  }
+
+  /**
+   * A value of the aeroplane, wherever it stands.
+   *
+   * @param path from the aeroplane on, such as {@code inertia.roll}
+   * @return as {@link #text}; empty also when the aeroplane file cannot be read
+   */
+  public Optional<String> aeroplaneText(String path) {
+    Optional<String> name = aeroplaneName();
+    if (name.isEmpty()) {
+      return text(AEROPLANE + "." + path);
+    }
+    try {
+      return JsonNode.find(named.object(file, name.get()), JsonPath.steps("$." + path))
+          .flatMap(ScenarioDocument::written);
+    } catch (FileFaultsException e) {
+      return Optional.empty(); // its faults are among those of the check
+    }
+  }
+
+  /**
+   * The same as it would stand in another file.
+   *
+   * @param newFile where
+   * @return a document whose path to the aeroplane file leads there from the new place
+   */
+  public ScenarioDocument at(Path newFile) {
+    if (newFile.equals(file)) {
+      return this;
+    }
+    JsonNode moved = root;
+    Optional<String> name = aeroplaneName();
+    if (name.isPresent()) {
+      String seen = NamedAeroplane.seenFrom(newFile, file, name.get());
+      moved = JsonNode.with(root, JsonPath.steps(AEROPLANE), new JsonNode.Text(seen));
+    }
+    return new ScenarioDocument(newFile, (JsonNode.Group) moved, named);
+  }
+
+  /**
+   * The text of the file: two blanks for each level, short objects on one line, lines that somebody
+   * chose kept.
+   *
+   * @return JSON
+   */
+  public String json() {
+    return json;
+  }
+
+  /**
+   * Reads the document, with the aeroplane file it names, as a file of this text would be.
+   *
+   * @return the scenario, or all faults
+   */
+  public Check check() {
+    Faults faults = new Faults(file);
+    byte[] bytes = json.getBytes(StandardCharsets.UTF_8);
+    Optional<Scenario> scenario = ScenarioFile.read(bytes, faults);
+    if (bytes.length > TextFile.LARGEST) {
+      faults.addForWholeFile(TextFile.tooLarge(bytes.length + " bytes").getMessage());
+    }
+    return new Check(faults.count() > 0 ? Optional.empty() : scenario, faults.sorted());
+  }
+
+  /**
+   * Where a fault is, as seen from the document.
+   *
+   * @param fault one of this document
+   * @return its path; below {@code $.aeroplane} when it is in the aeroplane file
+   */
+  public String pathOf(FileFault fault) {
+    return fault.file().equals(file) ? fault.jsonPath() : AEROPLANE + fault.jsonPath().substring(1);
+  }
+
+  /**
+   * From where the path of an aeroplane file counts.
+   *
+   * @return the absolute directory
+   */
+  public Path directory() {
+    Path parent = file.toAbsolutePath().getParent();
+    return parent == null ? file.toAbsolutePath() : parent;
+  }
+
+  @Override
+  public boolean equals(Object other) {
+    return other instanceof ScenarioDocument document
+        && document.json.equals(json)
+        && document.file.equals(file);
+  }
+
+  @Override
+  public int hashCode() {
+    return json.hashCode();
+  }
+
+  /**
+   * The text.
+   *
+   * @return as {@link #json}
+   */
+  @Override
+  public String toString() {
+    return json;
+  }
+}

@@ -1,0 +1,285 @@
+package org.rolltrace.ui.desk;
+
+import atlantafx.base.theme.PrimerDark;
+import atlantafx.base.theme.PrimerLight;
+import java.nio.file.Path;
+import java.time.ZoneId;
+import java.time.format.DateTimeFormatter;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import javafx.beans.binding.Bindings;
+import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.SimpleObjectProperty;
+import javafx.scene.Scene;
+import javafx.scene.control.Button;
+import javafx.scene.control.Menu;
+import javafx.scene.control.MenuBar;
+import javafx.scene.control.MenuItem;
+import javafx.scene.control.RadioMenuItem;
+import javafx.scene.control.SeparatorMenuItem;
+import javafx.scene.control.TextInputControl;
+import javafx.scene.control.ToggleGroup;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyCombination;
+import javafx.scene.input.KeyEvent;
+import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.stage.Stage;
+import javafx.stage.WindowEvent;
+import org.rolltrace.ui.chart.Palette;
+import org.rolltrace.ui.dialog.Dialogs;
+import org.rolltrace.ui.manoeuvre.ManoeuvreModel;
+import org.rolltrace.ui.manoeuvre.ManoeuvreView;
+import org.rolltrace.ui.session.DeskSession;
+import org.rolltrace.ui.session.Problem;
+import org.rolltrace.ui.session.RecoveryStore;
+
+/** The window: menus, the workplace, and the questions about unsaved work. */
+public final class DeskWindow {
+  private static final double WIDTH = 1240;
+  private static final double HEIGHT = 800;
+
+  private final Stage stage;
+  private final DeskSession session;
+  private final RecoveryStore recovery;
+  private final Dialogs dialogs;
+  private final ManoeuvreModel model;
+  private final BorderPane root = new BorderPane();
+  private final ObjectProperty<Palette> palette =
+      new SimpleObjectProperty<>(this, "palette", Palette.LIGHT);
+
+  /**
+   * A window that is not shown yet.
+   *
+   * @param stage where it is shown
+   * @param session what it shows
+   * @param recovery where work is kept against a crash
+   */
+  public DeskWindow(Stage stage, DeskSession session, RecoveryStore recovery) {
+    this.stage = stage;
+    this.recovery = recovery;
+    this.session = session;
+    this.dialogs = new Dialogs(stage);
+    this.model = new ManoeuvreModel(session);
+    root.getStyleClass().add("desk");
+    ManoeuvreView manoeuvre = new ManoeuvreView(model, palette);
+    MenuBar menus = menus();
+    HBox.setHgrow(menus, Priority.ALWAYS);
+    HBox top = new HBox(menus, manoeuvre.actions());
+    top.getStyleClass().add("top-row");
+    root.setTop(top);
+    root.setCenter(manoeuvre);
+    Scene scene = new Scene(root, WIDTH, HEIGHT);
+    scene.getStylesheets().add(DeskWindow.class.getResource("desk.css").toExternalForm());
+    scene.addEventFilter(KeyEvent.KEY_PRESSED, this::spacePlays);
+    useDark(false);
+    stage.setMinWidth(900);
+    stage.setMinHeight(640);
+    stage.setOnCloseRequest(this::closeAsked);
+    stage
+        .titleProperty()
+        .bind(
+            Bindings.createStringBinding(
+                this::windowTitle, session.titleProperty(), session.dirtyProperty()));
+    session
+        .problemProperty()
+        .addListener((property, before, now) -> Optional.ofNullable(now).ifPresent(this::tell));
+  }
+
+  private String windowTitle() {
+    String title = session.titleProperty().get();
+    return (title == null || title.isEmpty() ? "" : title + " \u2013 ")
+        + "Rolltrace"
+        + (session.dirtyProperty().get() ? " (unsaved)" : "");
+  }
+
+  /**
+   * The state behind the workplace.
+   *
+   * @return the model
+   */
+  public ManoeuvreModel model() {
+    return model;
+  }
+
+  /**
+   * Shows the window.
+   *
+   * @param first the scenario to open, unless a crash left something to take up
+   */
+  public void show(Path first) {
+    session.open(first);
+    stage.show();
+    offerRecovery();
+  }
+
+  private void offerRecovery() {
+    for (RecoveryStore.Pending pending : recovery.pending()) {
+      if (dialogs.askRecover(describe(pending))) {
+        session.recover(pending);
+        return;
+      }
+      recovery.forget(pending);
+    }
+  }
+
+  private static String describe(RecoveryStore.Pending pending) {
+    return pending.document().text("$.title").orElse("a scenario without a title")
+        + pending.origin().map(origin -> "\n" + origin).orElse("")
+        + "\n"
+        + DateTimeFormatter.ofPattern("yyyy-MM-dd HH:mm", Locale.ROOT)
+            .format(pending.time().atZone(ZoneId.systemDefault()));
+  }
+
+  private void tell(Problem problem) {
+    dialogs.tell(problem.title(), problem.message());
+    session.dismissProblem();
+  }
+
+  private MenuBar menus() {
+    Menu shipped = new Menu("Shipped scenarios");
+    shipped.setId("shipped");
+    shipped.setOnShowing(event -> fill(shipped));
+    shipped.getItems().add(new MenuItem("\u2026"));
+    Menu file =
+        new Menu(
+            "File",
+            null,
+            item("Open\u2026", "Shortcut+O", this::open),
+            shipped,
+            new SeparatorMenuItem(),
+            item("Save", "Shortcut+S", this::save),
+            item("Save as\u2026", "Shortcut+Shift+S", this::saveAs),
+            new SeparatorMenuItem(),
+            item("Close", "Shortcut+W", this::close));
+    MenuItem undo = item("Undo", "Shortcut+Z", session::undo);
+    undo.disableProperty().bind(session.canUndoProperty().not());
+    undo.textProperty().bind(Bindings.concat("Undo: ", session.undoWordProperty()));
+    MenuItem redo = item("Redo", "Shortcut+Shift+Z", session::redo);
+    redo.disableProperty().bind(session.canRedoProperty().not());
+    redo.textProperty().bind(Bindings.concat("Redo: ", session.redoWordProperty()));
+    Menu edit = new Menu("Edit", null, undo, redo);
+    RadioMenuItem light = new RadioMenuItem("Paper");
+    RadioMenuItem dark = new RadioMenuItem("Slate");
+    light.setId("theme-paper");
+    dark.setId("theme-slate");
+    ToggleGroup ground = new ToggleGroup();
+    light.setToggleGroup(ground);
+    dark.setToggleGroup(ground);
+    light.setSelected(true);
+    light.setOnAction(event -> useDark(false));
+    dark.setOnAction(event -> useDark(true));
+    Menu view =
+        new Menu(
+            "View",
+            null,
+            light,
+            dark,
+            new SeparatorMenuItem(),
+            item("Whole manoeuvre", "Shortcut+0", model::resetView));
+    return new MenuBar(file, edit, view);
+  }
+
+  private static MenuItem item(String words, String keys, Runnable action) {
+    MenuItem item = new MenuItem(words);
+    item.setAccelerator(KeyCombination.keyCombination(keys));
+    item.setOnAction(event -> action.run());
+    return item;
+  }
+
+  private void fill(Menu shipped) {
+    List<Path> files =
+        ShippedScenarios.scenariosIn(ShippedScenarios.folder(RecoveryStore.defaultFolder()));
+    shipped
+        .getItems()
+        .setAll(
+            files.stream()
+                .map(
+                    file -> {
+                      String name = file.getFileName().toString().replace(".json", "");
+                      MenuItem item = new MenuItem(name.replace('-', ' '));
+                      item.setId("shipped-" + name);
+                      item.setOnAction(event -> openAfterAsking(file));
+                      return item;
+                    })
+                .toList());
+  }
+
+  /**
+   * Draws on paper or on slate.
+   *
+   * @param dark true for slate
+   */
+  public void useDark(boolean dark) {
+    palette.set(dark ? Palette.SLATE : Palette.LIGHT);
+    stage
+        .getScene()
+        .setUserAgentStylesheet(
+            (dark ? new PrimerDark() : new PrimerLight()).getUserAgentStylesheet());
+    root.getStyleClass().removeAll("paper", "slate");
+    root.getStyleClass().add(dark ? "slate" : "paper");
+  }
+
+  private void spacePlays(KeyEvent event) {
+    boolean typing = stage.getScene().getFocusOwner() instanceof TextInputControl;
+    boolean pressing = stage.getScene().getFocusOwner() instanceof Button;
+    if (event.getCode() == KeyCode.SPACE && !typing && !pressing) {
+      model.clock().toggle();
+      event.consume();
+    }
+  }
+
+  private void open() {
+    dialogs.askOpen(folder()).ifPresent(this::openAfterAsking);
+  }
+
+  private void openAfterAsking(Path file) {
+    if (mayLeave()) {
+      session.open(file);
+    }
+  }
+
+  private Path folder() {
+    Path file = session.fileProperty().get();
+    return file == null ? null : file.toAbsolutePath().getParent();
+  }
+
+  private boolean save() {
+    return session.fileProperty().get() == null ? saveAs() : session.save();
+  }
+
+  private boolean saveAs() {
+    Path file = session.fileProperty().get();
+    String name = file == null ? "scenario.json" : file.getFileName().toString();
+    return dialogs.askSaveAs(folder(), name).map(session::saveAs).orElse(false);
+  }
+
+  /** Whether the present scenario may be left, after asking about unsaved changes. */
+  private boolean mayLeave() {
+    if (!session.dirtyProperty().get()) {
+      return true;
+    }
+    return switch (dialogs.askUnsaved(session.titleProperty().get())) {
+      case SAVE -> save();
+      case DISCARD -> true;
+      case STAY -> false;
+    };
+  }
+
+  private void closeAsked(WindowEvent event) {
+    if (mayLeave()) {
+      session.close();
+    } else {
+      event.consume();
+    }
+  }
+
+  private void close() {
+    stage.fireEvent(new WindowEvent(stage, WindowEvent.WINDOW_CLOSE_REQUEST));
+    if (!session.dirtyProperty().get()) {
+      stage.close();
+    }
+  }
+}

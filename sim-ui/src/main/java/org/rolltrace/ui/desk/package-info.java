@@ -1,0 +1,2 @@
+/** The window: application, wiring and style sheets. */
+package org.rolltrace.ui.desk;

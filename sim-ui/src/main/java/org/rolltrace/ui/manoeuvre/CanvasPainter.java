@@ -1,0 +1,112 @@
+package org.rolltrace.ui.manoeuvre;
+
+import javafx.geometry.VPos;
+import javafx.scene.canvas.GraphicsContext;
+import javafx.scene.paint.Color;
+import javafx.scene.shape.StrokeLineCap;
+import javafx.scene.shape.StrokeLineJoin;
+import javafx.scene.text.Font;
+import javafx.scene.text.TextAlignment;
+import org.rolltrace.ui.chart.Dash;
+import org.rolltrace.ui.chart.Ink;
+import org.rolltrace.ui.chart.Mark;
+import org.rolltrace.ui.chart.Palette;
+import org.rolltrace.ui.chart.Sheet;
+import org.rolltrace.ui.chart.Stroke;
+import org.rolltrace.ui.chart.TypeSize;
+
+/** Paints the drawings that window and paper share onto a canvas. */
+final class CanvasPainter {
+  static final String FAMILY = "DejaVu Sans";
+
+  private final GraphicsContext canvas;
+  private final Palette palette;
+
+  CanvasPainter(GraphicsContext canvas, Palette palette) {
+    this.canvas = canvas;
+    this.palette = palette;
+    canvas.setLineCap(StrokeLineCap.ROUND);
+    canvas.setLineJoin(StrokeLineJoin.ROUND);
+    canvas.setTextBaseline(VPos.BASELINE);
+  }
+
+  static Color colour(Palette palette, Ink ink, double opacity) {
+    int rgb = palette.rgb(ink);
+    return Color.rgb((rgb >> 16) & 0xff, (rgb >> 8) & 0xff, rgb & 0xff, opacity);
+  }
+
+  /** Paints a sheet with its upper left corner at a point. */
+  void paint(Sheet sheet, double x, double y) {
+    canvas.save();
+    canvas.translate(x, y);
+    sheet.marks().forEach(this::paint);
+    canvas.restore();
+  }
+
+  void paint(Mark mark) {
+    if (mark instanceof Mark.Line line) {
+      stroke(line.stroke());
+      canvas.strokeLine(line.x1(), line.y1(), line.x2(), line.y2());
+    } else if (mark instanceof Mark.Polyline curve) {
+      stroke(curve.stroke());
+      canvas.strokePolyline(curve.x(), curve.y(), curve.x().length);
+    } else if (mark instanceof Mark.Area area) {
+      canvas.setFill(colour(palette, area.ink(), area.opacity()));
+      canvas.fillPolygon(area.x(), area.y(), area.x().length);
+    } else if (mark instanceof Mark.Label label) {
+      paintLabel(label);
+    } else if (mark instanceof Mark.Dot dot) {
+      paintDot(dot);
+    } else if (mark instanceof Mark.Clip clip) {
+      canvas.save();
+      canvas.beginPath();
+      canvas.rect(clip.x(), clip.y(), clip.width(), clip.height());
+      canvas.clip();
+      clip.marks().forEach(this::paint);
+      canvas.restore();
+    }
+  }
+
+  private void stroke(Stroke stroke) {
+    canvas.setStroke(colour(palette, stroke.ink(), stroke.opacity()));
+    canvas.setLineWidth(stroke.width());
+    canvas.setLineDashes(dashes(stroke.dash(), stroke.width()));
+  }
+
+  private static double[] dashes(Dash dash, double width) {
+    double unit = Math.max(1, width);
+    return switch (dash) {
+      case SOLID -> new double[0];
+      case DASHED -> new double[] {5 * unit, 4 * unit};
+      case DOTTED -> new double[] {0.5 * unit, 3 * unit};
+      case DASH_DOT -> new double[] {6 * unit, 3 * unit, 0.5 * unit, 3 * unit};
+    };
+  }
+
+  private void paintLabel(Mark.Label label) {
+    canvas.setFill(colour(palette, label.ink(), 1));
+    canvas.setFont(font(label.size()));
+    canvas.setTextAlign(
+        switch (label.anchor()) {
+          case START -> TextAlignment.LEFT;
+          case MIDDLE -> TextAlignment.CENTER;
+          case END -> TextAlignment.RIGHT;
+        });
+    canvas.fillText(label.text(), label.x(), label.y());
+  }
+
+  static Font font(TypeSize size) {
+    return Font.font(FAMILY, size.pixels());
+  }
+
+  private void paintDot(Mark.Dot dot) {
+    double d = 2 * dot.radius();
+    if (dot.filled()) {
+      canvas.setFill(colour(palette, dot.ink(), 1));
+      canvas.fillOval(dot.x() - dot.radius(), dot.y() - dot.radius(), d, d);
+    } else {
+      stroke(Stroke.of(dot.ink(), 1.2));
+      canvas.strokeOval(dot.x() - dot.radius(), dot.y() - dot.radius(), d, d);
+    }
+  }
+}

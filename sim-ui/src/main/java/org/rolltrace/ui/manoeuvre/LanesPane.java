@@ -1,0 +1,328 @@
+package org.rolltrace.ui.manoeuvre;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.UnaryOperator;
+import javafx.beans.property.IntegerProperty;
+import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.SimpleIntegerProperty;
+import javafx.scene.Cursor;
+import javafx.scene.canvas.Canvas;
+import javafx.scene.canvas.GraphicsContext;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
+import javafx.scene.input.MouseEvent;
+import javafx.scene.layout.Region;
+import org.rolltrace.core.files.ScenarioDocument;
+import org.rolltrace.core.pilot.Control;
+import org.rolltrace.core.pilot.Movement;
+import org.rolltrace.core.run.RunResult;
+import org.rolltrace.ui.chart.Anchor;
+import org.rolltrace.ui.chart.Dash;
+import org.rolltrace.ui.chart.Ink;
+import org.rolltrace.ui.chart.Mark;
+import org.rolltrace.ui.chart.Palette;
+import org.rolltrace.ui.chart.StripChart;
+import org.rolltrace.ui.chart.Stroke;
+import org.rolltrace.ui.chart.TimeWindow;
+import org.rolltrace.ui.chart.TypeSize;
+
+/**
+ * What the hand did: stick and pedal lanes with their inputs as blocks to drag, stretch and resize.
+ */
+final class LanesPane extends Region {
+  private static final double LANE = 46;
+  private static final double GAP = 8;
+  private static final double REACH = 6;
+
+  /** Half the height of full travel. */
+  private static final double FULL = 0.5 * LANE - 3;
+
+  private final ManoeuvreModel model;
+  private final ObjectProperty<Palette> palette;
+  private final StagePane stage;
+  private final Canvas canvas = new Canvas();
+  private final IntegerProperty selected = new SimpleIntegerProperty(this, "selected", -1);
+  private List<LaneBlock> blocks = List.of();
+  private LaneBlock dragged;
+  private LaneBlock.Part part;
+  private double dragFrom;
+  private double dragSize;
+
+  LanesPane(ManoeuvreModel model, ObjectProperty<Palette> palette, StagePane stage) {
+    this.model = model;
+    this.palette = palette;
+    this.stage = stage;
+    setId("lanes");
+    setFocusTraversable(true);
+    setAccessibleText("Stick and pedal lanes");
+    getChildren().add(canvas);
+    setMinHeight(2 * LANE + GAP + 6);
+    setPrefHeight(2 * LANE + GAP + 6);
+    model.session().resultProperty().addListener((property, before, now) -> refresh());
+    model.windowProperty().addListener((property, before, now) -> draw());
+    palette.addListener((property, before, now) -> draw());
+    selected.addListener((property, before, now) -> draw());
+    addEventHandler(MouseEvent.MOUSE_MOVED, this::hover);
+    addEventHandler(MouseEvent.MOUSE_PRESSED, this::press);
+    addEventHandler(MouseEvent.MOUSE_DRAGGED, this::drag);
+    addEventHandler(MouseEvent.MOUSE_RELEASED, event -> release());
+    addEventHandler(MouseEvent.MOUSE_CLICKED, this::click);
+    addEventHandler(KeyEvent.KEY_PRESSED, this::keyPressed);
+    refresh();
+  }
+
+  /** The index of the selected input; −1 for none. */
+  IntegerProperty selectedProperty() {
+    return selected;
+  }
+
+  private void refresh() {
+    RunResult result = model.session().resultProperty().get();
+    blocks = result == null ? List.of() : LaneBlock.of(result.scenario().programme().inputs());
+    if (selected.get() >= blocks.size()) {
+      selected.set(blocks.size() - 1);
+    } else if (selected.get() < 0 && !blocks.isEmpty()) {
+      selected.set(0);
+    }
+    draw();
+  }
+
+  @Override
+  protected void layoutChildren() {
+    canvas.setWidth(getWidth());
+    canvas.setHeight(getHeight());
+    draw();
+  }
+
+  private double plotWidth() {
+    return getWidth() - StagePane.AXIS_FROM - StripChart.RIGHT;
+  }
+
+  private double xOf(double time) {
+    TimeWindow window = model.windowProperty().get();
+    return StagePane.AXIS_FROM + (time - window.from()) / window.length() * plotWidth();
+  }
+
+  private double timeAt(double x) {
+    TimeWindow window = model.windowProperty().get();
+    return window.from() + (x - StagePane.AXIS_FROM) / plotWidth() * window.length();
+  }
+
+  private static double middle(Control control) {
+    return 2 + 0.5 * LANE + (control == Control.STICK ? 0 : LANE + GAP);
+  }
+
+  private static double yOf(Control control, double position) {
+    return middle(control) - position * FULL;
+  }
+
+  private void draw() {
+    GraphicsContext context = canvas.getGraphicsContext2D();
+    context.setFill(CanvasPainter.colour(palette.get(), Ink.GROUND, 1));
+    context.fillRect(0, 0, getWidth(), getHeight());
+    if (plotWidth() < 100) {
+      return;
+    }
+    CanvasPainter painter = new CanvasPainter(context, palette.get());
+    for (Control control : Control.values()) {
+      drawLane(painter, control);
+    }
+    List<Mark> marks = new ArrayList<>();
+    for (LaneBlock block : blocks) {
+      addBlock(marks, block);
+    }
+    painter.paint(
+        new Mark.Clip(StagePane.AXIS_FROM, 0, plotWidth(), Math.max(1, getHeight()), marks));
+  }
+
+  private void drawLane(CanvasPainter painter, Control control) {
+    double left = StagePane.AXIS_FROM;
+    double right = getWidth() - StripChart.RIGHT;
+    double y = middle(control);
+    painter.paint(
+        new Mark.Area(
+            new double[] {left, right, right, left},
+            new double[] {y - FULL, y - FULL, y + FULL, y + FULL},
+            Ink.PANEL,
+            1));
+    painter.paint(new Mark.Line(left, y, right, y, Stroke.of(Ink.GRID, 1)));
+    String word = control == Control.STICK ? "Stick" : "Pedal";
+    painter.paint(new Mark.Label(10, y + 4, word, Anchor.START, TypeSize.NORMAL, Ink.TEXT));
+    painter.paint(
+        new Mark.Label(left - 8, y - FULL + 10, "right", Anchor.END, TypeSize.SMALL, Ink.QUIET));
+    painter.paint(
+        new Mark.Label(left - 8, y + FULL - 2, "left", Anchor.END, TypeSize.SMALL, Ink.QUIET));
+    if (blocks.stream().noneMatch(block -> block.control() == control)) {
+      painter.paint(
+          new Mark.Label(
+              left + 8,
+              y + 4,
+              "double-click to add an input",
+              Anchor.START,
+              TypeSize.SMALL,
+              Ink.QUIET));
+    }
+  }
+
+  private void addBlock(List<Mark> marks, LaneBlock block) {
+    Movement movement = block.shape().movement();
+    double last = Math.max(model.windowProperty().get().to(), block.shape().start());
+    List<double[]> corners = new ArrayList<>();
+    corners.add(new double[] {block.shape().start(), 0});
+    for (double at : movement.breakpoints()) {
+      if (at <= last) {
+        corners.add(new double[] {at, movement.positionAt(Math.nextDown(at))});
+        corners.add(new double[] {at, movement.positionAt(at)});
+      }
+    }
+    double end = block.shownEnd(last);
+    corners.add(new double[] {end, movement.positionAt(end)});
+    corners.add(new double[] {end, 0});
+    double[] x = corners.stream().mapToDouble(corner -> xOf(corner[0])).toArray();
+    double[] y = corners.stream().mapToDouble(corner -> yOf(block.control(), corner[1])).toArray();
+    Ink ink = block.shape().size() < 0 ? Ink.LEFT : Ink.RIGHT;
+    boolean chosen = block.index() == selected.get();
+    marks.add(new Mark.Area(x, y, ink, chosen ? 0.38 : 0.2));
+    marks.add(
+        new Mark.Polyline(
+            x,
+            y,
+            new Stroke(
+                ink, chosen ? 2 : 1.2, block.shape().size() < 0 ? Dash.DASHED : Dash.SOLID, 1)));
+    if (chosen) {
+      double top = yOf(block.control(), block.shape().size());
+      double hand = xOf(block.shape().start() + block.shape().handTime());
+      marks.add(new Mark.Dot(hand, top, 3.5, ink, true));
+      if (block.canStretch()) {
+        marks.add(new Mark.Dot(xOf(end), middle(block.control()), 3.5, ink, true));
+      }
+    }
+  }
+
+  private record Hit(LaneBlock block, LaneBlock.Part part) {}
+
+  private Optional<Hit> hitAt(double x, double y) {
+    for (int i = blocks.size() - 1; i >= 0; i--) {
+      LaneBlock block = blocks.get(i);
+      double middle = middle(block.control());
+      if (Math.abs(y - middle) > FULL + REACH) {
+        continue;
+      }
+      double left = xOf(block.shape().start());
+      double right = xOf(block.shownEnd(model.windowProperty().get().to()));
+      if (x < left - REACH || x > right + REACH) {
+        continue;
+      }
+      double top = yOf(block.control(), block.shape().size());
+      double hand = xOf(block.shape().start() + block.shape().handTime());
+      boolean chosen = block.index() == selected.get();
+      if (chosen && Math.abs(x - hand) <= REACH && Math.abs(y - top) <= REACH) {
+        return Optional.of(new Hit(block, LaneBlock.Part.HAND));
+      }
+      if (block.canStretch() && Math.abs(x - right) <= REACH) {
+        return Optional.of(new Hit(block, LaneBlock.Part.END));
+      }
+      if (Math.abs(y - top) <= REACH && x > left) {
+        return Optional.of(new Hit(block, LaneBlock.Part.TOP));
+      }
+      return Optional.of(new Hit(block, LaneBlock.Part.BODY));
+    }
+    return Optional.empty();
+  }
+
+  private void hover(MouseEvent event) {
+    setCursor(
+        hitAt(event.getX(), event.getY())
+            .map(
+                hit ->
+                    switch (hit.part()) {
+                      case BODY -> Cursor.MOVE;
+                      case TOP -> Cursor.V_RESIZE;
+                      case END, HAND -> Cursor.H_RESIZE;
+                    })
+            .orElse(Cursor.DEFAULT));
+  }
+
+  private void press(MouseEvent event) {
+    requestFocus();
+    Optional<Hit> hit = hitAt(event.getX(), event.getY());
+    dragged = hit.map(Hit::block).orElse(null);
+    part = hit.map(Hit::part).orElse(null);
+    dragFrom = timeAt(event.getX());
+    if (dragged != null) {
+      dragSize = dragged.shape().size() - (middle(dragged.control()) - event.getY()) / FULL;
+      selected.set(dragged.index());
+      stage.holdRanges(true);
+    }
+  }
+
+  private void drag(MouseEvent event) {
+    if (dragged == null) {
+      return;
+    }
+    double time = timeAt(event.getX());
+    LaneBlock block = dragged;
+    UnaryOperator<ScenarioDocument> change =
+        switch (part) {
+          case BODY -> document -> block.moved(document, time - dragFrom);
+          case TOP ->
+              document ->
+                  block.resized(
+                      document, dragSize + (middle(block.control()) - event.getY()) / FULL);
+          case END -> document -> block.stretched(document, time);
+          case HAND -> document -> block.handUntil(document, time);
+        };
+    model.session().edit(word(), "drag-" + block.index() + part, change);
+  }
+
+  private String word() {
+    return switch (part) {
+      case BODY -> "move input";
+      case TOP -> "resize input";
+      case END -> "stretch input";
+      case HAND -> "change the hand's movement";
+    };
+  }
+
+  private void release() {
+    if (dragged != null) {
+      dragged = null;
+      model.session().endGesture();
+      stage.holdRanges(false);
+    }
+  }
+
+  private void click(MouseEvent event) {
+    if (event.getClickCount() == 2 && hitAt(event.getX(), event.getY()).isEmpty()) {
+      boolean stick = event.getY() < middle(Control.STICK) + FULL + GAP / 2;
+      addInput(stick ? Control.STICK : Control.PEDAL, "hold", Math.max(0, timeAt(event.getX())));
+    }
+  }
+
+  void addInput(Control control, String shape, double start) {
+    int count = blocks.size();
+    model
+        .session()
+        .edit(
+            "add input",
+            document ->
+                document.withInputAdded(control.word(), shape, Math.rint(start * 100) / 100));
+    selected.set(count);
+  }
+
+  void removeSelected() {
+    int index = selected.get();
+    if (index >= 0 && index < blocks.size()) {
+      model.session().edit("remove input", document -> document.withoutInput(index));
+    }
+  }
+
+  private void keyPressed(KeyEvent event) {
+    if (event.getCode() == KeyCode.DELETE || event.getCode() == KeyCode.BACK_SPACE) {
+      removeSelected();
+      event.consume();
+    }
+  }
+}

@@ -1,0 +1,36 @@
+package org.rolltrace.ui.manoeuvre;
+
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
+import java.util.Locale;
+
+/** Numbers as they are written into files by the mouse, and on the screen. */
+final class Written {
+  private Written() {}
+
+  /** A number to some decimals, without zeros behind, as it would be typed. */
+  static String plain(double value, int decimals) {
+    BigDecimal rounded = BigDecimal.valueOf(value).setScale(decimals, RoundingMode.HALF_UP);
+    return rounded.signum() == 0 ? "0" : rounded.stripTrailingZeros().toPlainString();
+  }
+
+  /** A time as it would be typed. */
+  static String seconds(double value) {
+    return plain(value, 3) + " s";
+  }
+
+  /** Four figures with a proper minus sign, for reading. */
+  static String reading(double value) {
+    if (value == 0) {
+      return "0";
+    }
+    double size = Math.abs(value);
+    if (size < 1e-4 || size >= 1e6) {
+      return String.format(Locale.ROOT, "%.2e", value).replace('-', '\u2212');
+    }
+    BigDecimal figures = new BigDecimal(value).round(new MathContext(4));
+    int decimals = Math.max(0, Math.min(5, 4 - figures.precision() + figures.scale()));
+    return String.format(Locale.ROOT, "%." + decimals + "f", figures).replace('-', '\u2212');
+  }
+}

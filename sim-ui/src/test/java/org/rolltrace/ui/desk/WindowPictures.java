@@ -1,0 +1,131 @@
+package org.rolltrace.ui.desk;
+
+import java.io.File;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.file.Path;
+import java.util.ArrayDeque;
+import java.util.Deque;
+import java.util.List;
+import javafx.animation.PauseTransition;
+import javafx.application.Application;
+import javafx.application.Platform;
+import javafx.embed.swing.SwingFXUtils;
+import javafx.geometry.Rectangle2D;
+import javafx.scene.control.ToggleButton;
+import javafx.scene.image.WritableImage;
+import javafx.scene.robot.Robot;
+import javafx.stage.Stage;
+import javafx.util.Duration;
+import javax.imageio.ImageIO;
+import org.rolltrace.ui.session.DeskSession;
+import org.rolltrace.ui.session.RecoveryStore;
+import org.rolltrace.ui.task.Background;
+
+/**
+ * Takes pictures of the real window, on paper and slate, at two sizes, in the states that matter.
+ * Run by {@code .dev/window-pictures}.
+ */
+public final class WindowPictures extends Application {
+  private static final Duration SETTLE = Duration.millis(700);
+  private static final Path SCENARIOS = Path.of("scenarios").toAbsolutePath();
+
+  private final Deque<Shot> shots = new ArrayDeque<>();
+  private Background runner;
+  private DeskSession session;
+  private DeskWindow window;
+  private Stage stage;
+
+  /** Made by the window toolkit. */
+  public WindowPictures() {}
+
+  private record Shot(String name, Runnable before) {}
+
+  @Override
+  public void start(Stage first) throws IOException {
+    stage = first;
+    runner = new Background(Platform::runLater);
+    RecoveryStore recovery =
+        new RecoveryStore(java.nio.file.Files.createTempDirectory("rolltrace-pictures"));
+    session = new DeskSession(runner, recovery);
+    window = new DeskWindow(stage, session, recovery);
+    window.show(SCENARIOS.resolve("light-single-roll-entry.json"));
+    for (int[] size : List.of(new int[] {1240, 800}, new int[] {1100, 700})) {
+      for (boolean dark : new boolean[] {false, true}) {
+        String suffix = (dark ? "slate" : "paper") + "-" + size[0];
+        shots.add(
+            new Shot(
+                "entry-" + suffix,
+                () -> {
+                  stage.setX(0);
+                  stage.setY(0);
+                  stage.setWidth(size[0]);
+                  stage.setHeight(size[1]);
+                  window.useDark(dark);
+                  session.open(SCENARIOS.resolve("light-single-roll-entry.json"));
+                }));
+        shots.add(new Shot("left-right-" + suffix, () -> window.model().compareMirrored()));
+        shots.add(
+            new Shot(
+                "cursor-" + suffix,
+                () -> {
+                  session.dropGhost();
+                  session.open(SCENARIOS.resolve("light-single-held-stick.json"));
+                  session.edit("shorten", d -> d.with("$.duration", "12 s"));
+                  window.model().resetView();
+                  window.model().clock().moveTo(3.2);
+                }));
+        shots.add(
+            new Shot(
+                "fault-" + suffix,
+                () -> {
+                  session.edit("spoil", d -> d.with("$.condition.trueAirspeed", "176 kg"));
+                  figures(true);
+                }));
+        shots.add(
+            new Shot(
+                "drop-" + suffix,
+                () -> {
+                  figures(false);
+                  session.open(SCENARIOS.resolve("tarnlark-wing-drop.json"));
+                }));
+      }
+    }
+    next();
+  }
+
+  private void figures(boolean shown) {
+    ((ToggleButton) stage.getScene().lookup("#show-figures")).setSelected(shown);
+  }
+
+  private void next() {
+    Shot shot = shots.poll();
+    if (shot == null) {
+      runner.close();
+      Platform.exit();
+      return;
+    }
+    shot.before().run();
+    PauseTransition pause = new PauseTransition(SETTLE);
+    pause.setOnFinished(
+        event -> {
+          take(shot.name());
+          next();
+        });
+    pause.play();
+  }
+
+  private void take(String name) {
+    WritableImage image =
+        new Robot()
+            .getScreenCapture(
+                null,
+                new Rectangle2D(stage.getX(), stage.getY(), stage.getWidth(), stage.getHeight()));
+    File file = new File(getParameters().getUnnamed().get(0), name + ".png");
+    try {
+      ImageIO.write(SwingFXUtils.fromFXImage(image, null), "png", file);
+    } catch (IOException unwritable) {
+      throw new UncheckedIOException(unwritable);
+    }
+  }
+}

@@ -1,0 +1,132 @@
+package org.rolltrace.ui.task;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.time.Duration;
+import java.util.List;
+import java.util.concurrent.CopyOnWriteArrayList;
+import java.util.concurrent.CountDownLatch;
+import java.util.concurrent.Executor;
+import java.util.concurrent.LinkedBlockingQueue;
+import java.util.concurrent.TimeUnit;
+import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.Test;
+
+class BackgroundTest {
+  private final LinkedBlockingQueue<Runnable> handedOver = new LinkedBlockingQueue<>();
+  private final Executor handOver = handedOver::add;
+  private final Background runner = new Background(handOver);
+  private final List<String> seen = new CopyOnWriteArrayList<>();
+
+  @AfterEach
+  void end() {
+    runner.close();
+  }
+
+  private void takeOne() throws InterruptedException {
+    Runnable outcome = handedOver.poll(20, TimeUnit.SECONDS); // only a hung thread takes so long
+    assertThat(outcome).isNotNull();
+    outcome.run();
+  }
+
+  private static void await(CountDownLatch latch) {
+    try {
+      assertThat(latch.await(20, TimeUnit.SECONDS)).isTrue();
+    } catch (InterruptedException e) {
+      throw new IllegalStateException(e);
+    }
+  }
+
+  @Test
+  void ofWhatWaitsOnlyTheNewestIsDone() throws InterruptedException {
+    CountDownLatch begun = new CountDownLatch(1);
+    CountDownLatch mayGoOn = new CountDownLatch(1);
+    runner.run(
+        () -> {
+          begun.countDown();
+          await(mayGoOn);
+          return "first";
+        },
+        seen::add,
+        thrown -> seen.add("failed"));
+    await(begun);
+    for (String word : List.of("second", "third", "fourth")) {
+      runner.run(() -> word, seen::add, thrown -> seen.add("failed"));
+    }
+    mayGoOn.countDown();
+    takeOne();
+    takeOne();
+    assertThat(seen).containsExactly("first", "fourth");
+    assertThat(handedOver.poll(50, TimeUnit.MILLISECONDS)).isNull();
+  }
+
+  @Test
+  void workIsDoneElsewhereAndHandedOverWhereItIsTaken() throws InterruptedException {
+    Thread here = Thread.currentThread();
+    Thread[] worker = new Thread[1];
+    runner.run(
+        () -> {
+          worker[0] = Thread.currentThread();
+          return "done";
+        },
+        word -> seen.add(word + (Thread.currentThread() == here ? " here" : " elsewhere")),
+        thrown -> seen.add("failed"));
+    takeOne();
+    assertThat(seen).containsExactly("done here");
+    assertThat(worker[0]).isNotSameAs(here);
+    assertThat(worker[0].isDaemon()).isTrue();
+  }
+
+  @Test
+  void whatIsThrownIsHandedOverAndTheNextWorkIsDone() throws InterruptedException {
+    runner.run(
+        () -> {
+          throw new StackOverflowError("deep");
+        },
+        word -> seen.add("done"),
+        thrown -> seen.add(thrown.getMessage()));
+    takeOne();
+    runner.run(() -> "next", seen::add, thrown -> seen.add("failed"));
+    takeOne();
+    assertThat(seen).containsExactly("deep", "next");
+  }
+
+  @Test
+  void spacedWorkKeepsItsPauseAndDoesNotHoldUpTheOther() throws InterruptedException {
+    Duration pause = Duration.ofMillis(300);
+    List<Long> begun = new CopyOnWriteArrayList<>();
+    long start = System.nanoTime();
+    for (int i = 0; i < 50; i++) {
+      String word = "spaced " + i;
+      runner.spaced(
+          pause,
+          () -> {
+            begun.add(System.nanoTime());
+            return word;
+          },
+          seen::add,
+          thrown -> seen.add("failed"));
+      TimeUnit.MILLISECONDS.sleep(1);
+    }
+    runner.run(() -> "other", seen::add, thrown -> seen.add("failed"));
+    while (!seen.contains("spaced 49")) {
+      takeOne();
+    }
+    // Once at the beginning, and once for all the rest; a slow machine may take a few more.
+    long pauses = (System.nanoTime() - start) / pause.toNanos();
+    assertThat(begun).hasSizeBetween(2, (int) pauses + 1);
+    for (int i = 1; i < begun.size(); i++) {
+      // From start to start; the clock is read a little later than the pause is counted from.
+      assertThat(begun.get(i) - begun.get(i - 1)).isGreaterThan(pause.toNanos() * 9 / 10);
+    }
+    assertThat(seen.indexOf("other")).isLessThan(seen.indexOf("spaced 49"));
+  }
+
+  @Test
+  void afterTheEndNothingIsDone() throws InterruptedException {
+    runner.close();
+    runner.run(() -> "late", seen::add, thrown -> seen.add("failed"));
+    runner.spaced(Duration.ZERO, () -> "late", seen::add, thrown -> seen.add("failed"));
+    assertThat(handedOver.poll(50, TimeUnit.MILLISECONDS)).isNull();
+  }
+}
