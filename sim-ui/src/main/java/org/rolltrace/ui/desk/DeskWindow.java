@@ -72,6 +72,7 @@ public final class DeskWindow {
     root.setTop(top);
     root.setCenter(manoeuvre);
     Scene scene = new Scene(root, WIDTH, HEIGHT);
+    stage.setScene(scene);
     scene.getStylesheets().add(DeskWindow.class.getResource("desk.css").toExternalForm());
     scene.addEventFilter(KeyEvent.KEY_PRESSED, this::spacePlays);
     useDark(false);

@@ -78,22 +78,29 @@ final class ConditionStrip extends FlowPane {
     }
   }
 
+  /** Width of the choice of a kind, px. */
+  private static final double KIND = 104;
+
   private final DeskSession session;
-  private final HBox speed = new HBox(4);
-  private final HBox air = new HBox(4);
+  private final PathField speed;
+  private final PathField air;
   private final ComboBox<Speed> speedKind = new ComboBox<>();
   private final ComboBox<Air> airKind = new ComboBox<>();
   private final ToggleGroup slips = new ToggleGroup();
   private boolean showing;
 
   ConditionStrip(DeskSession session) {
-    super(14, 6);
+    super(10, 6);
     this.session = session;
     getStyleClass().add("condition-strip");
+    speed = new PathField(session, speedTarget(Speed.TRUE));
+    air = new PathField(session, airTarget(Air.OFFSET));
     speedKind.getItems().setAll(Speed.values());
     speedKind.setId("speed-kind");
+    speedKind.setPrefWidth(KIND);
     airKind.getItems().setAll(Air.values());
     airKind.setId("air-kind");
+    airKind.setPrefWidth(KIND);
     speedKind.valueProperty().addListener((property, before, now) -> speedKindChosen(before, now));
     airKind.valueProperty().addListener((property, before, now) -> airKindChosen(before, now));
     getChildren()
@@ -101,7 +108,7 @@ final class ConditionStrip extends FlowPane {
             new PathField(
                 session,
                 FieldTarget.quantity(
-                    "$.title", "Scenario", "title", "", "Title of the scenario", 17)),
+                    "$.title", "Scenario", "title", "", "Title of the scenario", 14)),
             new PathField(
                 session,
                 FieldTarget.quantity(
@@ -111,8 +118,8 @@ final class ConditionStrip extends FlowPane {
                     "3000 ft",
                     "Pressure altitude, in any unit of length",
                     7)),
-            air,
-            speed,
+            new HBox(4, air, labelled(airKind)),
+            new HBox(4, speed, labelled(speedKind)),
             slipChoice(),
             new PathField(
                 session,
@@ -188,49 +195,32 @@ final class ConditionStrip extends FlowPane {
     showing = true;
     Speed kind =
         speedIn(document).orElse(speedKind.getValue() == null ? Speed.TRUE : speedKind.getValue());
-    if (speedKind.getValue() != kind || speed.getChildren().isEmpty()) {
-      speedKind.setValue(kind);
-      speed
-          .getChildren()
-          .setAll(
-              new PathField(
-                  session,
-                  FieldTarget.quantity(
-                      kind.path(),
-                      "Airspeed",
-                      "airspeed",
-                      "120 kt",
-                      "Airspeed of the kind beside",
-                      7)),
-              labelled(speedKind));
-    }
+    speedKind.setValue(kind);
+    speed.retarget(speedTarget(kind));
     Air way = airIn(document);
-    if (airKind.getValue() != way || air.getChildren().isEmpty()) {
-      airKind.setValue(way);
-      air.getChildren()
-          .setAll(
-              new PathField(
-                  session,
-                  way == Air.OFFSET
-                      ? FieldTarget.quantity(
-                          way.path(),
-                          "Temperature",
-                          "temperature",
-                          "0 K",
-                          "Difference from the standard temperature at that altitude",
-                          5)
-                      : FieldTarget.quantity(
-                          way.path(),
-                          "Density",
-                          "density",
-                          "1.225 kg/m3",
-                          "Density of the air",
-                          11)),
-              labelled(airKind));
-    }
+    airKind.setValue(way);
+    air.retarget(airTarget(way));
     String slip = document.text("$.slip").orElse("");
     slips.getToggles().forEach(toggle -> toggle.setSelected(slip.equals(toggle.getUserData())));
     showing = false;
+  }
+
+  private static FieldTarget speedTarget(Speed kind) {
+    return FieldTarget.quantity(
+        kind.path(), "Airspeed", "airspeed", "120 kt", "Airspeed of the kind beside", 7);
+  }
+
+  private static FieldTarget airTarget(Air way) {
+    return way == Air.OFFSET
+        ? FieldTarget.quantity(
+            way.path(),
+            "Temperature",
+            "temperature",
+            "0 K",
+            "Difference from the standard temperature at that altitude",
+            9)
+        : FieldTarget.quantity(
+            way.path(), "Density", "density", "1.225 kg/m3", "Density of the air", 9);
   }
 
   private static Node labelled(Node node) {

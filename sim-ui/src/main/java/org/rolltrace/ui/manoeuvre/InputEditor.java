@@ -1,14 +1,14 @@
 package org.rolltrace.ui.manoeuvre;
 
-import java.util.ArrayList;
 import java.util.List;
-import javafx.geometry.Pos;
+import java.util.function.UnaryOperator;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.MenuButton;
 import javafx.scene.control.MenuItem;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
 import org.rolltrace.core.files.ScenarioDocument;
@@ -16,36 +16,64 @@ import org.rolltrace.core.pilot.Control;
 import org.rolltrace.ui.session.DeskSession;
 
 /** The selected input as typed values, and the buttons that add and remove inputs. */
-final class InputEditor extends HBox {
+final class InputEditor extends FlowPane {
   private static final List<String> SHAPES = List.of("step", "hold", "doublet");
 
   private final DeskSession session;
   private final LanesPane lanes;
-  private final HBox fields = new HBox(8);
-  private String shown = "";
+  private final ComboBox<String> control = new ComboBox<>();
+  private final ComboBox<String> shape = new ComboBox<>();
+  private final PathField start;
+  private final PathField size;
+  private final PathField length;
+  private final PathField hand;
+  private final List<Node> ofInput;
+  private boolean showing;
 
   InputEditor(DeskSession session, LanesPane lanes) {
-    super(10);
+    super(10, 6);
     this.session = session;
     this.lanes = lanes;
     setId("input-editor");
     getStyleClass().add("input-editor");
-    setAlignment(Pos.TOP_LEFT);
     MenuButton add = new MenuButton("Add input");
     add.setId("add-input");
-    for (Control control : Control.values()) {
-      for (String shape : SHAPES) {
-        MenuItem item = new MenuItem(control.word() + " " + shape);
-        item.setId("add-" + control.word() + "-" + shape);
-        item.setOnAction(event -> lanes.addInput(control, shape, 1));
+    add.setMinWidth(USE_PREF_SIZE);
+    for (Control moved : Control.values()) {
+      for (String kind : SHAPES) {
+        MenuItem item = new MenuItem(moved.word() + " " + kind);
+        item.setId("add-" + moved.word() + "-" + kind);
+        item.setOnAction(event -> lanes.addInput(moved, kind, 1));
         add.getItems().add(item);
       }
     }
     Button remove = new Button("Remove");
     remove.setId("remove-input");
+    remove.setMinWidth(USE_PREF_SIZE);
     remove.setOnAction(event -> lanes.removeSelected());
     remove.disableProperty().bind(lanes.selectedProperty().lessThan(0));
-    getChildren().addAll(labelled("Inputs", new HBox(6, add, remove)), fields);
+    control.getItems().setAll("stick", "pedal");
+    control.setId("input-control");
+    control.setOnAction(
+        event ->
+            choose(
+                "change control", document -> document.with(path("control"), control.getValue())));
+    shape.getItems().setAll(SHAPES);
+    shape.setId("input-shape");
+    shape.setOnAction(
+        event ->
+            choose(
+                "change shape",
+                document ->
+                    document.withInputShape(lanes.selectedProperty().get(), shape.getValue())));
+    start = new PathField(session, startTarget());
+    size = new PathField(session, sizeTarget());
+    length = new PathField(session, durationTarget());
+    hand = new PathField(session, handTarget());
+    ofInput =
+        List.of(labelled("Control", control), labelled("Shape", shape), start, size, length, hand);
+    getChildren().add(labelled("Inputs", new HBox(6, add, remove)));
+    getChildren().addAll(ofInput);
     lanes.selectedProperty().addListener((property, before, now) -> show());
     session.documentProperty().addListener((property, before, now) -> show());
     show();
@@ -57,89 +85,77 @@ final class InputEditor extends HBox {
     return new VBox(label, node);
   }
 
+  private void choose(String word, UnaryOperator<ScenarioDocument> change) {
+    if (!showing) {
+      session.edit(word, change);
+    }
+  }
+
+  private String path(String key) {
+    return "$.inputs[" + Math.max(0, lanes.selectedProperty().get()) + "]." + key;
+  }
+
+  private FieldTarget startTarget() {
+    return FieldTarget.quantity(
+        path("start"), "Start", "start of the input", "1 s", "When the hand begins to move", 6);
+  }
+
+  private FieldTarget sizeTarget() {
+    return FieldTarget.number(
+        path("size"),
+        "Size",
+        "size of the input",
+        "0.5",
+        "Fraction of travel, added to the trimmed position; right positive, \u22121 to 1",
+        5);
+  }
+
+  private FieldTarget durationTarget() {
+    return FieldTarget.quantity(
+        path("duration"),
+        "Held for",
+        "duration of the hold",
+        "2 s",
+        "From the start to the beginning of the return",
+        6);
+  }
+
+  private FieldTarget widthTarget() {
+    return FieldTarget.quantity(
+        path("width"), "Width", "width of the doublet", "0.5 s", "From one move to the next", 6);
+  }
+
+  private FieldTarget handTarget() {
+    return FieldTarget.quantity(
+        path("movement"),
+        "Hand takes",
+        "movement of the hand",
+        "0.1 s",
+        "How long the hand takes for a move; 0 s is a jump",
+        6);
+  }
+
   private void show() {
     ScenarioDocument document = session.documentProperty().get();
     int index = lanes.selectedProperty().get();
-    if (document == null || index < 0 || index >= document.inputCount()) {
-      fields.getChildren().clear();
-      shown = "";
-      return;
-    }
-    String base = "$.inputs[" + index + "].";
-    String shape = document.text(base + "shape").orElse("");
-    String control = document.text(base + "control").orElse("");
-    String key = index + control + shape;
-    if (key.equals(shown)) {
-      return;
-    }
-    shown = key;
-    List<Node> nodes = new ArrayList<>();
-    nodes.add(labelled("Control", choice("control", List.of("stick", "pedal"), control, base)));
-    nodes.add(labelled("Shape", choice("shape", SHAPES, shape, base)));
-    nodes.add(
-        quantity(
-            base + "start", "Start", "start of the input", "1 s", "When the hand begins to move"));
-    nodes.add(
-        new PathField(
-            session,
-            FieldTarget.number(
-                base + "size",
-                "Size",
-                "size of the input",
-                "0.5",
-                "Fraction of travel, right positive, \u22121 to 1",
-                5)));
-    if (shape.equals("hold")) {
-      nodes.add(
-          quantity(
-              base + "duration",
-              "Held for",
-              "duration of the hold",
-              "2 s",
-              "From the start to the beginning of the return"));
-    }
-    if (shape.equals("doublet")) {
-      nodes.add(
-          quantity(
-              base + "width",
-              "Width",
-              "width of the doublet",
-              "0.5 s",
-              "From one move to the next"));
-    }
-    nodes.add(
-        quantity(
-            base + "movement",
-            "Hand takes",
-            "movement of the hand",
-            "0.1 s",
-            "How long the hand takes for a move; 0 s is a jump"));
-    fields.getChildren().setAll(nodes);
-  }
-
-  private PathField quantity(String path, String title, String word, String prompt, String hint) {
-    return new PathField(session, FieldTarget.quantity(path, title, word, prompt, hint, 6));
-  }
-
-  private ComboBox<String> choice(String key, List<String> words, String value, String base) {
-    ComboBox<String> box = new ComboBox<>();
-    box.getItems().setAll(words);
-    box.setValue(value);
-    box.setId("input-" + key);
-    int index = lanes.selectedProperty().get();
-    box.setOnAction(
-        event -> {
-          String chosen = box.getValue();
-          if (chosen == null) {
-            return;
-          }
-          session.edit(
-              "change " + key,
-              document ->
-                  key.equals("shape")
-                      ? document.withInputShape(index, chosen)
-                      : document.with(base + key, chosen));
+    boolean any = document != null && index >= 0 && index < document.inputCount();
+    ofInput.forEach(
+        node -> {
+          node.setVisible(any);
+          node.setManaged(any);
         });
-    return box;
+    if (!any) {
+      return;
+    }
+    showing = true;
+    control.setValue(document.text(path("control")).orElse(""));
+    String kind = document.text(path("shape")).orElse("");
+    shape.setValue(kind);
+    showing = false;
+    start.retarget(startTarget());
+    size.retarget(sizeTarget());
+    length.retarget(kind.equals("doublet") ? widthTarget() : durationTarget());
+    length.setShown(!kind.equals("step"));
+    hand.retarget(handTarget());
   }
 }

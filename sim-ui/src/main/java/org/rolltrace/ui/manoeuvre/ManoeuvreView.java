@@ -20,6 +20,8 @@ public final class ManoeuvreView extends BorderPane {
   /** Width of the panes at either side, px. */
   private static final double SIDE = 276;
 
+  private static final double READINGS = 312;
+
   private final ManoeuvreModel model;
   private final FiguresPane figures;
   private final ToggleButton showFigures = new ToggleButton("Aeroplane\u2026");
@@ -46,8 +48,8 @@ public final class ManoeuvreView extends BorderPane {
     centre.getStyleClass().add("centre");
     setCenter(centre);
     ReadingsPane readings = new ReadingsPane(session);
-    readings.setPrefWidth(SIDE);
-    readings.setMinWidth(SIDE);
+    readings.setPrefWidth(READINGS);
+    readings.setMinWidth(READINGS);
     setRight(readings);
     setTop(new ConditionStrip(session));
     showFigures.setId("show-figures");

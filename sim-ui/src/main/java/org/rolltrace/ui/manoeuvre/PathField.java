@@ -1,11 +1,13 @@
 package org.rolltrace.ui.manoeuvre;
 
 import java.util.Optional;
+import javafx.collections.ListChangeListener;
 import javafx.css.PseudoClass;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
 import javafx.scene.control.Tooltip;
 import javafx.scene.layout.VBox;
+import org.rolltrace.core.files.FileFault;
 import org.rolltrace.core.files.ScenarioDocument;
 import org.rolltrace.ui.session.DeskSession;
 
@@ -17,30 +19,25 @@ final class PathField extends VBox {
   private static final PseudoClass FAULTY = PseudoClass.getPseudoClass("faulty");
 
   private final DeskSession session;
-  private final FieldTarget target;
+  private final Label label = new Label();
   private final TextField field = new TextField();
+  private final Tooltip hint = new Tooltip();
   private final Label fault = new Label();
+  private FieldTarget target;
   private boolean showing;
 
   PathField(DeskSession session, FieldTarget target) {
     this.session = session;
-    this.target = target;
     getStyleClass().add("path-field");
-    Label label = new Label(target.title());
     label.getStyleClass().add("field-label");
     label.setLabelFor(field);
-    field.setId(target.id());
-    field.setAccessibleText(target.title());
-    field.setPromptText(target.prompt());
-    field.setTooltip(new Tooltip(target.hint()));
-    field.setPrefColumnCount(target.columns());
+    field.setTooltip(hint);
     fault.getStyleClass().add("field-fault");
-    fault.setId(target.id() + "-fault");
     fault.setWrapText(true);
-    fault.setManaged(false);
-    fault.setVisible(false);
+    fault.setMinHeight(USE_PREF_SIZE);
     fault.maxWidthProperty().bind(field.widthProperty().multiply(2.2));
     getChildren().addAll(label, field, fault);
+    retarget(target);
 
     field.textProperty().addListener((property, before, now) -> typed(now));
     field
@@ -54,9 +51,27 @@ final class PathField extends VBox {
             });
     field.setOnAction(event -> session.endGesture());
     session.documentProperty().addListener((property, before, now) -> show());
-    session.faults().addListener((javafx.collections.ListChangeListener<Object>) c -> showFault());
+    session.faults().addListener((ListChangeListener<FileFault>) change -> showFault());
+  }
+
+  /** Shows and changes another value from now on. */
+  final void retarget(FieldTarget newTarget) {
+    target = newTarget;
+    label.setText(target.title());
+    field.setId(target.id());
+    field.setAccessibleText(target.title());
+    field.setPromptText(target.prompt());
+    field.setPrefColumnCount(target.columns());
+    hint.setText(target.hint());
+    fault.setId(target.id() + "-fault");
     show();
     showFault();
+  }
+
+  /** Takes part in the layout, or not. */
+  final void setShown(boolean shown) {
+    setVisible(shown);
+    setManaged(shown);
   }
 
   private void typed(String text) {

@@ -34,7 +34,7 @@ final class ReadingsPane extends VBox {
     getStyleClass().add("readings-pane");
     setPadding(new Insets(8, 10, 8, 10));
     setSpacing(6);
-    rows.setHgap(8);
+    rows.setHgap(7);
     rows.setVgap(3);
     ColumnConstraints titles = new ColumnConstraints();
     titles.setHgrow(Priority.ALWAYS);
@@ -212,6 +212,8 @@ final class ReadingsPane extends VBox {
     Label measure = new Label(unit);
     measure.getStyleClass().add("quiet");
     measure.setMinWidth(USE_PREF_SIZE);
+    name.setWrapText(true);
+    name.setMinHeight(USE_PREF_SIZE);
     rows.addRow(row, name, figure, measure);
     if (!kept.isEmpty()) {
       Label other = new Label(kept);

@@ -110,7 +110,10 @@ final class StagePane extends Region {
     strips =
         result == null
             ? List.of()
-            : RollStrips.of(result, Optional.ofNullable(model.session().ghostProperty().get()));
+            : RollStrips.of(result, Optional.ofNullable(model.session().ghostProperty().get()))
+                .stream()
+                .filter(strip -> !strip.title().equals(RollStrips.HANDS))
+                .toList();
     askRedraw();
   }
 

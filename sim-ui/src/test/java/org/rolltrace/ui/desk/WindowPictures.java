@@ -27,7 +27,7 @@ import org.rolltrace.ui.task.Background;
  * Run by {@code .dev/window-pictures}.
  */
 public final class WindowPictures extends Application {
-  private static final Duration SETTLE = Duration.millis(700);
+  private static final Duration SETTLE = Duration.millis(1500);
   private static final Path SCENARIOS = Path.of("scenarios").toAbsolutePath();
 
   private final Deque<Shot> shots = new ArrayDeque<>();
