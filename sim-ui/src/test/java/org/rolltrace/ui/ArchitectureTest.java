@@ -33,6 +33,26 @@ class ArchitectureTest {
           .resideInAnyPackage("javafx..", "java.awt..", "javax.swing..");
 
   @ArchTest
+  static final ArchRule DRAWINGS_KNOW_NO_WINDOW =
+      noClasses()
+          .that()
+          .resideInAPackage("org.rolltrace.ui.chart..")
+          .should()
+          .dependOnClassesThat()
+          .resideInAnyPackage("javafx..", "javax.swing..", "picocli..");
+
+  @ArchTest
+  static final ArchRule ONLY_PICTURES_ARE_PAINTED_BY_AWT =
+      noClasses()
+          .that()
+          .resideInAPackage("org.rolltrace.ui.chart..")
+          .and()
+          .doNotHaveSimpleName("PngPainter")
+          .should()
+          .dependOnClassesThat()
+          .resideInAPackage("java.awt..");
+
+  @ArchTest
   static final ArchRule ONLY_THE_LAUNCHER_ENDS_THE_PROGRAM =
       noClasses()
           .that()

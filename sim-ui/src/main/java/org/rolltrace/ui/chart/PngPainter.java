@@ -77,7 +77,8 @@ public final class PngPainter {
     // In memory: the usual way wants to write a temporary file.
     try (ImageOutputStream png = new MemoryCacheImageOutputStream(out)) {
       if (!ImageIO.write(image, "png", png)) {
-        throw new IOException("this Java runtime cannot write PNG; use one with its desktop module");
+        throw new IOException(
+            "this Java runtime cannot write PNG; use one with its desktop module");
       }
     }
   }

@@ -70,8 +70,8 @@ public final class RollStrips {
    * The ink of the side that a run rolls to.
    *
    * @param result the run
-   * @return {@link Ink#LEFT} or {@link Ink#RIGHT}, by its leading input; without one by how it starts,
-   *     and else by where it ends
+   * @return {@link Ink#LEFT} or {@link Ink#RIGHT}, by its leading input; without one by how it
+   *     starts, and else by where it ends
    */
   public static Ink side(RunResult result) {
     Scenario scenario = result.scenario();

@@ -21,7 +21,7 @@ final class StripDrawing {
   private static final double WORD_GAP = 8;
 
   /** From the base line of the words to the strip. */
-  private static final double WORD_LIFT = 6;
+  private static final double WORD_LIFT = 7;
 
   /** Beyond this a thing that had to move is tied to its place by a line. */
   private static final double TIED = 4;
@@ -127,11 +127,11 @@ final class StripDrawing {
       double x = area.xOf(marker.time());
       marks.add(new Mark.Line(x, area.y(), x, bottom(), EVENT));
     }
-    while (!seen.isEmpty() && sum(lengths(seen)) > sheetWidth - area.x() + FIGURES) {
+    while (!seen.isEmpty() && sum(lengths(seen)) > sheetWidth - area.x() + WORD_GAP) {
       seen.remove(seen.size() - 1);
     }
     double[] wanted = seen.stream().mapToDouble(marker -> area.xOf(marker.time())).toArray();
-    double[] placed = Spread.apart(wanted, lengths(seen), area.x() - FIGURES, sheetWidth);
+    double[] placed = Spread.apart(wanted, lengths(seen), area.x() - WORD_GAP, sheetWidth);
     double base = area.y() - WORD_LIFT;
     for (int i = 0; i < placed.length; i++) {
       marks.add(
@@ -179,7 +179,7 @@ final class StripDrawing {
     double[] wanted = named.stream().mapToDouble(this::endY).toArray();
     double[] heights = new double[wanted.length];
     Arrays.fill(heights, NAME_HEIGHT);
-    double[] placed = Spread.apart(wanted, heights, area.y() - 4, bottom() + 4);
+    double[] placed = Spread.apart(wanted, heights, area.y() - 3, bottom() + 3);
     for (int i = 0; i < placed.length; i++) {
       Curve curve = named.get(i);
       marks.add(
