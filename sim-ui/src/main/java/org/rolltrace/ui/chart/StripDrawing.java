@@ -27,7 +27,7 @@ final class StripDrawing {
   private static final double TIED = 4;
 
   /** The least distance of figures at the axis, px. */
-  private static final double TICKS = 20;
+  private static final double TICKS = 16;
 
   /** The space that a figure at the axis takes. */
   private static final double FIGURES = 40;

@@ -14,7 +14,13 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.rolltrace.core.history.Channel;
+import org.rolltrace.core.pilot.Control;
+import org.rolltrace.core.pilot.HoldInput;
+import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.pilot.PilotProgramme;
 import org.rolltrace.core.run.RunResult;
+import org.rolltrace.core.run.ScenarioRun;
+import org.rolltrace.core.scenario.Scenario;
 
 /** What stands on the sheets, read off their marks. */
 class DrawingsTest {
@@ -113,6 +119,61 @@ class DrawingsTest {
                 StripChart.RIGHT)
             .sheet();
     assertThat(Runs.crowding(sheet)).isEmpty();
+  }
+
+  @Test
+  void longTitlesAndManyInputsAreBrokenAndCut() {
+    Scenario plain = Runs.step(0.3).scenario();
+    List<PilotInput> inputs = new ArrayList<>();
+    for (int i = 0; i < 40; i++) {
+      inputs.add(new PilotInput(Control.STICK, new HoldInput(0.2 * i, 0.1, 0.1, 0.1)));
+    }
+    RunResult run =
+        ScenarioRun.execute(
+            new Scenario(
+                "A long title ".repeat(15),
+                plain.data(),
+                plain.condition(),
+                plain.propeller(),
+                plain.slip(),
+                plain.start(),
+                PilotProgramme.of(inputs),
+                plain.duration(),
+                plain.measures()));
+    Sheet page = StagePicture.draw(run, Optional.empty());
+    assertThat(Runs.crowding(page)).isEmpty();
+    assertThat(Runs.all(Mark.Label.class, page))
+        .extracting(Mark.Label::text)
+        .anyMatch(text -> text.endsWith(" …"));
+  }
+
+  /** The least that the window is meant for. */
+  @ParameterizedTest
+  @MethodSource("shipped")
+  void aSmallStageIsNotCrowded(Path file) {
+    RunResult run = Runs.of(file);
+    Sheet strips =
+        StripChart.draw(
+                RollStrips.of(run, Optional.empty()),
+                RollStrips.window(run),
+                640,
+                340,
+                StripChart.LEFT,
+                StripChart.RIGHT)
+            .sheet();
+    assertThat(Runs.crowding(strips)).isEmpty();
+    Sheet trace =
+        WingTrace.draw(
+            run,
+            Optional.empty(),
+            10,
+            RollStrips.window(run),
+            640,
+            140,
+            StripChart.LEFT,
+            StripChart.RIGHT,
+            OptionalDouble.of(1));
+    assertThat(Runs.crowding(trace)).isEmpty();
   }
 
   @Test
