@@ -29,6 +29,9 @@ final class StripDrawing {
   /** The least distance of figures at the axis, px. */
   private static final double TICKS = 16;
 
+  /** The same where there would be one figure only. */
+  private static final double CLOSE_TICKS = 12;
+
   /** The space that a figure at the axis takes. */
   private static final double FIGURES = 40;
 
@@ -74,12 +77,10 @@ final class StripDrawing {
       double x = sharp(area.xOf(times.value(i)));
       marks.add(new Mark.Line(x, area.y(), x, bottom(), GRID));
     }
-    Ticks values =
-        Ticks.of(
-            area.low(),
-            area.high(),
-            Math.max(1, area.height() / TICKS),
-            ValueRange.isAngle(strip.unit()));
+    Ticks values = values(TICKS);
+    if (values.size() < 2) {
+      values = values(CLOSE_TICKS);
+    }
     for (int i = 0; i < values.size(); i++) {
       double y = area.yOf(values.value(i));
       if (values.value(i) != 0) {
@@ -98,6 +99,14 @@ final class StripDrawing {
       double y = sharp(area.yOf(0));
       marks.add(new Mark.Line(area.x(), y, end(), y, ZERO));
     }
+  }
+
+  private Ticks values(double distance) {
+    return Ticks.of(
+        area.low(),
+        area.high(),
+        Math.max(1, area.height() / distance),
+        ValueRange.isAngle(strip.unit()));
   }
 
   /** The title beside the figures, broken into lines after its commas, and the unit below. */
