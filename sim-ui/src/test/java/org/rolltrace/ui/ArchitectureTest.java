@@ -33,6 +33,34 @@ class ArchitectureTest {
           .resideInAnyPackage("javafx..", "java.awt..", "javax.swing..");
 
   @ArchTest
+  static final ArchRule DRAWINGS_KNOW_NO_WINDOW =
+      noClasses()
+          .that()
+          .resideInAPackage("org.rolltrace.ui.chart..")
+          .should()
+          .dependOnClassesThat()
+          .resideInAnyPackage("javafx..", "javax.swing..", "picocli..");
+
+  @ArchTest
+  static final ArchRule ONLY_PICTURES_ARE_PAINTED_BY_AWT =
+      noClasses()
+          .that()
+          .resideInAPackage("org.rolltrace.ui.chart..")
+          .and()
+          .doNotHaveSimpleName("PngPainter")
+          .should()
+          .dependOnClassesThat()
+          .resideInAPackage("java.awt..");
+
+  @ArchTest
+  static final ArchRule ONLY_THE_LAUNCHER_ENDS_THE_PROGRAM =
+      noClasses()
+          .that()
+          .resideOutsideOfPackage("org.rolltrace.ui.launch")
+          .should()
+          .callMethod(System.class, "exit", int.class);
+
+  @ArchTest
   static final ArchRule THE_SESSION_HAS_NO_NODES =
       noClasses()
           .that()
@@ -58,10 +86,13 @@ class ArchitectureTest {
           .resideInAnyPackage("javafx..", "java.awt..", "javax.swing..", "org.rolltrace.core..");
 
   @ArchTest
-  static final ArchRule ONLY_THE_LAUNCHER_ENDS_THE_PROGRAM =
+  static final ArchRule MODELS_KNOW_NO_NODES =
       noClasses()
           .that()
-          .resideOutsideOfPackage("org.rolltrace.ui.launch")
+          .resideInAPackage("org.rolltrace.ui.manoeuvre..")
+          .and()
+          .haveSimpleNameEndingWith("Model")
           .should()
-          .callMethod(System.class, "exit", int.class);
+          .dependOnClassesThat()
+          .resideInAnyPackage("javafx.scene..", "javafx.stage..", "javafx.application..");
 }

@@ -26,7 +26,6 @@ public final class StagePicture {
   public static final double HEIGHT = 900;
 
   private static final double MARGIN = 26;
-  private static final double HEAD = 76;
   private static final double TRACE = 232;
   private static final double SMALL_LINE = 14;
 
@@ -42,11 +41,9 @@ public final class StagePicture {
   public static Sheet draw(RunResult result, Optional<RunResult> ghost) {
     double inside = WIDTH - 2 * MARGIN;
     List<Mark> marks = new ArrayList<>();
-    List<String> head = TextLines.wrapped(conditionLine(result), TypeSize.NORMAL, inside);
-    addText(marks, 32, List.of(result.scenario().title()), TypeSize.LARGE, Ink.TEXT, 0);
-    addText(marks, 53, List.of(head.get(0)), TypeSize.NORMAL, Ink.QUIET, 0);
-    List<String> inputs = TextLines.wrapped(inputLine(result), TypeSize.NORMAL, inside);
-    addText(marks, 71, List.of(inputs.get(0)), TypeSize.NORMAL, Ink.QUIET, 0);
+    double y = addHead(marks, 32, result.scenario().title(), TypeSize.LARGE, Ink.TEXT) + 1;
+    y = addHead(marks, y, conditionLine(result), TypeSize.NORMAL, Ink.QUIET);
+    double traceTop = addHead(marks, y, inputLine(result), TypeSize.NORMAL, Ink.QUIET) - 4;
 
     List<String> foot = footLines(result, inside);
     double footTop = HEIGHT - 18 - (foot.size() - 1) * SMALL_LINE;
@@ -64,8 +61,8 @@ public final class StagePicture {
             StripChart.LEFT,
             StripChart.RIGHT,
             OptionalDouble.of(strongInstant(result)));
-    place(trace, MARGIN, HEAD + 8, marks);
-    double stripsTop = HEAD + 8 + TRACE;
+    place(trace, MARGIN, traceTop, marks);
+    double stripsTop = traceTop + TRACE;
     Sheet strips =
         StripChart.draw(
                 RollStrips.of(result, ghost),
@@ -81,6 +78,17 @@ public final class StagePicture {
 
   private static void place(Sheet sheet, double x, double y, List<Mark> marks) {
     sheet.marks().forEach(mark -> marks.add(mark.movedBy(x, y)));
+  }
+
+  /** Adds a paragraph, of two lines at most, and returns where the next one begins. */
+  private static double addHead(List<Mark> marks, double y, String text, TypeSize size, Ink ink) {
+    List<String> lines = TextLines.wrapped(text, size, WIDTH - 2 * MARGIN - 20);
+    if (lines.size() > 2) {
+      lines = List.of(lines.get(0), lines.get(1) + " …");
+    }
+    double pitch = size == TypeSize.LARGE ? 20 : 18;
+    addText(marks, y, lines, size, ink, pitch);
+    return y + lines.size() * pitch;
   }
 
   private static void addText(

@@ -21,13 +21,16 @@ final class StripDrawing {
   private static final double WORD_GAP = 8;
 
   /** From the base line of the words to the strip. */
-  private static final double WORD_LIFT = 6;
+  private static final double WORD_LIFT = 7;
 
   /** Beyond this a thing that had to move is tied to its place by a line. */
   private static final double TIED = 4;
 
   /** The least distance of figures at the axis, px. */
-  private static final double TICKS = 20;
+  private static final double TICKS = 16;
+
+  /** The same where there would be one figure only. */
+  private static final double CLOSE_TICKS = 12;
 
   /** The space that a figure at the axis takes. */
   private static final double FIGURES = 40;
@@ -74,12 +77,10 @@ final class StripDrawing {
       double x = sharp(area.xOf(times.value(i)));
       marks.add(new Mark.Line(x, area.y(), x, bottom(), GRID));
     }
-    Ticks values =
-        Ticks.of(
-            area.low(),
-            area.high(),
-            Math.max(1, area.height() / TICKS),
-            ValueRange.isAngle(strip.unit()));
+    Ticks values = values(TICKS);
+    if (values.size() < 2) {
+      values = values(CLOSE_TICKS);
+    }
     for (int i = 0; i < values.size(); i++) {
       double y = area.yOf(values.value(i));
       if (values.value(i) != 0) {
@@ -98,6 +99,14 @@ final class StripDrawing {
       double y = sharp(area.yOf(0));
       marks.add(new Mark.Line(area.x(), y, end(), y, ZERO));
     }
+  }
+
+  private Ticks values(double distance) {
+    return Ticks.of(
+        area.low(),
+        area.high(),
+        Math.max(1, area.height() / distance),
+        ValueRange.isAngle(strip.unit()));
   }
 
   /** The title beside the figures, broken into lines after its commas, and the unit below. */
@@ -127,11 +136,11 @@ final class StripDrawing {
       double x = area.xOf(marker.time());
       marks.add(new Mark.Line(x, area.y(), x, bottom(), EVENT));
     }
-    while (!seen.isEmpty() && sum(lengths(seen)) > sheetWidth - area.x() + FIGURES) {
+    while (!seen.isEmpty() && sum(lengths(seen)) > sheetWidth - area.x() + WORD_GAP) {
       seen.remove(seen.size() - 1);
     }
     double[] wanted = seen.stream().mapToDouble(marker -> area.xOf(marker.time())).toArray();
-    double[] placed = Spread.apart(wanted, lengths(seen), area.x() - FIGURES, sheetWidth);
+    double[] placed = Spread.apart(wanted, lengths(seen), area.x() - WORD_GAP, sheetWidth);
     double base = area.y() - WORD_LIFT;
     for (int i = 0; i < placed.length; i++) {
       marks.add(
@@ -179,7 +188,7 @@ final class StripDrawing {
     double[] wanted = named.stream().mapToDouble(this::endY).toArray();
     double[] heights = new double[wanted.length];
     Arrays.fill(heights, NAME_HEIGHT);
-    double[] placed = Spread.apart(wanted, heights, area.y() - 4, bottom() + 4);
+    double[] placed = Spread.apart(wanted, heights, area.y() - 3, bottom() + 3);
     for (int i = 0; i < placed.length; i++) {
       Curve curve = named.get(i);
       marks.add(

@@ -8,8 +8,8 @@ package org.rolltrace.ui.chart;
  */
 public record ValueRange(double low, double high) {
 
-  /** The least that an axis covers: one degree, or per cent, to either side. */
-  private static final double SMALLEST = 2;
+  /** What an axis covers at least to either side: with some air, one degree or per cent. */
+  private static final double SMALL = 0.9;
 
   /** Into how many steps a range is cut to find its round ends. */
   private static final double STEPS = 7;
@@ -46,9 +46,9 @@ public record ValueRange(double low, double high) {
         }
       }
     }
-    if (most - least < SMALLEST) {
-      least = Math.min(least, -0.5 * SMALLEST);
-      most = Math.max(most, 0.5 * SMALLEST);
+    if (most - least < 2 * SMALL) {
+      least = Math.min(least, -SMALL);
+      most = Math.max(most, SMALL);
     }
     double step = Ticks.step((most - least) / STEPS, isAngle(strip.unit()));
     return new ValueRange(roundedDown(least, step), -roundedDown(-most, step));

@@ -18,6 +18,7 @@ import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.history.TimeHistory;
 import org.rolltrace.core.run.RunResult;
 import org.rolltrace.ui.chart.Anchor;
+import org.rolltrace.ui.chart.Curve;
 import org.rolltrace.ui.chart.Dash;
 import org.rolltrace.ui.chart.Ink;
 import org.rolltrace.ui.chart.Mark;
@@ -40,6 +41,9 @@ import org.rolltrace.ui.chart.WingTrace;
 final class StagePane extends Region {
   private static final double TRACE_SHARE = 0.27;
   private static final double ZOOM_STEP = 1.25;
+
+  /** About the width of a letter of the small type, px. */
+  private static final double LETTER = 6.4;
 
   /** Room at the left of the drawings, px. */
   static final double INSET = 10;
@@ -289,16 +293,14 @@ final class StagePane extends Region {
 
   private void readOut(CanvasPainter painter, PlotArea area, Strip strip, double shown, double x) {
     StringBuilder words = new StringBuilder();
-    for (var curve : strip.curves()) {
-      if (curve.stroke().dash() == Dash.DASHED && curve.name().isEmpty()) {
-        continue;
-      }
+    for (Curve curve : strip.curves()) {
       double value = at(curve.time(), curve.value(), shown);
-      double y = traceHeight + area.yOf(value);
       if (value >= area.low() && value <= area.high()) {
-        painter.paint(new Mark.Dot(x, y, 3, curve.stroke().ink(), true));
+        painter.paint(
+            new Mark.Dot(x, traceHeight + area.yOf(value), 3, curve.stroke().ink(), true));
       }
-      if (!curve.name().isEmpty()) {
+      boolean crowded = strip.curves().size() > 2 && curve.name().endsWith(", kept");
+      if (!curve.name().isEmpty() && !crowded) {
         words.append(words.isEmpty() ? "" : "   ");
         words.append(curve.name()).append(' ').append(figure(value, ""));
       }
@@ -322,8 +324,8 @@ final class StagePane extends Region {
 
   /** A short text beside the cursor, on the side that has room. */
   private void tag(CanvasPainter painter, double x, double y, String words) {
-    boolean right = x < overlay.getWidth() - StripChart.RIGHT - 190;
-    double width = 6.4 * words.length() + 8;
+    double width = LETTER * words.length() + 8;
+    boolean right = x + width < overlay.getWidth() - StripChart.RIGHT;
     double from = right ? x + 4 : x - 4 - width;
     painter.paint(
         new Mark.Area(

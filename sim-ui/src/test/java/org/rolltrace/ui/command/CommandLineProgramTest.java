@@ -80,6 +80,26 @@ class CommandLineProgramTest {
   }
 
   @Test
+  void chartsDrawsBothPictures() {
+    Path into = folder.resolve("charts");
+    Answer answer = run("fly", ROLL_ENTRY, "--json", "--charts", into.toString());
+    assertThat(answer.exitCode()).isZero();
+    assertThat(into.resolve("stage.svg")).isNotEmptyFile();
+    assertThat(into.resolve("stage.png")).isNotEmptyFile();
+    assertThat(answer.err()).contains("wrote " + into.resolve("stage.png"));
+    assertThat(answer.out()).startsWith("{").endsWith("}\n");
+  }
+
+  @Test
+  void chartsThatCannotBeWrittenEndWithThree() throws IOException {
+    Path file = Files.writeString(folder.resolve("taken"), "mine");
+    Answer answer = run("fly", ROLL_ENTRY, "--charts", file.toString());
+    assertThat(answer.exitCode()).isEqualTo(3);
+    assertThat(answer.err()).contains("cannot write the result into " + file);
+    assertThat(answer.out()).isEmpty();
+  }
+
+  @Test
   void aFolderThatCannotBeWrittenEndsWithThree() throws IOException {
     Path file = Files.writeString(folder.resolve("taken"), "mine");
     Answer answer = run("fly", ROLL_ENTRY, "--json", "--out", file.toString());
