@@ -4,8 +4,10 @@
  * <p>{@link org.rolltrace.core.files.ScenarioFile} and {@link
  * org.rolltrace.core.files.AeroplaneFile} turn files into values in SI units and radians, or refuse
  * them with a {@link org.rolltrace.core.files.FileFaultsException} that lists everything that is
- * wrong, each with file, path, line and the way out. {@link org.rolltrace.core.files.Schemas} hands
- * out the same formats as JSON Schemas.
+ * wrong, each with file, path, line and the way out. {@link
+ * org.rolltrace.core.files.ScenarioDocument} is a scenario file to be edited: its values stay as
+ * they are written, right or wrong, and it can be checked without being saved. {@link
+ * org.rolltrace.core.files.Schemas} hands out the same formats as JSON Schemas.
  *
  * <h2>Common to all</h2>
  *

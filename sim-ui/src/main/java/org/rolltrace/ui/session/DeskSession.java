@@ -420,7 +420,7 @@ public final class DeskSession {
   }
 
   private static String notKept(Throwable thrown) {
-    return "Unsaved edits would be lost in a crash: "
+    return "Unsaved edits would be lost in a crash, so save often: "
         + (thrown instanceof UncheckedIOException ? thrown.getMessage() : thrown.toString());
   }
 
