@@ -118,6 +118,9 @@ final class StripDrawing {
       y += 16;
     }
     for (String line : TextLines.brokenAtCommas(strip.unit(), TypeSize.SMALL, room)) {
+      if (y > bottom() + HALF_SMALL) {
+        return; // the next strip begins here
+      }
       marks.add(new Mark.Label(0, y, line, Anchor.START, TypeSize.SMALL, Ink.QUIET));
       y += 14;
     }

@@ -1,14 +1,16 @@
 package org.rolltrace.ui.desk;
 
 import java.io.IOException;
-import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.net.URISyntaxException;
-import java.nio.charset.StandardCharsets;
+import java.net.URL;
+import java.nio.file.FileSystem;
+import java.nio.file.FileSystems;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Stream;
 
@@ -53,25 +55,28 @@ final class ShippedScenarios {
     return Files.isRegularFile(folder.resolve(FIRST));
   }
 
+  /** Copies what the jar carries; a file that is there already is the user's and stays. */
   private static Path unpackedInto(Path folder) {
-    try (InputStream list = ShippedScenarios.class.getResourceAsStream("scenarios/list.txt")) {
-      if (list == null) {
-        throw new IllegalStateException("the jar carries no scenarios; it was built incompletely");
-      }
-      String names = new String(list.readAllBytes(), StandardCharsets.UTF_8);
-      for (String name : names.lines().toList()) {
-        Path place = folder.resolve(name);
+    URL inside = ShippedScenarios.class.getResource(FOLDER);
+    if (inside == null) {
+      throw new IllegalStateException("the jar carries no scenarios; it was built incompletely");
+    }
+    try (FileSystem jar = FileSystems.newFileSystem(inside.toURI(), Map.of());
+        Stream<Path> files = Files.walk(jar.provider().getPath(inside.toURI()))) {
+      Path top = jar.provider().getPath(inside.toURI());
+      for (Path file : files.filter(Files::isRegularFile).toList()) {
+        Path place = folder.resolve(top.relativize(file).toString());
         if (!Files.exists(place)) {
           Files.createDirectories(place.getParent());
-          try (InputStream in = ShippedScenarios.class.getResourceAsStream("scenarios/" + name)) {
-            Files.write(place, in.readAllBytes());
-          }
+          Files.copy(file, place);
         }
       }
       return folder;
     } catch (IOException unwritable) {
       throw new UncheckedIOException(
           "the shipped scenarios cannot be copied into " + folder, unwritable);
+    } catch (URISyntaxException impossible) {
+      throw new IllegalStateException("the place of the scenarios is no address", impossible);
     }
   }
 

@@ -90,7 +90,7 @@ final class ConditionStrip extends FlowPane {
   private boolean showing;
 
   ConditionStrip(DeskSession session) {
-    super(10, 6);
+    super(8, 6);
     this.session = session;
     getStyleClass().add("condition-strip");
     speed = new PathField(session, speedTarget(Speed.TRUE));
@@ -108,7 +108,7 @@ final class ConditionStrip extends FlowPane {
             new PathField(
                 session,
                 FieldTarget.quantity(
-                    "$.title", "Scenario", "title", "", "Title of the scenario", 14)),
+                    "$.title", "Scenario", "title", "", "Title of the scenario", 12)),
             new PathField(
                 session,
                 FieldTarget.quantity(
@@ -117,7 +117,7 @@ final class ConditionStrip extends FlowPane {
                     "height",
                     "3000 ft",
                     "Pressure altitude, in any unit of length",
-                    7)),
+                    6)),
             new HBox(4, air, labelled(airKind)),
             new HBox(4, speed, labelled(speedKind)),
             slipChoice(),
@@ -130,7 +130,7 @@ final class ConditionStrip extends FlowPane {
                     "none",
                     "Rolling moment of the propeller on the airframe, right wing down positive;"
                         + " a propeller turning clockwise seen from behind makes a negative one",
-                    8)),
+                    7)),
             new PathField(
                 session,
                 FieldTarget.quantity(
@@ -139,7 +139,7 @@ final class ConditionStrip extends FlowPane {
                     "bank at the start",
                     "0 deg",
                     "Bank that displaces the trimmed aeroplane, right wing down positive",
-                    6)),
+                    5)),
             new PathField(
                 session,
                 FieldTarget.quantity(
@@ -207,7 +207,7 @@ final class ConditionStrip extends FlowPane {
 
   private static FieldTarget speedTarget(Speed kind) {
     return FieldTarget.quantity(
-        kind.path(), "Airspeed", "airspeed", "120 kt", "Airspeed of the kind beside", 7);
+        kind.path(), "Airspeed", "airspeed", "120 kt", "Airspeed of the kind beside", 6);
   }
 
   private static FieldTarget airTarget(Air way) {

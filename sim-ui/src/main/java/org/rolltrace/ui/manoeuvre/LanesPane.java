@@ -32,8 +32,8 @@ import org.rolltrace.ui.chart.TypeSize;
  * What the hand did: stick and pedal lanes with their inputs as blocks to drag, stretch and resize.
  */
 final class LanesPane extends Region {
-  private static final double LANE = 46;
-  private static final double GAP = 8;
+  private static final double LANE = 40;
+  private static final double GAP = 6;
   private static final double REACH = 6;
 
   /** Half the height of full travel. */

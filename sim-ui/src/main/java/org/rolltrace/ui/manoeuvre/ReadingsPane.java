@@ -36,6 +36,7 @@ final class ReadingsPane extends VBox {
     setSpacing(6);
     rows.setHgap(7);
     rows.setVgap(3);
+    rows.setPadding(new Insets(0, 12, 0, 0)); // clear of the scroll bar
     ColumnConstraints titles = new ColumnConstraints();
     titles.setHgrow(Priority.ALWAYS);
     ColumnConstraints values = new ColumnConstraints();
@@ -60,6 +61,7 @@ final class ReadingsPane extends VBox {
     session.ghostProperty().addListener((property, before, now) -> show());
     session.staleProperty().addListener((property, before, now) -> showState());
     session.failureProperty().addListener((property, before, now) -> showState());
+    session.recoveryProblemProperty().addListener((property, before, now) -> showState());
     session.faults().addListener((ListChangeListener<Object>) change -> showState());
     show();
     showState();
@@ -81,6 +83,8 @@ final class ReadingsPane extends VBox {
               + session.faults().get(0).message();
     } else if (!session.failureProperty().get().isEmpty()) {
       words = session.failureProperty().get();
+    } else {
+      words = session.recoveryProblemProperty().get();
     }
     state.setText(words);
     state.setManaged(!words.isEmpty());
