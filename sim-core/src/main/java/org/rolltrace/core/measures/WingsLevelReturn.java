@@ -20,13 +20,6 @@ final class WingsLevelReturn {
   private WingsLevelReturn() {}
 
   static List<Measure> of(Manoeuvre manoeuvre) {
-    double start =
-        manoeuvre.programme().inputs().stream()
-            .filter(input -> input.shape().size() != 0)
-            .filter(input -> input.shape().start() < manoeuvre.duration())
-            .mapToDouble(input -> input.shape().end())
-            .max()
-            .orElse(0);
     if (manoeuvre.slip() == SlipTreatment.HELD) {
       return none("held slip cannot return by itself; choose settled or free slip");
     }
@@ -36,12 +29,11 @@ final class WingsLevelReturn {
     if (shaken) {
       return none("a doublet leaves the aeroplane swinging, not with a wing down");
     }
-    if (start >= manoeuvre.duration()) {
-      return none(
-          start == Double.POSITIVE_INFINITY
-              ? "a control stays away from trim"
-              : "the controls are back at trim only after the end of the manoeuvre");
+    OptionalDouble back = manoeuvre.programme().backAtTrim(manoeuvre.duration());
+    if (back.isEmpty()) {
+      return none("a control is away from trim to the end of the manoeuvre");
     }
+    double start = back.getAsDouble();
     TimeHistory history = manoeuvre.history();
     double bankThen = Curve.ofBank(history, 1, 0).at(start);
     double turns = 2 * Math.PI * Math.rint(bankThen / (2 * Math.PI));

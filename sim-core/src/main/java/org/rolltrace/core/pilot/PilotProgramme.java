@@ -142,6 +142,27 @@ public final class PilotProgramme {
   }
 
   /**
+   * When stick and pedals have come back to their trimmed positions, to stay there.
+   *
+   * @param end the end of the manoeuvre, s
+   * @return s, 0 when nothing moves; empty when a control is away from trim at the end
+   */
+  public OptionalDouble backAtTrim(double end) {
+    double last = 0;
+    for (double time : breakpoints()) {
+      if (time < end) {
+        last = time;
+      }
+    }
+    boolean away =
+        Math.abs(stick.positionAt(last)) >= CENTRED
+            || Math.abs(pedal.positionAt(last)) >= CENTRED
+            || stick.rateAt(last) != 0
+            || pedal.rateAt(last) != 0;
+    return away ? OptionalDouble.empty() : OptionalDouble.of(last);
+  }
+
+  /**
    * When the stick first begins a move that ends at its trimmed position.
    *
    * @return s, or empty when it never goes back

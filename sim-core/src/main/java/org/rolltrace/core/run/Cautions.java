@@ -211,11 +211,12 @@ final class Cautions {
     } else {
       FlightCondition here = scenario.condition();
       FlightCondition there = validAt.get();
+      boolean weightless = there.loadFactor() == 0;
       double liftRatio =
           here.loadFactor()
               * there.dynamicPressure()
               / (there.loadFactor() * here.dynamicPressure());
-      if (Math.abs(liftRatio - 1) > LIFT_COEFFICIENT_AWAY) {
+      if (!weightless && !(Math.abs(liftRatio - 1) <= LIFT_COEFFICIENT_AWAY)) {
         add(
             "derivatives are flown off their condition: the lift coefficient is %.3g times that for"
                 + " which they hold",
@@ -226,6 +227,10 @@ final class Cautions {
             "derivatives are flown off their condition: Mach %.2f instead of %.2f",
             here.mach(), there.mach());
       }
+    }
+    if (scenario.slip() == SlipTreatment.SETTLED
+        && !(scenario.data().derivatives().value(Coefficient.CN_BETA) > 0)) {
+      add("Cn_beta is not positive: sideslip does not settle, and settled slip is a guess");
     }
     if (scenario.slip() != SlipTreatment.HELD) {
       List<Coefficient> absent = scenario.data().derivatives().absentAmong(FreeModes.NEEDED);

@@ -71,6 +71,17 @@ class PilotProgrammeTest {
   }
 
   @Test
+  void controlsAreBackAtTrimWhenTheirSumIs() {
+    assertThat(stick().backAtTrim(10)).hasValue(0);
+    assertThat(stick(new StepInput(1, 0.5, 0.1)).backAtTrim(10)).isEmpty();
+    assertThat(stick(new HoldInput(1, 0.5, 2, 0.1)).backAtTrim(10)).hasValue(3.1);
+    assertThat(stick(new HoldInput(1, 0.5, 2, 0.1)).backAtTrim(3.05)).isEmpty();
+    assertThat(stick(new StepInput(1, 0.5, 0.1), new StepInput(5, -0.5, 0.1)).backAtTrim(10))
+        .hasValue(5.1);
+    assertThat(stick(new StepInput(12, 0.5, 0.1)).backAtTrim(10)).hasValue(0);
+  }
+
+  @Test
   void aDoubletHasNoHoldAndIsCentredAtItsEnd() {
     PilotProgramme programme = stick(new DoubletInput(1, 1, 2, 0.1));
     assertThat(programme.firstHold(20)).isEmpty();

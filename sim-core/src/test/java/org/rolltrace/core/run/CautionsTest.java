@@ -221,6 +221,13 @@ class CautionsTest {
   }
 
   @Test
+  void slipThatDoesNotSettle() {
+    slip = SlipTreatment.SETTLED;
+    values.put(Coefficient.CN_BETA, -0.02);
+    assertThat(cautions(0.2)).anyMatch(c -> c.startsWith("Cn_beta is not positive"));
+  }
+
+  @Test
   void anInputAfterTheEnd() {
     assertThat(cautions(stick(new StepInput(5, 0.2, 0.1))))
         .anyMatch(c -> c.equals("the stick input at 5.00 s starts after the end of the manoeuvre"));

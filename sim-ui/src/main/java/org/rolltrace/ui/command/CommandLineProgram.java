@@ -40,6 +40,7 @@ public final class CommandLineProgram implements Runnable {
     Locale.setDefault(Locale.ROOT);
     CommandLine commandLine = new CommandLine(new CommandLineProgram());
     commandLine.addSubcommand(new WindowCommand(opener));
+    commandLine.setExpandAtFiles(false); // a file may be called @something
     commandLine.setOut(out);
     commandLine.setErr(err);
     commandLine.setColorScheme(CommandLine.Help.defaultColorScheme(CommandLine.Help.Ansi.OFF));
