@@ -1,0 +1,164 @@
+#!/usr/bin/env python3
+"""Recomputes shipped scenarios independently of the program.
+
+Run from the top of the project, with NumPy and SciPy:  python3 sim-core/src/test/scipy/recompute.py
+Writes the CSV files of sim-core/src/test/resources/recomputed, which RecomputationTest compares with.
+
+The equations are written down here on their own: sideways velocity v in place of the sideslip, a mass
+matrix solved at every instant, and SciPy's DOP853 at a relative tolerance of 1e-12 from sample to sample.
+"""
+
+import json
+from pathlib import Path
+
+import numpy as np
+import scipy
+from scipy.integrate import solve_ivp
+
+G0 = 9.80665
+FT, LB = 0.3048, 0.45359237
+SLUG = LB * G0 / FT
+UNITS = {
+    "s": 1, "m": 1, "ft": FT, "m2": 1, "ft2": FT**2, "kg": 1, "lb": LB, "kg m2": 1, "slug ft2": SLUG * FT**2,
+    "m/s": 1, "ft/s": FT, "kt": 1852 / 3600, "kg/m3": 1, "slug/ft3": SLUG / FT**3, "K": 1, "N m": 1,
+    "deg": np.pi / 180, "rad": 1,
+}
+SCENARIOS = Path("scenarios")
+OUT = Path("sim-core/src/test/resources/recomputed")
+
+
+def si(text):
+    number, unit = text.split(" ", 1)
+    return float(number) * UNITS[unit]
+
+
+def air(condition):
+    """Density and true airspeed; U.S. Standard Atmosphere 1976 to 11 km, compressible pitot relation."""
+    gas, h = 8314.32 / 28.9644, si(condition["pressureAltitude"])
+    standard = 288.15 - 0.0065 * h
+    pressure = 101325 * (standard / 288.15) ** (G0 / (gas * 0.0065))
+    if "density" in condition:
+        density = si(condition["density"])
+    else:
+        density = pressure / (gas * (standard + si(condition.get("temperatureOffset", "0 K"))))
+    if "trueAirspeed" in condition:
+        return density, si(condition["trueAirspeed"])
+    sea_level_sound = np.sqrt(1.4 * gas * 288.15)
+    impact = 101325 * ((1 + 0.2 * (si(condition["calibratedAirspeed"]) / sea_level_sound) ** 2) ** 3.5 - 1)
+    mach = np.sqrt(5 * ((impact / pressure + 1) ** (2 / 7) - 1))
+    return density, mach * np.sqrt(1.4 * pressure / density)
+
+
+class Case:
+    """One scenario: forces per (v, p, r, aileron, rudder), the mass matrix, and what the hands do."""
+
+    def __init__(self, name):
+        self.scenario = json.loads((SCENARIOS / f"{name}.json").read_text())
+        plane = json.loads((SCENARIOS / self.scenario["aeroplane"]).read_text())
+        density, self.speed = air(self.scenario["condition"])
+        span, area, self.mass = si(plane["span"]), si(plane["wingArea"]), si(plane["mass"])
+        inertia = {axis: si(value) for axis, value in plane["inertia"].items()}
+        values = dict(plane["derivatives"]["values"])
+        if plane["derivatives"].get("aileronSign") == "left-roll-positive":
+            for key in ("CY_da", "Cl_da", "Cn_da"):
+                values[key] = -values.get(key, 0)
+        force, rate = 0.5 * density * self.speed**2 * area, span / (2 * self.speed)
+        self.per = np.array([
+            [arm * force * values.get(f"{axis}_{key}", 0) * scale for key, scale in
+             (("beta", 1 / self.speed), ("p", rate), ("r", rate), ("da", 1), ("dr", 1))]
+            for axis, arm in (("CY", 1), ("Cl", span), ("Cn", span))])
+        self.inertia = inertia
+        self.matrix = np.array([[self.mass, 0, 0],
+                                [0, inertia["roll"], -inertia.get("product", 0)],
+                                [0, -inertia.get("product", 0), inertia["yaw"]]])
+        self.propeller = np.array([0, si(self.scenario["condition"].get("propellerRollMoment", "0 N m")), 0])
+        self.full = 0.5 * (si(plane["ailerons"]["up"]) + si(plane["ailerons"]["down"]))
+        # wings-level trim: sideways velocity, aileron and rudder that leave no force and no moment
+        self.slip, self.aileron, self.rudder = np.linalg.solve(self.per[:, [0, 3, 4]], -self.propeller)
+        self.corners = [(0.0, 0.0)]
+        for move in self.scenario["inputs"]:
+            start, hand, size = si(move["start"]), si(move["movement"]), move["size"]
+            self.corners += [(start, self.corners[-1][1]), (start + hand, size)]
+            if move["shape"] == "hold":
+                back = start + si(move["duration"])
+                self.corners += [(back, size), (back + hand, 0.0)]
+
+    def stick(self, time):
+        times, positions = zip(*self.corners)
+        return self.aileron + self.full * np.interp(time, times, positions)
+
+    def free(self, time, state):
+        v, p, r, bank = state
+        load = self.per @ [v, p, r, self.stick(time), self.rudder] + self.propeller
+        load[0] += self.mass * G0 * np.sin(bank) - self.mass * self.speed * r
+        return [*np.linalg.solve(self.matrix, load), p]
+
+    def slip_and_yaw(self, time, p, bank):
+        """Sideways velocity and yaw rate that leave no side force and no yawing moment."""
+        left = self.per[np.ix_([0, 2], [0, 2])].copy()
+        left[0, 1] -= self.mass * self.speed
+        right = self.per[[0, 2]] @ [0, p, 0, self.stick(time), self.rudder]
+        right[0] += self.mass * G0 * np.sin(bank)
+        return np.linalg.solve(left, -right)
+
+    def settled(self, time, state):
+        p, bank = state
+        v, r = self.slip_and_yaw(time, p, bank)
+        moment = self.per[1] @ [v, p, r, self.stick(time), self.rudder] + self.propeller[1]
+        return [moment / self.inertia["roll"], p]
+
+    def modes(self):
+        a = np.zeros((4, 4))
+        forces = self.per[:, :3].copy()
+        forces[0, 2] -= self.mass * self.speed
+        a[:3, :3] = np.linalg.solve(self.matrix, forces)
+        a[:3, 3] = np.linalg.solve(self.matrix, [self.mass * G0, 0, 0])
+        a[3, 1] = 1
+        roots = np.linalg.eigvals(a)
+        real = sorted(root.real for root in roots if abs(root.imag) < 1e-9)
+        swing = next(root for root in roots if root.imag > 1e-9)
+        return [("roll", real[0], 0.0), ("spiral", real[1], 0.0), ("dutchRoll", swing.real, swing.imag)]
+
+    def history(self, slip, step=0.5):
+        """Rows of time, bank, roll rate, yaw rate and sideslip, in deg; every corner and sample ends a step."""
+        bank = si(self.scenario.get("start", {}).get("bank", "0 deg"))
+        state = np.array([self.slip, 0, 0, bank] if slip == "free" else [0, bank], float)
+        samples = np.arange(round(si(self.scenario["duration"]) / step) + 1) * step
+        stops = sorted({round(time, 12) for time in [*samples, *(corner[0] for corner in self.corners)]})
+        rows, equations = [], getattr(self, slip)
+        for begin, end in zip([0.0, *stops], stops):
+            if end > begin:
+                piece = solve_ivp(equations, (begin, end), state, method="DOP853", rtol=1e-12, atol=1e-14)
+                state = piece.y[:, -1]
+            if np.min(np.abs(samples - end)) < 1e-9:
+                if slip == "free":
+                    v, p, r, bank = state
+                else:
+                    (p, bank), (v, r) = state, self.slip_and_yaw(end, *state)
+                rows.append([end, *np.degrees([bank, p, r, v / self.speed])])
+        return rows
+
+
+def main():
+    head = f"# independent recomputation with SciPy {scipy.__version__} DOP853 rtol 1e-12, equations of motion written separately\n"
+    for name, slip, suffix in (
+            ("light-single-roll-entry", "free", ""), ("light-single-held-stick", "free", ""),
+            ("light-single-wing-drop", "free", "-free"), ("light-single-wing-drop", "settled", "-settled"),
+            ("tarnlark-cruise-roll-entry", "free", ""), ("large-jet-roll-entry", "free", "")):
+        with open(OUT / f"{name}{suffix}.csv", "w", newline="\n") as file:
+            file.write(head + f"# scenario {name}, {slip} slip\n")
+            file.write("time[s],bank[deg],rollRate[deg/s],yawRate[deg/s],sideslip[deg]\n")
+            for time, *values in Case(name).history(slip):
+                file.write(f"{time:.1f}," + ",".join(f"{value + 0.0:.9e}" for value in values) + "\n")
+    with open(OUT / "modes.csv", "w", newline="\n") as file:
+        file.write(f"# independent recomputation with NumPy {np.__version__}, eigenvalues of the linearised equations of free"
+                   " slip about wings level, equations of motion written separately\n"
+                   "# scenario as in the file names beside; of the pair of the dutch roll the root with positive"
+                   " imaginary part\ncase,mode,real[1/s],imag[1/s]\n")
+        for name in ("light-single-roll-entry", "tarnlark-cruise-roll-entry", "large-jet-roll-entry"):
+            for mode, real, imaginary in Case(name).modes():
+                file.write(f"{name},{mode},{real:.9e},{imaginary:.9e}\n")
+
+
+if __name__ == "__main__":
+    main()
