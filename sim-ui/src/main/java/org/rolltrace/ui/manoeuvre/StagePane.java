@@ -1,6 +1,7 @@
 package org.rolltrace.ui.manoeuvre;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -309,17 +310,9 @@ final class StagePane extends Region {
   }
 
   private static double at(double[] times, double[] values, double time) {
-    int low = 0;
-    int high = times.length;
-    while (high - low > 1) {
-      int middle = (low + high) >>> 1;
-      if (times[middle] <= time) {
-        low = middle;
-      } else {
-        high = middle;
-      }
-    }
-    return values[low];
+    int found = Arrays.binarySearch(times, time);
+    int index = found >= 0 ? found : -found - 2;
+    return values[Math.max(0, Math.min(values.length - 1, index))];
   }
 
   /** A short text beside the cursor, on the side that has room. */
