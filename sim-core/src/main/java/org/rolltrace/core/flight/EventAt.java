@@ -27,7 +27,19 @@ final class EventAt implements ODEEventDetector {
    */
   EventAt(
       double interval, ToDoubleFunction<ODEStateAndDerivative> function, ODEEventHandler handler) {
-    this.interval = AdaptableInterval.of(interval);
+    this(AdaptableInterval.of(interval), function, handler);
+  }
+
+  /**
+   * An event that is looked for the more often the nearer it is.
+   *
+   * @param interval how long the function may stay unseen from a state on, s
+   */
+  EventAt(
+      AdaptableInterval interval,
+      ToDoubleFunction<ODEStateAndDerivative> function,
+      ODEEventHandler handler) {
+    this.interval = interval;
     this.function = function;
     this.handler = handler;
   }

@@ -39,6 +39,9 @@ public final class Flight {
 
   private static final int LOOKS_PER_STRETCH = 16;
 
+  /** The roll rate that an aeroplane may gain while nobody looks at its bank, rad/s. */
+  private static final double QUICKEST_GAIN = 1;
+
   /** A state beyond this has left every range in which the equations mean something, rad, rad/s. */
   private static final double RANGE = 1e6;
 
@@ -56,6 +59,9 @@ public final class Flight {
   private final List<FlightEvent> events = new ArrayList<>();
   private final List<Double> openCaptures;
   private final double[] scratch;
+  private final double[] sample;
+  private final double[] row = new double[Channel.COUNT];
+  private final DenseStep step;
   private OptionalDouble captureFrom = OptionalDouble.empty();
   private final int samplesPerEven;
   private int nextSample;
@@ -86,6 +92,8 @@ public final class Flight {
             states);
     states += pedal.hasState() ? 1 : 0;
     this.scratch = new double[states];
+    this.sample = new double[states];
+    this.step = new DenseStep(states);
     this.integrator =
         new DormandPrince853Integrator(
             SMALLEST_STEP,
@@ -168,7 +176,6 @@ public final class Flight {
     begin(stick, start, state);
     begin(pedal, start, state);
     record(start, start, state);
-    recorder.dropIfRepeated();
     if (nextSampleTime() <= start) {
       nextSample++;
     }
@@ -257,7 +264,7 @@ public final class Flight {
     for (double change : openCaptures) {
       integrator.addEventDetector(
           new EventAt(
-              look,
+              (s, forward) -> Math.max(look, timeToReach(s, direction, fromBank, change)),
               s -> direction * (s.getPrimaryState()[LateralMotion.BANK] - fromBank) - change,
               (s, detector, increasing) -> {
                 if (increasing && openCaptures.remove(change)) {
@@ -266,6 +273,14 @@ public final class Flight {
                 return Action.CONTINUE;
               }));
     }
+  }
+
+  /** A time in which the bank cannot have changed by what is left, whatever the controls do. */
+  private static double timeToReach(
+      ODEStateAndDerivative at, double direction, double fromBank, double change) {
+    double[] state = at.getPrimaryState();
+    double left = Math.abs(direction * (state[LateralMotion.BANK] - fromBank) - change);
+    return left / (2 * Math.abs(state[LateralMotion.ROLL_RATE]) + QUICKEST_GAIN);
   }
 
   private void takeSamples(ODEStateInterpolator interpolator, double stretchEnd) {
@@ -279,10 +294,14 @@ public final class Flight {
       }
     }
     double time = nextSampleTime();
-    while (time <= current.getTime() && time < stretchEnd) {
-      record(time, time, interpolator.getInterpolatedState(time).getPrimaryState());
-      nextSample++;
-      time = nextSampleTime();
+    if (time <= current.getTime() && time < stretchEnd) {
+      step.take(interpolator);
+      while (time <= current.getTime() && time < stretchEnd) {
+        step.stateAt(time, sample);
+        record(time, time, sample);
+        nextSample++;
+        time = nextSampleTime();
+      }
     }
     reached = current.getTime();
   }
@@ -290,23 +309,22 @@ public final class Flight {
   /** Takes a sample where a slope breaks: the largest roll acceleration is often just there. */
   private void recordEvent(ODEStateAndDerivative at, double last) {
     record(at.getTime(), Math.min(at.getTime(), last), at.getPrimaryState());
-    recorder.dropIfRepeated();
   }
 
   private void record(double time, double controlTime, double[] state) {
     double aileron = stick.angle(controlTime, state);
     double rudder = pedal.angle(controlTime, state);
     motion.rates(state, aileron, rudder, scratch);
-    recorder.begin(time);
-    recorder.set(Channel.BANK, state[LateralMotion.BANK]);
-    recorder.set(Channel.ROLL_RATE, state[LateralMotion.ROLL_RATE]);
-    recorder.set(Channel.YAW_RATE, motion.yawRate(state, aileron, rudder));
-    recorder.set(Channel.SIDESLIP, motion.sideslip(state, aileron, rudder));
-    recorder.set(Channel.STICK, stick.position(controlTime));
-    recorder.set(Channel.PEDAL, pedal.position(controlTime));
-    recorder.set(Channel.AILERON, aileron);
-    recorder.set(Channel.RUDDER, rudder);
-    recorder.set(Channel.ROLL_ACCELERATION, scratch[LateralMotion.ROLL_RATE]);
+    row[Channel.BANK.column()] = state[LateralMotion.BANK];
+    row[Channel.ROLL_RATE.column()] = state[LateralMotion.ROLL_RATE];
+    row[Channel.YAW_RATE.column()] = motion.yawRate(state, aileron, rudder);
+    row[Channel.SIDESLIP.column()] = motion.sideslip(state, aileron, rudder);
+    row[Channel.STICK.column()] = stick.position(controlTime);
+    row[Channel.PEDAL.column()] = pedal.position(controlTime);
+    row[Channel.AILERON.column()] = aileron;
+    row[Channel.RUDDER.column()] = rudder;
+    row[Channel.ROLL_ACCELERATION.column()] = scratch[LateralMotion.ROLL_RATE];
+    recorder.add(time, row);
   }
 
   /** The equations between two breakpoints. */

@@ -3,30 +3,44 @@ package org.rolltrace.core.history;
 /** A quantity recorded against time. Positive to the right throughout. */
 public enum Channel {
   /** Bank φ, right wing down, never wrapped. */
-  BANK("bank", "rad"),
+  BANK("bank", "rad", 0),
   /** Roll rate p. */
-  ROLL_RATE("rollRate", "rad/s"),
+  ROLL_RATE("rollRate", "rad/s", 1),
   /** Yaw rate r. */
-  YAW_RATE("yawRate", "rad/s"),
+  YAW_RATE("yawRate", "rad/s", 2),
   /** Sideslip β, wind from the right. */
-  SIDESLIP("sideslip", "rad"),
+  SIDESLIP("sideslip", "rad", 3),
   /** Stick position, fraction of travel. */
-  STICK("stick", "-"),
+  STICK("stick", "-", 4),
   /** Pedal position, fraction of travel. */
-  PEDAL("pedal", "-"),
+  PEDAL("pedal", "-", 5),
   /** Aileron angle δa. */
-  AILERON("aileron", "rad"),
+  AILERON("aileron", "rad", 6),
   /** Rudder angle δr, trailing edge left. */
-  RUDDER("rudder", "rad"),
+  RUDDER("rudder", "rad", 7),
   /** Roll acceleration ṗ. */
-  ROLL_ACCELERATION("rollAcceleration", "rad/s2");
+  ROLL_ACCELERATION("rollAcceleration", "rad/s2", 8);
+
+  /** The number of channels. */
+  public static final int COUNT = values().length;
 
   private final String label;
   private final String unit;
+  private final int column;
 
-  Channel(String label, String unit) {
+  Channel(String label, String unit, int column) {
     this.label = label;
     this.unit = unit;
+    this.column = column;
+  }
+
+  /**
+   * Where the channel stands in a row of samples.
+   *
+   * @return from 0 to {@link #COUNT} − 1
+   */
+  public int column() {
+    return column;
   }
 
   /**

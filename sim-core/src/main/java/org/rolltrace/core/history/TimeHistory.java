@@ -1,7 +1,6 @@
 package org.rolltrace.core.history;
 
 import java.util.Arrays;
-import java.util.EnumMap;
 
 /**
  * Samples of all channels against time. Times do not fall; an instant at which something jumps
@@ -10,12 +9,14 @@ import java.util.EnumMap;
 public final class TimeHistory {
   private final double sampleRate;
   private final double[] times;
-  private final EnumMap<Channel, double[]> values;
 
-  private TimeHistory(double sampleRate, double[] times, EnumMap<Channel, double[]> values) {
+  /** Row after row of all channels. */
+  private final double[] samples;
+
+  private TimeHistory(double sampleRate, double[] times, double[] samples) {
     this.sampleRate = sampleRate;
     this.times = times;
-    this.values = values;
+    this.samples = samples;
   }
 
   /**
@@ -54,7 +55,7 @@ public final class TimeHistory {
    * @return the value in the channel's SI unit
    */
   public double value(Channel channel, int index) {
-    return values.get(channel)[index];
+    return samples[index * Channel.COUNT + channel.column()];
   }
 
   /**
@@ -64,7 +65,11 @@ public final class TimeHistory {
    * @return a copy of the values, in the channel's SI unit
    */
   public double[] values(Channel channel) {
-    return values.get(channel).clone();
+    double[] values = new double[times.length];
+    for (int i = 0; i < values.length; i++) {
+      values[i] = value(channel, i);
+    }
+    return values;
   }
 
   /**
@@ -120,59 +125,56 @@ public final class TimeHistory {
   public static final class Recorder {
     private final double sampleRate;
     private double[] times;
-    private final EnumMap<Channel, double[]> values = new EnumMap<>(Channel.class);
+    private double[] samples;
     private int size;
 
     private Recorder(double sampleRate, int capacity) {
       this.sampleRate = sampleRate;
       this.times = new double[Math.max(capacity, 4)];
-      for (Channel channel : Channel.values()) {
-        values.put(channel, new double[times.length]);
-      }
+      this.samples = new double[times.length * Channel.COUNT];
     }
 
     /**
-     * Begins a sample; its channels are then {@link #set}.
+     * Takes a sample. One that repeats the last in time and every channel is left out.
      *
      * @param time s, not before the last one
+     * @param row the values in SI units, each channel at its column; copied
+     * @throws IllegalArgumentException when the time falls or a value is not finite
      */
-    public void begin(double time) {
+    public void add(double time, double[] row) {
       if (size > 0 && !(time >= times[size - 1])) {
         throw new IllegalArgumentException(
             "sample time is " + time + " s; expected " + times[size - 1] + " s or later");
       }
-      if (size == times.length) {
-        times = Arrays.copyOf(times, 2 * size);
-        values.replaceAll((channel, samples) -> Arrays.copyOf(samples, 2 * size));
-      }
-      times[size++] = time;
-    }
-
-    /**
-     * Sets a channel of the sample that was begun last.
-     *
-     * @param channel the quantity
-     * @param value in the channel's SI unit, finite
-     */
-    public void set(Channel channel, double value) {
-      if (!(Math.abs(value) <= Double.MAX_VALUE)) {
-        throw new IllegalArgumentException(
-            channel.label() + " is " + value + " at " + times[size - 1] + " s; expected a number");
-      }
-      values.get(channel)[size - 1] = value;
-    }
-
-    /** Takes the last sample back when it repeats the one before it in time and every channel. */
-    public void dropIfRepeated() {
-      if (size < 2 || times[size - 1] != times[size - 2]) {
-        return;
-      }
-      for (double[] samples : values.values()) {
-        if (samples[size - 1] != samples[size - 2]) {
-          return;
+      for (double value : row) {
+        if (!(Math.abs(value) <= Double.MAX_VALUE)) {
+          throw new IllegalArgumentException(
+              "a channel is " + value + " at " + time + " s; expected a finite number");
         }
       }
-      size--;
+      if (repeatsLast(time, row)) {
+        return;
+      }
+      if (size == times.length) {
+        times = Arrays.copyOf(times, 2 * size);
+        samples = Arrays.copyOf(samples, 2 * size * Channel.COUNT);
+      }
+      times[size] = time;
+      System.arraycopy(row, 0, samples, size * Channel.COUNT, Channel.COUNT);
+      size++;
+    }
+
+    private boolean repeatsLast(double time, double[] row) {
+      if (size == 0 || times[size - 1] != time) {
+        return false;
+      }
+      int start = (size - 1) * Channel.COUNT;
+      for (int i = 0; i < Channel.COUNT; i++) {
+        if (samples[start + i] != row[i]) {
+          return false;
+        }
+      }
+      return true;
     }
 
     /**
@@ -181,9 +183,8 @@ public final class TimeHistory {
      * @return the history
      */
     public TimeHistory finish() {
-      EnumMap<Channel, double[]> taken = new EnumMap<>(values);
-      taken.replaceAll((channel, samples) -> Arrays.copyOf(samples, size));
-      return new TimeHistory(sampleRate, Arrays.copyOf(times, size), taken);
+      return new TimeHistory(
+          sampleRate, Arrays.copyOf(times, size), Arrays.copyOf(samples, size * Channel.COUNT));
     }
   }
 }
