@@ -13,21 +13,22 @@ final class Curve {
   private static final int HALVINGS = 50;
 
   private final TimeHistory history;
-  private final double[] values;
-  private final double[] slopes;
+  private final Channel values;
+  private final Channel slopes;
+  private final double factor;
+  private final double shift;
 
-  private Curve(TimeHistory history, double[] values, double[] slopes) {
+  private Curve(TimeHistory history, Channel values, Channel slopes, double factor, double shift) {
     this.history = history;
     this.values = values;
     this.slopes = slopes;
+    this.factor = factor;
+    this.shift = shift;
   }
 
   /** The roll rate times a factor. */
   static Curve ofRollRate(TimeHistory history, double factor) {
-    return new Curve(
-        history,
-        scaled(history.values(Channel.ROLL_RATE), factor, 0),
-        scaled(history.values(Channel.ROLL_ACCELERATION), factor, 0));
+    return new Curve(history, Channel.ROLL_RATE, Channel.ROLL_ACCELERATION, factor, 0);
   }
 
   /**
@@ -35,21 +36,11 @@ final class Curve {
    * slope differs a little from the roll rate, which moves nothing by more than the sampling does.
    */
   static Curve ofBank(TimeHistory history, double factor, double shift) {
-    return new Curve(
-        history,
-        scaled(history.values(Channel.BANK), factor, shift),
-        scaled(history.values(Channel.ROLL_RATE), factor, 0));
-  }
-
-  private static double[] scaled(double[] samples, double factor, double shift) {
-    for (int i = 0; i < samples.length; i++) {
-      samples[i] = factor * samples[i] + shift;
-    }
-    return samples;
+    return new Curve(history, Channel.BANK, Channel.ROLL_RATE, factor, shift);
   }
 
   int size() {
-    return values.length;
+    return history.size();
   }
 
   double time(int index) {
@@ -57,11 +48,11 @@ final class Curve {
   }
 
   double value(int index) {
-    return values[index];
+    return factor * history.value(values, index) + shift;
   }
 
   double slope(int index) {
-    return slopes[index];
+    return factor * history.value(slopes, index);
   }
 
   /** The first sample at or after an instant; the one after the jump where it stands twice. */
@@ -72,20 +63,20 @@ final class Curve {
 
   double at(double time) {
     int index = history.lastAt(time);
-    return index + 1 < size() ? inInterval(index, time) : values[index];
+    return index + 1 < size() ? inInterval(index, time) : value(index);
   }
 
   private double inInterval(int index, double time) {
     double h = time(index + 1) - time(index);
     if (h <= 0) {
-      return values[index + 1];
+      return value(index + 1);
     }
     double s = (time - time(index)) / h;
     double rest = 1 - s;
-    return values[index] * (1 + 2 * s) * rest * rest
-        + h * slopes[index] * s * rest * rest
-        + values[index + 1] * (3 - 2 * s) * s * s
-        - h * slopes[index + 1] * s * s * rest;
+    return value(index) * (1 + 2 * s) * rest * rest
+        + h * slope(index) * s * rest * rest
+        + value(index + 1) * (3 - 2 * s) * s * s
+        - h * slope(index + 1) * s * s * rest;
   }
 
   /** The first instant in [from, to] at which the curve rises to a level, or is at or above it. */
@@ -94,7 +85,7 @@ final class Curve {
       return OptionalDouble.of(from);
     }
     for (int i = history.lastAt(from); i + 1 < size() && time(i) < to; i++) {
-      if (values[i + 1] >= level && time(i + 1) > from) {
+      if (value(i + 1) >= level && time(i + 1) > from) {
         double crossing = crossing(i, level, Math.max(from, time(i)));
         return crossing <= to ? OptionalDouble.of(crossing) : OptionalDouble.empty();
       }
@@ -108,7 +99,7 @@ final class Curve {
   }
 
   private Curve negated() {
-    return new Curve(history, scaled(values.clone(), -1, 0), scaled(slopes.clone(), -1, 0));
+    return new Curve(history, values, slopes, -factor, -shift);
   }
 
   /** Where the curve passes a level between two samples that lie on either side of it. */
@@ -132,9 +123,9 @@ final class Curve {
     double best = Math.max(at(from), at(to));
     for (int i = history.lastAt(from); i < size() && time(i) <= to; i++) {
       if (time(i) >= from) {
-        best = Math.max(best, values[i]);
+        best = Math.max(best, value(i));
       }
-      if (i + 1 < size() && slopes[i] > 0 && slopes[i + 1] < 0) {
+      if (i + 1 < size() && slope(i) > 0 && slope(i + 1) < 0) {
         best = Math.max(best, topInside(i, from, to));
       }
     }
@@ -155,7 +146,7 @@ final class Curve {
         low = one;
       }
     }
-    return high > low ? inInterval(index, 0.5 * (low + high)) : values[index];
+    return high > low ? inInterval(index, 0.5 * (low + high)) : value(index);
   }
 
   /** The mean over [from, to], from &lt; to. */
