@@ -4,18 +4,19 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.linear.EigenDecompositionNonSymmetric;
 import org.hipparchus.linear.MatrixUtils;
-import org.hipparchus.linear.RealMatrix;
 
 /**
  * The natural motions of the linearised lateral equations.
  *
  * <p>Two of the four roots belong to the slip and yaw (the dutch roll), two to bank and roll rate
  * (roll mode and spiral). Which is which is decided by how much the states take part in each root:
- * the product of the components of its right and left eigenvectors. Two roots of bank and roll rate
- * that form a pair are the coupled roll-spiral.
+ * the product of the components of its right and left eigenvectors, which for the root λ of A is
+ * the minor of λI − A that leaves out the state, up to a common factor. Two roots of bank and roll
+ * rate that form a pair are the coupled roll-spiral.
  *
  * @param roll the fast root of bank and roll rate; empty when coupled with the spiral
  * @param spiral the slow root of bank and roll rate; empty when coupled with the roll
@@ -42,7 +43,7 @@ public record LateralModes(
    * @return the modes; without slip as a state there is no dutch roll
    */
   public static LateralModes of(LateralMotion motion) {
-    List<Root> roots = roots(MatrixUtils.createRealMatrix(motion.linearised()));
+    List<Root> roots = roots(motion.linearised());
     int ofYaw = roots.size() - 2;
     List<Root> byShare = pairsTogether(roots);
     List<Complex> yaw = byShare.subList(0, ofYaw).stream().map(Root::value).toList();
@@ -60,37 +61,50 @@ public record LateralModes(
         dutchRoll.isPresent() ? List.of() : reals(yaw));
   }
 
-  private static List<Root> roots(RealMatrix a) {
-    EigenDecompositionNonSymmetric right = new EigenDecompositionNonSymmetric(a);
-    EigenDecompositionNonSymmetric left = new EigenDecompositionNonSymmetric(a.transpose());
-    Complex[] values = right.getEigenvalues();
+  private static List<Root> roots(double[][] a) {
+    Complex[] values =
+        new EigenDecompositionNonSymmetric(MatrixUtils.createRealMatrix(a)).getEigenvalues();
     List<Root> roots = new ArrayList<>();
-    for (int i = 0; i < values.length; i++) {
-      int match = nearest(left.getEigenvalues(), values[i]);
+    for (Complex value : values) {
       double sum = 0;
       double yaw = 0;
-      for (int state = 0; state < values.length; state++) {
-        double part =
-            right.getEigenvector(i).getEntry(state).norm()
-                * left.getEigenvector(match).getEntry(state).norm();
+      for (int state = 0; state < a.length; state++) {
+        double part = minorWithout(state, a, value).norm();
         sum += part;
         if (state >= LateralMotion.SIDESLIP) {
           yaw += part;
         }
       }
-      roots.add(new Root(values[i], yaw / sum));
+      roots.add(new Root(value, sum > 0 ? yaw / sum : 0.5));
     }
     return roots;
   }
 
-  private static int nearest(Complex[] values, Complex wanted) {
-    int best = 0;
-    for (int i = 1; i < values.length; i++) {
-      if (values[i].subtract(wanted).norm() < values[best].subtract(wanted).norm()) {
-        best = i;
+  /** The determinant of λI − A without one state's row and column. */
+  private static Complex minorWithout(int state, double[][] a, Complex root) {
+    int[] kept = IntStream.range(0, a.length).filter(i -> i != state).toArray();
+    return expanded(kept, 0, (1 << kept.length) - 1, a, root);
+  }
+
+  /** A determinant by expansion: of the kept rows from one on, and the columns still open. */
+  private static Complex expanded(int[] kept, int row, int open, double[][] a, Complex root) {
+    if (row == kept.length) {
+      return Complex.ONE;
+    }
+    Complex sum = Complex.ZERO;
+    boolean even = true;
+    for (int c = 0; c < kept.length; c++) {
+      if ((open & (1 << c)) != 0) {
+        Complex entry = Complex.valueOf(-a[kept[row]][kept[c]]);
+        if (row == c) {
+          entry = entry.add(root);
+        }
+        Complex part = entry.multiply(expanded(kept, row + 1, open & ~(1 << c), a, root));
+        sum = even ? sum.add(part) : sum.subtract(part);
+        even = !even;
       }
     }
-    return best;
+    return sum;
   }
 
   /**
