@@ -26,6 +26,7 @@ public final class ManoeuvreModel {
    */
   public ManoeuvreModel(DeskSession session) {
     this.session = session;
+    clock.setRange(0, shownDuration);
     session.resultProperty().addListener((property, before, now) -> follow(now));
     follow(session.resultProperty().get());
   }
