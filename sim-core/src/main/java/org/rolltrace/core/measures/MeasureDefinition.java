@@ -96,7 +96,7 @@ public record MeasureDefinition(String name, String title, String unit, String d
   public static final MeasureDefinition TIP_INCIDENCE =
       new MeasureDefinition(
           "tipIncidence",
-          "Tip incidence of the roll, peak",
+          "Tip incidence, peak",
           "rad",
           "arc tangent of the peak helix angle: what the rolling adds to the incidence of the tip"
               + " that goes down");

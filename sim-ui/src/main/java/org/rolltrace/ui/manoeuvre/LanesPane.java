@@ -158,7 +158,7 @@ final class LanesPane extends Region {
       painter.paint(
           new Mark.Label(
               left + 8,
-              y + 4,
+              y - 5,
               "double-click to add an input",
               Anchor.START,
               TypeSize.SMALL,

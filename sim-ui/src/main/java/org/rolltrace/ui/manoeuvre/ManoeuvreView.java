@@ -20,7 +20,7 @@ public final class ManoeuvreView extends BorderPane {
   /** Width of the panes at either side, px. */
   private static final double SIDE = 276;
 
-  private static final double READINGS = 312;
+  private static final double READINGS = 322;
 
   private final ManoeuvreModel model;
   private final FiguresPane figures;

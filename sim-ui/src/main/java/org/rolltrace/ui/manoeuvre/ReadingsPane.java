@@ -4,28 +4,35 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import javafx.collections.ListChangeListener;
-import javafx.geometry.HPos;
+import javafx.css.PseudoClass;
 import javafx.geometry.Insets;
+import javafx.geometry.Pos;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.Tooltip;
-import javafx.scene.layout.ColumnConstraints;
-import javafx.scene.layout.GridPane;
+import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 import javafx.util.Duration;
-import org.rolltrace.core.measures.Measure;
-import org.rolltrace.core.motion.LateralModes;
+import org.rolltrace.core.files.FileFault;
 import org.rolltrace.core.run.RunResult;
 import org.rolltrace.core.run.Safety;
 import org.rolltrace.ui.session.DeskSession;
 
 /**
- * What the roll means: measures with their definitions, modes, and the cautions, always in sight.
+ * What the roll means: measures with their definitions, the values kept to compare with and the
+ * differences, and the cautions, always in sight.
  */
 final class ReadingsPane extends VBox {
+  private static final PseudoClass MISSING = PseudoClass.getPseudoClass("missing");
+
+  /** Width of a column of figures, px. */
+  private static final double FIGURE = 80;
+
   private final DeskSession session;
-  private final GridPane rows = new GridPane();
+  private final VBox list = new VBox(3);
+  private final HBox header = new HBox();
+  private final List<Row> rows = new ArrayList<>();
   private final VBox cautions = new VBox(4);
   private final Label state = new Label();
 
@@ -34,48 +41,51 @@ final class ReadingsPane extends VBox {
     getStyleClass().add("readings-pane");
     setPadding(new Insets(8, 10, 8, 10));
     setSpacing(6);
-    rows.setHgap(7);
-    rows.setVgap(3);
-    rows.setPadding(new Insets(0, 12, 0, 0)); // clear of the scroll bar
-    ColumnConstraints titles = new ColumnConstraints();
-    titles.setHgrow(Priority.ALWAYS);
-    ColumnConstraints values = new ColumnConstraints();
-    values.setHalignment(HPos.RIGHT);
-    ColumnConstraints units = new ColumnConstraints();
-    ColumnConstraints differences = new ColumnConstraints();
-    differences.setHalignment(HPos.RIGHT);
-    rows.getColumnConstraints().setAll(titles, values, units, differences);
     state.getStyleClass().add("state");
     state.setWrapText(true);
     state.setId("state");
     state.setMinHeight(USE_PREF_SIZE);
     cautions.setId("cautions");
     cautions.getStyleClass().add("cautions");
-    ScrollPane scroll = new ScrollPane(rows);
+    header.setAlignment(Pos.CENTER_RIGHT);
+    header.setPadding(new Insets(0, 12, 0, 0));
+    for (String words : new String[] {"now", "kept", "difference"}) {
+      Label label = figure(words);
+      label.getStyleClass().add("quiet");
+      header.getChildren().add(label);
+    }
+    list.setId("readings");
+    list.setPadding(new Insets(0, 12, 0, 0)); // clear of the scroll bar
+    ScrollPane scroll = new ScrollPane(list);
     scroll.setFitToWidth(true);
     scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
     scroll.getStyleClass().add("edge-to-edge");
     VBox.setVgrow(scroll, Priority.ALWAYS);
-    getChildren().addAll(heading("Readings"), state, scroll, cautions);
+    Label heading = new Label("Readings");
+    heading.getStyleClass().add("heading");
+    getChildren().addAll(heading, state, header, scroll, cautions);
     session.resultProperty().addListener((property, before, now) -> show());
     session.ghostProperty().addListener((property, before, now) -> show());
     session.staleProperty().addListener((property, before, now) -> showState());
     session.failureProperty().addListener((property, before, now) -> showState());
     session.recoveryProblemProperty().addListener((property, before, now) -> showState());
-    session.faults().addListener((ListChangeListener<Object>) change -> showState());
+    session.faults().addListener((ListChangeListener<FileFault>) change -> showState());
     show();
     showState();
   }
 
-  private static Label heading(String words) {
+  private static Label figure(String words) {
     Label label = new Label(words);
-    label.getStyleClass().add("heading");
+    label.getStyleClass().add("figure");
+    label.setAlignment(Pos.CENTER_RIGHT);
+    label.setMinWidth(FIGURE);
+    label.setPrefWidth(FIGURE);
     return label;
   }
 
   private void showState() {
     int faults = session.faults().size();
-    String words = "";
+    String words;
     if (faults > 0) {
       words =
           (faults == 1 ? "One value cannot be used" : faults + " values cannot be used")
@@ -89,159 +99,98 @@ final class ReadingsPane extends VBox {
     state.setText(words);
     state.setManaged(!words.isEmpty());
     state.setVisible(!words.isEmpty());
-    rows.setOpacity(session.staleProperty().get() ? 0.45 : 1);
+    list.setOpacity(session.staleProperty().get() ? 0.45 : 1);
   }
 
   private void show() {
-    rows.getChildren().clear();
-    cautions.getChildren().clear();
     RunResult result = session.resultProperty().get();
     if (result == null) {
       return;
     }
-    RunResult ghost = session.ghostProperty().get();
-    int row = 0;
-    if (ghost != null) {
-      addRow(row++, "", "now", "", "kept", "", "quiet");
+    Optional<RunResult> kept = Optional.ofNullable(session.ghostProperty().get());
+    header.setManaged(kept.isPresent());
+    header.setVisible(kept.isPresent());
+    List<Reading> readings = Reading.of(result, kept);
+    while (rows.size() < readings.size()) {
+      Row row = new Row();
+      rows.add(row);
+      list.getChildren().add(row);
     }
-    List<Measure> missing = new ArrayList<>();
-    for (Measure measure : result.measures()) {
-      if (measure.value().isEmpty()) {
-        missing.add(measure);
-        continue;
-      }
-      Shown shown = Shown.of(measure);
-      addRow(
-          row++,
-          measure.definition().title(),
-          shown.value(),
-          shown.unit(),
-          keptValue(measure, ghost),
-          hint(measure),
-          "reading");
+    for (int i = 0; i < rows.size(); i++) {
+      rows.get(i).show(i < readings.size() ? Optional.of(readings.get(i)) : Optional.empty());
     }
-    row = addModes(row, result);
-    for (Measure measure : missing) {
-      addRow(
-          row++,
-          measure.definition().title(),
-          "\u2013",
-          "",
-          keptValue(measure, ghost),
-          hint(measure),
-          "quiet");
-    }
-    for (String caution : result.cautions()) {
-      cautions.getChildren().add(cautionLabel("Caution: " + caution, "caution"));
-    }
-    cautions.getChildren().add(cautionLabel(Safety.NOTICE, "notice"));
+    showCautions(result.cautions());
   }
 
-  private static Label cautionLabel(String words, String style) {
-    Label label = new Label(words);
-    label.setWrapText(true);
-    label.setMinHeight(USE_PREF_SIZE);
-    label.getStyleClass().add(style);
-    return label;
-  }
-
-  private int addModes(int row, RunResult result) {
-    Optional<LateralModes> modes = result.modes();
-    if (modes.isEmpty()) {
-      return row;
+  private void showCautions(List<String> sentences) {
+    List<String> shown = new ArrayList<>();
+    sentences.forEach(sentence -> shown.add("Caution: " + sentence));
+    shown.add(Safety.NOTICE);
+    List<String> before =
+        cautions.getChildren().stream().map(node -> ((Label) node).getText()).toList();
+    if (before.equals(shown)) {
+      return;
     }
-    int next = row;
-    LateralModes found = modes.get();
-    if (found.spiral().isPresent()) {
-      double root = found.spiral().get().root();
-      addRow(
-          next++,
-          root <= 0 ? "Spiral halves in" : "Spiral doubles in",
-          Written.reading(found.spiral().get().timeToHalfOrDouble()),
-          "s",
-          "",
-          "Root of the spiral of the free equations: " + Written.reading(root) + " 1/s",
-          "reading");
+    cautions.getChildren().clear();
+    for (String sentence : shown) {
+      Label label = new Label(sentence);
+      label.setWrapText(true);
+      label.setMinHeight(USE_PREF_SIZE);
+      label.getStyleClass().add(sentence.equals(Safety.NOTICE) ? "notice" : "caution");
+      cautions.getChildren().add(label);
     }
-    if (found.dutchRoll().isPresent()) {
-      addRow(
-          next++,
-          "Dutch roll",
-          Written.reading(found.dutchRoll().get().naturalFrequency()),
-          "rad/s",
-          "",
-          "Undamped natural frequency of the dutch roll; damping ratio "
-              + Written.reading(found.dutchRoll().get().dampingRatio()),
-          "reading");
-    }
-    return next;
   }
 
-  private static String hint(Measure measure) {
-    String definition = capitalised(measure.definition().definition()) + ".";
-    return measure.remark().isEmpty()
-        ? definition
-        : definition + "\n" + capitalised(measure.remark()) + ".";
-  }
+  /** One reading: a line, or two when there is something to compare with. */
+  private static final class Row extends VBox {
+    private final Label title = new Label();
+    private final Label unit = new Label();
+    private final Label now = figure("");
+    private final Label keptNow = figure("");
+    private final Label kept = figure("");
+    private final Label difference = figure("");
+    private final HBox line = new HBox(6);
+    private final HBox figures = new HBox(keptNow, kept, difference);
+    private final Tooltip tooltip = new Tooltip();
 
-  private static String capitalised(String words) {
-    return words.isEmpty() ? words : Character.toUpperCase(words.charAt(0)) + words.substring(1);
-  }
-
-  private static String keptValue(Measure measure, RunResult ghost) {
-    if (ghost == null) {
-      return "";
-    }
-    return ghost
-        .measure(measure.definition().name())
-        .filter(other -> other.value().isPresent())
-        .map(other -> Shown.of(other).value())
-        .orElse("\u2013");
-  }
-
-  private void addRow(
-      int row, String title, String value, String unit, String kept, String hint, String style) {
-    Label name = new Label(title);
-    name.getStyleClass().add(style);
-    if (!hint.isEmpty()) {
-      Tooltip tooltip = new Tooltip(hint);
+    Row() {
+      getStyleClass().add("reading");
+      title.setMaxWidth(Double.MAX_VALUE);
+      HBox.setHgrow(title, Priority.ALWAYS);
+      title.setTooltip(tooltip);
       tooltip.setWrapText(true);
       tooltip.setMaxWidth(340);
       tooltip.setShowDelay(Duration.millis(250));
-      name.setTooltip(tooltip);
+      unit.getStyleClass().add("quiet");
+      unit.setMinWidth(44);
+      kept.getStyleClass().add("kept");
+      figures.setAlignment(Pos.CENTER_RIGHT);
+      now.setMinWidth(64);
+      now.setPrefWidth(64);
+      line.getChildren().addAll(title, now, unit);
+      getChildren().addAll(line, figures);
     }
-    Label figure = new Label(value);
-    figure.getStyleClass().addAll(style, "figure");
-    figure.setMinWidth(USE_PREF_SIZE);
-    Label measure = new Label(unit);
-    measure.getStyleClass().add("quiet");
-    measure.setMinWidth(USE_PREF_SIZE);
-    name.setWrapText(true);
-    name.setMinHeight(USE_PREF_SIZE);
-    rows.addRow(row, name, figure, measure);
-    if (!kept.isEmpty()) {
-      Label other = new Label(kept);
-      other.getStyleClass().addAll("figure", "kept");
-      other.setMinWidth(USE_PREF_SIZE);
-      rows.add(other, 3, row);
-    }
-  }
 
-  /** A value in the unit in which it is read. */
-  private record Shown(String value, String unit) {
-
-    static Shown of(Measure measure) {
-      double value = measure.value().orElseThrow();
-      return switch (measure.definition().unit()) {
-        case "rad" ->
-            measure.definition().name().startsWith("helix")
-                ? new Shown(Written.reading(value), "rad")
-                : new Shown(Written.reading(Math.toDegrees(value)), "deg");
-        case "rad/s" -> new Shown(Written.reading(Math.toDegrees(value)), "deg/s");
-        case "rad/s2" -> new Shown(Written.reading(Math.toDegrees(value)), "deg/s\u00b2");
-        case "1" -> new Shown(Written.reading(100 * value), "%");
-        default -> new Shown(Written.reading(value), measure.definition().unit());
-      };
+    void show(Optional<Reading> reading) {
+      setManaged(reading.isPresent());
+      setVisible(reading.isPresent());
+      if (reading.isEmpty()) {
+        return;
+      }
+      Reading shown = reading.get();
+      boolean compares = !shown.kept().isEmpty();
+      title.setText(shown.title());
+      title.setMinWidth(0);
+      tooltip.setText(shown.hint());
+      unit.setText(shown.unit());
+      now.setText(compares ? "" : shown.now());
+      now.setManaged(!compares);
+      keptNow.setText(shown.now());
+      kept.setText(shown.kept());
+      difference.setText(shown.difference());
+      figures.setManaged(compares);
+      figures.setVisible(compares);
+      pseudoClassStateChanged(MISSING, !shown.available());
     }
   }
 }

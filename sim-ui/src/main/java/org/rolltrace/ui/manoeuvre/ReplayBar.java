@@ -25,13 +25,13 @@ final class ReplayBar extends HBox {
   private static final String FORTH = "M3 2 L9 7 L3 12 Z M9.5 2 H11 V12 H9.5 Z";
   private static final String START = "M12 2 L7 7 L12 12 Z M7 2 L2 7 L7 12 Z";
   private static final double NANOSECONDS = 1e-9;
-  private static final double TIME_WIDTH = 70;
+  private static final double TIME_WIDTH = 58;
 
   private final ReplayClock clock;
   private final AnimationTimer timer;
 
   ReplayBar(ManoeuvreModel model) {
-    super(6);
+    super(5);
     this.clock = model.clock();
     getStyleClass().add("replay-bar");
     setAlignment(Pos.CENTER_LEFT);
@@ -91,7 +91,7 @@ final class ReplayBar extends HBox {
         region.setMinWidth(region == time ? TIME_WIDTH : USE_PREF_SIZE);
       }
     }
-    position.setMinWidth(60);
+    position.setMinWidth(30);
     timer =
         new AnimationTimer() {
           private long last;
@@ -129,6 +129,7 @@ final class ReplayBar extends HBox {
   private ChoiceBox<Double> speed() {
     ChoiceBox<Double> speed = new ChoiceBox<>();
     speed.setId("replay-speed");
+    speed.setPrefWidth(74);
     speed.getItems().addAll(0.25, 0.5, 1.0, 2.0, 4.0);
     speed.setConverter(
         new StringConverter<>() {
