@@ -40,6 +40,8 @@ import org.rolltrace.ui.session.RecoveryStore;
 public final class DeskWindow {
   private static final double WIDTH = 1240;
   private static final double HEIGHT = 800;
+  private static final String UNDO = "Shortcut+Z";
+  private static final String REDO = "Shortcut+Shift+Z";
 
   private final Stage stage;
   private final DeskSession session;
@@ -75,6 +77,7 @@ public final class DeskWindow {
     stage.setScene(scene);
     scene.getStylesheets().add(DeskWindow.class.getResource("desk.css").toExternalForm());
     scene.addEventFilter(KeyEvent.KEY_PRESSED, this::spacePlays);
+    scene.addEventFilter(KeyEvent.KEY_PRESSED, this::undoInFields);
     useDark(false);
     stage.setMinWidth(900);
     stage.setMinHeight(640);
@@ -155,10 +158,10 @@ public final class DeskWindow {
             item("Save as\u2026", "Shortcut+Shift+S", this::saveAs),
             new SeparatorMenuItem(),
             item("Close", "Shortcut+W", this::close));
-    MenuItem undo = item("Undo", "Shortcut+Z", session::undo);
+    MenuItem undo = item("Undo", UNDO, session::undo);
     undo.disableProperty().bind(session.canUndoProperty().not());
     undo.textProperty().bind(Bindings.concat("Undo: ", session.undoWordProperty()));
-    MenuItem redo = item("Redo", "Shortcut+Shift+Z", session::redo);
+    MenuItem redo = item("Redo", REDO, session::redo);
     redo.disableProperty().bind(session.canRedoProperty().not());
     redo.textProperty().bind(Bindings.concat("Redo: ", session.redoWordProperty()));
     Menu edit = new Menu("Edit", null, undo, redo);
@@ -228,6 +231,17 @@ public final class DeskWindow {
     boolean pressing = stage.getScene().getFocusOwner() instanceof Button;
     if (event.getCode() == KeyCode.SPACE && !typing && !pressing) {
       model.clock().toggle();
+      event.consume();
+    }
+  }
+
+  /** A text field would undo its own typing and so make one more edit of it. */
+  private void undoInFields(KeyEvent event) {
+    if (KeyCombination.keyCombination(UNDO).match(event)) {
+      session.undo();
+      event.consume();
+    } else if (KeyCombination.keyCombination(REDO).match(event)) {
+      session.redo();
       event.consume();
     }
   }

@@ -19,6 +19,9 @@ import org.rolltrace.core.pilot.PilotInput;
 record LaneBlock(int index, PilotInput input) {
   private static final double TICK = 0.01;
 
+  /** What dividing a whole number of ticks by the tick may be off by. */
+  private static final double ROUNDING = 1e-9;
+
   /** The part of a block that is dragged. */
   enum Part {
     /** The whole block, along the time axis. */
@@ -57,7 +60,11 @@ record LaneBlock(int index, PilotInput input) {
   }
 
   private String seconds(double value) {
-    return Written.seconds(Math.rint(value / TICK) * TICK);
+    return Written.seconds(ticks(Math.rint(value / TICK)));
+  }
+
+  private static double ticks(double count) {
+    return count * TICK;
   }
 
   /** The document after the block has been dragged by some time. */
@@ -73,7 +80,7 @@ record LaneBlock(int index, PilotInput input) {
 
   /** The document with the block's right edge at a time; a step has no right edge to drag. */
   ScenarioDocument stretched(ScenarioDocument document, double toTime) {
-    double least = Math.max(TICK, shape().handTime());
+    double least = Math.max(TICK, ticks(Math.ceil(shape().handTime() / TICK - ROUNDING)));
     if (shape() instanceof HoldInput) {
       double duration = toTime - shape().start() - shape().handTime();
       return document.with(path("duration"), seconds(Math.max(least, duration)));
@@ -95,7 +102,8 @@ record LaneBlock(int index, PilotInput input) {
         shape() instanceof HoldInput hold
             ? hold.duration()
             : shape() instanceof DoubletInput doublet ? doublet.width() : Double.MAX_VALUE;
-    double hand = Math.max(0, Math.min(longest, toTime - shape().start()));
-    return document.with(path("movement"), seconds(hand));
+    double hand = Math.max(0, toTime - shape().start());
+    double most = ticks(Math.floor(longest / TICK + ROUNDING));
+    return document.with(path("movement"), seconds(Math.min(most, hand)));
   }
 }

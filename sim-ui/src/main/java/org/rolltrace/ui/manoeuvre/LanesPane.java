@@ -60,6 +60,7 @@ final class LanesPane extends Region {
     getChildren().add(canvas);
     setMinHeight(2 * LANE + GAP + 6);
     setPrefHeight(2 * LANE + GAP + 6);
+    model.session().documentProperty().addListener((property, before, now) -> keepSelection());
     model.session().resultProperty().addListener((property, before, now) -> refresh());
     model.windowProperty().addListener((property, before, now) -> draw());
     palette.addListener((property, before, now) -> draw());
@@ -70,6 +71,7 @@ final class LanesPane extends Region {
     addEventHandler(MouseEvent.MOUSE_RELEASED, event -> release());
     addEventHandler(MouseEvent.MOUSE_CLICKED, this::click);
     addEventHandler(KeyEvent.KEY_PRESSED, this::keyPressed);
+    keepSelection();
     refresh();
   }
 
@@ -81,12 +83,22 @@ final class LanesPane extends Region {
   private void refresh() {
     RunResult result = model.session().resultProperty().get();
     blocks = result == null ? List.of() : LaneBlock.of(result.scenario().programme().inputs());
-    if (selected.get() >= blocks.size()) {
-      selected.set(blocks.size() - 1);
-    } else if (selected.get() < 0 && !blocks.isEmpty()) {
+    draw();
+  }
+
+  /** The inputs of the document, which the blocks follow as soon as it has been flown. */
+  private int inputCount() {
+    ScenarioDocument document = model.session().documentProperty().get();
+    return document == null ? 0 : document.inputCount();
+  }
+
+  private void keepSelection() {
+    int count = inputCount();
+    if (selected.get() >= count) {
+      selected.set(count - 1);
+    } else if (selected.get() < 0 && count > 0) {
       selected.set(0);
     }
-    draw();
   }
 
   @Override
@@ -100,7 +112,7 @@ final class LanesPane extends Region {
     return getWidth() - StagePane.AXIS_FROM - StripChart.RIGHT;
   }
 
-  private double xOf(double time) {
+  double xOf(double time) {
     TimeWindow window = model.windowProperty().get();
     return StagePane.AXIS_FROM + (time - window.from()) / window.length() * plotWidth();
   }
@@ -114,7 +126,7 @@ final class LanesPane extends Region {
     return 2 + 0.5 * LANE + (control == Control.STICK ? 0 : LANE + GAP);
   }
 
-  private static double yOf(Control control, double position) {
+  static double yOf(Control control, double position) {
     return middle(control) - position * FULL;
   }
 
@@ -204,6 +216,9 @@ final class LanesPane extends Region {
   private record Hit(LaneBlock block, LaneBlock.Part part) {}
 
   private Optional<Hit> hitAt(double x, double y) {
+    if (blocks.size() != inputCount()) {
+      return Optional.empty(); // these blocks are of other inputs
+    }
     for (int i = blocks.size() - 1; i >= 0; i--) {
       LaneBlock block = blocks.get(i);
       double middle = middle(block.control());
@@ -224,7 +239,10 @@ final class LanesPane extends Region {
       if (block.canStretch() && Math.abs(x - right) <= REACH) {
         return Optional.of(new Hit(block, LaneBlock.Part.END));
       }
-      if (Math.abs(y - top) <= REACH && x > left) {
+      double inwards = block.shape().size() < 0 ? top - y : y - top;
+      // A low block is to be moved, too: most of what is inside it is not its edge.
+      double inside = Math.min(REACH, 0.4 * Math.abs(middle - top));
+      if (inwards >= -REACH && inwards <= inside && x > left) {
         return Optional.of(new Hit(block, LaneBlock.Part.TOP));
       }
       return Optional.of(new Hit(block, LaneBlock.Part.BODY));
@@ -302,7 +320,7 @@ final class LanesPane extends Region {
   }
 
   void addInput(Control control, String shape, double start) {
-    int count = blocks.size();
+    int count = inputCount();
     model
         .session()
         .edit(
@@ -314,7 +332,7 @@ final class LanesPane extends Region {
 
   void removeSelected() {
     int index = selected.get();
-    if (index >= 0 && index < blocks.size()) {
+    if (index >= 0 && index < inputCount()) {
       model.session().edit("remove input", document -> document.withoutInput(index));
     }
   }

@@ -30,7 +30,7 @@ final class Written {
       return String.format(Locale.ROOT, "%.2e", value).replace('-', '\u2212');
     }
     BigDecimal figures = new BigDecimal(value).round(new MathContext(4));
-    int decimals = Math.max(0, Math.min(5, 4 - figures.precision() + figures.scale()));
+    int decimals = Math.max(0, Math.min(7, 4 - figures.precision() + figures.scale()));
     return String.format(Locale.ROOT, "%." + decimals + "f", figures).replace('-', '\u2212');
   }
 }
