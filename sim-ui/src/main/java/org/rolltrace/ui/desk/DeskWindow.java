@@ -8,17 +8,18 @@ import java.time.format.DateTimeFormatter;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.Set;
 import javafx.beans.binding.Bindings;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleObjectProperty;
+import javafx.geometry.Rectangle2D;
+import javafx.scene.Node;
 import javafx.scene.Scene;
-import javafx.scene.control.Button;
 import javafx.scene.control.Menu;
 import javafx.scene.control.MenuBar;
 import javafx.scene.control.MenuItem;
 import javafx.scene.control.RadioMenuItem;
 import javafx.scene.control.SeparatorMenuItem;
-import javafx.scene.control.TextInputControl;
 import javafx.scene.control.ToggleGroup;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCombination;
@@ -26,6 +27,7 @@ import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
+import javafx.stage.Screen;
 import javafx.stage.Stage;
 import javafx.stage.WindowEvent;
 import org.rolltrace.ui.chart.Palette;
@@ -40,6 +42,10 @@ import org.rolltrace.ui.session.RecoveryStore;
 public final class DeskWindow {
   private static final double WIDTH = 1240;
   private static final double HEIGHT = 800;
+
+  /** Where the space bar has no other meaning than to play and pause. */
+  private static final Set<String> PLAYABLE = Set.of("stage", "lanes");
+
   private static final String UNDO = "Shortcut+Z";
   private static final String REDO = "Shortcut+Shift+Z";
 
@@ -73,9 +79,10 @@ public final class DeskWindow {
     top.getStyleClass().add("top-row");
     root.setTop(top);
     root.setCenter(manoeuvre);
-    Scene scene = new Scene(root, WIDTH, HEIGHT);
+    Rectangle2D screen = Screen.getPrimary().getVisualBounds();
+    Scene scene =
+        new Scene(root, Math.min(WIDTH, screen.getWidth()), Math.min(HEIGHT, screen.getHeight()));
     stage.setScene(scene);
-    scene.getStylesheets().add(DeskWindow.class.getResource("desk.css").toExternalForm());
     scene.addEventFilter(KeyEvent.KEY_PRESSED, this::spacePlays);
     scene.addEventFilter(KeyEvent.KEY_PRESSED, this::undoInFields);
     useDark(false);
@@ -86,7 +93,10 @@ public final class DeskWindow {
         .titleProperty()
         .bind(
             Bindings.createStringBinding(
-                this::windowTitle, session.titleProperty(), session.dirtyProperty()));
+                this::windowTitle,
+                session.titleProperty(),
+                session.fileProperty(),
+                session.dirtyProperty()));
     session
         .problemProperty()
         .addListener((property, before, now) -> Optional.ofNullable(now).ifPresent(this::tell));
@@ -94,7 +104,9 @@ public final class DeskWindow {
 
   private String windowTitle() {
     String title = session.titleProperty().get();
+    Path file = session.fileProperty().get();
     return (title == null || title.isEmpty() ? "" : title + " \u2013 ")
+        + (file == null ? "" : file.getFileName() + " \u2013 ")
         + "Rolltrace"
         + (session.dirtyProperty().get() ? " (unsaved)" : "");
   }
@@ -222,14 +234,17 @@ public final class DeskWindow {
         .getScene()
         .setUserAgentStylesheet(
             (dark ? new PrimerDark() : new PrimerLight()).getUserAgentStylesheet());
-    root.getStyleClass().removeAll("paper", "slate");
-    root.getStyleClass().add(dark ? "slate" : "paper");
+    // The colours hang on the root of every scene, so that lists and menus have them too.
+    stage
+        .getScene()
+        .getStylesheets()
+        .setAll(styles(dark ? "slate.css" : "paper.css"), styles("desk.css"));
   }
 
   private void spacePlays(KeyEvent event) {
-    boolean typing = stage.getScene().getFocusOwner() instanceof TextInputControl;
-    boolean pressing = stage.getScene().getFocusOwner() instanceof Button;
-    if (event.getCode() == KeyCode.SPACE && !typing && !pressing) {
+    Node focused = stage.getScene().getFocusOwner();
+    boolean free = focused == null || PLAYABLE.contains(String.valueOf(focused.getId()));
+    if (event.getCode() == KeyCode.SPACE && free) {
       model.clock().toggle();
       event.consume();
     }
@@ -244,6 +259,10 @@ public final class DeskWindow {
       session.redo();
       event.consume();
     }
+  }
+
+  private static String styles(String file) {
+    return DeskWindow.class.getResource(file).toExternalForm();
   }
 
   private void open() {

@@ -1,5 +1,6 @@
 package org.rolltrace.ui.manoeuvre;
 
+import java.util.List;
 import javafx.beans.property.ObjectProperty;
 import javafx.geometry.Pos;
 import javafx.scene.control.Button;
@@ -22,8 +23,15 @@ public final class ManoeuvreView extends BorderPane {
 
   private static final double READINGS = 322;
 
+  /** Below this width the figures of the aeroplane take the place of the readings, px. */
+  private static final double NARROW = 1080;
+
   private final ManoeuvreModel model;
   private final FiguresPane figures;
+  private final ReadingsPane readings;
+  private final CautionsPane cautions;
+  private final VBox left = new VBox();
+  private final VBox right = new VBox();
   private final ToggleButton showFigures = new ToggleButton("Aeroplane\u2026");
 
   /**
@@ -37,8 +45,8 @@ public final class ManoeuvreView extends BorderPane {
     DeskSession session = model.session();
     getStyleClass().add("manoeuvre");
     figures = new FiguresPane(session);
-    figures.setPrefWidth(SIDE);
-    figures.setMinWidth(SIDE);
+    left.setPrefWidth(SIDE);
+    left.setMinWidth(SIDE);
     StagePane stage = new StagePane(model, palette);
     LanesPane lanes = new LanesPane(model, palette, stage);
     VBox.setVgrow(stage, Priority.ALWAYS);
@@ -47,16 +55,30 @@ public final class ManoeuvreView extends BorderPane {
     VBox centre = new VBox(stage, lanes, replay, editor);
     centre.getStyleClass().add("centre");
     setCenter(centre);
-    ReadingsPane readings = new ReadingsPane(session);
-    readings.setPrefWidth(READINGS);
-    readings.setMinWidth(READINGS);
-    setRight(readings);
+    readings = new ReadingsPane(session);
+    cautions = new CautionsPane(session);
+    VBox.setVgrow(readings, Priority.ALWAYS);
+    VBox.setVgrow(figures, Priority.ALWAYS);
+    right.getStyleClass().add("side");
+    left.getStyleClass().add("side");
+    right.setPrefWidth(READINGS);
+    right.setMinWidth(READINGS);
+    arrange();
     setTop(new ConditionStrip(session));
     showFigures.setId("show-figures");
     showFigures.setTooltip(new Tooltip("Figures and derivatives of the aeroplane"));
-    showFigures
-        .selectedProperty()
-        .addListener((property, before, now) -> setLeft(now ? figures : null));
+    showFigures.selectedProperty().addListener((property, before, now) -> arrange());
+    widthProperty().addListener((property, before, now) -> arrange());
+  }
+
+  private void arrange() {
+    boolean shown = showFigures.isSelected();
+    boolean narrow = getWidth() > 0 && getWidth() < NARROW;
+    boolean replaced = shown && narrow;
+    left.getChildren().setAll(replaced ? List.of(figures, cautions) : List.of(figures));
+    right.getChildren().setAll(replaced ? List.of(readings) : List.of(readings, cautions));
+    setLeft(shown ? left : null);
+    setRight(replaced ? null : right);
   }
 
   /**

@@ -1,8 +1,11 @@
 package org.rolltrace.ui.manoeuvre;
 
 import java.util.Optional;
+import javafx.application.Platform;
 import javafx.collections.ListChangeListener;
 import javafx.css.PseudoClass;
+import javafx.geometry.Point2D;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
 import javafx.scene.control.Tooltip;
@@ -16,7 +19,11 @@ import org.rolltrace.ui.session.DeskSession;
  * the fault that the reader finds there stands below the field.
  */
 final class PathField extends VBox {
+  private static final PseudoClass SKINNED = PseudoClass.getPseudoClass("skinned");
   private static final PseudoClass FAULTY = PseudoClass.getPseudoClass("faulty");
+
+  private static final double FAULT_WIDTH = 290;
+  private static final double MARGIN = 8;
 
   private final DeskSession session;
   private final Label label = new Label();
@@ -35,7 +42,8 @@ final class PathField extends VBox {
     fault.getStyleClass().add("field-fault");
     fault.setWrapText(true);
     fault.setMinHeight(USE_PREF_SIZE);
-    fault.maxWidthProperty().bind(field.widthProperty().multiply(2.2));
+    fault.setManaged(false);
+    fault.setMouseTransparent(true);
     getChildren().addAll(label, field, fault);
     retarget(target);
 
@@ -49,6 +57,12 @@ final class PathField extends VBox {
                 show();
               }
             });
+    // A field gets the colour of its text only in a style pass after the one that made its skin.
+    field
+        .skinProperty()
+        .addListener(
+            (property, before, now) ->
+                Platform.runLater(() -> field.pseudoClassStateChanged(SKINNED, true)));
     field.setOnAction(event -> session.endGesture());
     session.documentProperty().addListener((property, before, now) -> show());
     session.faults().addListener((ListChangeListener<FileFault>) change -> showFault());
@@ -94,10 +108,40 @@ final class PathField extends VBox {
   }
 
   private void showFault() {
-    Optional<String> message = session.faultAt(target.path());
+    Optional<String> message = session.faultAt(target.path()).or(this::missingOneOfSeveral);
     pseudoClassStateChanged(FAULTY, message.isPresent());
     fault.setText(message.orElse(""));
-    fault.setManaged(message.isPresent());
     fault.setVisible(message.isPresent());
+    // In front of whatever stands where the text floats.
+    for (Node node = this; node != null; node = node.getParent()) {
+      node.setViewOrder(message.isPresent() ? -1 : 0);
+    }
+    requestLayout();
+  }
+
+  /** Without any of the airspeeds the fault is the condition's. */
+  private Optional<String> missingOneOfSeveral() {
+    return target.path().endsWith("Airspeed") && field.getText().isEmpty()
+        ? session.faults().stream()
+            .filter(found -> found.jsonPath().equals("$.condition"))
+            .map(FileFault::message)
+            .findFirst()
+        : Optional.empty();
+  }
+
+  /** The fault floats below the field, or above it where the window ends, and moves nothing. */
+  @Override
+  protected void layoutChildren() {
+    super.layoutChildren();
+    if (!fault.isVisible() || getScene() == null) {
+      return;
+    }
+    double width = Math.min(FAULT_WIDTH, fault.prefWidth(-1));
+    double height = fault.prefHeight(width);
+    Point2D place = localToScene(0, field.getBoundsInParent().getMaxY() + 2);
+    double x = Math.min(0, getScene().getWidth() - MARGIN - width - place.getX());
+    boolean below = place.getY() + height + MARGIN < getScene().getHeight();
+    double y = below ? field.getBoundsInParent().getMaxY() + 2 : -height - 2;
+    fault.resizeRelocate(x, y, width, height);
   }
 }

@@ -4,10 +4,12 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.Collectors;
 import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.measures.MeasureDefinition;
 import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.Mode;
+import org.rolltrace.core.quantity.Quantity;
 import org.rolltrace.core.run.RunResult;
 
 /**
@@ -32,10 +34,14 @@ record Reading(
 
   private static final String NONE = "\u2013";
 
+  /** A difference this small against the values is rounding. */
+  private static final double ROUNDING = 1e-9;
+
   /** All readings of a result, those that could not be had last. */
   static List<Reading> of(RunResult result, Optional<RunResult> kept) {
     List<Reading> had = new ArrayList<>();
     List<Reading> missing = new ArrayList<>();
+    boolean ofSizes = kept.map(ghost -> areOpposite(result, ghost)).orElse(false);
     for (Measure measure : result.measures()) {
       OptionalDouble other =
           kept.flatMap(ghost -> ghost.measure(measure.definition().name()))
@@ -48,6 +54,7 @@ record Reading(
               measure.value(),
               kept.isPresent(),
               other,
+              ofSizes,
               hint(measure));
       (reading.available() ? had : missing).add(reading);
     }
@@ -75,6 +82,7 @@ record Reading(
                       .flatMap(LateralModes::spiral)
                       .filter(other -> other.root() <= 0 == returns)
                       .map(Mode.Aperiodic::timeToHalfOrDouble)),
+              false,
               "Root of the spiral of the free equations: "
                   + Written.reading(spiral.root())
                   + " 1/s."));
@@ -91,6 +99,7 @@ record Reading(
                   keptModes
                       .flatMap(LateralModes::dutchRoll)
                       .map(Mode.Oscillatory::naturalFrequency)),
+              false,
               "Undamped natural frequency of the dutch roll; damping ratio "
                   + Written.reading(dutchRoll.dampingRatio())
                   + "."));
@@ -107,10 +116,11 @@ record Reading(
       OptionalDouble value,
       boolean compares,
       OptionalDouble other,
+      boolean ofSizes,
       String hint) {
     OptionalDouble difference =
         value.isPresent() && other.isPresent()
-            ? OptionalDouble.of(value.getAsDouble() - other.getAsDouble())
+            ? OptionalDouble.of(difference(value.getAsDouble(), other.getAsDouble(), ofSizes))
             : OptionalDouble.empty();
     return new Reading(
         title,
@@ -120,6 +130,48 @@ record Reading(
         compares ? scale.signed(difference) : "",
         hint,
         value.isPresent());
+  }
+
+  private static double difference(double now, double kept, boolean ofSizes) {
+    double difference = ofSizes ? Math.abs(now) - Math.abs(kept) : now - kept;
+    double size = Math.max(Math.abs(now), Math.abs(kept));
+    return Math.abs(difference) < ROUNDING * size ? 0 : difference;
+  }
+
+  /** Whether one rolls right and the other left, so that their sizes are what is compared. */
+  static boolean areOpposite(RunResult one, RunResult other) {
+    return side(one) * side(other) < 0;
+  }
+
+  private static double side(RunResult result) {
+    return result
+        .scenario()
+        .programme()
+        .leading(result.scenario().duration())
+        .map(input -> Math.signum(input.shape().size()))
+        .orElse(0.0);
+  }
+
+  /** What was flown, in a few words. */
+  static String flown(RunResult result) {
+    String inputs =
+        result.scenario().programme().inputs().stream()
+            .map(
+                input ->
+                    input.control().word()
+                        + " "
+                        + input.shape().name()
+                        + " "
+                        + Written.plain(100 * Math.abs(input.shape().size()), 1)
+                        + " % "
+                        + (input.shape().size() < 0 ? "left" : "right"))
+            .collect(Collectors.joining(", "));
+    return (inputs.isEmpty() ? "no input" : inputs)
+        + "; "
+        + result.scenario().slip().word()
+        + " slip, "
+        + Written.plain(Quantity.toUnit(result.scenario().condition().trueAirspeed(), "kt"), 1)
+        + " kt true";
   }
 
   private static String hint(Measure measure) {

@@ -3,6 +3,7 @@ package org.rolltrace.ui.manoeuvre;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import javafx.animation.PauseTransition;
 import javafx.collections.ListChangeListener;
 import javafx.css.PseudoClass;
 import javafx.geometry.Insets;
@@ -16,15 +17,19 @@ import javafx.scene.layout.VBox;
 import javafx.util.Duration;
 import org.rolltrace.core.files.FileFault;
 import org.rolltrace.core.run.RunResult;
-import org.rolltrace.core.run.Safety;
 import org.rolltrace.ui.session.DeskSession;
 
 /**
  * What the roll means: measures with their definitions, the values kept to compare with and the
- * differences, and the cautions, always in sight.
+ * differences.
  */
 final class ReadingsPane extends VBox {
   private static final PseudoClass MISSING = PseudoClass.getPseudoClass("missing");
+
+  /** After this without a result the readings no longer pass for those of what is typed. */
+  private static final Duration LATE = Duration.millis(150);
+
+  private static final double DIMMED = 0.45;
 
   /** Width of a column of figures, px. */
   private static final double FIGURE = 80;
@@ -32,8 +37,10 @@ final class ReadingsPane extends VBox {
   private final DeskSession session;
   private final VBox list = new VBox(3);
   private final HBox header = new HBox();
+  private final Label differenceTitle = figure("");
+  private final Label keptWords = new Label();
+  private final PauseTransition late = new PauseTransition(LATE);
   private final List<Row> rows = new ArrayList<>();
-  private final VBox cautions = new VBox(4);
   private final Label state = new Label();
 
   ReadingsPane(DeskSession session) {
@@ -45,15 +52,15 @@ final class ReadingsPane extends VBox {
     state.setWrapText(true);
     state.setId("state");
     state.setMinHeight(USE_PREF_SIZE);
-    cautions.setId("cautions");
-    cautions.getStyleClass().add("cautions");
     header.setAlignment(Pos.CENTER_RIGHT);
     header.setPadding(new Insets(0, 12, 0, 0));
-    for (String words : new String[] {"now", "kept", "difference"}) {
-      Label label = figure(words);
-      label.getStyleClass().add("quiet");
-      header.getChildren().add(label);
-    }
+    header.getChildren().addAll(figure("now"), figure("kept"), differenceTitle);
+    header.getChildren().forEach(label -> label.getStyleClass().add("quiet"));
+    keptWords.getStyleClass().add("quiet");
+    keptWords.setWrapText(true);
+    keptWords.setMinHeight(USE_PREF_SIZE);
+    keptWords.setId("kept-words");
+    late.setOnFinished(event -> list.setOpacity(DIMMED));
     list.setId("readings");
     list.setPadding(new Insets(0, 12, 0, 0)); // clear of the scroll bar
     ScrollPane scroll = new ScrollPane(list);
@@ -63,7 +70,8 @@ final class ReadingsPane extends VBox {
     VBox.setVgrow(scroll, Priority.ALWAYS);
     Label heading = new Label("Readings");
     heading.getStyleClass().add("heading");
-    getChildren().addAll(heading, state, header, scroll, cautions);
+    getChildren().addAll(heading, state, keptWords, header, scroll);
+    session.documentProperty().addListener((property, before, now) -> late.playFromStart());
     session.resultProperty().addListener((property, before, now) -> show());
     session.ghostProperty().addListener((property, before, now) -> show());
     session.staleProperty().addListener((property, before, now) -> showState());
@@ -89,7 +97,7 @@ final class ReadingsPane extends VBox {
     if (faults > 0) {
       words =
           (faults == 1 ? "One value cannot be used" : faults + " values cannot be used")
-              + "; the curves are those before it: "
+              + "; the curves are from before: "
               + session.faults().get(0).message();
     } else if (!session.failureProperty().get().isEmpty()) {
       words = session.failureProperty().get();
@@ -99,7 +107,8 @@ final class ReadingsPane extends VBox {
     state.setText(words);
     state.setManaged(!words.isEmpty());
     state.setVisible(!words.isEmpty());
-    list.setOpacity(session.staleProperty().get() ? 0.45 : 1);
+    late.stop();
+    list.setOpacity(session.staleProperty().get() ? DIMMED : 1);
   }
 
   private void show() {
@@ -110,6 +119,13 @@ final class ReadingsPane extends VBox {
     Optional<RunResult> kept = Optional.ofNullable(session.ghostProperty().get());
     header.setManaged(kept.isPresent());
     header.setVisible(kept.isPresent());
+    keptWords.setManaged(kept.isPresent());
+    keptWords.setVisible(kept.isPresent());
+    if (kept.isPresent()) {
+      keptWords.setText("Kept: " + Reading.flown(kept.get()));
+      differenceTitle.setText(Reading.areOpposite(result, kept.get()) ? "of sizes" : "difference");
+    }
+    showState();
     List<Reading> readings = Reading.of(result, kept);
     while (rows.size() < readings.size()) {
       Row row = new Row();
@@ -118,26 +134,6 @@ final class ReadingsPane extends VBox {
     }
     for (int i = 0; i < rows.size(); i++) {
       rows.get(i).show(i < readings.size() ? Optional.of(readings.get(i)) : Optional.empty());
-    }
-    showCautions(result.cautions());
-  }
-
-  private void showCautions(List<String> sentences) {
-    List<String> shown = new ArrayList<>();
-    sentences.forEach(sentence -> shown.add("Caution: " + sentence));
-    shown.add(Safety.NOTICE);
-    List<String> before =
-        cautions.getChildren().stream().map(node -> ((Label) node).getText()).toList();
-    if (before.equals(shown)) {
-      return;
-    }
-    cautions.getChildren().clear();
-    for (String sentence : shown) {
-      Label label = new Label(sentence);
-      label.setWrapText(true);
-      label.setMinHeight(USE_PREF_SIZE);
-      label.getStyleClass().add(sentence.equals(Safety.NOTICE) ? "notice" : "caution");
-      cautions.getChildren().add(label);
     }
   }
 

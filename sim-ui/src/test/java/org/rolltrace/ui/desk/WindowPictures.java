@@ -50,7 +50,15 @@ public final class WindowPictures extends Application {
     session = new DeskSession(runner, recovery);
     window = new DeskWindow(stage, session, recovery);
     window.show(SCENARIOS.resolve("light-single-roll-entry.json"));
-    for (int[] size : List.of(new int[] {1240, 800}, new int[] {1100, 700})) {
+    shots.add(
+        new Shot(
+            "figures-first-on-slate",
+            () -> {
+              window.useDark(true);
+              figures(true);
+            }));
+    shots.add(new Shot("figures-closed", () -> figures(false)));
+    for (int[] size : List.of(new int[] {1240, 800}, new int[] {1000, 680})) {
       for (boolean dark : new boolean[] {false, true}) {
         String suffix = (dark ? "slate" : "paper") + "-" + size[0];
         shots.add(
