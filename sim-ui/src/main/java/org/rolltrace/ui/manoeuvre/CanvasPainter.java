@@ -19,6 +19,9 @@ import org.rolltrace.ui.chart.TypeSize;
 final class CanvasPainter {
   static final String FAMILY = "DejaVu Sans";
 
+  /** What places may be off by, px. */
+  private static final double ROUNDING = 1e-6;
+
   private final GraphicsContext canvas;
   private final Palette palette;
 
@@ -58,13 +61,56 @@ final class CanvasPainter {
     } else if (mark instanceof Mark.Dot dot) {
       paintDot(dot);
     } else if (mark instanceof Mark.Clip clip) {
-      canvas.save();
-      canvas.beginPath();
-      canvas.rect(clip.x(), clip.y(), clip.width(), clip.height());
-      canvas.clip();
-      clip.marks().forEach(this::paint);
-      canvas.restore();
+      paintClip(clip);
     }
+  }
+
+  /**
+   * Clipping costs the renderer more than all the rest, so it is left out where nothing needs it.
+   */
+  private void paintClip(Mark.Clip clip) {
+    if (clip.marks().stream().allMatch(mark -> isInside(mark, clip))) {
+      clip.marks().forEach(this::paint);
+      return;
+    }
+    canvas.save();
+    canvas.beginPath();
+    canvas.rect(clip.x(), clip.y(), clip.width(), clip.height());
+    canvas.clip();
+    clip.marks().forEach(this::paint);
+    canvas.restore();
+  }
+
+  /** Whether a mark lies in the rectangle, but for the width of its strokes and its letters. */
+  private static boolean isInside(Mark mark, Mark.Clip clip) {
+    if (mark instanceof Mark.Line line) {
+      return isInside(line.x1(), line.y1(), clip) && isInside(line.x2(), line.y2(), clip);
+    } else if (mark instanceof Mark.Polyline curve) {
+      return areInside(curve.x(), curve.y(), clip);
+    } else if (mark instanceof Mark.Area area) {
+      return areInside(area.x(), area.y(), clip);
+    } else if (mark instanceof Mark.Label label) {
+      return isInside(label.x(), label.y(), clip);
+    } else if (mark instanceof Mark.Dot dot) {
+      return isInside(dot.x(), dot.y(), clip);
+    }
+    return false;
+  }
+
+  private static boolean areInside(double[] x, double[] y, Mark.Clip clip) {
+    for (int i = 0; i < x.length; i++) {
+      if (!isInside(x[i], y[i], clip)) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  private static boolean isInside(double x, double y, Mark.Clip clip) {
+    return x >= clip.x() - ROUNDING
+        && x <= clip.x() + clip.width() + ROUNDING
+        && y >= clip.y() - ROUNDING
+        && y <= clip.y() + clip.height() + ROUNDING;
   }
 
   private void stroke(Stroke stroke) {
