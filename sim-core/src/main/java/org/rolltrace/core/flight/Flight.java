@@ -296,12 +296,12 @@ public final class Flight {
   private void record(double time, double controlTime, double[] state) {
     double aileron = stick.angle(controlTime, state);
     double rudder = pedal.angle(controlTime, state);
-    motion.rates(state, aileron, rudder, scratch);
+    motion.rates(controlTime, state, aileron, rudder, scratch);
     recorder.begin(time);
     recorder.set(Channel.BANK, state[LateralMotion.BANK]);
     recorder.set(Channel.ROLL_RATE, state[LateralMotion.ROLL_RATE]);
-    recorder.set(Channel.YAW_RATE, motion.yawRate(state, aileron, rudder));
-    recorder.set(Channel.SIDESLIP, motion.sideslip(state, aileron, rudder));
+    recorder.set(Channel.YAW_RATE, motion.yawRate(controlTime, state, aileron, rudder));
+    recorder.set(Channel.SIDESLIP, motion.sideslip(controlTime, state, aileron, rudder));
     recorder.set(Channel.STICK, stick.position(controlTime));
     recorder.set(Channel.PEDAL, pedal.position(controlTime));
     recorder.set(Channel.AILERON, aileron);
@@ -326,7 +326,7 @@ public final class Flight {
     public double[] computeDerivatives(double time, double[] state) {
       double within = Math.min(time, last);
       double[] rates = new double[state.length];
-      motion.rates(state, stick.angle(within, state), pedal.angle(within, state), rates);
+      motion.rates(within, state, stick.angle(within, state), pedal.angle(within, state), rates);
       stick.rate(within, state, rates);
       pedal.rate(within, state, rates);
       return rates;

@@ -42,7 +42,7 @@ class SlipTreatmentTest {
       double[] rates = new double[4];
       double da = 0.2;
       double dr = -0.1;
-      LateralMotion.of(SlipTreatment.FREE, m).rates(x, da, dr, rates);
+      LateralMotion.of(SlipTreatment.FREE, m).rates(0, x, da, dr, rates);
       double l = m.rollMoment().at(x[2], x[1], x[3], da, dr);
       double n = m.yawMoment().at(x[2], x[1], x[3], da, dr);
       double ixx = m.inertia().roll();
@@ -69,8 +69,8 @@ class SlipTreatmentTest {
       double[] x = randomState(random, 2);
       double da = 0.2;
       double dr = -0.1;
-      double slip = settled.sideslip(x, da, dr);
-      double r = settled.yawRate(x, da, dr);
+      double slip = settled.sideslip(0, x, da, dr);
+      double r = settled.yawRate(0, x, da, dr);
       double mv = m.mass().orElseThrow() * m.speed();
       double weight = m.mass().orElseThrow() * 9.80665 * Math.cos(0.1) * Math.sin(x[0]);
       double side = m.sideForce().at(slip, x[1], r, da, dr) + weight - mv * r;
@@ -78,7 +78,7 @@ class SlipTreatmentTest {
       double yaw = m.yawMoment().at(slip, x[1], r, da, dr);
       assertThat(yaw).isCloseTo(0, within(1e-9 * m.inertia().roll()));
       double[] rates = new double[2];
-      settled.rates(x, da, dr, rates);
+      settled.rates(0, x, da, dr, rates);
       double l = m.rollMoment().at(slip, x[1], r, da, dr);
       assertThat(rates[1] * m.inertia().roll()).isCloseTo(l, within(1e-9 * m.inertia().roll()));
     }
@@ -89,8 +89,8 @@ class SlipTreatmentTest {
     LateralModel m = model(4, 0);
     LateralMotion held = LateralMotion.of(SlipTreatment.HELD, m);
     double[] x = {0.6, 0.3};
-    assertThat(held.sideslip(x, 0.1, 0.1)).isZero();
-    assertThat(held.yawRate(x, 0.1, 0.1))
+    assertThat(held.sideslip(0, x, 0.1, 0.1)).isZero();
+    assertThat(held.yawRate(0, x, 0.1, 0.1))
         .isCloseTo(9.80665 / m.speed() * Math.sin(0.6), within(1e-15));
   }
 
@@ -110,8 +110,8 @@ class SlipTreatmentTest {
           minus[j] = -step;
           double[] up = new double[n];
           double[] down = new double[n];
-          motion.rates(plus, 0, 0, up);
-          motion.rates(minus, 0, 0, down);
+          motion.rates(0, plus, 0, 0, up);
+          motion.rates(0, minus, 0, 0, down);
           for (int i = 0; i < n; i++) {
             // central difference: error of the order of step², times slopes up to some 30
             assertThat((up[i] - down[i]) / (2 * step)).isCloseTo(a[i][j], within(1e-7));
@@ -133,9 +133,9 @@ class SlipTreatmentTest {
     HeldSlip held = (HeldSlip) LateralMotion.of(SlipTreatment.HELD, m);
     double[] x = {0.5, 0.4};
     double[] rates = new double[2];
-    held.rates(x, 0.1, 0, rates);
-    double rudder = held.rudderToHold(x, 0.1, 0);
-    double r = held.yawRate(x, 0.1, 0);
+    held.rates(0, x, 0.1, 0, rates);
+    double rudder = held.rudderToHold(0, x, 0.1, 0);
+    double r = held.yawRate(0, x, 0.1, 0);
     double yawAcceleration = 9.80665 / m.speed() * Math.cos(0.5) * 0.4;
     double n = m.yawMoment().at(0, 0.4, r, 0.1, rudder);
     double needed =

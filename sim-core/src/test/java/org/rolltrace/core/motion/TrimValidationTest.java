@@ -74,7 +74,7 @@ class TrimValidationTest {
           state[LateralMotion.SIDESLIP] = trim.sideslip();
         }
         double[] rates = new double[state.length];
-        motion.rates(state, trim.aileron(), trim.rudder(), rates);
+        motion.rates(0, state, trim.aileron(), trim.rudder(), rates);
         // accelerations that would move a wing by a second of arc in an hour
         assertThat(rates).containsExactly(new double[state.length], within(1e-11));
         assertThat(motion.sideslip(state, trim.aileron(), trim.rudder()))
