@@ -300,6 +300,15 @@ public final class ScenarioDocument {
     return changed;
   }
 
+  /**
+   * The shapes that an input may have.
+   *
+   * @return their words, the plainest first
+   */
+  public static List<String> shapes() {
+    return List.copyOf(InputFormat.words());
+  }
+
   private static ShapeFormat format(String shape) {
     for (ShapeFormat format : InputFormat.SHAPES) {
       if (format.word().equals(shape)) {

@@ -36,9 +36,13 @@ final class TraceFormat implements ShapeFormat {
 
   @Override
   public Optional<InputShape> read(ObjectCursor in, Common common) {
-    Optional<String> name = in.text(FILE, JsonTree.LONGEST_TEXT);
+    Optional<String> name = in.freeText(FILE, JsonTree.LONGEST_TEXT);
     Optional<String> column = in.text(COLUMN, LONGEST_COLUMN);
     if (name.isEmpty() || column.isEmpty()) {
+      return Optional.empty();
+    }
+    if (name.get().isBlank()) {
+      in.refuse(FILE, "the path is blank; expected one from here to a CSV file");
       return Optional.empty();
     }
     Path file;

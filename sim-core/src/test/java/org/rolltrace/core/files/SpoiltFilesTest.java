@@ -78,14 +78,14 @@ class SpoiltFilesTest {
             "\"note\": \"\", \"durations\": 3, \"duration\"",
             "$.durations",
             9,
-            "unknown key \"durations\"; did you mean \"duration\"? The keys of a scenario are format, title, aeroplane, condition, slip, duration, start, inputs, measures, note"),
+            "unknown key \"durations\"; did you mean \"duration\"? The keys of a scenario are format, title, aeroplane, condition, slip, duration, start, heldSlip, inputs, measures, note"),
         spoilt(
             Samples.SCENARIO,
             "\"duration\"",
             "\"odd key\": 3, \"duration\"",
             "$[\"odd key\"]",
             9,
-            "unknown key \"odd key\". The keys of a scenario are format, title, aeroplane, condition, slip, duration, start, inputs, measures, note"),
+            "unknown key \"odd key\". The keys of a scenario are format, title, aeroplane, condition, slip, duration, start, heldSlip, inputs, measures, note"),
         spoilt(
             Samples.SCENARIO,
             "\"size\": 1.0",
@@ -313,7 +313,7 @@ class SpoiltFilesTest {
             "\"stepp\"",
             "$.inputs[0].shape",
             8,
-            "unknown shape \"stepp\"; expected one of \"step\", \"hold\", \"doublet\"; did you mean \"step\"?"),
+            "unknown shape \"stepp\"; expected one of \"step\", \"hold\", \"doublet\", \"multistep\", \"ramp\", \"sweep\", \"trace\"; did you mean \"step\"?"),
         spoilt(
             Samples.SCENARIO,
             "\"stick\"",
