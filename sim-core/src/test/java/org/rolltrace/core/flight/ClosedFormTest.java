@@ -7,10 +7,12 @@ import static org.rolltrace.core.testing.Scenarios.oneDegree;
 import static org.rolltrace.core.testing.Scenarios.seaLevel;
 import static org.rolltrace.core.testing.Scenarios.stick;
 
+import java.util.List;
 import java.util.function.DoubleUnaryOperator;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.EnumSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.rolltrace.core.aeroplane.SurfaceDynamics;
 import org.rolltrace.core.history.Channel;
@@ -19,7 +21,12 @@ import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.pilot.DoubletInput;
 import org.rolltrace.core.pilot.HoldInput;
 import org.rolltrace.core.pilot.InputShape;
+import org.rolltrace.core.pilot.MultistepInput;
+import org.rolltrace.core.pilot.RampInput;
 import org.rolltrace.core.pilot.StepInput;
+import org.rolltrace.core.pilot.SweepInput;
+import org.rolltrace.core.pilot.Trace;
+import org.rolltrace.core.pilot.TraceInput;
 import org.rolltrace.core.run.ScenarioRun;
 import org.rolltrace.core.scenario.AeroplaneData;
 import org.rolltrace.core.testing.Scenarios;
@@ -103,6 +110,171 @@ class ClosedFormTest {
     TimeHistory history = fly(oneDegree(T, K), new DoubletInput(1, 0.5, 0.5, hand), 4);
     assertRollRate(
         history, sum(move(1, hand, size), move(1.5, hand, -2 * size), move(2, hand, size)));
+  }
+
+  @ParameterizedTest
+  @ValueSource(doubles = {0, 0.1})
+  void multistep(double hand) {
+    double size = -0.5 * FULL_AILERON;
+    TimeHistory history =
+        fly(oneDegree(T, K), new MultistepInput(1, -0.5, 0.4, List.of(3, 2, 1, 1), hand), 6);
+    assertRollRate(
+        history,
+        sum(
+            move(1, hand, size),
+            move(2.2, hand, -2 * size),
+            move(3, hand, 2 * size),
+            move(3.4, hand, -2 * size),
+            move(3.8, hand, size)));
+  }
+
+  @Test
+  void slowRamp() {
+    TimeHistory history = fly(oneDegree(T, K), new RampInput(1, 0.8, 2.5), 6);
+    assertRollRate(history, move(1, 2.5, 0.8 * FULL_AILERON));
+  }
+
+  /** ṗ + p/T = K A sin ωτ is answered by K A ((sin ωτ)/T − ω cos ωτ + ω e^(−τ/T))/(1/T² + ω²). */
+  @Test
+  void aSweepThatKeepsItsFrequencyIsASine() {
+    double w = 5;
+    TimeHistory history =
+        fly(oneDegree(T, K), new SweepInput(1, 0.6, w, w, 20, SweepInput.Law.LINEAR), 8);
+    assertRollRate(
+        history,
+        t -> {
+          double tau = t - 1;
+          return tau <= 0
+              ? 0
+              : K
+                  * 0.6
+                  * FULL_AILERON
+                  * (Math.sin(w * tau) / T - w * Math.cos(w * tau) + w * Math.exp(-tau / T))
+                  / (1 / (T * T) + w * w);
+        });
+  }
+
+  /**
+   * Against Simpson's rule at a tenth of a millisecond, the phase summed from the frequency and the
+   * rate from ṗ = −p/T + K δ by its integrating factor.
+   */
+  @ParameterizedTest
+  @EnumSource(SweepInput.Law.class)
+  void sweep(SweepInput.Law law) {
+    double start = 0.5;
+    double from = 1;
+    double to = 15;
+    double span = 6;
+    SweepInput sweep = new SweepInput(start, 0.7, from, to, span, law);
+    TimeHistory history = fly(oneDegree(T, K), sweep, 9);
+    double h = 1e-4;
+    double phase = 0;
+    double rate = 0;
+    int next = 0;
+    for (int k = 0; k < 90_000; k++) {
+      double tau = k * h - start;
+      while (next < history.size() && history.time(next) <= k * h + 1e-9) {
+        if (Math.abs(history.time(next) - k * h) < 1e-9) {
+          assertThat(history.value(Channel.ROLL_RATE, next))
+              .as("roll rate at %s s", k * h)
+              .isCloseTo(rate, within(TOLERANCE));
+        }
+        next++;
+      }
+      if (tau < -0.5 * h) {
+        continue;
+      }
+      double w0 = frequency(law, from, to, tau / span);
+      double w1 = frequency(law, from, to, (tau + 0.25 * h) / span);
+      double w2 = frequency(law, from, to, (tau + 0.5 * h) / span);
+      double w3 = frequency(law, from, to, (tau + 0.75 * h) / span);
+      double w4 = frequency(law, from, to, (tau + h) / span);
+      double middle = phase + h / 12 * (w0 + 4 * w1 + w2);
+      double after = phase + h / 6 * (w0 + 4 * w2 + w4) + 0 * w3;
+      // After its duration the sine goes on to the next multiple of π.
+      boolean over = tau >= span && Math.floor(phase / Math.PI) > 0 && isOver(phase, tau, span, to);
+      double a0 = over ? 0 : Math.sin(phase);
+      double a1 = over || isOver(middle, tau + h / 2, span, to) ? 0 : Math.sin(middle);
+      double a2 = over || isOver(after, tau + h, span, to) ? 0 : Math.sin(after);
+      double fade = Math.exp(-h / T);
+      rate =
+          rate * fade
+              + K * 0.7 * FULL_AILERON * h / 6 * (a0 * fade + 4 * a1 * Math.exp(-h / 2 / T) + a2);
+      phase = after;
+    }
+    assertThat(next).isGreaterThan(850);
+  }
+
+  private static double frequency(SweepInput.Law law, double from, double to, double share) {
+    double s = Math.min(1, share);
+    return law == SweepInput.Law.LINEAR
+        ? (1 - s) * from + s * to
+        : Math.pow(from, 1 - s) * Math.pow(to, s);
+  }
+
+  /** Whether a multiple of π lies between the end of the duration and here. */
+  private static boolean isOver(double phase, double tau, double span, double to) {
+    if (tau <= span) {
+      return false;
+    }
+    double atSpan = phase - to * (tau - span);
+    return Math.floor(phase / Math.PI) > Math.floor(atSpan / Math.PI);
+  }
+
+  private static TraceInput traced(InputShape shape, double[] times) {
+    double[] positions = new double[times.length];
+    for (int i = 0; i < times.length; i++) {
+      positions[i] = shape.movement().positionAt(times[i]);
+    }
+    return new TraceInput(0, 1, Trace.of("hold.csv", "stick", times, positions));
+  }
+
+  @Test
+  void aTraceOfAHoldIsAnsweredAsTheHold() {
+    HoldInput hold = new HoldInput(1, 0.5, 2, 0.25);
+    TimeHistory typed = fly(oneDegree(T, K), hold, 6);
+    TimeHistory corners =
+        fly(oneDegree(T, K), traced(hold, new double[] {0, 1, 1.25, 3, 3.25, 4}), 6);
+    double[] often = new double[1601];
+    for (int i = 0; i < often.length; i++) {
+      often[i] = i / 400.0;
+    }
+    TimeHistory samples = fly(oneDegree(T, K), traced(hold, often), 6);
+    int[] even = typed.evenSamples();
+    for (TimeHistory other : List.of(corners, samples)) {
+      int[] its = other.evenSamples();
+      assertThat(its).hasSameSizeAs(even);
+      for (Channel channel : Channel.values()) {
+        for (int i = 0; i < even.length; i++) {
+          // the promise of the local tolerance, 1e-9
+          assertThat(other.value(channel, its[i]))
+              .as("%s at %s s", channel, typed.time(even[i]))
+              .isCloseTo(typed.value(channel, even[i]), within(1e-9));
+        }
+      }
+    }
+  }
+
+  /** A surface that cannot follow a sweep, against steps of 10 µs that never exceed the limit. */
+  @Test
+  void aRateLimitedSurfaceChasesASweep() {
+    double limit = 1;
+    SweepInput sweep = new SweepInput(0.5, 1, 3, 12, 5, SweepInput.Law.LINEAR);
+    TimeHistory history = flown(new SurfaceDynamics(limit, 0), sweep, 7).history();
+    double h = 1e-5;
+    double angle = 0;
+    long step = 0;
+    for (int i = 0; i < history.size(); i++) {
+      while ((step + 1) * h <= history.time(i)) {
+        step++;
+        double gap = FULL_AILERON * sweep.movement().positionAt(step * h) - angle;
+        angle += Math.max(-limit * h, Math.min(limit * h, gap));
+      }
+      // a step of the demand, whose rate is at most 4.2 rad/s
+      assertThat(history.value(Channel.AILERON, i))
+          .as("aileron at %s s", history.time(i))
+          .isCloseTo(angle, within(5e-5));
+    }
   }
 
   @Test
