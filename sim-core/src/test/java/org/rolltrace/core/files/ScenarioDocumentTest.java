@@ -209,9 +209,7 @@ class ScenarioDocumentTest {
     "step,doublet,width",
     "hold,doublet,width",
     "step,multistep,unit",
-    "ramp,hold,movement",
-    "doublet,sweep,from",
-    "sweep,multistep,unit"
+    "hold,multistep,unit"
   })
   void shapesChangeBothWays(String one, String other, String keyOfOther) {
     ScenarioDocument document =
@@ -390,6 +388,22 @@ class ScenarioDocumentTest {
       assertThat(left.map(path -> path.getFileName().toString()))
           .containsExactlyInAnyOrder("aeroplanes", "folder", "scenario.json", "traces");
     }
+  }
+
+  @ParameterizedTest
+  @CsvSource({
+    "step,ramp,duration",
+    "doublet,sweep,from",
+    "multistep,sweep,to",
+    "sweep,ramp,duration"
+  })
+  void aShapeWithoutAHandLeavesOutItsMovement(String one, String other, String keyOfOther) {
+    ScenarioDocument changed =
+        document(Samples.SCENARIO).withInputAdded("stick", one, 2).withInputShape(1, other);
+    assertThat(changed.text("$.inputs[1]." + keyOfOther)).isPresent();
+    assertThat(changed.text("$.inputs[1].movement")).isEmpty();
+    assertThat(paths(changed)).isEmpty();
+    assertThat(paths(changed.withInputShape(1, one))).isEmpty();
   }
 
   @Test

@@ -510,8 +510,8 @@ class SpoiltFilesTest {
             "column",
             "the trace file has no column \"stik\"; did you mean \"stick\"? Its columns are time, stick, pedal"),
         ofTrace(
-            "-0.5",
-            "-1.5",
+            "\"size\": -0.5",
+            "\"size\": -1.5",
             "size",
             "-1.5 is out of range; expected from -1 to 1, a fraction of the travel, right positive"),
         // held slip
