@@ -105,7 +105,9 @@ public enum SurfaceMode {
     return switch (this) {
       case FOLLOWING -> demandRate > 0 ? SLEWING_UP : SLEWING_DOWN;
       case LAGGING -> demand > angle ? SLEWING_UP : SLEWING_DOWN;
-      case SLEWING_UP, SLEWING_DOWN -> dynamics.lag() > 0 ? LAGGING : FOLLOWING;
+      case SLEWING_UP, SLEWING_DOWN ->
+          // A demand that comes past faster than the surface can turn is slewed after at once.
+          dynamics.lag() > 0 ? LAGGING : of(dynamics, demand, demandRate, angle);
     };
   }
 

@@ -19,12 +19,26 @@ final class InputFormat {
   private static final Range FRACTION =
       Range.fromTo(-1, 1, "from -1 to 1, a fraction of the travel, right positive");
 
-  /** The keys that all shapes share. */
-  static final Keys COMMON =
-      Keys.of("an input").required(CONTROL, SHAPE, START, SIZE).optional(MOVEMENT);
+  private static final Keys ANY = Keys.of("an input").required(CONTROL, SHAPE);
+
+  /** The keys of shapes that are one movement, without a hand that makes moves. */
+  static final Keys SMOOTH = ANY.required(START, SIZE);
+
+  /** The keys of shapes that are made of moves of the hand. */
+  static final Keys COMMON = SMOOTH.optional(MOVEMENT);
+
+  /** The keys of a recorded movement. */
+  static final Keys RECORDED = ANY.optional(START, SIZE);
 
   static final List<ShapeFormat> SHAPES =
-      List.of(new StepFormat(), new HoldFormat(), new DoubletFormat());
+      List.of(
+          new StepFormat(),
+          new HoldFormat(),
+          new DoubletFormat(),
+          new MultistepFormat(),
+          new RampFormat(),
+          new SweepFormat(),
+          new TraceFormat());
 
   private InputFormat() {}
 
@@ -41,8 +55,8 @@ final class InputFormat {
     Optional<Control> control = control(in);
     ShapeFormat.Common common =
         new ShapeFormat.Common(
-            in.quantity(START, Dimension.TIME, Range.ZERO_OR_MORE),
-            in.number(SIZE, FRACTION),
+            in.quantity(START, Dimension.TIME, Range.ZERO_OR_MORE, 0),
+            in.number(SIZE, FRACTION, 1),
             in.quantity(MOVEMENT, Dimension.TIME, Range.ZERO_OR_MORE, InputShape.DEFAULT_MOVEMENT));
     if (format.isEmpty()) {
       return Optional.empty();
@@ -81,7 +95,7 @@ final class InputFormat {
     return all;
   }
 
-  private static Keys keysOfAnyShape() {
+  static Keys keysOfAnyShape() {
     Keys any = COMMON;
     for (Keys keys : keysOfShapes()) {
       for (String key : keys.all()) {

@@ -256,6 +256,20 @@ final class ObjectCursor {
     return quantity(key, dimension, range, Double.NaN);
   }
 
+  /** A frequency in cycles or angle per time, in rad/s; NaN when it is absent or was refused. */
+  double frequency(String key, Range range) {
+    Optional<JsonValue> value = value(key);
+    if (value.isEmpty() || !(value.get() instanceof JsonValue.Text text)) {
+      return quantity(key, Dimension.FREQUENCY, range);
+    }
+    try {
+      return inRange(value.get(), Quantity.parseFrequency(text.text()), range);
+    } catch (QuantityException e) {
+      refuse(key, e.getMessage());
+      return Double.NaN;
+    }
+  }
+
   /** A quantity that may be absent; empty also when it was refused. */
   OptionalDouble optionalQuantity(String key, Dimension dimension, Range range) {
     return asOptional(quantity(key, dimension, range, Double.NaN));
@@ -302,14 +316,23 @@ final class ObjectCursor {
     if (value.isEmpty()) {
       return Double.NaN;
     }
-    if (!(value.get() instanceof JsonValue.Numeral number)) {
-      addWrongType(value.get(), "a plain number such as 0.5, without unit and quotation marks");
+    return number(value.get(), range);
+  }
+
+  /** A number without unit out of a list. */
+  double number(JsonValue value, Range range) {
+    if (value instanceof JsonValue.Refused refused) {
+      faults.add(refused.place(), refused.reason());
+      return Double.NaN;
+    }
+    if (!(value instanceof JsonValue.Numeral number)) {
+      addWrongType(value, "a plain number such as 0.5, without unit and quotation marks");
       return Double.NaN;
     }
     try {
-      return inRange(value.get(), Quantity.parse(number.digits(), Dimension.DIMENSIONLESS), range);
+      return inRange(value, Quantity.parse(number.digits(), Dimension.DIMENSIONLESS), range);
     } catch (QuantityException e) {
-      refuse(key, e.getMessage());
+      faults.add(value.place(), e.getMessage());
       return Double.NaN;
     }
   }

@@ -22,7 +22,12 @@ import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.Mode;
 import org.rolltrace.core.motion.Trim;
+import org.rolltrace.core.pilot.HeldSideslip;
+import org.rolltrace.core.pilot.InputShape;
+import org.rolltrace.core.pilot.MultistepInput;
 import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.pilot.SweepInput;
+import org.rolltrace.core.pilot.TraceInput;
 import org.rolltrace.core.run.RunResult;
 import org.rolltrace.core.run.Safety;
 import org.rolltrace.core.scenario.Scenario;
@@ -108,6 +113,7 @@ public final class ResultJson {
     json.writeStringField("aeroplane", scenario.data().aeroplane().name());
     json.writeStringField("derivativesSource", scenario.data().derivatives().source());
     json.writeStringField("slip", scenario.slip().word());
+    writeHeldSlip(scenario.programme().heldSideslip());
     json.writeObjectFieldStart("start");
     number("bank", scenario.start().disturbance().bank());
     number("rollRate", scenario.start().disturbance().rollRate());
@@ -125,6 +131,7 @@ public final class ResultJson {
       if (input.shape().end() < Double.POSITIVE_INFINITY) {
         number("end", input.shape().end());
       }
+      writeOwn(input.shape());
       json.writeEndObject();
     }
     json.writeEndArray();
@@ -132,6 +139,42 @@ public final class ResultJson {
     number("relativeTolerance", result.settings().relativeTolerance());
     number("absoluteTolerance", result.settings().absoluteTolerance());
     json.writeEndObject();
+  }
+
+  /** What only one shape has and what does not follow from start, movement and end. */
+  private void writeOwn(InputShape shape) throws IOException {
+    if (shape instanceof MultistepInput multistep) {
+      number("unit", multistep.unit());
+      json.writeArrayFieldStart("pattern");
+      for (int stay : multistep.pattern()) {
+        json.writeNumber(stay);
+      }
+      json.writeEndArray();
+    } else if (shape instanceof SweepInput sweep) {
+      number("from", sweep.from());
+      number("to", sweep.to());
+      number("duration", sweep.duration());
+      json.writeStringField("law", sweep.law().word());
+    } else if (shape instanceof TraceInput trace) {
+      json.writeStringField("file", trace.trace().file());
+      json.writeStringField("column", trace.trace().column());
+      number("scale", trace.scale());
+      number("shift", trace.shift());
+    }
+  }
+
+  private void writeHeldSlip(HeldSideslip held) throws IOException {
+    if (held.isNone()) {
+      return;
+    }
+    json.writeArrayFieldStart("heldSlip");
+    for (HeldSideslip.Point point : held.points()) {
+      json.writeStartObject();
+      number("time", point.time());
+      number("sideslip", point.sideslip());
+      json.writeEndObject();
+    }
+    json.writeEndArray();
   }
 
   private void writeAeroplane(Aeroplane aeroplane) throws IOException {

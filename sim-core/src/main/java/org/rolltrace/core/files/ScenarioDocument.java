@@ -1,12 +1,15 @@
 package org.rolltrace.core.files;
 
 import java.nio.charset.StandardCharsets;
+import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.regex.Pattern;
+import java.util.stream.Collectors;
 import org.rolltrace.core.scenario.Scenario;
 
 /**
@@ -22,6 +25,12 @@ import org.rolltrace.core.scenario.Scenario;
 public final class ScenarioDocument {
   private static final String AEROPLANE = "$.aeroplane";
   private static final String INPUTS = "$.inputs";
+
+  private static final String HELD_SLIP = "$.heldSlip";
+
+  /** A number, a blank and something that may be a unit. */
+  private static final Pattern ANGLE =
+      Pattern.compile("[+-]?(\\d+\\.?\\d*|\\.\\d+)([eE][+-]?\\d+)? .*");
 
   private static final Pattern NUMBER =
       Pattern.compile("-?(0|[1-9]\\d*)(\\.\\d+)?([eE][+-]?\\d+)?");
@@ -161,6 +170,39 @@ public final class ScenarioDocument {
   }
 
   /**
+   * The numbers of a list as they stand in the document.
+   *
+   * @param path where
+   * @return them with a comma and a blank between; empty when there is no list
+   */
+  public Optional<String> numbers(String path) {
+    return group(path, true)
+        .map(
+            list ->
+                list.items().stream()
+                    .map(item -> written(item.value()).orElse("?"))
+                    .collect(Collectors.joining(", ")));
+  }
+
+  /**
+   * The same with another list of numbers.
+   *
+   * @param path where; objects on the way are made when they are missing
+   * @param numbers with commas, hyphens or blanks between; what JSON does not know as a number is
+   *     written as text, so that reading finds its fault
+   * @return the edited document
+   */
+  public ScenarioDocument withNumbers(String path, String numbers) {
+    List<JsonNode.Item> items = new ArrayList<>();
+    for (String digits : numbers.strip().split("\\s*[,\\s-]\\s*", -1)) {
+      JsonNode number =
+          NUMBER.matcher(digits).matches() ? new JsonNode.Bare(digits) : new JsonNode.Text(digits);
+      items.add(new JsonNode.Item("", number, false));
+    }
+    return with(path, new JsonNode.Group(true, items, false));
+  }
+
+  /**
    * The same without a value.
    *
    * @param path where; it may lead nowhere
@@ -192,8 +234,8 @@ public final class ScenarioDocument {
   }
 
   /**
-   * The same with one more input, behind the others: half the travel to the right, with the usual
-   * time for the hand and lengths.
+   * The same with one more input, behind the others: half the travel to the right, or all of a
+   * trace, with the usual time for the hand and lengths.
    *
    * @param control such as {@code stick}
    * @param shape such as {@code step}
@@ -210,7 +252,7 @@ public final class ScenarioDocument {
     return with(at + ".control", control)
         .with(at + ".shape", shape)
         .with(at + ".start", seconds(startSeconds))
-        .withNumber(at + ".size", "0.5")
+        .withNumber(at + ".size", format(shape).usualSize())
         .with(at + ".movement", "0.15 s")
         .withInputShape(inputCount(), shape);
   }
@@ -243,14 +285,18 @@ public final class ScenarioDocument {
     String at = existingInput(index);
     ShapeFormat format = format(shape);
     ScenarioDocument changed = this;
-    for (ShapeFormat other : InputFormat.SHAPES) {
-      for (String key : other.usual().keySet()) {
-        if (!format.keys().has(key)) {
-          changed = changed.without(at + "." + key);
-        }
+    for (String key : InputFormat.keysOfAnyShape().all()) {
+      if (!format.keys().has(key)) {
+        changed = changed.without(at + "." + key);
       }
     }
     changed = changed.with(at + ".shape", shape);
+    if (format.keys().required().contains("start") && find(at + ".start").isEmpty()) {
+      changed = changed.with(at + ".start", "0 s");
+    }
+    if (format.keys().required().contains("size") && find(at + ".size").isEmpty()) {
+      changed = changed.withNumber(at + ".size", format.usualSize());
+    }
     for (Map.Entry<String, String> usual : format.usual().entrySet()) {
       String path = at + "." + usual.getKey();
       if (changed.find(path).isEmpty()) {
@@ -258,6 +304,15 @@ public final class ScenarioDocument {
       }
     }
     return changed;
+  }
+
+  /**
+   * The shapes that an input may have.
+   *
+   * @return their words, the plainest first
+   */
+  public static List<String> shapes() {
+    return List.copyOf(InputFormat.words());
   }
 
   private static ShapeFormat format(String shape) {
@@ -271,9 +326,9 @@ public final class ScenarioDocument {
   }
 
   /**
-   * The same with every input to the other side.
+   * The same with every input and every held sideslip to the other side.
    *
-   * @return the edited document; sizes that are no numbers stay
+   * @return the edited document; sizes that are no numbers and sideslips that are no angles stay
    */
   public ScenarioDocument mirrored() {
     ScenarioDocument changed = this;
@@ -284,16 +339,31 @@ public final class ScenarioDocument {
           && written.get() instanceof JsonNode.Bare number
           && NUMBER.matcher(number.written()).matches()) {
         changed = changed.withNumber(size, negated(number.written()));
+      } else if (written.isEmpty() && text(input(i) + ".shape").equals(Optional.of("trace"))) {
+        changed = changed.withNumber(size, "-1");
+      }
+    }
+    int points = group(HELD_SLIP, true).map(list -> list.items().size()).orElse(0);
+    for (int i = 0; i < points; i++) {
+      String sideslip = HELD_SLIP + "[" + i + "].sideslip";
+      Optional<String> angle = text(sideslip);
+      if (angle.isPresent() && ANGLE.matcher(angle.get()).matches()) {
+        changed = changed.with(sideslip, negated(angle.get()));
       }
     }
     return changed;
   }
 
+  /** A number, or one with a unit, of the other sign. */
   private static String negated(String digits) {
-    if (Double.parseDouble(digits) == 0) {
+    String number = digits.indexOf(' ') < 0 ? digits : digits.substring(0, digits.indexOf(' '));
+    if (Double.parseDouble(number) == 0) {
       return digits;
     }
-    return digits.startsWith("-") ? digits.substring(1) : "-" + digits;
+    if (digits.startsWith("-")) {
+      return digits.substring(1);
+    }
+    return "-" + (digits.startsWith("+") ? digits.substring(1) : digits);
   }
 
   /**
@@ -324,6 +394,17 @@ public final class ScenarioDocument {
                 node instanceof JsonNode.Text text ? Optional.of(text.text()) : Optional.empty());
   }
 
+  private static String traceFile(int index) {
+    return input(index) + "." + TraceFormat.FILE;
+  }
+
+  private Optional<String> traceName(int index) {
+    return find(traceFile(index))
+        .flatMap(
+            node ->
+                node instanceof JsonNode.Text text ? Optional.of(text.text()) : Optional.empty());
+  }
+
   /**
    * A value of the aeroplane, wherever it stands.
    *
@@ -347,7 +428,7 @@ public final class ScenarioDocument {
    * The same as it would stand in another file.
    *
    * @param newFile where
-   * @return a document whose path to the aeroplane file leads there from the new place
+   * @return a document whose paths to aeroplane and trace files lead there from the new place
    */
   public ScenarioDocument at(Path newFile) {
     if (newFile.equals(file)) {
@@ -358,6 +439,13 @@ public final class ScenarioDocument {
     if (name.isPresent()) {
       String seen = NamedAeroplane.seenFrom(newFile, file, name.get());
       moved = JsonNode.with(root, JsonPath.steps(AEROPLANE), new JsonNode.Text(seen));
+    }
+    for (int i = 0; i < inputCount(); i++) {
+      Optional<String> trace = traceName(i);
+      if (trace.isPresent()) {
+        String seen = NamedAeroplane.seenFrom(newFile, file, trace.get());
+        moved = JsonNode.with(moved, JsonPath.steps(traceFile(i)), new JsonNode.Text(seen));
+      }
     }
     return new ScenarioDocument(newFile, (JsonNode.Group) moved, named);
   }
@@ -391,10 +479,27 @@ public final class ScenarioDocument {
    * Where a fault is, as seen from the document.
    *
    * @param fault one of this document
-   * @return its path; below {@code $.aeroplane} when it is in the aeroplane file
+   * @return its path; below {@code $.aeroplane} when it is in the aeroplane file, that of the name
+   *     of a trace file when it is in one
    */
   public String pathOf(FileFault fault) {
-    return fault.file().equals(file) ? fault.jsonPath() : AEROPLANE + fault.jsonPath().substring(1);
+    if (fault.file().equals(file)) {
+      return fault.jsonPath();
+    }
+    for (int i = 0; i < inputCount(); i++) {
+      if (traceName(i).isPresent() && leadsTo(traceName(i).get(), fault.file())) {
+        return traceFile(i);
+      }
+    }
+    return AEROPLANE + fault.jsonPath().substring(1);
+  }
+
+  private boolean leadsTo(String name, Path named) {
+    try {
+      return file.resolveSibling(name).equals(named);
+    } catch (InvalidPathException e) {
+      return false;
+    }
   }
 
   /**

@@ -11,6 +11,7 @@ import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.measures.MeasureOptions;
 import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.pilot.HeldSideslip;
 import org.rolltrace.core.pilot.PilotInput;
 import org.rolltrace.core.pilot.PilotProgramme;
 import org.rolltrace.core.propeller.PropellerMoments;
@@ -27,20 +28,26 @@ final class ScenarioFormat {
   static final int LONGEST_TITLE = 200;
   static final int MOST_INPUTS = 200;
   static final int MOST_BANK_ANGLES = 100;
+  static final int MOST_SLIP_POINTS = 1000;
 
   private static final String AEROPLANE = "aeroplane";
   private static final String INPUTS = "inputs";
+  private static final String HELD_SLIP = "heldSlip";
   private static final String BANK_ANGLES = "bankAngles";
 
   private static final Range DURATION =
       Range.aboveZeroTo(Scenario.LONGEST, "a duration above 0 and at most 3600 s");
+  private static final Range HELD =
+      Range.fromTo(-HeldSideslip.LARGEST, HeldSideslip.LARGEST, "at most 90 deg either way");
   private static final Range BAND = Range.fromTo(0.001, 0.5, "a fraction from 0.001 to 0.5");
   private static final double LARGEST_BANK_CHANGE = 3600;
 
   static final Keys SCENARIO =
       Keys.of("a scenario")
           .required(FormatName.KEY, "title", AEROPLANE, "condition", "slip", "duration")
-          .optional("start", INPUTS, "measures", "note");
+          .optional("start", HELD_SLIP, INPUTS, "measures", "note");
+
+  static final Keys HELD_SLIP_POINT = Keys.of("a held slip").required("time", "sideslip");
 
   static final Keys START = Keys.of("the start").optional("bank", "rollRate", "sideslip", "trim");
   static final Keys TRIM = Keys.of("the trim").optional("state", PROPELLER_ROLL_MOMENT);
@@ -66,6 +73,8 @@ final class ScenarioFormat {
     Optional<SlipTreatment> slip = slip(in);
     Optional<Start> start = start(in, propeller);
     Optional<PilotProgramme> programme = programme(in);
+    Optional<HeldSideslip> held = heldSideslip(in);
+    programme = programme.flatMap(inputs -> held.map(inputs::holding));
     double duration = in.quantity("duration", Dimension.TIME, DURATION);
     Optional<MeasureOptions> measures = measures(in);
 
@@ -208,6 +217,35 @@ final class ScenarioFormat {
     }
     return inputs.size() == elements.size()
         ? Optional.of(PilotProgramme.of(inputs))
+        : Optional.empty();
+  }
+
+  private static Optional<HeldSideslip> heldSideslip(ObjectCursor scenario) {
+    List<JsonValue> elements = scenario.list(HELD_SLIP, MOST_SLIP_POINTS);
+    List<HeldSideslip.Point> points = new ArrayList<>();
+    for (JsonValue element : elements) {
+      if (!(element instanceof JsonValue.ObjectValue object)) {
+        scenario.addWrongType(element, "a time and a sideslip in braces { }");
+        continue;
+      }
+      ObjectCursor in = ObjectCursor.of(object, HELD_SLIP_POINT, scenario.faults());
+      double time = in.quantity("time", Dimension.TIME, Range.ZERO_OR_MORE);
+      double sideslip = in.quantity("sideslip", Dimension.ANGLE, HELD);
+      if (!in.isSound()) {
+        continue;
+      }
+      if (!points.isEmpty() && !(time > points.get(points.size() - 1).time())) {
+        in.refuse(
+            "time",
+            "the time is not after the one before, "
+                + points.get(points.size() - 1).time()
+                + " s; expected increasing times");
+        continue;
+      }
+      points.add(new HeldSideslip.Point(time, sideslip));
+    }
+    return points.size() == elements.size()
+        ? Optional.of(HeldSideslip.of(points))
         : Optional.empty();
   }
 

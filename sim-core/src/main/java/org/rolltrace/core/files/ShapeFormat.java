@@ -16,6 +16,11 @@ interface ShapeFormat {
   /** What its own keys say in a new input. */
   Map<String, String> usual();
 
+  /** The size of a new input. */
+  default String usualSize() {
+    return "0.5";
+  }
+
   /**
    * Makes the shape of its own keys and of what all shapes share.
    *
@@ -25,6 +30,9 @@ interface ShapeFormat {
    */
   Optional<InputShape> read(ObjectCursor in, Common common);
 
-  /** What all shapes share, s and fraction of travel; NaN where it was refused. */
+  /**
+   * What all shapes share, s and fraction of travel; NaN where it was refused. Where a shape may do
+   * without, start is 0 and size 1.
+   */
   record Common(double start, double size, double movement) {}
 }

@@ -32,6 +32,9 @@
  *       the aeroplane itself</td></tr>
  *   <tr><td>condition*</td><td>a condition, below</td></tr>
  *   <tr><td>slip*</td><td>{@code held}, {@code settled} or {@code free}</td></tr>
+ *   <tr><td>heldSlip</td><td>list of held slips, below; up to 1000, straight between them, the first
+ *       one before and the last one after them: the sideslip that the pilot holds, with held slip
+ *       only; none when absent. The trim is that without slip</td></tr>
  *   <tr><td>start</td><td>{@code bank} (right wing down positive), {@code rollRate} (rolling right),
  *       {@code sideslip} (wind from the right): displacements from the trimmed state, 0 when absent;
  *       {@code trim}: {@code state}, so far only {@code wings-level}, and {@code
@@ -64,16 +67,48 @@
  *   <tr><th>key</th><th>value</th></tr>
  *   <tr><td>control*</td><td>{@code stick} or {@code pedal}</td></tr>
  *   <tr><td>shape*</td><td>{@code step} (stays), {@code hold} (and then back), {@code doublet} (to
- *       one side, the other, and back)</td></tr>
- *   <tr><td>start*</td><td>time of the first movement, 0 or more</td></tr>
- *   <tr><td>size*</td><td>number, −1 to 1: fraction of the travel, right positive</td></tr>
- *   <tr><td>movement</td><td>time that the hand takes for a move, 0 or more; 0.1 s when absent, 0 s
+ *       one side, the other, and back), {@code multistep} (to either side by turns, 3-2-1-1),
+ *       {@code ramp} (slowly, and stays), {@code sweep} (a sine of changing frequency), {@code
+ *       trace} (as recorded)</td></tr>
+ *   <tr><td>start*</td><td>time of the first movement, 0 or more; of trace, which may do without,
+ *       what is added to its times, 0 s when absent</td></tr>
+ *   <tr><td>size*</td><td>number, −1 to 1: fraction of the travel, right positive; of sweep
+ *       how far it goes to each side, of trace, which may do without, a factor, 1 when absent</td></tr>
+ *   <tr><td>movement, not of ramp, sweep and trace</td><td>time that the hand takes for a move, 0 or more; 0.1 s when absent, 0 s
  *       for a jump</td></tr>
  *   <tr><td>duration*, of hold only</td><td>time from the start to the beginning of the return, not
  *       below the movement</td></tr>
  *   <tr><td>width*, of doublet only</td><td>time from one move to the next, not below the
  *       movement</td></tr>
+ *   <tr><td>unit*, pattern, of multistep only</td><td>time of one unit, not below the movement; list
+ *       of up to 100 whole numbers from 1 to 1000, the units it stays at each side, {@code [3, 2, 1,
+ *       1]} when absent</td></tr>
+ *   <tr><td>duration*, of ramp</td><td>time above 0 that the hand takes from the trimmed position to
+ *       the size</td></tr>
+ *   <tr><td>from*, to*, duration*, law, of sweep</td><td>frequencies above 0 and up to 20 Hz, as
+ *       cycles ({@code Hz}) or angles ({@code rad/s}) per time; time above 0 from one to the other;
+ *       {@code linear} (default) or {@code logarithmic}. The sine ends with its first passage
+ *       through zero after the duration</td></tr>
+ *   <tr><td>file*, column*, of trace only</td><td>the path of a CSV file from the directory of the
+ *       scenario; the name of a column there, below</td></tr>
  * </table>
+ *
+ * <table>
+ *   <caption>Keys of a held slip</caption>
+ *   <tr><th>key</th><th>value</th></tr>
+ *   <tr><td>time*</td><td>time, 0 or more, increasing from point to point</td></tr>
+ *   <tr><td>sideslip*</td><td>angle, wind from the right positive, up to 90 deg either way</td></tr>
+ * </table>
+ *
+ * <h2>Trace, CSV</h2>
+ *
+ * <p>UTF-8, values separated by commas, without quotation marks. The first line names the columns
+ * and their units, {@code time[s],stick[-],pedal[%]}; one is called {@code time}, in a unit of
+ * time, and increases from line to line. The column of the movement is a fraction {@code [-]} or
+ * per cent {@code [%]} of the travel, right positive; times the size it stays within the travel.
+ * Other columns are not looked at. At least two lines of numbers follow, at most 100 000, 1 MiB in
+ * all. Between samples the movement is straight, before the first it is at the trimmed position,
+ * after the last it stays where that one is.
  *
  * <h2>Aeroplane, {@code rolltrace-aeroplane/1}</h2>
  *

@@ -314,11 +314,11 @@ public final class Flight {
   private void record(double time, double controlTime, double[] state) {
     double aileron = stick.angle(controlTime, state);
     double rudder = pedal.angle(controlTime, state);
-    motion.rates(state, aileron, rudder, scratch);
+    motion.rates(controlTime, state, aileron, rudder, scratch);
     row[Channel.BANK.column()] = state[LateralMotion.BANK];
     row[Channel.ROLL_RATE.column()] = state[LateralMotion.ROLL_RATE];
-    row[Channel.YAW_RATE.column()] = motion.yawRate(state, aileron, rudder);
-    row[Channel.SIDESLIP.column()] = motion.sideslip(state, aileron, rudder);
+    row[Channel.YAW_RATE.column()] = motion.yawRate(controlTime, state, aileron, rudder);
+    row[Channel.SIDESLIP.column()] = motion.sideslip(controlTime, state, aileron, rudder);
     row[Channel.STICK.column()] = stick.position(controlTime);
     row[Channel.PEDAL.column()] = pedal.position(controlTime);
     row[Channel.AILERON.column()] = aileron;
@@ -344,7 +344,7 @@ public final class Flight {
     public double[] computeDerivatives(double time, double[] state) {
       double within = Math.min(time, last);
       double[] rates = new double[state.length];
-      motion.rates(state, stick.angle(within, state), pedal.angle(within, state), rates);
+      motion.rates(within, state, stick.angle(within, state), pedal.angle(within, state), rates);
       stick.rate(within, state, rates);
       pedal.rate(within, state, rates);
       return rates;

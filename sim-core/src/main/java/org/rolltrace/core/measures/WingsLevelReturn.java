@@ -9,6 +9,7 @@ import java.util.OptionalDouble;
 import org.rolltrace.core.history.TimeHistory;
 import org.rolltrace.core.motion.Mode;
 import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.pilot.PilotInput;
 
 /** Whether, and how fast, the wings come level by themselves. */
 final class WingsLevelReturn {
@@ -23,11 +24,15 @@ final class WingsLevelReturn {
     if (manoeuvre.slip() == SlipTreatment.HELD) {
       return none("held slip cannot return by itself; choose settled or free slip");
     }
-    boolean shaken =
+    Optional<PilotInput> shaking =
         manoeuvre.programme().inputs().stream()
-            .anyMatch(input -> input.shape().size() != 0 && !input.shape().isHeld());
-    if (shaken) {
-      return none("a doublet leaves the aeroplane swinging, not with a wing down");
+            .filter(input -> input.shape().size() != 0 && !input.shape().isHeld())
+            .findFirst();
+    if (shaking.isPresent()) {
+      return none(
+          "a "
+              + shaking.get().shape().name()
+              + " leaves the aeroplane swinging, not with a wing down");
     }
     OptionalDouble back = manoeuvre.programme().backAtTrim(manoeuvre.duration());
     if (back.isEmpty()) {

@@ -29,7 +29,7 @@ public final class FreeSlip extends LateralMotion {
   }
 
   @Override
-  public void rates(double[] state, double aileron, double rudder, double[] rates) {
+  public void rates(double time, double[] state, double aileron, double rudder, double[] rates) {
     double p = state[ROLL_RATE];
     double slip = state[SIDESLIP];
     double r = state[YAW_RATE];
@@ -42,12 +42,12 @@ public final class FreeSlip extends LateralMotion {
   }
 
   @Override
-  public double sideslip(double[] state, double aileron, double rudder) {
+  public double sideslip(double time, double[] state, double aileron, double rudder) {
     return state[SIDESLIP];
   }
 
   @Override
-  public double yawRate(double[] state, double aileron, double rudder) {
+  public double yawRate(double time, double[] state, double aileron, double rudder) {
     return state[YAW_RATE];
   }
 

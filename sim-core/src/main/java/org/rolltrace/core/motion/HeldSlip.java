@@ -1,17 +1,35 @@
 package org.rolltrace.core.motion;
 
+import org.rolltrace.core.pilot.HeldSideslip;
+
 /**
- * No sideslip: one degree of freedom, with the yaw rate of the co-ordinated turn that goes with the
- * bank. Nothing in it brings a wing up again.
+ * The sideslip is what the pilot holds, none unless one against time is given: one degree of
+ * freedom, with the yaw rate of the turn that goes with bank and slip,
+ *
+ * <p>r = (g/V) sin φ cos γ + q̄ S CY_β β/(m V) − β̇.
+ *
+ * <p>Nothing in it brings a wing up again but a slip that the pilot holds for it.
  */
 public final class HeldSlip extends LateralMotion {
   private final LinearLoad roll;
   private final double rollInertia;
+  private final HeldSideslip held;
 
-  HeldSlip(LateralModel model) {
+  /** q̄ S CY_β/(m V), 1/s; 0 where no slip is held and the mass need not be known. */
+  private final double turnPerSlip;
+
+  HeldSlip(LateralModel model, HeldSideslip held) {
     super(model);
     this.roll = model.rollMoment();
     this.rollInertia = model.inertia().roll();
+    this.held = held;
+    if (!held.isNone() && model.mass().isEmpty()) {
+      throw new IllegalArgumentException("a slip held against time needs the mass");
+    }
+    this.turnPerSlip =
+        held.isNone()
+            ? 0
+            : model.sideForce().perSideslip() / (model.mass().getAsDouble() * model.speed());
   }
 
   @Override
@@ -20,20 +38,21 @@ public final class HeldSlip extends LateralMotion {
   }
 
   @Override
-  public void rates(double[] state, double aileron, double rudder, double[] rates) {
-    double yawRate = weightTurn(state[BANK]);
+  public void rates(double time, double[] state, double aileron, double rudder, double[] rates) {
+    double yawRate = yawRate(time, state, aileron, rudder);
     rates[BANK] = bankRate(state[BANK], state[ROLL_RATE], yawRate);
-    rates[ROLL_RATE] = roll.at(0, state[ROLL_RATE], yawRate, aileron, rudder) / rollInertia;
+    rates[ROLL_RATE] =
+        roll.at(held.at(time), state[ROLL_RATE], yawRate, aileron, rudder) / rollInertia;
   }
 
   @Override
-  public double sideslip(double[] state, double aileron, double rudder) {
-    return 0;
+  public double sideslip(double time, double[] state, double aileron, double rudder) {
+    return held.at(time);
   }
 
   @Override
-  public double yawRate(double[] state, double aileron, double rudder) {
-    return weightTurn(state[BANK]);
+  public double yawRate(double time, double[] state, double aileron, double rudder) {
+    return weightTurn(state[BANK]) + turnPerSlip * held.at(time) - held.rateAt(time);
   }
 
   @Override
@@ -45,25 +64,29 @@ public final class HeldSlip extends LateralMotion {
   }
 
   /**
-   * The rudder angle that the yawing moments need for the slip to stay at zero.
+   * The rudder angle that the yawing moments need for the slip to stay what it is held at; where
+   * its slope breaks, without the blow that would take.
    *
+   * @param time s
    * @param state bank and roll rate
    * @param aileron δa, rad
    * @param rudder the rudder angle flown, which enters the roll, rad
    * @return δr, rad; NaN when yaw inertia or rudder power is not known
    */
-  public double rudderToHold(double[] state, double aileron, double rudder) {
+  public double rudderToHold(double time, double[] state, double aileron, double rudder) {
     LinearLoad yaw = model().yawMoment();
     if (model().inertia().yaw().isEmpty() || yaw.perRudder() == 0) {
       return Double.NaN;
     }
     double[] rates = new double[2];
-    rates(state, aileron, rudder, rates);
-    double yawAcceleration = weightTurnPerBank() * Math.cos(state[BANK]) * rates[BANK];
+    rates(time, state, aileron, rudder, rates);
+    double yawAcceleration =
+        weightTurnPerBank() * Math.cos(state[BANK]) * rates[BANK] + turnPerSlip * held.rateAt(time);
     double needed =
         model().inertia().yaw().getAsDouble() * yawAcceleration
             - model().inertia().product() * rates[ROLL_RATE];
-    double others = yaw.at(0, state[ROLL_RATE], yawRate(state, aileron, rudder), aileron, 0);
+    double yawRate = yawRate(time, state, aileron, rudder);
+    double others = yaw.at(held.at(time), state[ROLL_RATE], yawRate, aileron, 0);
     return (needed - others) / yaw.perRudder();
   }
 }

@@ -1,5 +1,7 @@
 package org.rolltrace.core.motion;
 
+import org.rolltrace.core.pilot.HeldSideslip;
+
 /**
  * The equations of motion for one treatment of the slip. The state is an array that begins with
  * bank φ [rad] and roll rate p [rad/s]; free slip adds sideslip β [rad] and yaw rate r [rad/s].
@@ -40,10 +42,22 @@ public abstract sealed class LateralMotion permits HeldSlip, SettledSlip, FreeSl
    */
   public static LateralMotion of(SlipTreatment slip, LateralModel model) {
     return switch (slip) {
-      case HELD -> new HeldSlip(model);
+      case HELD -> new HeldSlip(model, HeldSideslip.NONE);
       case SETTLED -> new SettledSlip(model);
       case FREE -> new FreeSlip(model);
     };
+  }
+
+  /**
+   * The equations of a slip that is held against time.
+   *
+   * @param model the dimensional constants
+   * @param sideslip what the pilot holds
+   * @return the equations
+   * @throws IllegalArgumentException when a sideslip is given and the mass is not
+   */
+  public static HeldSlip holding(LateralModel model, HeldSideslip sideslip) {
+    return new HeldSlip(model, sideslip);
   }
 
   /**
@@ -56,32 +70,36 @@ public abstract sealed class LateralMotion permits HeldSlip, SettledSlip, FreeSl
   /**
    * The rates of the state.
    *
+   * @param time s; only a slip that is held against time depends on it
    * @param state bank, roll rate and, for free slip, sideslip and yaw rate
    * @param aileron δa, rad
    * @param rudder δr, rad
    * @param rates receives the time derivatives of the states
    */
-  public abstract void rates(double[] state, double aileron, double rudder, double[] rates);
+  public abstract void rates(
+      double time, double[] state, double aileron, double rudder, double[] rates);
 
   /**
    * The sideslip that goes with a state.
    *
+   * @param time as for {@link #rates}
    * @param state as for {@link #rates}
    * @param aileron δa, rad
    * @param rudder δr, rad
    * @return β, rad
    */
-  public abstract double sideslip(double[] state, double aileron, double rudder);
+  public abstract double sideslip(double time, double[] state, double aileron, double rudder);
 
   /**
    * The yaw rate that goes with a state.
    *
+   * @param time as for {@link #rates}
    * @param state as for {@link #rates}
    * @param aileron δa, rad
    * @param rudder δr, rad
    * @return r, rad/s
    */
-  public abstract double yawRate(double[] state, double aileron, double rudder);
+  public abstract double yawRate(double time, double[] state, double aileron, double rudder);
 
   /**
    * The dimensional constants.

@@ -72,22 +72,22 @@ public final class SettledSlip extends LateralMotion {
   }
 
   @Override
-  public double sideslip(double[] state, double aileron, double rudder) {
+  public double sideslip(double time, double[] state, double aileron, double rudder) {
     return slipPerSide * sideRest(state, aileron, rudder)
         + slipPerYaw * yawRest(state, aileron, rudder);
   }
 
   @Override
-  public double yawRate(double[] state, double aileron, double rudder) {
+  public double yawRate(double time, double[] state, double aileron, double rudder) {
     return yawRatePerSide * sideRest(state, aileron, rudder)
         + yawRatePerYaw * yawRest(state, aileron, rudder);
   }
 
   @Override
-  public void rates(double[] state, double aileron, double rudder, double[] rates) {
+  public void rates(double time, double[] state, double aileron, double rudder, double[] rates) {
     double bank = state[BANK];
     double rollRate = state[ROLL_RATE];
-    double yawRate = isLevel() ? 0 : yawRate(state, aileron, rudder);
+    double yawRate = isLevel() ? 0 : yawRate(time, state, aileron, rudder);
     rates[BANK] = bankRate(bank, rollRate, yawRate);
     rates[ROLL_RATE] =
         (momentPerTurn * weightTurn(bank) + moment.at(0, rollRate, 0, aileron, rudder))

@@ -23,12 +23,12 @@ public interface InputShape {
   /**
    * How long the hand takes for a move.
    *
-   * @return s; 0 for a jump
+   * @return s; 0 for a jump, and for a shape that is itself the movement
    */
   double handTime();
 
   /**
-   * The first position that the input reaches.
+   * How far the input goes, to the side to which it goes first.
    *
    * @return fraction of travel, right positive, −1 to 1
    */
@@ -44,7 +44,7 @@ public interface InputShape {
   /**
    * Whether the input is meant to be held until a steady rate is reached; a doublet is not.
    *
-   * @return true for a step and a hold
+   * @return true for a step, a ramp and a hold
    */
   boolean isHeld();
 

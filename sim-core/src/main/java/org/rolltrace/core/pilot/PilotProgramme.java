@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.DoubleStream;
+import java.util.stream.Stream;
 
 /** All inputs of a scenario. Inputs on the same control add up. */
 public final class PilotProgramme {
@@ -14,9 +15,11 @@ public final class PilotProgramme {
   private final List<PilotInput> inputs;
   private final Movement stick;
   private final Movement pedal;
+  private final HeldSideslip heldSideslip;
 
-  private PilotProgramme(List<PilotInput> inputs) {
+  private PilotProgramme(List<PilotInput> inputs, HeldSideslip heldSideslip) {
     this.inputs = List.copyOf(inputs);
+    this.heldSideslip = heldSideslip;
     this.stick = movementOf(Control.STICK);
     this.pedal = movementOf(Control.PEDAL);
   }
@@ -28,7 +31,17 @@ public final class PilotProgramme {
    * @return the programme
    */
   public static PilotProgramme of(List<PilotInput> inputs) {
-    return new PilotProgramme(inputs);
+    return new PilotProgramme(inputs, HeldSideslip.NONE);
+  }
+
+  /**
+   * The same with a sideslip that the pilot holds.
+   *
+   * @param sideslip against time
+   * @return the programme
+   */
+  public PilotProgramme holding(HeldSideslip sideslip) {
+    return new PilotProgramme(inputs, sideslip);
   }
 
   private Movement movementOf(Control control) {
@@ -72,13 +85,22 @@ public final class PilotProgramme {
   }
 
   /**
+   * The sideslip that the pilot holds, however the pedals have to be moved for it.
+   *
+   * @return against time; none unless one was given
+   */
+  public HeldSideslip heldSideslip() {
+    return heldSideslip;
+  }
+
+  /**
    * The instants at which the integration has to start anew.
    *
-   * @return breakpoints of stick and pedals, s, increasing
+   * @return breakpoints of stick, pedals and held sideslip, s, increasing
    */
   public double[] breakpoints() {
-    return DoubleStream.concat(
-            DoubleStream.of(stick.breakpoints()), DoubleStream.of(pedal.breakpoints()))
+    return Stream.of(stick.breakpoints(), pedal.breakpoints(), heldSideslip.breakpoints())
+        .flatMapToDouble(DoubleStream::of)
         .sorted()
         .distinct()
         .toArray();
@@ -174,7 +196,9 @@ public final class PilotProgramme {
       boolean away = Math.abs(before) >= CENTRED;
       boolean centredAtOnce = Math.abs(stick.positionAt(breaks[i])) < CENTRED;
       boolean centredByNext =
-          i + 1 < breaks.length && Math.abs(stick.positionAt(breaks[i + 1])) < CENTRED;
+          i + 1 < breaks.length
+              && Math.abs(stick.positionAt(breaks[i + 1])) < CENTRED
+              && isRest(breaks[i + 1]);
       if (away && (centredAtOnce || (centredByNext && !isRest(breaks[i])))) {
         return OptionalDouble.of(breaks[i]);
       }

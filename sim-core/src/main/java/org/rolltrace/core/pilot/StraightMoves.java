@@ -61,16 +61,51 @@ final class StraightMoves implements Movement {
         largest);
   }
 
+  /**
+   * Straight from point to point; 0 before the first, the last position from the last on.
+   *
+   * @param times s, increasing; closer than a nanosecond they make a jump
+   * @param positions fraction of travel
+   * @return the movement
+   */
+  static StraightMoves through(double[] times, double[] positions) {
+    double[] starts = new double[times.length];
+    double[] from = new double[times.length];
+    double[] rate = new double[times.length];
+    int piece = 0;
+    double largest = 0;
+    for (int i = 0; i < times.length; i++) {
+      largest = Math.max(largest, Math.abs(positions[i]));
+      double begin = toNanosecond(times[i]);
+      double end = i + 1 < times.length ? toNanosecond(times[i + 1]) : Double.POSITIVE_INFINITY;
+      double slope = i + 1 < times.length ? (positions[i + 1] - positions[i]) / (end - begin) : 0;
+      boolean goesOn = slope == 0 && (piece > 0 ? rests(piece - 1, from, rate) : 0) == positions[i];
+      if (end > begin && !goesOn) {
+        starts[piece] = begin;
+        from[piece] = positions[i];
+        rate[piece] = slope;
+        piece++;
+      }
+    }
+    return new StraightMoves(
+        Arrays.copyOf(starts, piece),
+        Arrays.copyOf(from, piece),
+        Arrays.copyOf(rate, piece),
+        largest);
+  }
+
+  /** Where a piece rests; NaN where it moves. */
+  private static double rests(int piece, double[] from, double[] rate) {
+    return rate[piece] == 0 ? from[piece] : Double.NaN;
+  }
+
   private static double toNanosecond(double time) {
     return Math.rint(time * TICKS_PER_SECOND) / TICKS_PER_SECOND;
   }
 
   private int pieceAt(double time) {
-    int piece = starts.length - 1;
-    while (piece >= 0 && starts[piece] > time) {
-      piece--;
-    }
-    return piece;
+    int found = Arrays.binarySearch(starts, time);
+    return found >= 0 ? found : -found - 2;
   }
 
   @Override

@@ -7,6 +7,13 @@
  * holds already. Times are kept to the nanosecond, so that instants which are the same on paper are
  * the same here.
  *
+ * <p>The shapes: {@link org.rolltrace.core.pilot.StepInput step}, {@link
+ * org.rolltrace.core.pilot.HoldInput hold}, {@link org.rolltrace.core.pilot.DoubletInput doublet},
+ * {@link org.rolltrace.core.pilot.MultistepInput multistep} (3-2-1-1 and its like), {@link
+ * org.rolltrace.core.pilot.RampInput ramp}, {@link org.rolltrace.core.pilot.SweepInput sweep} (of
+ * frequency), {@link org.rolltrace.core.pilot.TraceInput trace} (as recorded). Beside them the
+ * pilot may hold a {@linkplain org.rolltrace.core.pilot.HeldSideslip sideslip against time}.
+ *
  * <p>A further shape is one class: it implements {@code InputShape} and draws its movement, smooth
  * between its breakpoints, as a {@link org.rolltrace.core.pilot.Movement}.
  */

@@ -56,6 +56,30 @@ public final class Quantity {
   }
 
   /**
+   * Reads a frequency, given as cycles per time ({@code 0.2 Hz}) or as an angular rate ({@code 1.5
+   * rad/s}).
+   *
+   * @param text a number and a unit
+   * @return rad/s
+   * @throws QuantityException if the text is neither
+   */
+  public static double parseFrequency(String text) {
+    QuantityException asCycles;
+    try {
+      double si = 2 * Math.PI * parse(text, Dimension.FREQUENCY);
+      return inRange(text, text, si, Dimension.FREQUENCY);
+    } catch (QuantityException e) {
+      asCycles = e;
+    }
+    try {
+      return parse(text, Dimension.ANGULAR_RATE);
+    } catch (QuantityException neither) {
+      throw new QuantityException(
+          asCycles.getMessage() + " or " + DimensionNames.of(Dimension.ANGULAR_RATE).withUnits());
+    }
+  }
+
+  /**
    * Converts a value for output.
    *
    * @param si the value in SI units and radians

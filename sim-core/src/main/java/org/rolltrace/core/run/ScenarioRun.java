@@ -51,7 +51,7 @@ public final class ScenarioRun {
    */
   public static RunResult execute(Scenario scenario, FlightSettings settings) {
     LateralModel model = model(scenario, scenario.propeller());
-    LateralMotion motion = motion(scenario.slip(), model);
+    LateralMotion motion = motion(scenario, model);
     FreeModes free = FreeModes.of(model, scenario.data().derivatives());
     Trim trim = trim(scenario, scenario.slip());
     Flown flown = Flight.fly(plan(scenario, motion, trim), settings);
@@ -88,9 +88,11 @@ public final class ScenarioRun {
         propeller);
   }
 
-  private static LateralMotion motion(SlipTreatment slip, LateralModel model) {
+  private static LateralMotion motion(Scenario scenario, LateralModel model) {
     try {
-      return LateralMotion.of(slip, model);
+      return scenario.slip() == SlipTreatment.HELD
+          ? LateralMotion.holding(model, scenario.programme().heldSideslip())
+          : LateralMotion.of(scenario.slip(), model);
     } catch (IllegalArgumentException undetermined) {
       throw new CalculationException(undetermined.getMessage(), undetermined);
     }

@@ -52,7 +52,10 @@ final class SlipAssumption {
       state[LateralMotion.ROLL_RATE] = history.value(Channel.ROLL_RATE, i);
       double rudder =
           held.rudderToHold(
-              state, history.value(Channel.AILERON, i), history.value(Channel.RUDDER, i));
+              history.time(i),
+              state,
+              history.value(Channel.AILERON, i),
+              history.value(Channel.RUDDER, i));
       if (Double.isNaN(rudder)) {
         return Measure.missing(
             PEDAL_TO_HOLD_SLIP, "the aeroplane gives no yaw inertia or no Cn_dr");
@@ -74,6 +77,9 @@ final class SlipAssumption {
       FlightSettings settings) {
     if (free.modes().isEmpty()) {
       return unknown(free.remark());
+    }
+    if (!scenario.programme().heldSideslip().isNone()) {
+      return unknown("a slip held against time has no counterpart in free slip");
     }
     TimeHistory other;
     try {

@@ -97,6 +97,22 @@ public record Scenario(
               "a sideslip at the start needs free slip, where it is a state of its own; the slip is "
                   + slip.word()));
     }
+    if (!programme.heldSideslip().isNone()) {
+      if (slip != SlipTreatment.HELD) {
+        faults.add(
+            new ScenarioFault(
+                "$.heldSlip",
+                "a sideslip is held against time, but the slip is "
+                    + slip.word()
+                    + "; choose held slip, or take heldSlip out"));
+      } else if (aeroplane.mass().isEmpty()) {
+        faults.add(
+            new ScenarioFault(
+                "$.heldSlip",
+                "a sideslip held against time needs mass, which the aeroplane does not give; give"
+                    + " it, or take heldSlip out"));
+      }
+    }
     for (int i = 0; i < programme.inputs().size(); i++) {
       PilotInput input = programme.inputs().get(i);
       boolean stick = input.control() == Control.STICK;

@@ -76,7 +76,7 @@ public class RollEntryBenchmark {
 
   private void prepareLinearStep() {
     double[] rates = new double[4];
-    motion.rates(new double[4], 1, 0, rates);
+    motion.rates(0, new double[4], 1, 0, rates);
     SimpleMatrix augmented = new SimpleMatrix(5, 5);
     double[][] a = motion.linearised();
     for (int i = 0; i < 4; i++) {
@@ -124,13 +124,13 @@ public class RollEntryBenchmark {
     for (int n = 0; n < SAMPLES; n++) {
       System.arraycopy(x, 0, history, 4 * n, 4);
       double t = n * h;
-      motion.rates(x, aileron(t), 0, k[0]);
+      motion.rates(t, x, aileron(t), 0, k[0]);
       advance(x, k[0], 0.5 * h, y);
-      motion.rates(y, aileron(t + 0.5 * h), 0, k[1]);
+      motion.rates(t + 0.5 * h, y, aileron(t + 0.5 * h), 0, k[1]);
       advance(x, k[1], 0.5 * h, y);
-      motion.rates(y, aileron(t + 0.5 * h), 0, k[2]);
+      motion.rates(t + 0.5 * h, y, aileron(t + 0.5 * h), 0, k[2]);
       advance(x, k[2], h, y);
-      motion.rates(y, aileron(t + h), 0, k[3]);
+      motion.rates(t + h, y, aileron(t + h), 0, k[3]);
       for (int i = 0; i < 4; i++) {
         x[i] += h / 6 * (k[0][i] + 2 * k[1][i] + 2 * k[2][i] + k[3][i]);
       }

@@ -19,6 +19,8 @@ final class Samples {
   static final String AEROPLANE = resource("aeroplanes/some-aeroplane.json");
   static final String AEROPLANE_WITH_EVERY_KEY = resource("aeroplanes/every-key.json");
 
+  static final String TRACE = resource("traces/hand.csv");
+
   private Samples() {}
 
   private static String resource(String name) {
@@ -45,8 +47,9 @@ final class Samples {
     }
   }
 
-  /** Writes a scenario beside the aeroplane that it may name. */
+  /** Writes a scenario beside the aeroplane and the trace that it may name. */
   static Path writeScenario(Path directory, String text) {
+    write(directory, "traces/hand.csv", TRACE);
     write(directory, "aeroplanes/some-aeroplane.json", AEROPLANE);
     return write(directory, "scenario.json", text);
   }

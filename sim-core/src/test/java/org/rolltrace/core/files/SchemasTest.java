@@ -47,6 +47,7 @@ class SchemasTest {
   private static Map<String, Keys> scenarioObjects() {
     Map<String, Keys> objects = new LinkedHashMap<>();
     objects.put("", ScenarioFormat.SCENARIO);
+    objects.put("/properties/heldSlip/items", ScenarioFormat.HELD_SLIP_POINT);
     objects.put("/properties/start", ScenarioFormat.START);
     objects.put("/properties/start/properties/trim", ScenarioFormat.TRIM);
     objects.put("/properties/measures", ScenarioFormat.MEASURES);
@@ -242,6 +243,25 @@ class SchemasTest {
         Arguments.of("\"wings-level\"", "\"steady-turn\""),
         Arguments.of("\"stick\", \"shape\": \"step\"", "\"yoke\", \"shape\": \"step\""),
         Arguments.of("\"shape\": \"step\"", "\"shape\": \"ramp\""),
+        Arguments.of("\"shape\": \"step\"", "\"shape\": \"slope\""),
+        Arguments.of("[2, 1, 1]", "[2, 1.5, 1]"),
+        Arguments.of("[2, 1, 1]", "[2, 0]"),
+        Arguments.of("[2, 1, 1]", "[1001]"),
+        Arguments.of("[2, 1, 1]", "[]"),
+        Arguments.of("[2, 1, 1]", "\"2-1-1\""),
+        Arguments.of("\"unit\": \"0.4 s\", ", ""),
+        Arguments.of("\"size\": 0.3, ", "\"size\": 0.3, \"movement\": \"0.1 s\", "),
+        Arguments.of(", \"duration\": \"3 s\"", ""),
+        Arguments.of("\"0.5 Hz\"", "0.5"),
+        Arguments.of("\"from\": \"0.5 Hz\", ", ""),
+        Arguments.of("\"to\": \"6 rad/s\", ", ""),
+        Arguments.of("\"logarithmic\"", "\"log\""),
+        Arguments.of("\"file\": \"traces/hand.csv\", ", ""),
+        Arguments.of("\"traces/hand.csv\"", "\" \""),
+        Arguments.of(", \"column\": \"stick\"", ""),
+        Arguments.of("\"heldSlip\": []", "\"heldSlip\": {}"),
+        Arguments.of("\"heldSlip\": []", "\"heldSlip\": [{ \"time\": \"1 s\" }]"),
+        Arguments.of("\"heldSlip\": []", "\"heldSlip\": [{ \"sideslip\": \"1 deg\" }]"),
         Arguments.of("\"shape\": \"step\"", "\"shape\": \"step\", \"width\": \"1 s\""),
         Arguments.of("\"shape\": \"step\"", "\"shape\": \"step\", \"duration\": \"1 s\""),
         Arguments.of(", \"duration\": \"2 s\"", ""),
@@ -320,6 +340,18 @@ class SchemasTest {
           assertThat(definition.path("description").asText())
               .contains(String.join(", ", Unit.symbolsOf(dimension)));
         });
+  }
+
+  @Test
+  void examplesOfFrequenciesAreSomeAndTheirUnitsAreOffered() {
+    JsonNode definition = tree("scenario").at("/$defs/frequency");
+    assertThat(definition.path("examples")).hasSize(2);
+    definition
+        .path("examples")
+        .forEach(example -> assertThat(Quantity.parseFrequency(example.asText())).isPositive());
+    assertThat(definition.path("description").asText())
+        .contains(String.join(", ", Unit.symbolsOf(Dimension.FREQUENCY)))
+        .contains(String.join(", ", Unit.symbolsOf(Dimension.ANGULAR_RATE)));
   }
 
   @Test

@@ -74,10 +74,10 @@ class TrimValidationTest {
           state[LateralMotion.SIDESLIP] = trim.sideslip();
         }
         double[] rates = new double[state.length];
-        motion.rates(state, trim.aileron(), trim.rudder(), rates);
+        motion.rates(0, state, trim.aileron(), trim.rudder(), rates);
         // accelerations that would move a wing by a second of arc in an hour
         assertThat(rates).containsExactly(new double[state.length], within(1e-11));
-        assertThat(motion.sideslip(state, trim.aileron(), trim.rudder()))
+        assertThat(motion.sideslip(0, state, trim.aileron(), trim.rudder()))
             .isCloseTo(trim.sideslip(), within(1e-12));
         // a left-rolling torque is held with right aileron
         assertThat(trim.aileron()).isPositive();

@@ -172,7 +172,7 @@ class PublishedExamplesValidationTest {
     assertThat(a[YAW_RATE][ROLL_RATE]).isCloseTo(np, within(0.002));
     assertThat(a[YAW_RATE][YAW_RATE]).isCloseTo(nr, close);
     double[] rates = new double[4];
-    motion.rates(new double[4], 1, 0, rates);
+    motion.rates(0, new double[4], 1, 0, rates);
     assertThat(rates[ROLL_RATE]).isCloseTo(lAileron, close);
   }
 

@@ -10,6 +10,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.Collectors;
 import org.rolltrace.core.aeroplane.Aeroplane;
 import org.rolltrace.core.aeroplane.SurfaceDynamics;
 import org.rolltrace.core.atmosphere.FlightCondition;
@@ -22,9 +23,14 @@ import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.Mode;
 import org.rolltrace.core.motion.Trim;
 import org.rolltrace.core.pilot.DoubletInput;
+import org.rolltrace.core.pilot.HeldSideslip;
 import org.rolltrace.core.pilot.HoldInput;
 import org.rolltrace.core.pilot.InputShape;
+import org.rolltrace.core.pilot.MultistepInput;
 import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.pilot.RampInput;
+import org.rolltrace.core.pilot.SweepInput;
+import org.rolltrace.core.pilot.TraceInput;
 import org.rolltrace.core.quantity.Quantity;
 import org.rolltrace.core.run.RunResult;
 import org.rolltrace.core.run.Safety;
@@ -151,7 +157,7 @@ final class FlyReport {
   }
 
   private void addManoeuvre(Scenario scenario) {
-    row("  slip", scenario.slip().word());
+    row("  slip", scenario.slip().word() + held(scenario.programme().heldSideslip()));
     Disturbance disturbance = scenario.start().disturbance();
     if (!disturbance.isNone()) {
       row(
@@ -168,17 +174,51 @@ final class FlyReport {
     row("  duration", plain(scenario.duration()) + " s");
   }
 
+  /** A sideslip against time, by its first points. */
+  private static String held(HeldSideslip held) {
+    if (held.isNone()) {
+      return "";
+    }
+    int shown = 4;
+    List<HeldSideslip.Point> points = held.points();
+    return points.stream()
+        .limit(shown)
+        .map(
+            point ->
+                format(
+                    "%s deg at %s s", plain(Math.toDegrees(point.sideslip())), plain(point.time())))
+        .collect(Collectors.joining(", ", ": sideslip ", points.size() > shown ? ", and on" : ""));
+  }
+
   private static String describe(PilotInput input) {
     InputShape shape = input.shape();
     return format(
-        "%s %s, %s %% %s at %s s%s, hand takes %s s",
+        "%s %s, %s %% %s at %s s%s",
         input.control().word(),
         shape.name(),
         plain(100 * Math.abs(shape.size())),
         shape.size() < 0 ? "left" : "right",
         plain(shape.start()),
-        length(shape),
-        plain(shape.handTime()));
+        course(shape));
+  }
+
+  private static String course(InputShape shape) {
+    if (shape instanceof RampInput ramp) {
+      return ", reached in " + plain(ramp.duration()) + " s";
+    }
+    if (shape instanceof SweepInput sweep) {
+      return format(
+          ", %s from %s to %s Hz in %s s",
+          sweep.law().word(),
+          plain(sweep.from() / (2 * Math.PI)),
+          plain(sweep.to() / (2 * Math.PI)),
+          plain(sweep.duration()));
+    }
+    if (shape instanceof TraceInput trace) {
+      return format(
+          ", %s times %s, from %s s", trace.trace(), plain(trace.scale()), plain(trace.shift()));
+    }
+    return length(shape) + ", hand takes " + plain(shape.handTime()) + " s";
   }
 
   private static String length(InputShape shape) {
@@ -187,6 +227,13 @@ final class FlyReport {
     }
     if (shape instanceof DoubletInput doublet) {
       return ", width " + plain(doublet.width()) + " s";
+    }
+    if (shape instanceof MultistepInput multistep) {
+      return ", "
+          + multistep.pattern().stream().map(String::valueOf).collect(Collectors.joining("-"))
+          + " units of "
+          + plain(multistep.unit())
+          + " s";
     }
     return "";
   }

@@ -22,7 +22,9 @@ record FieldTarget(
     /** As a text: a quantity with its unit, or words. */
     TEXT,
     /** As a plain number. */
-    NUMBER
+    NUMBER,
+    /** As a list of plain numbers. */
+    NUMBERS
   }
 
   private static final String AEROPLANE = "$.aeroplane.";
@@ -37,6 +39,11 @@ record FieldTarget(
     return new FieldTarget(path, title, word, Kind.NUMBER, prompt, hint, columns);
   }
 
+  static FieldTarget numbers(
+      String path, String title, String word, String prompt, String hint, int columns) {
+    return new FieldTarget(path, title, word, Kind.NUMBERS, prompt, hint, columns);
+  }
+
   /** A name by which tests and style sheets find the field. */
   String id() {
     return path.substring(2).replace('.', '-').replace("[", "-").replace("]", "");
@@ -47,6 +54,9 @@ record FieldTarget(
   }
 
   Optional<String> textIn(ScenarioDocument document) {
+    if (kind == Kind.NUMBERS) {
+      return document.numbers(path);
+    }
     return ofAeroplane()
         ? document.aeroplaneText(path.substring(AEROPLANE.length()))
         : document.text(path);
@@ -59,6 +69,17 @@ record FieldTarget(
     if (text.isEmpty()) {
       return base.without(path);
     }
-    return kind == Kind.NUMBER ? base.withNumber(path, text) : base.with(path, text);
+    return switch (kind) {
+      case TEXT -> base.with(path, text);
+      case NUMBER -> base.withNumber(path, text);
+      case NUMBERS -> base.withNumbers(path, text);
+    };
+  }
+
+  /** Whether a text is what stands in the document, though it may be spaced in another way. */
+  boolean says(ScenarioDocument document, String text) {
+    return kind == Kind.NUMBERS
+        ? put(document, text).equals(document)
+        : text.equals(textIn(document).orElse(""));
   }
 }

@@ -1,5 +1,6 @@
 package org.rolltrace.ui.manoeuvre;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.function.UnaryOperator;
 import javafx.scene.Node;
@@ -17,7 +18,10 @@ import org.rolltrace.ui.session.DeskSession;
 
 /** The selected input as typed values, and the buttons that add and remove inputs. */
 final class InputEditor extends FlowPane {
-  private static final List<String> SHAPES = List.of("step", "hold", "doublet");
+  private static final List<String> SHAPES = ScenarioDocument.shapes();
+
+  /** The most fields that a shape has beside start and size. */
+  private static final int MOST_OWN = 3;
 
   private final DeskSession session;
   private final LanesPane lanes;
@@ -25,8 +29,9 @@ final class InputEditor extends FlowPane {
   private final ComboBox<String> shape = new ComboBox<>();
   private final PathField start;
   private final PathField size;
-  private final PathField length;
-  private final PathField hand;
+  private final List<PathField> own = new ArrayList<>();
+  private final ComboBox<String> law = new ComboBox<>();
+  private final Node labelledLaw;
   private final List<Node> ofInput;
   private boolean showing;
 
@@ -68,10 +73,18 @@ final class InputEditor extends FlowPane {
                     document.withInputShape(lanes.selectedProperty().get(), shape.getValue())));
     start = new PathField(session, startTarget());
     size = new PathField(session, sizeTarget());
-    length = new PathField(session, durationTarget());
-    hand = new PathField(session, handTarget());
-    ofInput =
-        List.of(labelled("Control", control), labelled("Shape", shape), start, size, length, hand);
+    for (int i = 0; i < MOST_OWN; i++) {
+      own.add(new PathField(session, durationTarget("")));
+    }
+    law.getItems().setAll("linear", "logarithmic");
+    law.setId("input-law");
+    law.setOnAction(
+        event -> choose("change law", document -> document.with(path("law"), law.getValue())));
+    labelledLaw = labelled("Law", law);
+    ofInput = new ArrayList<>();
+    ofInput.addAll(List.of(labelled("Control", control), labelled("Shape", shape), start, size));
+    ofInput.addAll(own);
+    ofInput.add(labelledLaw);
     getChildren().add(labelled("Inputs", new HBox(6, add, remove)));
     getChildren().addAll(ofInput);
     lanes.selectedProperty().addListener((property, before, now) -> show());
@@ -110,19 +123,96 @@ final class InputEditor extends FlowPane {
         5);
   }
 
-  private FieldTarget durationTarget() {
+  private FieldTarget shiftTarget() {
+    return FieldTarget.quantity(
+        path("start"), "Start", "start of the trace", "0 s", "What is added to its times", 6);
+  }
+
+  private FieldTarget scaleTarget() {
+    return FieldTarget.number(
+        path("size"),
+        "Times",
+        "size of the trace",
+        "1",
+        "What the recorded positions are multiplied by, \u22121 to 1",
+        5);
+  }
+
+  private FieldTarget durationTarget(String kind) {
     return FieldTarget.quantity(
         path("duration"),
-        "Held for",
-        "duration of the hold",
+        kind.equals("hold") ? "Held for" : "Lasts",
+        "duration of the " + kind,
         "2 s",
-        "From the start to the beginning of the return",
+        switch (kind) {
+          case "hold" -> "From the start to the beginning of the return";
+          case "ramp" -> "From the start until the size is reached, to stay";
+          default ->
+              "From the first frequency to the last; then on to the next passage through zero";
+        },
         6);
   }
 
   private FieldTarget widthTarget() {
     return FieldTarget.quantity(
         path("width"), "Width", "width of the doublet", "0.5 s", "From one move to the next", 6);
+  }
+
+  private FieldTarget unitTarget() {
+    return FieldTarget.quantity(
+        path("unit"), "Unit", "unit of the steps", "0.5 s", "How long one unit lasts", 6);
+  }
+
+  private FieldTarget patternTarget() {
+    return FieldTarget.numbers(
+        path("pattern"),
+        "Pattern",
+        "pattern of the steps",
+        "3, 2, 1, 1",
+        "How many units it stays at each side, by turns; whole numbers",
+        8);
+  }
+
+  private FieldTarget frequencyTarget(String key, String title, String prompt) {
+    return FieldTarget.quantity(
+        path(key), title, "frequency", prompt, "In Hz, or as an angle per time in rad/s", 6);
+  }
+
+  private FieldTarget fileTarget() {
+    return FieldTarget.quantity(
+        path("file"),
+        "File",
+        "file of the trace",
+        "traces/roll.csv",
+        "A CSV file, from the folder of the scenario",
+        14);
+  }
+
+  private FieldTarget columnTarget() {
+    return FieldTarget.quantity(
+        path("column"),
+        "Column",
+        "column of the trace",
+        "stick",
+        "Its name in the first line of the file, without the unit",
+        6);
+  }
+
+  /** The fields that only some shapes have, in their order. */
+  private List<FieldTarget> ownTargets(String kind) {
+    return switch (kind) {
+      case "hold" -> List.of(durationTarget(kind), handTarget());
+      case "doublet" -> List.of(widthTarget(), handTarget());
+      case "multistep" -> List.of(unitTarget(), patternTarget(), handTarget());
+      case "ramp" -> List.of(durationTarget(kind));
+      case "sweep" ->
+          List.of(
+              frequencyTarget("from", "From", "0.2 Hz"),
+              frequencyTarget("to", "To", "2 Hz"),
+              durationTarget(kind));
+      case "trace" -> List.of(fileTarget(), columnTarget());
+      default -> List.of(handTarget());
+    };
   }
 
   private FieldTarget handTarget() {
@@ -151,11 +241,19 @@ final class InputEditor extends FlowPane {
     control.setValue(document.text(path("control")).orElse(""));
     String kind = document.text(path("shape")).orElse("");
     shape.setValue(kind);
+    law.setValue(document.text(path("law")).orElse("linear"));
     showing = false;
-    start.retarget(startTarget());
-    size.retarget(sizeTarget());
-    length.retarget(kind.equals("doublet") ? widthTarget() : durationTarget());
-    length.setShown(!kind.equals("step"));
-    hand.retarget(handTarget());
+    boolean isTrace = kind.equals("trace");
+    start.retarget(isTrace ? shiftTarget() : startTarget());
+    size.retarget(isTrace ? scaleTarget() : sizeTarget());
+    List<FieldTarget> targets = ownTargets(kind);
+    for (int i = 0; i < own.size(); i++) {
+      own.get(i).setShown(i < targets.size());
+      if (i < targets.size()) {
+        own.get(i).retarget(targets.get(i));
+      }
+    }
+    labelledLaw.setVisible(kind.equals("sweep"));
+    labelledLaw.setManaged(kind.equals("sweep"));
   }
 }

@@ -2,12 +2,19 @@ package org.rolltrace.ui.manoeuvre;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.DoubleStream;
 import org.rolltrace.core.files.ScenarioDocument;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.DoubletInput;
 import org.rolltrace.core.pilot.HoldInput;
 import org.rolltrace.core.pilot.InputShape;
+import org.rolltrace.core.pilot.Movement;
+import org.rolltrace.core.pilot.MultistepInput;
 import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.pilot.RampInput;
+import org.rolltrace.core.pilot.SweepInput;
+import org.rolltrace.core.pilot.TraceInput;
+import org.rolltrace.ui.chart.TimeWindow;
 
 /**
  * An input as a block on its lane, and what dragging does to it. Times are kept to a hundredth of a
@@ -21,6 +28,9 @@ record LaneBlock(int index, PilotInput input) {
 
   /** What dividing a whole number of ticks by the tick may be off by. */
   private static final double ROUNDING = 1e-9;
+
+  /** With more corners than this in view a movement is drawn by points instead. */
+  private static final int MOST_CORNERS = 2000;
 
   /** The part of a block that is dragged. */
   enum Part {
@@ -69,16 +79,22 @@ record LaneBlock(int index, PilotInput input) {
 
   /** The document after the block has been dragged by some time. */
   ScenarioDocument moved(ScenarioDocument document, double byTime) {
-    return document.with(path("start"), seconds(Math.max(0, shape().start() + byTime)));
+    double from = shape() instanceof TraceInput trace ? trace.shift() : shape().start();
+    return document.with(path("start"), seconds(Math.max(0, from + byTime)));
   }
 
   /** The document with another size, fraction of travel. */
   ScenarioDocument resized(ScenarioDocument document, double size) {
-    double kept = Math.max(-1, Math.min(1, Math.rint(size / TICK) * TICK));
+    // The size of a trace in the file is a factor to what was recorded.
+    double written =
+        shape() instanceof TraceInput trace && trace.size() != 0
+            ? size / trace.size() * trace.scale()
+            : size;
+    double kept = Math.max(-1, Math.min(1, Math.rint(written / TICK) * TICK));
     return document.withNumber(path("size"), Written.plain(kept, 2));
   }
 
-  /** The document with the block's right edge at a time; a step has no right edge to drag. */
+  /** The document with the block's right edge at a time; what stays has no right edge to drag. */
   ScenarioDocument stretched(ScenarioDocument document, double toTime) {
     double least = Math.max(TICK, ticks(Math.ceil(shape().handTime() / TICK - ROUNDING)));
     if (shape() instanceof HoldInput) {
@@ -89,21 +105,74 @@ record LaneBlock(int index, PilotInput input) {
       double width = 0.5 * (toTime - shape().start() - shape().handTime());
       return document.with(path("width"), seconds(Math.max(least, width)));
     }
+    if (shape() instanceof MultistepInput multistep) {
+      double unit = (toTime - shape().start() - shape().handTime()) / multistep.units();
+      return document.with(path("unit"), seconds(Math.max(least, unit)));
+    }
+    if (shape() instanceof SweepInput) {
+      double duration = toTime - shape().start();
+      return document.with(path("duration"), seconds(Math.max(least, duration)));
+    }
     return document;
   }
 
   boolean canStretch() {
-    return shape().end() < Double.POSITIVE_INFINITY;
+    return shape().end() < Double.POSITIVE_INFINITY && !(shape() instanceof TraceInput);
+  }
+
+  /** Whether there is a first movement of the hand to be drawn out. */
+  boolean hasHand() {
+    return !(shape() instanceof TraceInput || shape() instanceof SweepInput);
   }
 
   /** The document with the first movement of the hand ending at a time. */
   ScenarioDocument handUntil(ScenarioDocument document, double toTime) {
-    double longest =
-        shape() instanceof HoldInput hold
-            ? hold.duration()
-            : shape() instanceof DoubletInput doublet ? doublet.width() : Double.MAX_VALUE;
+    if (shape() instanceof RampInput) {
+      double duration = Math.max(TICK, toTime - shape().start());
+      return document.with(path("duration"), seconds(duration));
+    }
+    double longest = Double.MAX_VALUE;
+    if (shape() instanceof HoldInput hold) {
+      longest = hold.duration();
+    } else if (shape() instanceof DoubletInput doublet) {
+      longest = doublet.width();
+    } else if (shape() instanceof MultistepInput multistep) {
+      longest = multistep.unit();
+    }
     double hand = Math.max(0, toTime - shape().start());
     double most = ticks(Math.floor(longest / TICK + ROUNDING));
     return document.with(path("movement"), seconds(Math.min(most, hand)));
+  }
+
+  /**
+   * The outline of the block from its start to its end, jumps as two corners, a smooth movement by
+   * points that lie {@code step} apart.
+   *
+   * @param window what is looked at, s; what lies outside is left out
+   * @param step s
+   * @return time, s, and position of each corner
+   */
+  List<double[]> outline(TimeWindow window, double step) {
+    Movement movement = shape().movement();
+    double from = Math.max(shape().start(), window.from());
+    double end = Math.max(from, shownEnd(Math.max(window.to(), shape().start())));
+    List<double[]> corners = new ArrayList<>();
+    corners.add(new double[] {from, 0});
+    corners.add(new double[] {from, movement.positionAt(from)});
+    double[] breaks =
+        DoubleStream.of(movement.breakpoints()).filter(at -> at > from && at <= end).toArray();
+    if (shape() instanceof SweepInput || breaks.length > MOST_CORNERS) {
+      for (int i = 1; from + i * step < end; i++) {
+        corners.add(new double[] {from + i * step, movement.positionAt(from + i * step)});
+      }
+    } else {
+      for (double at : breaks) {
+        corners.add(new double[] {at, movement.positionAt(Math.nextDown(at))});
+        corners.add(new double[] {at, movement.positionAt(at)});
+      }
+    }
+    corners.add(new double[] {end, movement.positionAt(end)});
+    corners.add(new double[] {end, 0});
+    return corners;
   }
 }

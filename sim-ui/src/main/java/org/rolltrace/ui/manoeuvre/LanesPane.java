@@ -16,7 +16,6 @@ import javafx.scene.input.MouseEvent;
 import javafx.scene.layout.Region;
 import org.rolltrace.core.files.ScenarioDocument;
 import org.rolltrace.core.pilot.Control;
-import org.rolltrace.core.pilot.Movement;
 import org.rolltrace.core.run.RunResult;
 import org.rolltrace.ui.chart.Anchor;
 import org.rolltrace.ui.chart.Dash;
@@ -35,6 +34,9 @@ final class LanesPane extends Region {
   private static final double LANE = 40;
   private static final double GAP = 6;
   private static final double REACH = 6;
+
+  /** How far apart the points of a smooth movement lie, px. */
+  private static final double STEP = 0.5;
 
   /** Half the height of full travel. */
   private static final double FULL = 0.5 * LANE - 3;
@@ -86,12 +88,6 @@ final class LanesPane extends Region {
     draw();
   }
 
-  /** The inputs of the document, which the blocks follow as soon as it has been flown. */
-  private int inputCount() {
-    ScenarioDocument document = model.session().documentProperty().get();
-    return document == null ? 0 : document.inputCount();
-  }
-
   private void keepSelection() {
     int count = inputCount();
     if (selected.get() >= count) {
@@ -99,6 +95,12 @@ final class LanesPane extends Region {
     } else if (selected.get() < 0 && count > 0) {
       selected.set(0);
     }
+  }
+
+  /** How many inputs there are, also of those that cannot be flown and so have no block. */
+  private int inputCount() {
+    ScenarioDocument document = model.session().documentProperty().get();
+    return document == null ? 0 : document.inputCount();
   }
 
   @Override
@@ -179,19 +181,9 @@ final class LanesPane extends Region {
   }
 
   private void addBlock(List<Mark> marks, LaneBlock block) {
-    Movement movement = block.shape().movement();
-    double last = Math.max(model.windowProperty().get().to(), block.shape().start());
-    List<double[]> corners = new ArrayList<>();
-    corners.add(new double[] {block.shape().start(), 0});
-    for (double at : movement.breakpoints()) {
-      if (at <= last) {
-        corners.add(new double[] {at, movement.positionAt(Math.nextDown(at))});
-        corners.add(new double[] {at, movement.positionAt(at)});
-      }
-    }
-    double end = block.shownEnd(last);
-    corners.add(new double[] {end, movement.positionAt(end)});
-    corners.add(new double[] {end, 0});
+    TimeWindow window = model.windowProperty().get();
+    List<double[]> corners = block.outline(window, STEP * window.length() / plotWidth());
+    double end = block.shownEnd(Math.max(window.to(), block.shape().start()));
     double[] x = corners.stream().mapToDouble(corner -> xOf(corner[0])).toArray();
     double[] y = corners.stream().mapToDouble(corner -> yOf(block.control(), corner[1])).toArray();
     Ink ink = block.shape().size() < 0 ? Ink.LEFT : Ink.RIGHT;
@@ -205,8 +197,10 @@ final class LanesPane extends Region {
                 ink, chosen ? 2 : 1.2, block.shape().size() < 0 ? Dash.DASHED : Dash.SOLID, 1)));
     if (chosen) {
       double top = yOf(block.control(), block.shape().size());
-      double hand = xOf(block.shape().start() + block.shape().handTime());
-      marks.add(new Mark.Dot(hand, top, 3.5, ink, true));
+      if (block.hasHand()) {
+        double hand = xOf(block.shape().start() + block.shape().handTime());
+        marks.add(new Mark.Dot(hand, top, 3.5, ink, true));
+      }
       if (block.canStretch()) {
         marks.add(new Mark.Dot(xOf(end), middle(block.control()), 3.5, ink, true));
       }
@@ -233,7 +227,7 @@ final class LanesPane extends Region {
       double top = yOf(block.control(), block.shape().size());
       double hand = xOf(block.shape().start() + block.shape().handTime());
       boolean chosen = block.index() == selected.get();
-      if (chosen && Math.abs(x - hand) <= REACH && Math.abs(y - top) <= REACH) {
+      if (chosen && block.hasHand() && Math.abs(x - hand) <= REACH && Math.abs(y - top) <= REACH) {
         return Optional.of(new Hit(block, LaneBlock.Part.HAND));
       }
       if (block.canStretch() && Math.abs(x - right) <= REACH) {

@@ -90,7 +90,7 @@ final class PathField extends VBox {
 
   private void typed(String text) {
     ScenarioDocument document = session.documentProperty().get();
-    if (showing || document == null || text.equals(target.textIn(document).orElse(""))) {
+    if (showing || document == null || target.says(document, text)) {
       return;
     }
     session.edit("change " + target.word(), target.id(), edited -> target.put(edited, text));
@@ -100,7 +100,9 @@ final class PathField extends VBox {
   private void show() {
     ScenarioDocument document = session.documentProperty().get();
     String text = document == null ? "" : target.textIn(document).orElse("");
-    if (!field.getText().equals(text)) {
+    boolean shown =
+        document == null ? field.getText().isEmpty() : target.says(document, field.getText());
+    if (!shown) {
       showing = true;
       field.setText(text);
       showing = false;
