@@ -63,28 +63,39 @@ class MutatedFilesTest {
       Samples.SCENARIO,
       Samples.SCENARIO_WITH_EVERY_KEY,
       Samples.AEROPLANE,
-      Samples.AEROPLANE_WITH_EVERY_KEY
+      Samples.AEROPLANE_WITH_EVERY_KEY,
+      Samples.TRACE
     };
+    Path traced = Samples.writeScenario(directory, Samples.SCENARIO_WITH_EVERY_KEY);
     Samples.write(directory, "aeroplanes/some-aeroplane.json", Samples.AEROPLANE);
     int accepted = 0;
     for (int i = 0; i < FILES; i++) {
       int sample = i % samples.length;
       byte[] mutated = mutated(samples[sample], random);
       String text = new String(mutated, StandardCharsets.ISO_8859_1);
+      boolean isTrace = sample == samples.length - 1;
       boolean isScenario = sample < 2;
       // A file of this size takes about a millisecond; a second is far beyond a slow machine.
       accepted +=
           assertTimeoutPreemptively(
-              Duration.ofSeconds(1), () -> isAccepted(mutated, isScenario) ? 1 : 0, text);
+              Duration.ofSeconds(1),
+              () -> isAccepted(mutated, isScenario, isTrace, traced) ? 1 : 0,
+              text);
+      if (isTrace) {
+        Samples.write(directory, "traces/hand.csv", Samples.TRACE);
+      }
     }
     // Some changes hit blanks, titles and digits; most do harm.
     assertThat(accepted).isBetween(FILES / 50, FILES / 2);
   }
 
-  private boolean isAccepted(byte[] bytes, boolean isScenario) throws IOException {
-    Path file = Files.write(directory.resolve("mutated.json"), bytes);
+  private boolean isAccepted(byte[] bytes, boolean isScenario, boolean isTrace, Path traced)
+      throws IOException {
+    Path file = Files.write(directory.resolve(isTrace ? "traces/hand.csv" : "mutated.json"), bytes);
     try {
-      if (isScenario) {
+      if (isTrace) {
+        assertThat(ScenarioFile.read(traced)).isNotNull();
+      } else if (isScenario) {
         assertThat(ScenarioFile.read(file)).isNotNull();
       } else {
         assertThat(AeroplaneFile.read(file)).isNotNull();
@@ -151,7 +162,8 @@ class MutatedFilesTest {
       if (sample.charAt(i) == '"') {
         end = sample.indexOf('"', i + 1) + 1;
       } else if (Character.isLetterOrDigit(sample.charAt(i))) {
-        while (Character.isLetterOrDigit(sample.charAt(end)) || sample.charAt(end) == '.') {
+        while (end < sample.length()
+            && (Character.isLetterOrDigit(sample.charAt(end)) || sample.charAt(end) == '.')) {
           end++;
         }
       }

@@ -204,7 +204,13 @@ class ScenarioDocumentTest {
   }
 
   @ParameterizedTest
-  @CsvSource({"step,hold,duration", "step,doublet,width", "hold,doublet,width"})
+  @CsvSource({
+    "step,hold,duration",
+    "step,doublet,width",
+    "hold,doublet,width",
+    "step,multistep,unit",
+    "hold,multistep,unit"
+  })
   void shapesChangeBothWays(String one, String other, String keyOfOther) {
     ScenarioDocument document =
         document(Samples.SCENARIO).withInputAdded("stick", one, 2).with("$.inputs[1].note", "?");
@@ -380,8 +386,66 @@ class ScenarioDocumentTest {
     assertThat(ScenarioFile.read(file).title()).isEqualTo("Another");
     try (Stream<Path> left = Files.list(directory)) {
       assertThat(left.map(path -> path.getFileName().toString()))
-          .containsExactlyInAnyOrder("aeroplanes", "folder", "scenario.json");
+          .containsExactlyInAnyOrder("aeroplanes", "folder", "scenario.json", "traces");
     }
+  }
+
+  @ParameterizedTest
+  @CsvSource({
+    "step,ramp,duration",
+    "doublet,sweep,from",
+    "multistep,sweep,to",
+    "sweep,ramp,duration"
+  })
+  void aShapeWithoutAHandLeavesOutItsMovement(String one, String other, String keyOfOther) {
+    ScenarioDocument changed =
+        document(Samples.SCENARIO).withInputAdded("stick", one, 2).withInputShape(1, other);
+    assertThat(changed.text("$.inputs[1]." + keyOfOther)).isPresent();
+    assertThat(changed.text("$.inputs[1].movement")).isEmpty();
+    assertThat(paths(changed)).isEmpty();
+    assertThat(paths(changed.withInputShape(1, one))).isEmpty();
+  }
+
+  @Test
+  void aTraceWantsItsFileAndIsThenComplete() {
+    ScenarioDocument document = document(Samples.SCENARIO).withInputAdded("pedal", "trace", 0.5);
+    assertThat(document.text("$.inputs[1].size")).contains("1");
+    assertThat(paths(document)).containsExactly("$.inputs[1].file");
+    ScenarioDocument named = document.with("$.inputs[1].file", "traces/hand.csv");
+    assertThat(paths(named)).isEmpty();
+    // Start and size may be absent in a trace, and must be there in a step.
+    ScenarioDocument step =
+        named.without("$.inputs[1].start").without("$.inputs[1].size").withInputShape(1, "step");
+    assertThat(paths(step)).isEmpty();
+    assertThat(step.text("$.inputs[1].file")).isEmpty();
+  }
+
+  @Test
+  void theWayToATraceIsThatFromTheNewPlace() {
+    ScenarioDocument document = document(Samples.SCENARIO_WITH_EVERY_KEY);
+    ScenarioDocument moved = document.at(directory.resolve("sub/copy.json"));
+    assertThat(moved.text("$.inputs[6].file")).contains("../traces/hand.csv");
+    assertThat(document.at(directory.resolve("other.json")).text("$.inputs[6].file"))
+        .contains("traces/hand.csv");
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"3-2-1-1", "3, 2,1 1", " 3 2 1 1 "})
+  void patternsAreWrittenAsPeopleDo(String pattern) {
+    ScenarioDocument edited =
+        document(Samples.SCENARIO_WITH_EVERY_KEY).withNumbers("$.inputs[3].pattern", pattern);
+    assertThat(edited.numbers("$.inputs[3].pattern")).contains("3, 2, 1, 1");
+    assertThat(edited.json()).contains("\"pattern\": [3, 2, 1, 1]");
+    assertThat(paths(edited)).isEmpty();
+    assertThat(edited.numbers("$.inputs[3].unit")).isEmpty();
+  }
+
+  @Test
+  void whatIsNoNumberInAPatternIsAFault() {
+    ScenarioDocument edited =
+        document(Samples.SCENARIO_WITH_EVERY_KEY).withNumbers("$.inputs[3].pattern", "3-x");
+    assertThat(edited.numbers("$.inputs[3].pattern")).contains("3, x");
+    assertThat(paths(edited)).containsExactly("$.inputs[3].pattern[1]");
   }
 
   /** Quick enough to be done while somebody types. */

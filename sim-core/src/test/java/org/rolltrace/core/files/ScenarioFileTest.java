@@ -17,9 +17,15 @@ import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.DoubletInput;
+import org.rolltrace.core.pilot.HeldSideslip;
 import org.rolltrace.core.pilot.HoldInput;
+import org.rolltrace.core.pilot.MultistepInput;
 import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.pilot.RampInput;
 import org.rolltrace.core.pilot.StepInput;
+import org.rolltrace.core.pilot.SweepInput;
+import org.rolltrace.core.pilot.Trace;
+import org.rolltrace.core.pilot.TraceInput;
 import org.rolltrace.core.propeller.PropellerMoments;
 import org.rolltrace.core.scenario.Scenario;
 import org.rolltrace.core.scenario.Start;
@@ -70,7 +76,22 @@ class ScenarioFileTest {
         .containsExactly(
             new PilotInput(Control.STICK, new StepInput(0, -1, 0.1)),
             new PilotInput(Control.STICK, new HoldInput(1, 0.5, 2, 0)),
-            new PilotInput(Control.PEDAL, new DoubletInput(4, -0.25, 0.5, 0.2)));
+            new PilotInput(Control.PEDAL, new DoubletInput(4, -0.25, 0.5, 0.2)),
+            new PilotInput(Control.STICK, new MultistepInput(7, 0.1, 0.4, List.of(2, 1, 1), 0.1)),
+            new PilotInput(Control.STICK, new RampInput(9, 0.3, 3)),
+            new PilotInput(
+                Control.STICK, new SweepInput(12, 0.2, Math.PI, 6, 6, SweepInput.Law.LOGARITHMIC)),
+            new PilotInput(
+                Control.STICK,
+                new TraceInput(
+                    20,
+                    -0.5,
+                    Trace.of(
+                        "traces/hand.csv",
+                        "stick",
+                        new double[] {0, 0.5, 1, 1.5},
+                        new double[] {0, 0.25, 1, 0}))));
+    assertThat(scenario.programme().heldSideslip()).isSameAs(HeldSideslip.NONE);
     assertThat(scenario.duration()).isEqualTo(30);
     assertThat(scenario.measures().settlingBand()).isEqualTo(0.02);
     assertThat(scenario.measures().bankChanges())
@@ -165,5 +186,61 @@ class ScenarioFileTest {
     Samples.write(directory, "aeroplanes/some-aeroplane.json", Samples.AEROPLANE);
     Path link = Files.createSymbolicLink(directory.resolve("link.json"), file);
     assertThat(ScenarioFile.read(link).title()).isEqualTo("Roll entry at cruise");
+  }
+
+  @Test
+  void patternLawStartAndSizeMayBeAbsent() {
+    String inputs =
+        """
+        { "control": "stick", "shape": "multistep", "start": "1 s", "size": 1, "unit": "1 s" },
+        { "control": "stick", "shape": "sweep", "start": "0 s", "size": 1, "from": "1 Hz",
+          "to": "180 deg/s", "duration": "1 s" },
+        { "control": "stick", "shape": "trace", "file": "traces/hand.csv", "column": "pedal" },
+        """;
+    String text = Samples.with(Samples.SCENARIO, "\"inputs\": [", "\"inputs\": [" + inputs);
+    Scenario scenario = ScenarioFile.read(Samples.writeScenario(directory, text));
+    assertThat(scenario.programme().inputs())
+        .extracting(PilotInput::shape)
+        .startsWith(
+            new MultistepInput(1, 1, 1, List.of(3, 2, 1, 1), 0.1),
+            new SweepInput(0, 1, 2 * Math.PI, Math.PI, 1, SweepInput.Law.LINEAR),
+            new TraceInput(
+                0,
+                1,
+                Trace.of(
+                    "traces/hand.csv",
+                    "pedal",
+                    new double[] {0, 0.5, 1, 1.5},
+                    new double[] {0, 0.1, -0.2, 0})));
+  }
+
+  @Test
+  void aTraceMayHaveAnyLineEndsAByteOrderMarkAndBlanks() {
+    Path file = Samples.writeScenario(directory, Samples.SCENARIO_WITH_EVERY_KEY);
+    Scenario plain = ScenarioFile.read(file);
+    for (String text :
+        List.of(
+            Samples.TRACE.replace("\n", "\r\n"),
+            Samples.TRACE.replace("\n", "\r") + "\r\r",
+            "\ufeff" + Samples.TRACE,
+            Samples.TRACE.replace(",", " ,\t"),
+            Samples.TRACE.stripTrailing())) {
+      Samples.write(directory, "traces/hand.csv", text);
+      assertThat(ScenarioFile.read(file).programme().inputs())
+          .isEqualTo(plain.programme().inputs());
+    }
+  }
+
+  @Test
+  void aHeldSlipIsReadInItsOrder() {
+    String text =
+        Samples.with(
+            Samples.SCENARIO,
+            "\"slip\": \"free\"",
+            "\"slip\": \"held\", \"heldSlip\": [ { \"time\": \"1 s\", \"sideslip\": \"0 deg\" },"
+                + " { \"time\": \"1.5 s\", \"sideslip\": \"-0.1 rad\" } ]");
+    Scenario scenario = ScenarioFile.read(Samples.writeScenario(directory, text));
+    assertThat(scenario.programme().heldSideslip().points())
+        .containsExactly(new HeldSideslip.Point(1, 0), new HeldSideslip.Point(1.5, -0.1));
   }
 }

@@ -26,6 +26,118 @@ class SpoiltFilesTest {
     return new Spoilt(Samples.with(sample, part, replacement), path, line, message);
   }
 
+  private static Spoilt ofMultistep(String part, String replacement, String key, String message) {
+    return ofInput(3, part, replacement, key, message);
+  }
+
+  private static Spoilt ofRamp(String part, String replacement, String key, String message) {
+    return ofInput(4, part, replacement, key, message);
+  }
+
+  private static Spoilt ofSweep(String part, String replacement, String key, String message) {
+    return ofInput(5, part, replacement, key, message);
+  }
+
+  private static Spoilt ofTrace(String part, String replacement, String key, String message) {
+    return ofInput(6, part, replacement, key, message);
+  }
+
+  private static Spoilt ofInput(
+      int index, String part, String replacement, String key, String message) {
+    return spoilt(
+        Samples.SCENARIO_WITH_EVERY_KEY,
+        part,
+        replacement,
+        "$.inputs[" + index + "]." + key,
+        32 + index,
+        message);
+  }
+
+  private static Spoilt ofHeldSlip(String points, String place, String message) {
+    return spoilt(
+        Samples.SCENARIO,
+        "\"slip\": \"free\"",
+        "\"slip\": \"held\", \"heldSlip\": [" + points + "]",
+        "$.heldSlip" + place,
+        6,
+        message);
+  }
+
+  /** Each trace has one thing wrong, and is reported with its line. */
+  static Stream<Spoilt> traces() {
+    return Stream.of(
+        ofCsv(
+            "time[s],stick[-],pedal[%]",
+            "", 1, "the first line is blank; expected a header such as time[s],stick[-]"),
+        ofCsv(
+            "time[s]",
+            "time",
+            1,
+            "\"time\" is no name with a unit; expected a header such as time[s],stick[-]"),
+        ofCsv(
+            "time[s]",
+            "\"time[s]\"",
+            1,
+            "\"\"time[s]\"\" is quoted; expected a name without quotation marks"),
+        ofCsv(
+            "time[s]",
+            "t[s]",
+            1,
+            "no column is called time; expected a header such as time[s],stick[-]"),
+        ofCsv("time[s]", "time[m]", 1, "the unit of time is \"m\"; expected [s] or [ms]"),
+        ofCsv("time[s]", "time[-]", 1, "the unit of time is \"-\"; expected [s] or [ms]"),
+        ofCsv(
+            "stick[-]",
+            "stick[deg]",
+            1,
+            "the unit of \"stick\" is \"deg\"; expected a fraction or per cent of the travel, [-] or [%]"),
+        ofCsv(
+            "pedal[%]",
+            "stick[%]", 1, "the column \"stick\" stands here again; keep one of the two"),
+        ofCsv("0.5,0.25,10", "0.5,0.25", 3, "the line has 2 values; expected 3, as the header"),
+        ofCsv("0.5,0.25,10", "0.5;0.25;10", 3, "the line has 1 values; expected 3, as the header"),
+        ofCsv(
+            "0.5,0.25,10",
+            "0.5,,10",
+            3,
+            "\"\" does not begin with a decimal number; expected a plain number such as \"12\""),
+        ofCsv(
+            "0.5,0.25,10",
+            "0.5,NaN,10",
+            3,
+            "\"NaN\" does not begin with a decimal number; expected a plain number such as \"12\""),
+        ofCsv(
+            "0.5,0.25,10",
+            "0.5,1e999,10",
+            3,
+            "\"1e999\" is too large to be computed with; expected a plain number such as \"12\""),
+        ofCsv(
+            "0.5,0.25,10",
+            "0.5,2.1,10",
+            3,
+            "the position is 2.1, times the size -0.5; expected from -1 to 1, a fraction of the travel"),
+        ofCsv(
+            "0.5,0.25,10",
+            "0,0.25,10",
+            3,
+            "the time is 0.0 s after 0.0 s; expected increasing times"),
+        ofCsv(
+            "0,0,0\n",
+            "-21,0,0\n",
+            2,
+            "the time is -21.0 s, and the start 20.0 s; expected a sum of 0 or more: give a later start"),
+        ofCsv("0.5,0.25,10", "", 3, "a blank line stands between the samples; take it out"),
+        ofCsv(
+            "0.5,0.25,10\n1,1,-20\n1.5,0,0\n",
+            "",
+            2,
+            "there are fewer than two samples; expected at least two lines of numbers"));
+  }
+
+  private static Spoilt ofCsv(String part, String replacement, int line, String message) {
+    return new Spoilt(Samples.with(Samples.TRACE, part, replacement), "$", line, message);
+  }
+
   static Stream<Spoilt> scenarios() {
     return Stream.of(
         // missing keys
@@ -155,7 +267,7 @@ class SpoiltFilesTest {
             "[\"50 deg\", \"45 deg\", \"360 deg\"]",
             "{}",
             "$.measures.bankAngles",
-            37,
+            41,
             "found an object; expected a list in brackets [ ]"),
         spoilt(
             Samples.SCENARIO,
@@ -198,7 +310,7 @@ class SpoiltFilesTest {
             "\"50 deg\"",
             "50",
             "$.measures.bankAngles[0]",
-            37,
+            41,
             "the number stands bare: \"50\" has no unit; expected an angle such as \"50 deg\" (deg, rad, mrad, rev)"),
         // ranges
         spoilt(
@@ -255,14 +367,14 @@ class SpoiltFilesTest {
             "0.02",
             "0.6",
             "$.measures.settlingBand",
-            37,
+            41,
             "0.6 is out of range; expected a fraction from 0.001 to 0.5"),
         spoilt(
             Samples.SCENARIO_WITH_EVERY_KEY,
             "\"50 deg\"",
             "\"-50 deg\"",
             "$.measures.bankAngles[0]",
-            37,
+            41,
             "\"-50 deg\" is out of range; expected a change above 0 and at most 3600 deg"),
         spoilt(
             Samples.SCENARIO,
@@ -299,6 +411,134 @@ class SpoiltFilesTest {
             "$.title",
             3,
             "the text is blank; expected some words"),
+        // shapes of inputs
+        ofMultistep(
+            "\"unit\": \"0.4 s\", ",
+            "",
+            "unit",
+            "the key \"unit\" is missing; shape \"multistep\" must have it"),
+        ofMultistep(
+            "0.4 s",
+            "50 ms",
+            "unit",
+            "\"50 ms\": unit, s, is 0.05; expected at least the movement of the hand, 0.1 s"),
+        ofMultistep(
+            "[2, 1, 1]",
+            "[2, 1.5]",
+            "pattern[1]",
+            "found the number 1.5; expected a whole number from 1 to 1000"),
+        ofMultistep(
+            "[2, 1, 1]",
+            "[0]",
+            "pattern[0]",
+            "0 is out of range; expected a whole number from 1 to 1000"),
+        ofMultistep(
+            "[2, 1, 1]",
+            "[2, \"1\"]",
+            "pattern[1]",
+            "found the text \"1\"; expected a plain number such as 0.5, without unit and quotation marks"),
+        ofMultistep(
+            "[2, 1, 1]",
+            "[NaN]",
+            "pattern[0]",
+            "NaN is no number in JSON; expected a decimal number"),
+        ofMultistep(
+            "[2, 1, 1]",
+            "[]",
+            "pattern",
+            "the pattern is empty; expected whole numbers such as [3, 2, 1, 1]"),
+        ofMultistep(
+            "[2, 1, 1]",
+            "[" + "1, ".repeat(100) + "1]",
+            "pattern",
+            "the list has 101 elements; expected at most 100"),
+        ofMultistep(
+            "[2, 1, 1]",
+            "\"3-2-1-1\"",
+            "pattern",
+            "found the text \"3-2-1-1\"; expected a list in brackets [ ]"),
+        ofRamp(
+            "\"3 s\"", "\"0 s\"", "duration", "\"0 s\" is out of range; expected a value above 0"),
+        ofRamp(
+            "\"size\": 0.3",
+            "\"size\": 0.3, \"movement\": \"1 s\"",
+            "movement",
+            "unknown key \"movement\"; shape \"ramp\" has none, but shape \"step\" and shape \"hold\" and shape \"doublet\" and shape \"multistep\" has. The keys of shape \"ramp\" are control, shape, start, size, duration"),
+        ofSweep(
+            "0.5 Hz",
+            "0 Hz",
+            "from",
+            "\"0 Hz\" is out of range; expected a frequency above 0 and at most 20 Hz"),
+        ofSweep(
+            "6 rad/s",
+            "20.1 Hz",
+            "to",
+            "\"20.1 Hz\" is out of range; expected a frequency above 0 and at most 20 Hz"),
+        ofSweep(
+            "6 rad/s",
+            "6 rad",
+            "to",
+            "\"6 rad\" is an angle; expected a frequency (Hz, 1/s) or an angular rate (deg/s, rad/s, rpm, rev/s)"),
+        ofSweep(
+            "\"0.5 Hz\"",
+            "0.5",
+            "from",
+            "the number stands bare: \"0.5\" has no unit; expected a frequency such as \"0.5 Hz\" (Hz, 1/s)"),
+        ofSweep(
+            "logarithmic",
+            "log",
+            "law",
+            "unknown law \"log\"; expected one of \"linear\", \"logarithmic\""),
+        ofTrace(
+            "\"traces/hand.csv\"",
+            "\"\"",
+            "file",
+            "the path is blank; expected one from here to a CSV file"),
+        ofTrace(
+            "traces/hand.csv",
+            "traces/foot.csv",
+            "file",
+            "the trace file \"traces/foot.csv\" does not exist; check its name and directory. The path counts from the directory of the scenario"),
+        ofTrace(
+            "traces/hand.csv",
+            "traces",
+            "file",
+            "the trace file \"traces\" is a directory; expected a file. The path counts from the directory of the scenario"),
+        ofTrace(
+            "\"column\": \"stick\"",
+            "\"column\": \"stik\"",
+            "column",
+            "the trace file has no column \"stik\"; did you mean \"stick\"? Its columns are time, stick, pedal"),
+        ofTrace(
+            "\"size\": -0.5",
+            "\"size\": -1.5",
+            "size",
+            "-1.5 is out of range; expected from -1 to 1, a fraction of the travel, right positive"),
+        // held slip
+        ofHeldSlip(
+            "{ \"time\": \"1 s\" }",
+            "[0].sideslip",
+            "the key \"sideslip\" is missing; a held slip must have it"),
+        ofHeldSlip(
+            "{ \"time\": \"-1 s\", \"sideslip\": \"1 deg\" }",
+            "[0].time",
+            "\"-1 s\" is out of range; expected 0 or more"),
+        ofHeldSlip(
+            "{ \"time\": \"0 s\", \"sideslip\": \"91 deg\" }",
+            "[0].sideslip",
+            "\"91 deg\" is out of range; expected at most 90 deg either way"),
+        ofHeldSlip(
+            "{ \"time\": \"2 s\", \"sideslip\": \"1 deg\" }, { \"time\": \"2 s\", \"sideslip\": \"1 deg\" }",
+            "[1].time",
+            "the time is not after the one before, 2.0 s; expected increasing times"),
+        ofHeldSlip("5", "[0]", "found the number 5; expected a time and a sideslip in braces { }"),
+        spoilt(
+            Samples.SCENARIO,
+            "\"slip\": \"free\"",
+            "\"slip\": \"free\", \"heldSlip\": [{ \"time\": \"0 s\", \"sideslip\": \"1 deg\" }]",
+            "$.heldSlip",
+            6,
+            "a sideslip is held against time, but the slip is free; choose held slip, or take heldSlip out"),
         // words
         spoilt(
             Samples.SCENARIO,
@@ -696,6 +936,32 @@ class SpoiltFilesTest {
   void aFaultOfAScenarioIsReportedWhereItStands(Spoilt spoilt) {
     Path file = Samples.writeScenario(directory, spoilt.text());
     check(spoilt, file, Samples.refusalOfScenario(file));
+  }
+
+  @ParameterizedTest
+  @MethodSource("traces")
+  void aFaultOfATraceIsReportedWhereItStands(Spoilt spoilt) {
+    Path scenario = Samples.writeScenario(directory, Samples.SCENARIO_WITH_EVERY_KEY);
+    Path file = Samples.write(directory, "traces/hand.csv", spoilt.text());
+    check(spoilt, file, Samples.refusalOfScenario(scenario));
+    ScenarioDocument document = ScenarioDocument.open(scenario);
+    assertThat(document.pathOf(document.check().faults().get(0))).isEqualTo("$.inputs[6].file");
+  }
+
+  @Test
+  void aTraceMayHaveSoManySamplesAndNoMore() {
+    Path scenario = Samples.writeScenario(directory, Samples.SCENARIO_WITH_EVERY_KEY);
+    StringBuilder csv = new StringBuilder("time[ms],stick[-]\n");
+    for (int i = 0; i < TraceCsv.MOST_ROWS; i++) {
+      csv.append(i).append(",0\n");
+    }
+    Path file = Samples.write(directory, "traces/hand.csv", csv.toString());
+    assertThat(ScenarioFile.read(scenario)).isNotNull();
+    csv.append("100000,0\n");
+    Samples.write(directory, "traces/hand.csv", csv.toString());
+    assertThat(Samples.only(Samples.refusalOfScenario(scenario)))
+        .hasToString(
+            file + ":100002: $: there are more than 100000 samples; shorten or thin the trace");
   }
 
   @ParameterizedTest

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThatIllegalArgumentException
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.EnumMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
@@ -14,6 +15,7 @@ import org.rolltrace.core.aeroplane.Aeroplane;
 import org.rolltrace.core.aeroplane.Inertia;
 import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.derivatives.LateralDerivatives;
+import org.rolltrace.core.pilot.HeldSideslip;
 import org.rolltrace.core.propeller.PropellerMoments;
 import org.rolltrace.core.testing.RandomAeroplane;
 import org.rolltrace.core.testing.Scenarios;
@@ -141,6 +143,69 @@ class SlipTreatmentTest {
     double needed =
         m.inertia().yaw().orElseThrow() * yawAcceleration - m.inertia().product() * rates[1];
     assertThat(n).isCloseTo(needed, within(1e-9 * m.inertia().roll()));
+  }
+
+  private static final HeldSideslip LED_IN =
+      HeldSideslip.of(List.of(new HeldSideslip.Point(1, 0), new HeldSideslip.Point(2, 0.1)));
+
+  @Test
+  void aSlipHeldAgainstTimeTurnsAndRollsTheAeroplane() {
+    LateralModel m = model(12, 0.1);
+    HeldSlip held = LateralMotion.holding(m, LED_IN);
+    double[] x = {0.4, -0.2};
+    // half way in: β = 0.05, β̇ = 0.1
+    double r =
+        9.80665 / m.speed() * Math.sin(0.4) * Math.cos(0.1)
+            + m.sideForce().perSideslip() * 0.05 / (m.mass().orElseThrow() * m.speed())
+            - 0.1;
+    assertThat(held.sideslip(1.5, x, 0.1, 0.2)).isCloseTo(0.05, within(1e-12));
+    assertThat(held.yawRate(1.5, x, 0.1, 0.2)).isCloseTo(r, within(1e-12));
+    double[] rates = new double[2];
+    held.rates(1.5, x, 0.1, 0.2, rates);
+    double moment = m.rollMoment().at(0.05, -0.2, r, 0.1, 0.2);
+    assertThat(rates[1] * m.inertia().roll()).isCloseTo(moment, within(1e-12 * m.inertia().roll()));
+    // before, it is the plain held slip
+    double[] plain = new double[2];
+    LateralMotion.of(SlipTreatment.HELD, m).rates(0, x, 0.1, 0.2, plain);
+    held.rates(0.9, x, 0.1, 0.2, rates);
+    assertThat(rates).containsExactly(plain);
+  }
+
+  /** ṙ by a difference along the motion, instead of by the formula. */
+  @Test
+  void theRudderThatHoldsASlipAgainstTimeBalancesTheYaw() {
+    LateralModel m = model(13, 0);
+    HeldSlip held = LateralMotion.holding(m, LED_IN);
+    double[] x = {0.5, 0.4};
+    for (double t : new double[] {1.5, 3}) {
+      double[] rates = new double[2];
+      held.rates(t, x, 0.1, 0, rates);
+      double h = 1e-5;
+      double[] after = {x[0] + h * rates[0], x[1] + h * rates[1]};
+      double[] before = {x[0] - h * rates[0], x[1] - h * rates[1]};
+      double yawAcceleration =
+          (held.yawRate(t + h, after, 0.1, 0) - held.yawRate(t - h, before, 0.1, 0)) / (2 * h);
+      double rudder = held.rudderToHold(t, x, 0.1, 0);
+      double n =
+          m.yawMoment().at(held.sideslip(t, x, 0, 0), 0.4, held.yawRate(t, x, 0, 0), 0.1, rudder);
+      double needed =
+          m.inertia().yaw().orElseThrow() * yawAcceleration - m.inertia().product() * rates[1];
+      // the difference: rounding of 1e-16/h, and h² times slopes of order one
+      assertThat(n).isCloseTo(needed, within(1e-8 * m.inertia().yaw().orElseThrow()));
+    }
+  }
+
+  @Test
+  void aSlipHeldAgainstTimeNeedsTheMass() {
+    LateralModel bare =
+        LateralModel.of(
+            Scenarios.oneDegree(0.4, 8).aeroplane(),
+            Scenarios.oneDegree(0.4, 8).derivatives(),
+            Scenarios.seaLevel(50),
+            PropellerMoments.NONE);
+    assertThatIllegalArgumentException()
+        .isThrownBy(() -> LateralMotion.holding(bare, LED_IN))
+        .withMessageContaining("mass");
   }
 
   @Test

@@ -87,4 +87,49 @@ class PilotProgrammeTest {
     assertThat(programme.firstHold(20)).isEmpty();
     assertThat(programme.firstCentring().orElseThrow()).isCloseTo(5, within(1e-12));
   }
+
+  @Test
+  void aRampIsHeldFromItsEnd() {
+    assertThat(stick(new RampInput(1, 0.5, 2)).firstHold(10))
+        .contains(new PilotProgramme.HeldStretch(3, 10));
+  }
+
+  private static TraceInput trace(double[] times, double... positions) {
+    return new TraceInput(0, 1, Trace.of("a.csv", "stick", times, positions));
+  }
+
+  @Test
+  void shapesThatAreNotMeantToBeHeldHaveNoHold() {
+    double[] times = {0, 1, 5, 6};
+    for (InputShape shape :
+        List.of(
+            new MultistepInput(1, 1, 1, List.of(3, 2, 1, 1), 0.1),
+            new SweepInput(1, 1, 1, 2, 5, SweepInput.Law.LINEAR),
+            trace(times, 0, 1, 1, 0))) {
+      assertThat(stick(shape).firstHold(20)).as(shape.name()).isEmpty();
+    }
+    // What goes on after them is.
+    assertThat(
+            stick(new StepInput(0, 0.5, 0.1), new MultistepInput(0, 0.2, 1, List.of(1, 1), 0.1))
+                .firstHold(20))
+        .contains(new PilotProgramme.HeldStretch(2.1, 20));
+  }
+
+  @Test
+  void aTraceIsCentredWhereItComesToRestAtTrimAndNotWhereItPasses() {
+    double[] times = {0, 1, 2, 3, 4, 5};
+    assertThat(stick(trace(times, 0, 1, 0, -1, 0, 0)).firstCentring()).hasValue(3);
+    assertThat(stick(trace(times, 0, 1, 1, 0, 0, 0)).firstCentring()).hasValue(2);
+    assertThat(stick(trace(times, 0, 1, 1, 0, 0, 0)).backAtTrim(10)).hasValue(3);
+  }
+
+  @Test
+  void aHeldSideslipAddsItsBreakpoints() {
+    HeldSideslip held =
+        HeldSideslip.of(List.of(new HeldSideslip.Point(0.5, 0), new HeldSideslip.Point(3, 0.1)));
+    PilotProgramme programme = stick(new StepInput(1, 0.5, 0)).holding(held);
+    assertThat(programme.breakpoints()).containsExactly(0.5, 1, 3);
+    assertThat(programme.heldSideslip()).isSameAs(held);
+    assertThat(programme.inputs()).hasSize(1);
+  }
 }
