@@ -15,7 +15,8 @@
  *
  * free:    mV β̇ = Y + m g cos γ sin φ − mV r;   [Ixx −Ixz; −Ixz Izz][ṗ; ṙ] = [L; N]
  * settled: β̇ = 0 and N = 0, solved for β and r at every instant;   Ixx ṗ = L
- * held:    β = 0, r = (g/V) sin φ cos γ;   Ixx ṗ = L
+ * held:    β and β̇ as the pilot holds them, 0 unless against time;   Ixx ṗ = L
+ *          r = (g/V) sin φ cos γ + q̄ S CY_β β/(mV) − β̇
  * </pre>
  *
  * <p>The relations are the usual small-perturbation ones of flight dynamics (B. Etkin and L.D.

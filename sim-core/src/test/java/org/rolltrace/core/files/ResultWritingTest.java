@@ -174,4 +174,42 @@ class ResultWritingTest {
       return files.map(file -> file.getFileName().toString()).sorted().toList();
     }
   }
+
+  private static JsonNode scenarioOf(String name) throws IOException {
+    Path file = Path.of("..", "scenarios", "tarnlark-" + name + ".json");
+    return json(ScenarioRun.execute(ScenarioFile.read(file))).get("scenario");
+  }
+
+  @Test
+  void whatOnlyOneShapeHasIsInTheResult() throws IOException {
+    JsonNode multistep = scenarioOf("multistep").at("/inputs/0");
+    assertThat(multistep.get("unit").asDouble()).isEqualTo(0.55);
+    assertThat(multistep.get("pattern")).hasToString("[3,2,1,1]");
+    JsonNode sweep = scenarioOf("sweep").at("/inputs/0");
+    assertThat(sweep.get("law").asText()).isEqualTo("logarithmic");
+    assertThat(sweep.get("to").asDouble()).isCloseTo(4 * Math.PI, within(1e-12));
+    assertThat(sweep.get("end").asDouble()).isBetween(26.0, 26.25);
+    assertThat(scenarioOf("ramp").at("/inputs/0/movement").asDouble()).isEqualTo(2);
+    JsonNode pedal = scenarioOf("trace").at("/inputs/1");
+    assertThat(pedal.get("file").asText()).isEqualTo("traces/roll-and-back.csv");
+    assertThat(pedal.get("column").asText()).isEqualTo("pedal");
+    assertThat(pedal.get("scale").asDouble()).isEqualTo(0.8);
+    JsonNode held = scenarioOf("held-sideslip").get("heldSlip");
+    assertThat(held).hasSize(4);
+    assertThat(held.at("/1/sideslip").asDouble()).isCloseTo(Math.toRadians(5), within(1e-12));
+    assertThat(scenarioOf("ramp").has("heldSlip")).isFalse();
+  }
+
+  @Test
+  void aSlipHeldAgainstTimeReportsItsPedalAndNoFreeSlipToCompareWith() {
+    RunResult result =
+        ScenarioRun.execute(
+            ScenarioFile.read(Path.of("..", "scenarios", "tarnlark-held-sideslip.json")));
+    // Held at 5 deg, Cn_beta/Cn_dr of the file give -0.0816/-0.0735 · 5 deg of rudder of 25 deg:
+    // 22 % of the pedal, left for a wind from the right; leading in and out change it by the rest.
+    assertThat(result.measure("pedalToHoldSlip").orElseThrow().value().orElseThrow())
+        .isBetween(-0.35, -0.18);
+    assertThat(result.measure("freeSlipBankDifference").orElseThrow().remark())
+        .contains("no counterpart in free slip");
+  }
 }

@@ -14,6 +14,7 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
@@ -52,6 +53,22 @@ class CommandLineProgramTest {
         .contains("flight must follow");
     assertThat(answer.out().lines()).allMatch(line -> line.length() <= 120);
     assertThat(answer.out().lines()).noneMatch(line -> line.endsWith(" "));
+  }
+
+  @ParameterizedTest
+  @CsvSource(
+      delimiter = '|',
+      value = {
+        "multistep | stick multistep, 20 % right at 1 s, 3-2-1-1 units of 0.55 s, hand takes 0.15 s",
+        "ramp | stick ramp, 50 % right at 1 s, reached in 2 s",
+        "sweep | stick sweep, 10 % right at 1 s, logarithmic from 0.1 to 2 Hz in 25 s",
+        "trace | column stick of traces/roll-and-back.csv times 1, from 0 s",
+        "held-sideslip | held: sideslip 0 deg at 1 s, 5 deg at 2 s, 5 deg at 4 s, 0 deg at 5 s"
+      })
+  void theReportSaysWhatTheHandDid(String name, String words) {
+    Answer answer = run("fly", SCENARIOS.resolve("tarnlark-" + name + ".json").toString());
+    assertThat(answer.exitCode()).isZero();
+    assertThat(answer.out()).contains(words);
   }
 
   @Test

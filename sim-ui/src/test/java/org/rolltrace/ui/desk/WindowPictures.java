@@ -82,6 +82,16 @@ public final class WindowPictures extends Application {
                   session.edit("spoil", d -> d.with("$.condition.trueAirspeed", "176 kg"));
                   figures(true);
                 }));
+        for (String input : List.of("multistep", "sweep", "trace")) {
+          shots.add(
+              new Shot(
+                  input + "-" + suffix,
+                  () -> {
+                    figures(false);
+                    session.open(SCENARIOS.resolve("tarnlark-" + input + ".json"));
+                    window.model().resetView();
+                  }));
+        }
         shots.add(
             new Shot(
                 "drop-" + suffix,
