@@ -26,6 +26,12 @@ public final class ScenarioDocument {
   private static final String AEROPLANE = "$.aeroplane";
   private static final String INPUTS = "$.inputs";
 
+  private static final String HELD_SLIP = "$.heldSlip";
+
+  /** A number, a blank and something that may be a unit. */
+  private static final Pattern ANGLE =
+      Pattern.compile("[+-]?(\\d+\\.?\\d*|\\.\\d+)([eE][+-]?\\d+)? .*");
+
   private static final Pattern NUMBER =
       Pattern.compile("-?(0|[1-9]\\d*)(\\.\\d+)?([eE][+-]?\\d+)?");
 
@@ -320,9 +326,9 @@ public final class ScenarioDocument {
   }
 
   /**
-   * The same with every input to the other side.
+   * The same with every input and every held sideslip to the other side.
    *
-   * @return the edited document; sizes that are no numbers stay
+   * @return the edited document; sizes that are no numbers and sideslips that are no angles stay
    */
   public ScenarioDocument mirrored() {
     ScenarioDocument changed = this;
@@ -333,16 +339,31 @@ public final class ScenarioDocument {
           && written.get() instanceof JsonNode.Bare number
           && NUMBER.matcher(number.written()).matches()) {
         changed = changed.withNumber(size, negated(number.written()));
+      } else if (written.isEmpty() && text(input(i) + ".shape").equals(Optional.of("trace"))) {
+        changed = changed.withNumber(size, "-1");
+      }
+    }
+    int points = group(HELD_SLIP, true).map(list -> list.items().size()).orElse(0);
+    for (int i = 0; i < points; i++) {
+      String sideslip = HELD_SLIP + "[" + i + "].sideslip";
+      Optional<String> angle = text(sideslip);
+      if (angle.isPresent() && ANGLE.matcher(angle.get()).matches()) {
+        changed = changed.with(sideslip, negated(angle.get()));
       }
     }
     return changed;
   }
 
+  /** A number, or one with a unit, of the other sign. */
   private static String negated(String digits) {
-    if (Double.parseDouble(digits) == 0) {
+    String number = digits.indexOf(' ') < 0 ? digits : digits.substring(0, digits.indexOf(' '));
+    if (Double.parseDouble(number) == 0) {
       return digits;
     }
-    return digits.startsWith("-") ? digits.substring(1) : "-" + digits;
+    if (digits.startsWith("-")) {
+      return digits.substring(1);
+    }
+    return "-" + (digits.startsWith("+") ? digits.substring(1) : digits);
   }
 
   /**

@@ -407,6 +407,27 @@ class ScenarioDocumentTest {
   }
 
   @Test
+  void tracesAndHeldSideslipsAreMirroredToo() {
+    ScenarioDocument trace =
+        document(Samples.SCENARIO)
+            .withInputAdded("stick", "trace", 0)
+            .with("$.inputs[1].file", "traces/hand.csv")
+            .without("$.inputs[1].size");
+    assertThat(trace.mirrored().text("$.inputs[1].size")).contains("-1");
+    ScenarioDocument held =
+        document(Samples.SCENARIO)
+            .with("$.slip", "held")
+            .with("$.heldSlip[0].time", "1 s")
+            .with("$.heldSlip[0].sideslip", "0 deg")
+            .with("$.heldSlip[1].time", "2 s")
+            .with("$.heldSlip[1].sideslip", "5.0 deg");
+    assertThat(paths(held)).isEmpty();
+    assertThat(held.mirrored().text("$.heldSlip[0].sideslip")).contains("0 deg");
+    assertThat(held.mirrored().text("$.heldSlip[1].sideslip")).contains("-5.0 deg");
+    assertThat(held.mirrored().mirrored()).isEqualTo(held);
+  }
+
+  @Test
   void aTraceWantsItsFileAndIsThenComplete() {
     ScenarioDocument document = document(Samples.SCENARIO).withInputAdded("pedal", "trace", 0.5);
     assertThat(document.text("$.inputs[1].size")).contains("1");
