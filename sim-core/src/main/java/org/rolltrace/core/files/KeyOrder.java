@@ -40,9 +40,11 @@ final class KeyOrder {
           "wingArea",
           "mass",
           "inertia",
+          "lateralImbalance",
           "ailerons",
           "rudder",
           "axes",
+          "angleOfAttack",
           "limits",
           "derivatives");
 

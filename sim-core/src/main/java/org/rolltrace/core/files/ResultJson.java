@@ -107,6 +107,7 @@ public final class ResultJson {
     json.writeStringField("title", scenario.title());
     json.writeStringField("aeroplane", scenario.data().aeroplane().name());
     json.writeStringField("derivativesSource", scenario.data().derivatives().source());
+    json.writeStringField("derivativesConvention", scenario.data().derivatives().convention());
     json.writeStringField("slip", scenario.slip().word());
     json.writeObjectFieldStart("start");
     number("bank", scenario.start().disturbance().bank());
@@ -145,6 +146,12 @@ public final class ResultJson {
     number("yaw", aeroplane.inertia().yaw());
     number("product", aeroplane.inertia().product());
     json.writeEndObject();
+    if (aeroplane.imbalance().isPresent()) {
+      json.writeObjectFieldStart("lateralImbalance");
+      number("mass", aeroplane.imbalance().get().mass());
+      number("arm", aeroplane.imbalance().get().arm());
+      json.writeEndObject();
+    }
     if (aeroplane.ailerons().isPresent()) {
       Ailerons ailerons = aeroplane.ailerons().get();
       json.writeObjectFieldStart("ailerons");
@@ -203,10 +210,13 @@ public final class ResultJson {
 
   private void writeTrim(Trim trim) throws IOException {
     json.writeObjectFieldStart("trim");
-    json.writeStringField("state", "wings-level");
+    json.writeStringField("state", trim.state().kind().word());
     number("aileron", trim.aileron());
     number("rudder", trim.rudder());
+    number("bank", trim.bank());
+    number("rollRate", trim.rollRate());
     number("sideslip", trim.sideslip());
+    number("yawRate", trim.yawRate());
     number("stick", trim.stick());
     number("pedal", trim.pedal());
     json.writeArrayFieldStart("shortfalls");
