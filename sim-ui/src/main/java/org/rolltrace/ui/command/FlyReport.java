@@ -20,6 +20,7 @@ import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.Mode;
+import org.rolltrace.core.motion.SteadyState;
 import org.rolltrace.core.motion.Trim;
 import org.rolltrace.core.pilot.DoubletInput;
 import org.rolltrace.core.pilot.HoldInput;
@@ -66,6 +67,7 @@ final class FlyReport {
     if (!scenario.data().derivatives().source().isBlank()) {
       wrapped(padded("  derivatives from", 20), scenario.data().derivatives().source());
     }
+    wrapped(padded("  given as", 20), scenario.data().derivatives().convention());
   }
 
   private static String sizeAndMass(Aeroplane aeroplane) {
@@ -77,6 +79,10 @@ final class FlyReport {
     if (aeroplane.inertia().product() != 0) {
       words.append(format(", product %.4g kg m2", aeroplane.inertia().product()));
     }
+    aeroplane
+        .imbalance()
+        .ifPresent(
+            i -> words.append(format(", %.4g kg of it, %+.3g m to the right", i.mass(), i.arm())));
     return words.toString();
   }
 
@@ -224,14 +230,19 @@ final class FlyReport {
   private void addTrim() {
     line("");
     double trimmedWith = result.scenario().start().trimmedWith().roll();
+    Trim trim = result.trim();
+    String state = trim.state().kind().word().replace('-', ' ');
     line(
         trimmedWith == result.scenario().propeller().roll()
-            ? "Trim, wings level"
-            : format("Trim, wings level, with a propeller moment of %+.1f N m", trimmedWith));
-    Trim trim = result.trim();
+            ? "Trim, " + state
+            : format("Trim, %s, with a propeller moment of %+.1f N m", state, trimmedWith));
     surface("aileron", trim.aileron(), "stick", trim.stick());
     surface("rudder", trim.rudder(), "pedal", trim.pedal());
     two("sideslip", format("%.2f deg", Math.toDegrees(trim.sideslip())), "");
+    if (trim.state().kind() != SteadyState.Kind.WINGS_LEVEL) {
+      two("bank", format("%.2f deg", Math.toDegrees(trim.bank())), "");
+      two("yaw rate", format("%.2f deg/s", Math.toDegrees(trim.yawRate())), "");
+    }
     for (String shortfall : trim.shortfalls()) {
       line("  " + shortfall);
     }
