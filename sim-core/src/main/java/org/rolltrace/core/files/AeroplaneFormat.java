@@ -139,7 +139,10 @@ final class AeroplaneFormat {
     double mass = in.quantity("mass", Dimension.MASS, Range.ABOVE_ZERO);
     double arm = in.quantity("arm", Dimension.LENGTH, Range.ANY);
     if (whole.isPresent() && mass >= whole.getAsDouble()) {
-      in.refuse("mass", "as much as the mass of the aeroplane, which counts it; expected a part");
+      in.refuse(
+          "mass",
+          new IllegalArgumentException(
+              "not below the mass of the aeroplane, which counts it; expected a part of that"));
     }
     return in.isSound() ? Optional.of(new LateralImbalance(mass, arm)) : Optional.empty();
   }

@@ -63,7 +63,8 @@ class MutatedFilesTest {
       Samples.SCENARIO,
       Samples.SCENARIO_WITH_EVERY_KEY,
       Samples.AEROPLANE,
-      Samples.AEROPLANE_WITH_EVERY_KEY
+      Samples.AEROPLANE_WITH_EVERY_KEY,
+      Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY
     };
     Samples.write(directory, "aeroplanes/some-aeroplane.json", Samples.AEROPLANE);
     int accepted = 0;
