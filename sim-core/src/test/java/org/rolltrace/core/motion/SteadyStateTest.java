@@ -11,9 +11,8 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Random;
-import org.hipparchus.geometry.euclidean.threed.Rotation;
-import org.hipparchus.geometry.euclidean.threed.RotationConvention;
-import org.hipparchus.geometry.euclidean.threed.Vector3D;
+import org.hipparchus.linear.MatrixUtils;
+import org.hipparchus.linear.RealMatrix;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -119,7 +118,7 @@ class SteadyStateTest {
   }
 
   /**
-   * Kinematics of a climbing turn by rotating the axes themselves, as a matrix library does, with
+   * Kinematics of a climbing turn by rotating the axes themselves, without angles of Euler, with
    * the rates of the trim: after any time the climb and the bank are what they were, and the
    * heading has turned by (g/V) tan φ a second (common practice).
    */
@@ -130,28 +129,34 @@ class SteadyStateTest {
     double climb = Math.toRadians(climbDeg);
     FlightCondition condition = LEVEL.withFlightPathAngle(climb).inTurn(bank);
     Trim trim = trim(SteadyState.turn(bank), SlipTreatment.FREE, model(SIMPLE, condition, 0));
-    // weight is balanced across the path in the plane of symmetry by n g, so q V = g (n − cos γ cos φ)
-    double q =
-        GRAVITY / 50 * (condition.loadFactor() - Math.cos(climb) * Math.cos(bank));
-    Vector3D rates = new Vector3D(trim.rollRate(), q, trim.yawRate());
-    Rotation attitude =
-        new Rotation(Vector3D.PLUS_K, 0.3, RotationConvention.VECTOR_OPERATOR)
-            .applyTo(new Rotation(Vector3D.PLUS_J, climb, RotationConvention.VECTOR_OPERATOR))
-            .applyTo(new Rotation(Vector3D.PLUS_I, bank, RotationConvention.VECTOR_OPERATOR));
+    // weight is balanced across the path in the plane of symmetry by n g, so q V = g (n − cos γ cos
+    // φ)
+    double q = GRAVITY / 50 * (condition.loadFactor() - Math.cos(climb) * Math.cos(bank));
+    RealMatrix attitude =
+        turned(0, 0, 0.3).multiply(turned(0, climb, 0)).multiply(turned(bank, 0, 0));
     for (double time : new double[] {0.5, 7, 40}) {
-      Rotation later =
-          attitude.applyTo(
-              new Rotation(
-                  rates, rates.getNorm() * time, RotationConvention.VECTOR_OPERATOR));
-      Vector3D nose = later.applyTo(Vector3D.PLUS_I);
-      Vector3D wing = later.applyTo(Vector3D.PLUS_J);
-      Vector3D belly = later.applyTo(Vector3D.PLUS_K);
-      assertThat(Math.asin(-nose.getZ())).isCloseTo(climb, within(1e-12));
-      assertThat(Math.atan2(wing.getZ(), belly.getZ())).isCloseTo(bank, within(1e-12));
-      double turned = Math.atan2(nose.getY(), nose.getX()) - 0.3;
+      RealMatrix later =
+          attitude.multiply(turned(trim.rollRate() * time, q * time, trim.yawRate() * time));
+      // columns: nose, right wing and belly, seen from the ground with z down
+      double[] nose = later.getColumn(0);
+      assertThat(Math.asin(-nose[2])).isCloseTo(climb, within(1e-12));
+      assertThat(Math.atan2(later.getEntry(2, 1), later.getEntry(2, 2)))
+          .isCloseTo(bank, within(1e-12));
+      double heading = Math.atan2(nose[1], nose[0]) - 0.3;
       double expected = GRAVITY / 50 * Math.tan(bank) * time;
-      assertThat(Math.IEEEremainder(turned - expected, 2 * Math.PI)).isCloseTo(0, within(1e-11));
+      assertThat(Math.IEEEremainder(heading - expected, 2 * Math.PI)).isCloseTo(0, within(1e-11));
     }
+  }
+
+  /** A rotation about one axis by its length: I + sin θ K + (1 − cos θ) K², O. Rodrigues 1840. */
+  private static RealMatrix turned(double x, double y, double z) {
+    double angle = Math.sqrt(x * x + y * y + z * z);
+    RealMatrix k =
+        MatrixUtils.createRealMatrix(new double[][] {{0, -z, y}, {z, 0, -x}, {-y, x, 0}})
+            .scalarMultiply(1 / angle);
+    return MatrixUtils.createRealIdentityMatrix(3)
+        .add(k.scalarMultiply(Math.sin(angle)))
+        .add(k.multiply(k).scalarMultiply(1 - Math.cos(angle)));
   }
 
   /** Whatever the aeroplane: nothing changes in the trimmed state, by the equations of motion. */
@@ -191,8 +196,7 @@ class SteadyStateTest {
                 condition,
                 new PropellerMoments(-300));
         for (SlipTreatment slip : SlipTreatment.values()) {
-          if (slip == SlipTreatment.HELD
-              && state.kind() == SteadyState.Kind.STRAIGHT_SIDESLIP) {
+          if (slip == SlipTreatment.HELD && state.kind() == SteadyState.Kind.STRAIGHT_SIDESLIP) {
             continue;
           }
           assertSteady(trim(state, slip, model), LateralMotion.of(slip, model), seed);
@@ -234,10 +238,11 @@ class SteadyStateTest {
     double moment = loadFactor * GRAVITY * 30 - 90;
     Trim trim = trim(SteadyState.WINGS_LEVEL, SlipTreatment.HELD, model);
     assertThat(trim.aileron()).isCloseTo(-moment / (225_000 * 0.16), within(1e-15));
-    assertThat(Aeroplane.builder("a", 10, 15, Inertia.ofRoll(1000)).imbalance(
-                new LateralImbalance(20, -1.5))
-            .build()
-            .loadedInertia())
+    assertThat(
+            Aeroplane.builder("a", 10, 15, Inertia.ofRoll(1000))
+                .imbalance(new LateralImbalance(20, -1.5))
+                .build()
+                .loadedInertia())
         .isEqualTo(Inertia.ofRoll(1045));
   }
 
@@ -262,8 +267,7 @@ class SteadyStateTest {
     values.remove(Coefficient.CN_DR);
     LateralModel noRudder = model(values, LEVEL, 0);
     assertThatExceptionOfType(CalculationException.class)
-        .isThrownBy(
-            () -> trim(SteadyState.straightAtSideslip(0.1), SlipTreatment.FREE, noRudder))
+        .isThrownBy(() -> trim(SteadyState.straightAtSideslip(0.1), SlipTreatment.FREE, noRudder))
         .withMessageStartingWith("straight-sideslip trim has no single answer")
         .withMessageContaining("Cn_dr");
     assertThatExceptionOfType(CalculationException.class)
@@ -271,12 +275,10 @@ class SteadyStateTest {
         .withMessageStartingWith("steady-turn trim has no single answer");
     values.remove(Coefficient.CL_DA);
     assertThatExceptionOfType(CalculationException.class)
-        .isThrownBy(
-            () -> trim(SteadyState.turn(0.5), SlipTreatment.HELD, model(values, LEVEL, 0)))
+        .isThrownBy(() -> trim(SteadyState.turn(0.5), SlipTreatment.HELD, model(values, LEVEL, 0)))
         .withMessageStartingWith("steady-turn trim has no answer: a rolling moment of");
     assertThatIllegalArgumentException()
-        .isThrownBy(
-            () -> trim(SteadyState.straightAtBank(0.1), SlipTreatment.HELD, noRudder))
+        .isThrownBy(() -> trim(SteadyState.straightAtBank(0.1), SlipTreatment.HELD, noRudder))
         .withMessageContaining("held slip has none");
   }
 
