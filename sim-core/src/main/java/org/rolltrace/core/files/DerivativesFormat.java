@@ -266,16 +266,16 @@ final class DerivativesFormat {
       }
     }
     values = axes.turn(values);
-    values.forEach(
-        (coefficient, value) -> {
-          if (!(Math.abs(value) <= Double.MAX_VALUE)) {
-            in.refuse(
-                where,
-                coefficient.symbol()
-                    + " comes out too large to be computed with; look for a value or unit that is"
-                    + " wrong by orders of magnitude");
-          }
-        });
+    for (Map.Entry<Coefficient, Double> entry : values.entrySet()) {
+      if (!(Math.abs(entry.getValue()) <= Double.MAX_VALUE)) {
+        in.refuse(
+            where,
+            entry.getKey().symbol()
+                + " comes out too large to be computed with; look for a value or unit that is"
+                + " wrong by orders of magnitude");
+        break; // one that is out of range takes others with it
+      }
+    }
     return values;
   }
 

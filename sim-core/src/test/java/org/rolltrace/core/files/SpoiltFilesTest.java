@@ -82,13 +82,6 @@ class SpoiltFilesTest {
             "$.derivatives.primed",
             9,
             "only a dimensional set is primed or not; leave it out beside \"values\""),
-        spoilt(
-            Samples.with(Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY, "\"primed\": true,", ""),
-            "\"dimensional\": {",
-            "\"source2\": {",
-            "$.derivatives.source2",
-            19,
-            "unknown key \"source2\"; did you mean \"source\"? The keys of a set of derivatives are values, source, aileronSign, per, aileronAngle, validAt, dimensional, primed"),
         dimensional(
             "\"-8 1/s\"",
             "-8",
@@ -177,6 +170,35 @@ class SpoiltFilesTest {
             "$.lateralImbalance.arm",
             12,
             "the key \"arm\" is missing; the imbalance must have it"));
+  }
+
+  @Test
+  void aSetWithoutDerivativesSaysWhatItMayHave() {
+    String text = Samples.AEROPLANE.replaceFirst("\"values\": \\{[^}]*\\}", "\"per\": \"radian\"");
+    FileFault fault =
+        Samples.only(Samples.refusalOfAeroplane(Samples.write(directory, "empty.json", text)));
+    assertThat(fault.jsonPath()).isEqualTo("$.derivatives");
+    assertThat(fault.message())
+        .isEqualTo(
+            "there are no derivatives; expected \"values\", or a \"dimensional\" set with"
+                + " \"primed\" and \"validAt\"");
+  }
+
+  /** Turned axes and primes need the yaw inertia, and a side force the mass. */
+  @Test
+  void whatTheConversionNeedsOfTheAeroplaneIsAskedFor() {
+    String text =
+        Samples.with(
+            Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY,
+            "\"yaw\": \"2500 kg m2\",\n    \"product\": \"-100 kg m2\"",
+            "\"product\": \"0 kg m2\"");
+    assertThat(Samples.refusalOfAeroplane(Samples.write(directory, "no-yaw.json", text)).faults())
+        .extracting(fault -> fault.jsonPath() + ": " + fault.message())
+        .containsExactly(
+            "$.angleOfAttack: \"6 deg\": inertias about turned axes need the yaw inertia; give it"
+                + " too",
+            "$.derivatives.dimensional: N_beta is a moment by yaw inertia; give the yaw inertia"
+                + " too");
   }
 
   @ParameterizedTest

@@ -256,7 +256,7 @@ class SteadyStateTest {
                     SteadyState.straightAtSideslip(Math.toRadians(60)),
                     SlipTreatment.FREE,
                     model(SIMPLE, LEVEL, 0)))
-        .withMessageStartingWith("straight-sideslip trim has no answer: at 60 deg of sideslip")
+        .withMessageStartingWith("straight-sideslip trim has no answer: at 60.00 deg of sideslip")
         .withMessageContaining("1.33 times")
         .withMessageEndingWith("ask for less sideslip");
   }
