@@ -82,7 +82,11 @@ final class FlyReport {
     aeroplane
         .imbalance()
         .ifPresent(
-            i -> words.append(format(", %.4g kg of it, %+.3g m to the right", i.mass(), i.arm())));
+            one ->
+                words.append(
+                    format(
+                        "; %.4g kg of the mass hang %.4g m to the %s",
+                        one.mass(), Math.abs(one.arm()), one.arm() < 0 ? "left" : "right")));
     return words.toString();
   }
 
