@@ -63,6 +63,15 @@ final class FlyReport {
     Aeroplane aeroplane = scenario.data().aeroplane();
     row("  aeroplane", aeroplane.name());
     row("  size and mass", sizeAndMass(aeroplane));
+    aeroplane
+        .imbalance()
+        .ifPresent(
+            one ->
+                row(
+                    "  on one side",
+                    format(
+                        "%.4g kg of the mass, %.4g m to the %s",
+                        one.mass(), Math.abs(one.arm()), one.arm() < 0 ? "left" : "right")));
     row("  control travel", travel(aeroplane));
     if (!scenario.data().derivatives().source().isBlank()) {
       wrapped(padded("  derivatives from", 20), scenario.data().derivatives().source());
@@ -79,14 +88,6 @@ final class FlyReport {
     if (aeroplane.inertia().product() != 0) {
       words.append(format(", product %.4g kg m2", aeroplane.inertia().product()));
     }
-    aeroplane
-        .imbalance()
-        .ifPresent(
-            one ->
-                words.append(
-                    format(
-                        "; %.4g kg of the mass hang %.4g m to the %s",
-                        one.mass(), Math.abs(one.arm()), one.arm() < 0 ? "left" : "right")));
     return words.toString();
   }
 
