@@ -14,6 +14,7 @@ from pathlib import Path
 import numpy as np
 import scipy
 from scipy.integrate import solve_ivp
+from scipy.optimize import root
 
 G0 = 9.80665
 FT, LB = 0.3048, 0.45359237
@@ -73,25 +74,62 @@ class Case:
                                 [0, -inertia.get("product", 0), inertia["yaw"]]])
         self.propeller = np.array([0, si(self.scenario["condition"].get("propellerRollMoment", "0 N m")), 0])
         self.full = 0.5 * (si(plane["ailerons"]["up"]) + si(plane["ailerons"]["down"]))
-        # wings-level trim: sideways velocity, aileron and rudder that leave no force and no moment
-        self.slip, self.aileron, self.rudder = np.linalg.solve(self.per[:, [0, 3, 4]], -self.propeller)
-        self.corners = [(0.0, 0.0)]
+        if plane["rudder"]["left"] != plane["rudder"]["right"]:
+            raise ValueError("one travel of the rudder is expected")
+        self.full_rudder = -si(plane["rudder"]["right"])
+        self.climb = si(self.scenario["condition"].get("flightPathAngle", "0 deg"))
+        self.load_factor = np.cos(self.climb)
+        self.trim(self.scenario.get("start", {}).get("trim", {}))
+        self.corners = {"stick": [(0.0, 0.0)], "pedal": [(0.0, 0.0)]}
         for move in self.scenario["inputs"]:
             start, hand, size = si(move["start"]), si(move["movement"]), move["size"]
-            self.corners += [(start, self.corners[-1][1]), (start + hand, size)]
+            corners = self.corners[move["control"]]
+            corners += [(start, corners[-1][1]), (start + hand, size)]
             if move["shape"] == "hold":
                 back = start + si(move["duration"])
-                self.corners += [(back, size), (back + hand, 0.0)]
+                corners += [(back, size), (back + hand, 0.0)]
+
+    def trim(self, wanted):
+        """Bank, rates, sideways velocity, aileron and rudder in which nothing changes."""
+        state = wanted.get("state", "wings-level")
+        self.bank = si(wanted["bank"]) if state == "steady-turn" else 0.0
+        self.load_factor /= np.cos(self.bank)
+        # a heading that turns by g tan(bank)/V, resolved along axes that climb and bank
+        turn = G0 * np.tan(self.bank) / self.speed
+        self.p = -turn * np.sin(self.climb)
+        self.r = turn * np.cos(self.climb) * np.cos(self.bank)
+        if state == "straight-sideslip":
+            given = self.speed * si(wanted["sideslip"])  # the program's sideslip is v/V
+
+            def unbalanced(x):
+                aileron, rudder, bank = x
+                q = G0 / self.speed * np.cos(self.climb) * (1 - np.cos(bank))
+                p = -q * np.sin(bank) * np.tan(self.climb)
+                load = self.per @ [given, p, 0, aileron, rudder] + self.propeller
+                load[0] += self.mass * G0 * np.cos(self.climb) * np.sin(bank)
+                return load / (self.mass * G0)
+
+            answer = root(unbalanced, np.zeros(3), tol=1e-14)
+            self.aileron, self.rudder, self.bank = answer.x
+            q = G0 / self.speed * np.cos(self.climb) * (1 - np.cos(self.bank))
+            self.p, self.r, self.slip = -q * np.sin(self.bank) * np.tan(self.climb), 0.0, given
+        else:
+            rest = self.per[:, [1, 2]] @ [self.p, self.r] + self.propeller
+            self.slip, self.aileron, self.rudder = np.linalg.solve(self.per[:, [0, 3, 4]], -rest)
+
+    def moved(self, control, time):
+        return np.interp(time, *zip(*self.corners[control]))
 
     def stick(self, time):
-        times, positions = zip(*self.corners)
-        return self.aileron + self.full * np.interp(time, times, positions)
+        return self.aileron + self.full * self.moved("stick", time)
 
     def free(self, time, state):
         v, p, r, bank = state
-        load = self.per @ [v, p, r, self.stick(time), self.rudder] + self.propeller
-        load[0] += self.mass * G0 * np.sin(bank) - self.mass * self.speed * r
-        return [*np.linalg.solve(self.matrix, load), p]
+        rudder = self.rudder + self.full_rudder * self.moved("pedal", time)
+        load = self.per @ [v, p, r, self.stick(time), rudder] + self.propeller
+        load[0] += self.mass * G0 * np.cos(self.climb) * np.sin(bank) - self.mass * self.speed * r
+        q = G0 / self.speed * (self.load_factor - np.cos(self.climb) * np.cos(bank))
+        return [*np.linalg.solve(self.matrix, load), p + (q * np.sin(bank) + r * np.cos(bank)) * np.tan(self.climb)]
 
     def slip_and_yaw(self, time, p, bank):
         """Sideways velocity and yaw rate that leave no side force and no yawing moment."""
@@ -121,10 +159,10 @@ class Case:
 
     def history(self, slip, step=0.5):
         """Rows of time, bank, roll rate, yaw rate and sideslip, in deg; every corner and sample ends a step."""
-        bank = si(self.scenario.get("start", {}).get("bank", "0 deg"))
-        state = np.array([self.slip, 0, 0, bank] if slip == "free" else [0, bank], float)
+        bank = self.bank + si(self.scenario.get("start", {}).get("bank", "0 deg"))
+        state = np.array([self.slip, self.p, self.r, bank] if slip == "free" else [self.p, bank], float)
         samples = np.arange(round(si(self.scenario["duration"]) / step) + 1) * step
-        stops = sorted({round(time, 12) for time in [*samples, *(corner[0] for corner in self.corners)]})
+        stops = sorted({round(time, 12) for time in [*samples, *(corner[0] for corners in self.corners.values() for corner in corners)]})
         rows, equations = [], getattr(self, slip)
         for begin, end in zip([0.0, *stops], stops):
             if end > begin:
@@ -144,7 +182,9 @@ def main():
     for name, slip, suffix in (
             ("light-single-roll-entry", "free", ""), ("light-single-held-stick", "free", ""),
             ("light-single-wing-drop", "free", "-free"), ("light-single-wing-drop", "settled", "-settled"),
-            ("tarnlark-cruise-roll-entry", "free", ""), ("large-jet-roll-entry", "free", "")):
+            ("tarnlark-cruise-roll-entry", "free", ""), ("large-jet-roll-entry", "free", ""),
+            ("tarnlark-turn-reversal", "free", ""), ("tarnlark-climbing-turn", "free", ""),
+            ("tarnlark-straight-sideslip", "free", "")):
         with open(OUT / f"{name}{suffix}.csv", "w", newline="\n") as file:
             file.write(head + f"# scenario {name}, {slip} slip\n")
             file.write("time[s],bank[deg],rollRate[deg/s],yawRate[deg/s],sideslip[deg]\n")

@@ -15,6 +15,8 @@ import org.rolltrace.core.quantity.Check;
  * @param ailerons aileron travel; empty when not known, which leaves the stick unused
  * @param rudder rudder travel; empty when not known, which leaves the pedals unused
  * @param limits the aeroplane's own limits
+ * @param imbalance what hangs on one side only; empty for nothing. The mass counts it, the inertia
+ *     does not
  */
 public record Aeroplane(
     String name,
@@ -24,7 +26,8 @@ public record Aeroplane(
     Inertia inertia,
     Optional<Ailerons> ailerons,
     Optional<Rudder> rudder,
-    Limits limits) {
+    Limits limits,
+    Optional<LateralImbalance> imbalance) {
 
   public Aeroplane {
     if (name.isBlank()) {
@@ -35,6 +38,24 @@ public record Aeroplane(
     if (mass.isPresent()) {
       Check.positive("mass, kg,", mass.getAsDouble());
     }
+  }
+
+  /**
+   * The inertia with the lateral imbalance, if there is one: Ixx and Izz grow by m_f y_f².
+   *
+   * @return the inertia that flies
+   */
+  public Inertia loadedInertia() {
+    if (imbalance.isEmpty()) {
+      return inertia;
+    }
+    double more = imbalance.get().massMoment() * imbalance.get().arm();
+    return new Inertia(
+        inertia.roll() + more,
+        inertia.yaw().isPresent()
+            ? OptionalDouble.of(inertia.yaw().getAsDouble() + more)
+            : OptionalDouble.empty(),
+        inertia.product());
   }
 
   /**
@@ -60,6 +81,7 @@ public record Aeroplane(
     private Optional<Ailerons> ailerons = Optional.empty();
     private Optional<Rudder> rudder = Optional.empty();
     private Limits limits = Limits.NONE;
+    private Optional<LateralImbalance> imbalance = Optional.empty();
 
     private Builder(String name, double span, double wingArea, Inertia inertia) {
       this.name = name;
@@ -113,13 +135,25 @@ public record Aeroplane(
     }
 
     /**
+     * Hangs something on one side.
+     *
+     * @param value what and where
+     * @return this builder
+     */
+    public Builder imbalance(LateralImbalance value) {
+      imbalance = Optional.of(value);
+      return this;
+    }
+
+    /**
      * Makes the aeroplane.
      *
      * @return the aeroplane
      * @throws IllegalArgumentException when a value is out of range
      */
     public Aeroplane build() {
-      return new Aeroplane(name, span, wingArea, mass, inertia, ailerons, rudder, limits);
+      return new Aeroplane(
+          name, span, wingArea, mass, inertia, ailerons, rudder, limits, imbalance);
     }
   }
 }

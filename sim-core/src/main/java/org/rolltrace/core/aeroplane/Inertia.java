@@ -54,4 +54,35 @@ public record Inertia(double roll, OptionalDouble yaw, double product) {
   public static Inertia of(double roll, double yaw, double product) {
     return new Inertia(roll, OptionalDouble.of(yaw), product);
   }
+
+  /**
+   * The same body about axes turned about the y axis: x' = x cos a + z sin a, so that a positive
+   * angle lowers the nose of the axes. By the angle of attack, body axes become stability axes.
+   *
+   * <pre>
+   * Ixx' = Ixx cos² a − 2 Ixz sin a cos a + Izz sin² a
+   * Izz' = Ixx sin² a + 2 Ixz sin a cos a + Izz cos² a
+   * Ixz' = Ixz (cos² a − sin² a) + (Ixx − Izz) sin a cos a
+   * </pre>
+   *
+   * @param angle a, rad
+   * @return the inertia; this one for an angle of 0
+   * @throws IllegalArgumentException when the yaw inertia is not known
+   */
+  public Inertia turned(double angle) {
+    if (angle == 0) {
+      return this;
+    }
+    double izz =
+        yaw.orElseThrow(
+            () ->
+                new IllegalArgumentException(
+                    "inertias about turned axes need the yaw inertia; give it too"));
+    double c = Math.cos(angle);
+    double s = Math.sin(angle);
+    return of(
+        roll * c * c - 2 * product * s * c + izz * s * s,
+        roll * s * s + 2 * product * s * c + izz * c * c,
+        product * (c * c - s * s) + (roll - izz) * s * c);
+  }
 }

@@ -116,6 +116,25 @@ public final class FlightCondition {
   }
 
   /**
+   * The same condition in a steady turn along its path. The load factor becomes cos γ / cos φ,
+   * which keeps path angle and bank, unless {@link #withLoadFactor} has set one: then it stays.
+   *
+   * @param bank bank φ, rad, inside ±π/2; 0 for straight flight
+   * @return the condition
+   * @throws IllegalArgumentException if the bank is outside its range
+   */
+  public FlightCondition inTurn(double bank) {
+    if (!(Math.abs(bank) < Math.PI / 2)) {
+      throw new IllegalArgumentException(
+          "bank of a steady turn, rad, is " + bank + "; expected a number inside ±π/2");
+    }
+    double turning = Math.cos(flightPathAngle) / Math.cos(bank);
+    return loadFactorGiven || turning == loadFactor
+        ? this
+        : new FlightCondition(air, motion, turning, false, flightPathAngle);
+  }
+
+  /**
    * The same condition at another speed in the same air.
    *
    * @param kind what kind of airspeed is given

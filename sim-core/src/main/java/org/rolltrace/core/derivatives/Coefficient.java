@@ -61,8 +61,37 @@ public enum Coefficient {
     return symbol;
   }
 
+  /**
+   * The name of the dimensional form, such as {@code L_beta}.
+   *
+   * @return the name; the package page says what each is
+   */
+  public String dimensionalSymbol() {
+    return Character.toUpperCase(symbol.charAt(1)) + symbol.substring(2);
+  }
+
+  /**
+   * The force or moment of which this is a derivative.
+   *
+   * @return Y, L or N
+   */
+  Load load() {
+    return switch (symbol.charAt(1)) {
+      case 'Y' -> Load.SIDE;
+      case 'l' -> Load.ROLL;
+      default -> Load.YAW;
+    };
+  }
+
   Motion motion() {
     return motion;
+  }
+
+  /** What a derivative is of. */
+  enum Load {
+    SIDE,
+    ROLL,
+    YAW
   }
 
   /**

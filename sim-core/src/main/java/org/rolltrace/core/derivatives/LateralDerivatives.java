@@ -13,16 +13,24 @@ import org.rolltrace.core.quantity.Check;
  * was not given is 0 and says that it is absent.
  */
 public final class LateralDerivatives {
+  private static final String AS_IN_THE_MODEL =
+      "non-dimensional, " + PrintedConvention.MODEL.words() + "; stability axes";
+
   private final EnumMap<Coefficient, Double> given;
   private final String source;
   private final Optional<FlightCondition> validAt;
+  private final String convention;
 
   private LateralDerivatives(
-      Map<Coefficient, Double> given, String source, Optional<FlightCondition> validAt) {
+      Map<Coefficient, Double> given,
+      String source,
+      Optional<FlightCondition> validAt,
+      String convention) {
     this.given = new EnumMap<>(Coefficient.class);
     this.given.putAll(given);
     this.source = source;
     this.validAt = validAt;
+    this.convention = convention;
     given.forEach((coefficient, value) -> Check.finite(coefficient.symbol(), value));
   }
 
@@ -35,7 +43,7 @@ public final class LateralDerivatives {
    * @throws IllegalArgumentException when a value is not finite
    */
   public static LateralDerivatives ofGiven(Map<Coefficient, Double> values, String source) {
-    return new LateralDerivatives(values, source, Optional.empty());
+    return new LateralDerivatives(values, source, Optional.empty(), AS_IN_THE_MODEL);
   }
 
   /**
@@ -45,7 +53,17 @@ public final class LateralDerivatives {
    * @return the set
    */
   public LateralDerivatives validAt(FlightCondition condition) {
-    return new LateralDerivatives(given, source, Optional.of(condition));
+    return new LateralDerivatives(given, source, Optional.of(condition), convention);
+  }
+
+  /**
+   * The same set, known to be converted from another convention.
+   *
+   * @param words the convention in which it was printed
+   * @return the set
+   */
+  public LateralDerivatives printedAs(String words) {
+    return new LateralDerivatives(given, source, validAt, words);
   }
 
   /**
@@ -85,6 +103,16 @@ public final class LateralDerivatives {
    */
   public String source() {
     return source;
+  }
+
+  /**
+   * The convention from which the values were converted.
+   *
+   * @return words such as "dimensional, primed, per radian; mean aileron angle,
+   *     right-roll-positive; stability axes"
+   */
+  public String convention() {
+    return convention;
   }
 
   /**

@@ -62,4 +62,25 @@ public record PrintedConvention(
     }
     return value;
   }
+
+  /**
+   * The convention in words.
+   *
+   * @return such as "per radian; mean aileron angle, right-roll-positive"
+   */
+  public String words() {
+    String angle =
+        switch (aileronAngle) {
+          case MEAN -> "mean";
+          case TOTAL -> "total";
+          case ONE_SIDE -> "one-side";
+        };
+    return (angleUnit == AngleUnit.DEGREE ? "per degree" : "per radian")
+        + "; "
+        + angle
+        + " aileron angle, "
+        + (aileronSign == AileronSign.LEFT_ROLL_POSITIVE
+            ? "left-roll-positive"
+            : "right-roll-positive");
+  }
 }

@@ -6,6 +6,7 @@ import java.util.OptionalDouble;
 import org.rolltrace.core.aeroplane.Aeroplane;
 import org.rolltrace.core.aeroplane.Ailerons;
 import org.rolltrace.core.aeroplane.Inertia;
+import org.rolltrace.core.aeroplane.LateralImbalance;
 import org.rolltrace.core.aeroplane.Limits;
 import org.rolltrace.core.aeroplane.Rudder;
 import org.rolltrace.core.aeroplane.SurfaceDynamics;
@@ -23,6 +24,15 @@ final class AeroplaneFormat {
       Range.aboveZeroTo(Math.PI / 2, "a travel above 0 and at most 90 deg");
   private static final Range TRAVEL_OR_NONE = Range.fromTo(0, Math.PI / 2, "from 0 to 90 deg");
 
+  private static final String AXES = "axes";
+  private static final String ANGLE_OF_ATTACK = "angleOfAttack";
+  private static final String IMBALANCE = "lateralImbalance";
+  private static final Range ANGLES =
+      Range.fromTo(
+          Math.nextUp(-Math.PI / 2), Math.nextDown(Math.PI / 2), "inside 90 deg either way");
+
+  static final List<String> AXES_WORDS = List.of("stability", "body");
+
   static final Keys IN_FILE = withTheRest(Keys.of("an aeroplane").required(FormatName.KEY));
   static final Keys INLINE = withTheRest(Keys.of("an aeroplane").optional(FormatName.KEY));
   static final Keys INERTIA = Keys.of("the inertia").required("roll").optional("yaw", "product");
@@ -30,6 +40,7 @@ final class AeroplaneFormat {
       Keys.of("the ailerons").required("up", "down").optional("rateLimit", "lag");
   static final Keys RUDDER =
       Keys.of("the rudder").required("left", "right").optional("rateLimit", "lag");
+  static final Keys LATERAL_IMBALANCE = Keys.of("the imbalance").required("mass", "arm");
   static final Keys LIMITS =
       Keys.of("the limits")
           .optional(
@@ -40,7 +51,8 @@ final class AeroplaneFormat {
   private static Keys withTheRest(Keys format) {
     return format
         .required("span", "wingArea", "inertia", "derivatives")
-        .optional("name", "mass", "ailerons", "rudder", "axes", "limits", "note");
+        .optional("name", "mass", "ailerons", "rudder", "axes", "limits", "note")
+        .optional(ANGLE_OF_ATTACK, IMBALANCE);
   }
 
   static Optional<AeroplaneData> read(JsonValue.ObjectValue object, Keys keys, Faults faults) {
@@ -52,17 +64,26 @@ final class AeroplaneFormat {
     double span = in.quantity("span", Dimension.LENGTH, Range.ABOVE_ZERO);
     double wingArea = in.quantity("wingArea", Dimension.AREA, Range.ABOVE_ZERO);
     OptionalDouble mass = in.optionalQuantity("mass", Dimension.MASS, Range.ABOVE_ZERO);
-    checkAxes(in);
+    double turn = angleOfAttack(in);
     in.freeText("note", JsonTree.LONGEST_TEXT);
     Optional<Inertia> inertia = inertia(in);
     Optional<Ailerons> ailerons = ailerons(in);
     Optional<Rudder> rudder = rudder(in);
     Limits limits = limits(in);
+    Optional<LateralImbalance> imbalance = imbalance(in, mass);
+    boolean described = in.isSound();
     Optional<LateralDerivatives> derivatives = Optional.empty();
     Optional<ObjectCursor> set = in.object("derivatives", DerivativesFormat.DERIVATIVES);
     if (set.isPresent()) {
-      derivatives = DerivativesFormat.read(set.get());
+      derivatives =
+          DerivativesFormat.read(
+              set.get(),
+              described
+                  ? Optional.of(
+                      new DerivativesFormat.Body(span, wingArea, mass, inertia.orElseThrow(), turn))
+                  : Optional.empty());
     }
+    Optional<Inertia> turned = described ? turned(in, inertia.orElseThrow(), turn) : inertia;
     if (!in.isSound()) {
       return Optional.empty();
     }
@@ -73,25 +94,57 @@ final class AeroplaneFormat {
                 span,
                 wingArea,
                 mass,
-                inertia.orElseThrow(),
+                turned.orElseThrow(),
                 ailerons,
                 rudder,
-                limits),
+                limits,
+                imbalance),
             derivatives.orElseThrow()));
   }
 
-  private static void checkAxes(ObjectCursor in) {
-    Optional<JsonValue> axes = in.value("axes");
-    if (axes.isPresent()
-        && axes.get() instanceof JsonValue.Text text
-        && text.text().equals("body")) {
-      in.refuse(
-          "axes",
-          "body axes are not read yet; expected \"stability\". Turn inertias and derivatives to"
-              + " stability axes by the angle of attack");
-    } else {
-      in.word("axes", List.of("stability"));
+  /** The angle by which the axes of the file are turned to stability axes; NaN when refused. */
+  private static double angleOfAttack(ObjectCursor in) {
+    Optional<String> axes = in.word(AXES, AXES_WORDS);
+    double angle = in.quantity(ANGLE_OF_ATTACK, Dimension.ANGLE, ANGLES, 0);
+    boolean body = axes.isPresent() && axes.get().equals("body");
+    if (body && !in.has(ANGLE_OF_ATTACK)) {
+      in.addMissing(
+          ANGLE_OF_ATTACK, "body axes are turned to stability axes by the angle of attack");
     }
+    if (!body && in.has(ANGLE_OF_ATTACK) && (axes.isPresent() || !in.has(AXES))) {
+      in.refuse(
+          ANGLE_OF_ATTACK,
+          "the axes are stability axes, which are not turned; write \"axes\": \"body\", or leave"
+              + " the angle of attack out");
+    }
+    return body ? angle : 0;
+  }
+
+  private static Optional<Inertia> turned(ObjectCursor in, Inertia inertia, double angle) {
+    try {
+      return Optional.of(inertia.turned(angle));
+    } catch (IllegalArgumentException e) {
+      in.refuse(ANGLE_OF_ATTACK, e);
+      return Optional.empty();
+    }
+  }
+
+  private static Optional<LateralImbalance> imbalance(
+      ObjectCursor aeroplane, OptionalDouble whole) {
+    Optional<ObjectCursor> object = aeroplane.object(IMBALANCE, LATERAL_IMBALANCE);
+    if (object.isEmpty()) {
+      return Optional.empty();
+    }
+    ObjectCursor in = object.get();
+    double mass = in.quantity("mass", Dimension.MASS, Range.ABOVE_ZERO);
+    double arm = in.quantity("arm", Dimension.LENGTH, Range.ANY);
+    if (whole.isPresent() && mass >= whole.getAsDouble()) {
+      in.refuse(
+          "mass",
+          new IllegalArgumentException(
+              "not below the mass of the aeroplane, which counts it; expected a part of that"));
+    }
+    return in.isSound() ? Optional.of(new LateralImbalance(mass, arm)) : Optional.empty();
   }
 
   private static Optional<Inertia> inertia(ObjectCursor aeroplane) {

@@ -85,6 +85,11 @@ final class ObjectCursor {
         .toString();
   }
 
+  /** Reports that a key is missing, and why it must be there. */
+  void addMissing(String key, String why) {
+    faults.add(object.place().within(key), "the key " + Shown.text(key) + " is missing; " + why);
+  }
+
   private void addMissing(String key) {
     faults.add(
         object.place().within(key),
@@ -236,6 +241,19 @@ final class ObjectCursor {
       return Optional.empty();
     }
     return Optional.of(text.text());
+  }
+
+  /** The word true or false. */
+  Optional<Boolean> flag(String key) {
+    Optional<JsonValue> value = value(key);
+    if (value.isEmpty()) {
+      return Optional.empty();
+    }
+    if (value.get() instanceof JsonValue.Word word && !word.word().equals("null")) {
+      return Optional.of(word.word().equals("true"));
+    }
+    addWrongType(value.get(), "true or false, without quotation marks");
+    return Optional.empty();
   }
 
   private static String listed(List<String> words) {

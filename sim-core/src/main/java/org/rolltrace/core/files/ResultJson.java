@@ -112,6 +112,7 @@ public final class ResultJson {
     json.writeStringField("title", scenario.title());
     json.writeStringField("aeroplane", scenario.data().aeroplane().name());
     json.writeStringField("derivativesSource", scenario.data().derivatives().source());
+    json.writeStringField("derivativesConvention", scenario.data().derivatives().convention());
     json.writeStringField("slip", scenario.slip().word());
     writeHeldSlip(scenario.programme().heldSideslip());
     json.writeObjectFieldStart("start");
@@ -188,6 +189,12 @@ public final class ResultJson {
     number("yaw", aeroplane.inertia().yaw());
     number("product", aeroplane.inertia().product());
     json.writeEndObject();
+    if (aeroplane.imbalance().isPresent()) {
+      json.writeObjectFieldStart("lateralImbalance");
+      number("mass", aeroplane.imbalance().get().mass());
+      number("arm", aeroplane.imbalance().get().arm());
+      json.writeEndObject();
+    }
     if (aeroplane.ailerons().isPresent()) {
       Ailerons ailerons = aeroplane.ailerons().get();
       json.writeObjectFieldStart("ailerons");
@@ -246,10 +253,13 @@ public final class ResultJson {
 
   private void writeTrim(Trim trim) throws IOException {
     json.writeObjectFieldStart("trim");
-    json.writeStringField("state", "wings-level");
+    json.writeStringField("state", trim.state().kind().word());
     number("aileron", trim.aileron());
     number("rudder", trim.rudder());
+    number("bank", trim.bank());
+    number("rollRate", trim.rollRate());
     number("sideslip", trim.sideslip());
+    number("yawRate", trim.yawRate());
     number("stick", trim.stick());
     number("pedal", trim.pedal());
     json.writeArrayFieldStart("shortfalls");

@@ -7,10 +7,12 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.measures.MeasureOptions;
 import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.motion.SteadyState;
 import org.rolltrace.core.pilot.HeldSideslip;
 import org.rolltrace.core.pilot.PilotInput;
 import org.rolltrace.core.pilot.PilotProgramme;
@@ -40,6 +42,9 @@ final class ScenarioFormat {
   private static final Range HELD =
       Range.fromTo(-HeldSideslip.LARGEST, HeldSideslip.LARGEST, "at most 90 deg either way");
   private static final Range BAND = Range.fromTo(0.001, 0.5, "a fraction from 0.001 to 0.5");
+  private static final Range LEAN =
+      Range.fromTo(
+          Math.nextUp(-Math.PI / 2), Math.nextDown(Math.PI / 2), "inside 90 deg either way");
   private static final double LARGEST_BANK_CHANGE = 3600;
 
   static final Keys SCENARIO =
@@ -50,7 +55,8 @@ final class ScenarioFormat {
   static final Keys HELD_SLIP_POINT = Keys.of("a held slip").required("time", "sideslip");
 
   static final Keys START = Keys.of("the start").optional("bank", "rollRate", "sideslip", "trim");
-  static final Keys TRIM = Keys.of("the trim").optional("state", PROPELLER_ROLL_MOMENT);
+  static final Keys TRIM =
+      Keys.of("the trim").optional("state", "bank", "sideslip", PROPELLER_ROLL_MOMENT);
   static final Keys MEASURES = Keys.of("the measures").optional("settlingBand", BANK_ANGLES);
 
   private ScenarioFormat() {}
@@ -192,14 +198,64 @@ final class ScenarioFormat {
     double rollRate = in.quantity("rollRate", Dimension.ANGULAR_RATE, Range.ANY, 0);
     double sideslip = in.quantity("sideslip", Dimension.ANGLE, Range.ANY, 0);
     PropellerMoments trimmedWith = propeller;
+    Optional<SteadyState> state = Optional.of(SteadyState.WINGS_LEVEL);
     Optional<ObjectCursor> trim = in.object("trim", TRIM);
     if (trim.isPresent()) {
-      trim.get().word("state", List.of("wings-level"));
+      state = state(trim.get());
       trimmedWith = propeller(trim.get(), propeller);
     }
     return in.isSound()
-        ? Optional.of(new Start(trimmedWith, new Disturbance(bank, rollRate, sideslip)))
+        ? Optional.of(
+            new Start(state.orElseThrow(), trimmedWith, new Disturbance(bank, rollRate, sideslip)))
         : Optional.empty();
+  }
+
+  private static Optional<SteadyState> state(ObjectCursor in) {
+    List<String> words = new ArrayList<>();
+    for (SteadyState.Kind kind : SteadyState.Kind.values()) {
+      words.add(kind.word());
+    }
+    OptionalDouble bank = in.optionalQuantity("bank", Dimension.ANGLE, LEAN);
+    OptionalDouble sideslip = in.optionalQuantity("sideslip", Dimension.ANGLE, LEAN);
+    String word = in.word("state", words).orElse(in.has("state") ? "" : words.get(0));
+    if (word.isEmpty()) {
+      return Optional.empty();
+    }
+    SteadyState.Kind kind = SteadyState.Kind.ofWord(word);
+    switch (kind) {
+      case WINGS_LEVEL -> {
+        for (String key : List.of("bank", "sideslip")) {
+          if (in.has(key)) {
+            in.refuse(
+                key,
+                "wings-level trim has no "
+                    + key
+                    + "; choose another state, or put it beside \"trim\" as what displaces the"
+                    + " trimmed aeroplane");
+          }
+        }
+      }
+      case STRAIGHT_SIDESLIP -> {
+        if (in.has("bank") == in.has("sideslip")) {
+          in.faults()
+              .add(
+                  in.place(),
+                  (in.has("bank") ? "both sideslip and bank are" : "neither sideslip nor bank is")
+                      + " given; a straight sideslip takes one of them, the other follows");
+        }
+      }
+      case STEADY_TURN -> {
+        if (!in.has("bank")) {
+          in.addMissing("bank", "a steady turn must have it");
+        }
+        if (in.has("sideslip")) {
+          in.refuse(
+              "sideslip",
+              "a steady turn takes no sideslip; it follows from the ball in the middle");
+        }
+      }
+    }
+    return in.isSound() ? Optional.of(new SteadyState(kind, bank, sideslip)) : Optional.empty();
   }
 
   private static Optional<PilotProgramme> programme(ObjectCursor in) {

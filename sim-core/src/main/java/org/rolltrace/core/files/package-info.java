@@ -37,8 +37,10 @@
  *       only; none when absent. The trim is that without slip</td></tr>
  *   <tr><td>start</td><td>{@code bank} (right wing down positive), {@code rollRate} (rolling right),
  *       {@code sideslip} (wind from the right): displacements from the trimmed state, 0 when absent;
- *       {@code trim}: {@code state}, so far only {@code wings-level}, and {@code
- *       propellerRollMoment}, the one trimmed with, that of the condition when absent</td></tr>
+ *       {@code trim}: {@code state}: {@code wings-level} (default), {@code straight-sideslip} with
+ *       either {@code sideslip} or {@code bank}, or {@code steady-turn} with {@code bank}, these
+ *       inside 90 deg either way; and {@code propellerRollMoment}, the one trimmed with, that of the
+ *       condition when absent. A straight sideslip needs settled or free slip</td></tr>
  *   <tr><td>inputs</td><td>list of inputs, below; up to 200, none when absent; those on one control
  *       add up</td></tr>
  *   <tr><td>duration*</td><td>time above 0, up to 3600 s</td></tr>
@@ -56,7 +58,8 @@
  *   <tr><td>density</td><td>density, instead of temperatureOffset</td></tr>
  *   <tr><td>trueAirspeed, equivalentAirspeed, calibratedAirspeed</td><td>speed above 0 and below
  *       Mach 1; exactly one of the three*</td></tr>
- *   <tr><td>loadFactor</td><td>number; the cosine of the flight-path angle when absent</td></tr>
+ *   <tr><td>loadFactor</td><td>number; when absent the cosine of the flight-path angle, in a
+ *       steady turn divided by that of the bank</td></tr>
  *   <tr><td>flightPathAngle</td><td>angle inside ±90 deg, positive climbing; 0 when absent</td></tr>
  *   <tr><td>propellerRollMoment</td><td>moment, right wing down positive; 0 when absent. Not in
  *       {@code validAt} of derivatives</td></tr>
@@ -120,18 +123,25 @@
  *   <tr><td>note</td><td>text, not looked at</td></tr>
  *   <tr><td>span*, wingArea*, mass</td><td>length, area, mass; above 0. Settled and free slip need
  *       the mass</td></tr>
+ *   <tr><td>lateralImbalance</td><td>{@code mass}* above 0 and {@code arm}*, positive to the right:
+ *       fuel or stores on one side only, which the mass counts and the inertia does not</td></tr>
  *   <tr><td>inertia*</td><td>{@code roll}* Ixx and {@code yaw} Izz, above 0, {@code product} Ixz with
  *       Ixz² &lt; Ixx Izz, 0 when absent. Settled and free slip need yaw</td></tr>
  *   <tr><td>ailerons</td><td>{@code up}* above 0 and {@code down}* from 0, up to 90 deg: travel of
  *       each; {@code rateLimit}: angular rate above 0; {@code lag}: time, 0 or more</td></tr>
  *   <tr><td>rudder</td><td>{@code left}*, {@code right}* above 0, up to 90 deg; {@code rateLimit},
  *       {@code lag}</td></tr>
- *   <tr><td>axes</td><td>{@code stability}</td></tr>
+ *   <tr><td>axes</td><td>{@code stability} (default) or {@code body}: the axes of inertia and
+ *       derivatives</td></tr>
+ *   <tr><td>angleOfAttack</td><td>of body axes*, inside 90 deg either way: inertia and derivatives
+ *       are turned by it to stability axes at reading</td></tr>
  *   <tr><td>limits</td><td>{@code manoeuvringSpeed}, {@code neverExceedSpeed} (calibrated
  *       airspeeds), {@code rollingLoadFactor} (number), {@code rollRate}, {@code bank}; above
  *       0</td></tr>
- *   <tr><td>derivatives*</td><td>{@code source}: text; {@code values}*: numbers by name,
- *       C{Y,l,n}_{beta,p,r,da,dr}, 0 when absent; {@code per}: {@code radian} (default) or {@code
+ *   <tr><td>derivatives*</td><td>{@code source}: text; {@code values}: numbers by name,
+ *       C{Y,l,n}_{beta,p,r,da,dr}, 0 when absent; or instead of them {@code dimensional}: quantities
+ *       by name, {Y,L,N}_{beta,p,r,da,dr,v}, as {@link org.rolltrace.core.derivatives} has them,
+ *       with {@code primed}*: true or false, and {@code validAt}*; {@code per}: {@code radian} (default) or {@code
  *       degree}, for beta, da and dr; {@code aileronSign}: {@code right-roll-positive} (default) or
  *       {@code left-roll-positive}; {@code aileronAngle}: {@code mean} (default), {@code total} or
  *       {@code one-side}; {@code validAt}: a condition</td></tr>

@@ -141,10 +141,11 @@ public final class Flight {
 
   private Flown run() {
     double[] state = new double[scratch.length];
-    state[LateralMotion.BANK] = plan.disturbance().bank();
-    state[LateralMotion.ROLL_RATE] = plan.disturbance().rollRate();
+    state[LateralMotion.BANK] = plan.trim().bank() + plan.disturbance().bank();
+    state[LateralMotion.ROLL_RATE] = plan.trim().rollRate() + plan.disturbance().rollRate();
     if (motion.dimension() > LateralMotion.SIDESLIP) {
       state[LateralMotion.SIDESLIP] = plan.trim().sideslip() + plan.disturbance().sideslip();
+      state[LateralMotion.YAW_RATE] = plan.trim().yawRate();
     }
     stick.initialise(state);
     pedal.initialise(state);

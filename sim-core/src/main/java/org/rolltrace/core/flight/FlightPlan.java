@@ -15,7 +15,7 @@ import org.rolltrace.core.quantity.Check;
  * @param motion the equations
  * @param stickRun from the stick to the ailerons; empty when the stick is not used
  * @param pedalRun from the pedals to the rudder; empty when the pedals are not used
- * @param trim where the controls are before the manoeuvre
+ * @param trim the steady state and the controls before the manoeuvre
  * @param disturbance what displaces the aeroplane at the start
  * @param programme what the pilot does
  * @param captures bank changes, from the first movement of the controls and in its direction, whose

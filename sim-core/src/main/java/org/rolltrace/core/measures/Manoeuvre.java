@@ -5,6 +5,7 @@ import java.util.OptionalDouble;
 import org.rolltrace.core.history.TimeHistory;
 import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.motion.SteadyState;
 import org.rolltrace.core.pilot.PilotProgramme;
 
 /**
@@ -14,6 +15,7 @@ import org.rolltrace.core.pilot.PilotProgramme;
  * @param captures the instants, s, at which the bank had first changed by an angle, rad, in the
  *     commanded direction
  * @param programme what the pilot did
+ * @param start the steady state it started from
  * @param slip the treatment of the slip
  * @param modes of the equations that were flown
  * @param dutchRollPeriod of the free equations, s; empty when they have no dutch roll or the data
@@ -25,6 +27,7 @@ public record Manoeuvre(
     TimeHistory history,
     Map<Double, Double> captures,
     PilotProgramme programme,
+    SteadyState start,
     SlipTreatment slip,
     LateralModes modes,
     OptionalDouble dutchRollPeriod,

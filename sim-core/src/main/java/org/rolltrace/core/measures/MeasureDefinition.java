@@ -157,6 +157,15 @@ public record MeasureDefinition(String name, String title, String unit, String d
           "rad/s",
           "largest difference in roll rate from the same manoeuvre with free slip");
 
+  /** The time to roll out of one turn into the opposite one. */
+  public static final MeasureDefinition TIME_BANK_TO_BANK_30 =
+      new MeasureDefinition(
+          "timeBankToBank30",
+          "Time from 30 deg one way to 30 deg the other",
+          "s",
+          "from the first movement of the control, in a steady turn at 30 deg of bank, to the first"
+              + " crossing of 30 deg of bank the other way");
+
   /**
    * The time to a bank change.
    *

@@ -10,6 +10,7 @@ import java.util.OptionalDouble;
 import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.Mode;
+import org.rolltrace.core.motion.SteadyState;
 import org.rolltrace.core.pilot.InputShape;
 import org.rolltrace.core.pilot.PilotInput;
 import org.rolltrace.core.pilot.PilotProgramme.HeldStretch;
@@ -26,6 +27,11 @@ final class RollEntry {
 
   /** Movements are kept to the nanosecond; a hold this close behind one follows from it, s. */
   private static final double MOVE_ENDS_WITHIN = 1e-6;
+
+  private static final double BANK_OF_TURN = Math.toRadians(30);
+
+  /** A turn that drifts by more than this before the control moves is not steady. */
+  private static final double BANK_AGREES_WITHIN = Math.toRadians(0.1);
 
   private static final String ALREADY_ROLLING =
       "the roll rate is at that level already when the control first moves";
@@ -57,6 +63,7 @@ final class RollEntry {
       for (double degrees : options.bankChanges()) {
         measures.add(Measure.missing(timeToBank(degrees), reason));
       }
+      measures.add(Measure.missing(TIME_BANK_TO_BANK_30, reason));
       measures.add(Measure.missing(ROLL_ACCELERATION, reason));
       measures.add(Measure.missing(HELIX_ANGLE_PEAK, reason));
       measures.add(Measure.missing(HELIX_ANGLE_STEADY, reason));
@@ -96,6 +103,7 @@ final class RollEntry {
     for (double degrees : options.bankChanges()) {
       measures.add(timeToBankChange(degrees, input.start()));
     }
+    measures.add(bankToBank(input, direction));
     measures.add(rollAcceleration(input, direction));
     measures.add(helix(HELIX_ANGLE_PEAK, peak));
     measures.add(helix(HELIX_ANGLE_STEADY, steady));
@@ -241,6 +249,25 @@ final class RollEntry {
     return time == null
         ? Measure.missing(timeToBank(degrees), "not reached in this manoeuvre")
         : Measure.of(timeToBank(degrees), time - start);
+  }
+
+  private Measure bankToBank(InputShape input, double direction) {
+    Curve bank = Curve.ofBank(manoeuvre.history(), direction, 0);
+    double before = bank.at(input.start());
+    if (manoeuvre.start().kind() != SteadyState.Kind.STEADY_TURN
+        || !(Math.abs(Math.abs(before) - BANK_OF_TURN) <= BANK_AGREES_WITHIN)) {
+      return Measure.missing(
+          TIME_BANK_TO_BANK_30,
+          "the control does not first move in a steady turn at 30 deg of bank");
+    }
+    if (before > 0) {
+      return Measure.missing(
+          TIME_BANK_TO_BANK_30, "the control first moves towards the wing that is down");
+    }
+    return bank.firstAtOrAbove(BANK_OF_TURN, input.start(), manoeuvre.duration()).stream()
+        .mapToObj(time -> Measure.of(TIME_BANK_TO_BANK_30, time - input.start()))
+        .findFirst()
+        .orElse(Measure.missing(TIME_BANK_TO_BANK_30, "not reached in this manoeuvre"));
   }
 
   private Measure rollAcceleration(InputShape input, double direction) {

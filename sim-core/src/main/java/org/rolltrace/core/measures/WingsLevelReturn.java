@@ -9,6 +9,7 @@ import java.util.OptionalDouble;
 import org.rolltrace.core.history.TimeHistory;
 import org.rolltrace.core.motion.Mode;
 import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.motion.SteadyState;
 import org.rolltrace.core.pilot.PilotInput;
 
 /** Whether, and how fast, the wings come level by themselves. */
@@ -23,6 +24,11 @@ final class WingsLevelReturn {
   static List<Measure> of(Manoeuvre manoeuvre) {
     if (manoeuvre.slip() == SlipTreatment.HELD) {
       return none("held slip cannot return by itself; choose settled or free slip");
+    }
+    if (manoeuvre.start().kind() != SteadyState.Kind.WINGS_LEVEL) {
+      return none(
+          "the controls are not trimmed for wings level but for a "
+              + manoeuvre.start().kind().word().replace('-', ' '));
     }
     Optional<PilotInput> shaking =
         manoeuvre.programme().inputs().stream()

@@ -5,6 +5,7 @@ import static org.rolltrace.core.derivatives.Coefficient.*;
 import java.util.OptionalDouble;
 import org.rolltrace.core.aeroplane.Aeroplane;
 import org.rolltrace.core.aeroplane.Inertia;
+import org.rolltrace.core.aeroplane.LateralImbalance;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.derivatives.LateralDerivatives;
@@ -17,9 +18,9 @@ import org.rolltrace.core.propeller.PropellerMoments;
  * @param loadFactor n
  * @param flightPathAngle γ, rad
  * @param mass m, kg; empty when not known
- * @param inertia kg m²
+ * @param inertia kg m², with a lateral imbalance
  * @param sideForce Y, N
- * @param rollMoment L, N m, with the propeller's
+ * @param rollMoment L, N m, with the propeller's and that of a lateral imbalance
  * @param yawMoment N, N m
  */
 public record LateralModel(
@@ -38,7 +39,7 @@ public record LateralModel(
    * @param aeroplane span, area, mass and inertia
    * @param derivatives non-dimensional derivatives
    * @param condition speed and density
-   * @param propeller its moments
+   * @param propeller its moments; a lateral imbalance of the aeroplane adds n g m_f y_f in roll
    * @return the constants
    */
   public static LateralModel of(
@@ -49,14 +50,19 @@ public record LateralModel(
     double force = condition.dynamicPressure() * aeroplane.wingArea();
     double moment = force * aeroplane.span();
     double perRate = aeroplane.span() / (2 * condition.trueAirspeed());
+    double weightOnOneSide =
+        condition.loadFactor()
+            * FlightCondition.STANDARD_GRAVITY
+            * aeroplane.imbalance().map(LateralImbalance::massMoment).orElse(0.0);
+    double constantRoll = propeller.roll() + weightOnOneSide;
     return new LateralModel(
         condition.trueAirspeed(),
         condition.loadFactor(),
         condition.flightPathAngle(),
         aeroplane.mass(),
-        aeroplane.inertia(),
+        aeroplane.loadedInertia(),
         load(derivatives, force, perRate, 0, CY_BETA, CY_P, CY_R, CY_DA, CY_DR),
-        load(derivatives, moment, perRate, propeller.roll(), CL_BETA, CL_P, CL_R, CL_DA, CL_DR),
+        load(derivatives, moment, perRate, constantRoll, CL_BETA, CL_P, CL_R, CL_DA, CL_DR),
         load(derivatives, moment, perRate, 0, CN_BETA, CN_P, CN_R, CN_DA, CN_DR));
   }
 

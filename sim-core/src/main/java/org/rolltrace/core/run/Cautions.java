@@ -17,6 +17,7 @@ import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.motion.LateralModel;
 import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.motion.SteadyState;
 import org.rolltrace.core.motion.Trim;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.scenario.Scenario;
@@ -38,6 +39,7 @@ final class Cautions {
   private static final double LARGEST_MACH = 0.7;
   private static final double LIFT_COEFFICIENT_AWAY = 0.1;
   private static final double MACH_AWAY = 0.05;
+  private static final double LOAD_FACTOR_AWAY = 0.05;
 
   private final Scenario scenario;
   private final Flown flown;
@@ -64,7 +66,22 @@ final class Cautions {
 
   private void addTrim(Trim trim) {
     for (String shortfall : trim.shortfalls()) {
-      add("wings-level trim: %s; the manoeuvre starts at the stop and out of trim", shortfall);
+      add(
+          "%s trim: %s; the manoeuvre starts at the stop and out of trim",
+          trim.state().kind().word(), shortfall);
+    }
+    double steady =
+        Math.cos(scenario.condition().flightPathAngle()) / Math.cos(trim.state().bankOfTurn());
+    double given = scenario.condition().loadFactor();
+    if (trim.state().kind() == SteadyState.Kind.STEADY_TURN
+        && Math.abs(given - steady) > LOAD_FACTOR_AWAY) {
+      add(
+          "load factor %.2f is given, but a steady turn at %.0f deg of bank has %.2f: the flight"
+              + " path curves %s",
+          given,
+          Math.toDegrees(Math.abs(trim.state().bankOfTurn())),
+          steady,
+          given > steady ? "up" : "down");
     }
   }
 

@@ -61,6 +61,7 @@ public final class ScenarioRun {
             flown.history(),
             captures(flown),
             scenario.programme(),
+            scenario.start().state(),
             scenario.slip(),
             LateralModes.of(motion),
             dutchRollPeriod(free),
@@ -99,7 +100,8 @@ public final class ScenarioRun {
   }
 
   static Trim trim(Scenario scenario, SlipTreatment slip) {
-    return Trim.wingsLevel(
+    return Trim.of(
+        scenario.start().state(),
         slip,
         model(scenario, scenario.start().trimmedWith()),
         stickRun(scenario.data().aeroplane()),

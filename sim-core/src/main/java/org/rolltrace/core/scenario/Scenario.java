@@ -8,6 +8,7 @@ import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.measures.MeasureOptions;
 import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.motion.SteadyState;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.PilotInput;
 import org.rolltrace.core.pilot.PilotProgramme;
@@ -18,7 +19,8 @@ import org.rolltrace.core.propeller.PropellerMoments;
  *
  * @param title what it is called
  * @param data the aeroplane and its derivatives
- * @param condition height, speed, load factor and flight-path angle
+ * @param condition height, speed, load factor and flight-path angle; a load factor that was not
+ *     given becomes that of the turn it starts from
  * @param propeller the propeller moments it flies with
  * @param slip the treatment of the slip
  * @param start how it starts
@@ -52,6 +54,7 @@ public record Scenario(
               .map(fault -> fault.path() + ": " + fault.message())
               .collect(Collectors.joining("; ")));
     }
+    condition = condition.inTurn(start.state().bankOfTurn());
   }
 
   /**
@@ -112,6 +115,13 @@ public record Scenario(
                 "a sideslip held against time needs mass, which the aeroplane does not give; give"
                     + " it, or take heldSlip out"));
       }
+    }
+    if (slip == SlipTreatment.HELD && start.state().kind() == SteadyState.Kind.STRAIGHT_SIDESLIP) {
+      faults.add(
+          new ScenarioFault(
+              "$.start.trim.state",
+              "a straight sideslip needs settled or free slip; held slip has the ball centred all"
+                  + " the time"));
     }
     for (int i = 0; i < programme.inputs().size(); i++) {
       PilotInput input = programme.inputs().get(i);

@@ -64,7 +64,8 @@ class MutatedFilesTest {
       Samples.SCENARIO_WITH_EVERY_KEY,
       Samples.AEROPLANE,
       Samples.AEROPLANE_WITH_EVERY_KEY,
-      Samples.TRACE
+      Samples.TRACE,
+      Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY
     };
     Path traced = Samples.writeScenario(directory, Samples.SCENARIO_WITH_EVERY_KEY);
     Samples.write(directory, "aeroplanes/some-aeroplane.json", Samples.AEROPLANE);

@@ -18,6 +18,8 @@ final class Samples {
   static final String SCENARIO_WITH_EVERY_KEY = resource("every-key.json");
   static final String AEROPLANE = resource("aeroplanes/some-aeroplane.json");
   static final String AEROPLANE_WITH_EVERY_KEY = resource("aeroplanes/every-key.json");
+  static final String AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY =
+      resource("aeroplanes/every-dimensional-key.json");
 
   static final String TRACE = resource("traces/hand.csv");
 

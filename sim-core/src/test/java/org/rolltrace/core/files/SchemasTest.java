@@ -66,6 +66,8 @@ class SchemasTest {
     objects.put("/$defs/aeroplane/properties/ailerons", AeroplaneFormat.AILERONS);
     objects.put("/$defs/aeroplane/properties/rudder", AeroplaneFormat.RUDDER);
     objects.put("/$defs/aeroplane/properties/limits", AeroplaneFormat.LIMITS);
+    objects.put("/$defs/aeroplane/properties/lateralImbalance", AeroplaneFormat.LATERAL_IMBALANCE);
+    objects.put("/$defs/derivatives/properties/dimensional", DerivativesFormat.DIMENSIONAL_VALUES);
     objects.put("/$defs/derivatives", DerivativesFormat.DERIVATIVES);
     objects.put("/$defs/derivatives/properties/values", DerivativesFormat.COEFFICIENTS);
     objects.put("/$defs/validAt", ConditionFormat.VALID_AT);
@@ -175,6 +177,7 @@ class SchemasTest {
     assertAccepted(SCENARIO, Samples.SCENARIO_WITH_EVERY_KEY);
     assertAccepted(AEROPLANE, Samples.AEROPLANE);
     assertAccepted(AEROPLANE, Samples.AEROPLANE_WITH_EVERY_KEY);
+    assertAccepted(AEROPLANE, Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY);
   }
 
   private static void assertAccepted(Schema schema, String text) {
@@ -192,12 +195,23 @@ class SchemasTest {
     assertThat(keysOf(scenario.path("measures")))
         .containsExactlyInAnyOrderElementsOf(ScenarioFormat.MEASURES.all());
     assertThat(scenario.path("inputs")).hasSize(org.rolltrace.core.files.InputFormat.SHAPES.size());
-    assertThat(keysOf(aeroplane))
+    JsonNode dimensional = JSON.readTree(Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY);
+    assertThat(both(keysOf(aeroplane), keysOf(dimensional)))
         .containsExactlyInAnyOrderElementsOf(AeroplaneFormat.IN_FILE.all());
-    assertThat(keysOf(aeroplane.path("derivatives")))
+    assertThat(both(keysOf(aeroplane.path("derivatives")), keysOf(dimensional.path("derivatives"))))
         .containsExactlyInAnyOrderElementsOf(DerivativesFormat.DERIVATIVES.all());
+    List<String> values = keysOf(dimensional.at("/derivatives/dimensional"));
+    values.addAll(List.of("Y_v", "L_v", "N_v")); // these stand instead of those by beta
+    assertThat(values)
+        .containsExactlyInAnyOrderElementsOf(DerivativesFormat.DIMENSIONAL_VALUES.all());
     assertThat(keysOf(aeroplane.at("/derivatives/values")))
         .containsExactlyInAnyOrderElementsOf(DerivativesFormat.COEFFICIENTS.all());
+  }
+
+  private static Set<String> both(List<String> one, List<String> other) {
+    Set<String> all = new java.util.TreeSet<>(one);
+    all.addAll(other);
+    return all;
   }
 
   private static List<String> keysOf(JsonNode object) {
@@ -241,6 +255,20 @@ class SchemasTest {
         Arguments.of("\"9 degF\"", "\"9 degF\", \"density\": \"1.1 kg/m3\""),
         Arguments.of("\"loadFactor\": 1.5", "\"loadFactor\": \"1.5\""),
         Arguments.of("\"wings-level\"", "\"steady-turn\""),
+        Arguments.of("\"wings-level\"", "\"wings-level\", \"bank\": \"1 deg\""),
+        Arguments.of("\"wings-level\"", "\"straight-sideslip\""),
+        Arguments.of(
+            "\"wings-level\"",
+            "\"straight-sideslip\", \"bank\": \"1 deg\", \"sideslip\": \"1 deg\""),
+        Arguments.of(
+            "\"wings-level\"", "\"steady-turn\", \"bank\": \"1 deg\", \"sideslip\": \"1 deg\""),
+        Arguments.of("\"name\": \"Inline\"", "\"name\": \"Inline\", \"angleOfAttack\": \"1 deg\""),
+        Arguments.of("\"source\": \"made up\"", "\"source\": \"made up\", \"primed\": true"),
+        Arguments.of("\"source\": \"made up\"", "\"source\": \"made up\", \"dimensional\": {}"),
+        Arguments.of("\"values\": {", "\"dimensional\": {"),
+        Arguments.of(
+            "\"mass\": \"1000 kg\"",
+            "\"mass\": \"1000 kg\", \"lateralImbalance\": { \"mass\": \"1 kg\" }"),
         Arguments.of("\"stick\", \"shape\": \"step\"", "\"yoke\", \"shape\": \"step\""),
         Arguments.of("\"shape\": \"step\"", "\"shape\": \"ramp\""),
         Arguments.of("\"shape\": \"step\"", "\"shape\": \"slope\""),
@@ -326,7 +354,11 @@ class SchemasTest {
             Map.entry("angularRate", Dimension.ANGULAR_RATE),
             Map.entry("inertia", Dimension.INERTIA),
             Map.entry("moment", Dimension.MOMENT),
-            Map.entry("density", Dimension.DENSITY));
+            Map.entry("density", Dimension.DENSITY),
+            Map.entry("acceleration", Dimension.ACCELERATION),
+            Map.entry("perTime", Dimension.FREQUENCY),
+            Map.entry("frequencySquared", Dimension.FREQUENCY.power(2)),
+            Map.entry("frequencyPerLength", Dimension.FREQUENCY.per(Dimension.LENGTH)));
     JsonNode definitions = tree("scenario").path("$defs");
     dimensions.forEach(
         (name, dimension) -> {

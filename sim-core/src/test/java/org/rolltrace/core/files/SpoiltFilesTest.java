@@ -138,6 +138,188 @@ class SpoiltFilesTest {
     return new Spoilt(Samples.with(Samples.TRACE, part, replacement), "$", line, message);
   }
 
+  private static Spoilt trim(String keys, String path, String message) {
+    return spoilt(
+        Samples.SCENARIO,
+        "{ \"bank\": \"0 deg\" }",
+        "{ \"trim\": { " + keys + " } }",
+        "$.start.trim" + path,
+        7,
+        message);
+  }
+
+  private static Spoilt dimensional(
+      String part, String replacement, String path, int line, String message) {
+    return spoilt(
+        Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY, part, replacement, path, line, message);
+  }
+
+  /** Faults of the other forms of a set, and of what hangs on one side. */
+  static Stream<Spoilt> printedSets() {
+    return Stream.of(
+        dimensional(
+            "\"primed\": true,",
+            "",
+            "$.derivatives.primed",
+            15,
+            "the key \"primed\" is missing; a dimensional set must say whether the product of inertia is worked in (true) or not (false)"),
+        dimensional(
+            "\"primed\": true",
+            "\"primed\": \"yes\"",
+            "$.derivatives.primed",
+            18,
+            "found the text \"yes\"; expected true or false, without quotation marks"),
+        dimensional(
+            "\"primed\": true",
+            "\"primed\": null",
+            "$.derivatives.primed",
+            18,
+            "found null; expected true or false, without quotation marks. Where there is nothing to say, leave the key out"),
+        dimensional(
+            "\"validAt\": { \"pressureAltitude\": \"0 m\", \"density\": \"1.2 kg/m3\", \"trueAirspeed\": \"50 m/s\" },",
+            "",
+            "$.derivatives.validAt",
+            15,
+            "the key \"validAt\" is missing; a dimensional set holds at one speed and density, which it must state"),
+        dimensional(
+            "\"primed\": true",
+            "\"values\": { \"Cl_p\": -0.5 }, \"primed\": true",
+            "$.derivatives.dimensional",
+            19,
+            "values and dimensional stand together; expected one of the two forms"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"values\"",
+            "\"primed\": false, \"values\"",
+            "$.derivatives.primed",
+            9,
+            "only a dimensional set is primed or not; leave it out beside \"values\""),
+        dimensional(
+            "\"-8 1/s\"",
+            "-8",
+            "$.derivatives.dimensional.L_p",
+            21,
+            "the number stands bare: \"-8\" has no unit; expected a frequency such as \"-8 Hz\" (Hz, 1/s)"),
+        dimensional(
+            "\"-16 1/s2\"",
+            "\"-16 1/s\"",
+            "$.derivatives.dimensional.L_beta",
+            21,
+            "\"-16 1/s\" is a frequency; expected a frequency squared (1/s2)"),
+        dimensional(
+            "\"-12 m/s2\"",
+            "\"-0.24 1/s\"",
+            "$.derivatives.dimensional.Y_beta",
+            20,
+            "\"-0.24 1/s\" is a frequency; expected an acceleration (m/s2, ft/s2)"),
+        dimensional(
+            "\"Y_p\"",
+            "\"Y_v\": \"-0.24 1/s\", \"Y_p\"",
+            "$.derivatives.dimensional.Y_v",
+            20,
+            "Y_v and Y_beta say the same and stand together; keep one"),
+        dimensional(
+            "\"L_p\"",
+            "\"L_q\"",
+            "$.derivatives.dimensional.L_q",
+            21,
+            "unknown key \"L_q\"; did you mean \"L_p\"? The keys of the dimensional values are Y_beta, Y_p, Y_r, Y_da, Y_dr, L_beta, L_p, L_r, L_da, L_dr, N_beta, N_p, N_r, N_da, N_dr, Y_v, L_v, N_v"),
+        dimensional(
+            ", \"N_dr\": \"-4.6 1/s2\"",
+            "",
+            "$.derivatives.dimensional.N_dr",
+            19,
+            "the key \"N_dr\" is missing; in body axes it turns into others of the set; give it, 0 when there is none"),
+        spoilt(
+            Samples.with(
+                Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY,
+                "\"axes\": \"body\",\n  \"angleOfAttack\": \"6 deg\",",
+                "\n"),
+            ", \"N_dr\": \"-4.6 1/s2\"",
+            "",
+            "$.derivatives.dimensional.N_dr",
+            19,
+            "the key \"N_dr\" is missing; a primed set with a product of inertia needs L and N of the same motion together; give it, 0 when there is none"),
+        dimensional(
+            "\"mass\": \"1000 kg\",",
+            "",
+            "$.derivatives.dimensional",
+            19,
+            "Y_beta is a force by mass; give the mass too"),
+        dimensional(
+            "\"-8 1/s\"",
+            "\"-8e307 1/s\"",
+            "$.derivatives.dimensional",
+            19,
+            "Cl_p comes out too large to be computed with; look for a value or unit that is wrong by orders of magnitude"),
+        dimensional(
+            "\"6 deg\"",
+            "\"90 deg\"",
+            "$.angleOfAttack",
+            14,
+            "\"90 deg\" is out of range; expected inside 90 deg either way"),
+        dimensional(
+            "\"body\"",
+            "\"stability\"",
+            "$.angleOfAttack",
+            14,
+            "the axes are stability axes, which are not turned; write \"axes\": \"body\", or leave the angle of attack out"),
+        dimensional(
+            "\"20 kg\"",
+            "\"0 kg\"",
+            "$.lateralImbalance.mass",
+            12,
+            "\"0 kg\" is out of range; expected a value above 0"),
+        dimensional(
+            "\"20 kg\"",
+            "\"1000.1 kg\"",
+            "$.lateralImbalance.mass",
+            12,
+            "\"1000.1 kg\": not below the mass of the aeroplane, which counts it; expected a part of that"),
+        dimensional(
+            ", \"arm\": \"-2 m\"",
+            "",
+            "$.lateralImbalance.arm",
+            12,
+            "the key \"arm\" is missing; the imbalance must have it"));
+  }
+
+  @Test
+  void aSetWithoutDerivativesSaysWhatItMayHave() {
+    String text = Samples.AEROPLANE.replaceFirst("\"values\": \\{[^}]*\\}", "\"per\": \"radian\"");
+    FileFault fault =
+        Samples.only(Samples.refusalOfAeroplane(Samples.write(directory, "empty.json", text)));
+    assertThat(fault.jsonPath()).isEqualTo("$.derivatives");
+    assertThat(fault.message())
+        .isEqualTo(
+            "there are no derivatives; expected \"values\", or a \"dimensional\" set with"
+                + " \"primed\" and \"validAt\"");
+  }
+
+  /** Turned axes and primes need the yaw inertia, and a side force the mass. */
+  @Test
+  void whatTheConversionNeedsOfTheAeroplaneIsAskedFor() {
+    String text =
+        Samples.with(
+            Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY,
+            "\"yaw\": \"2500 kg m2\",\n    \"product\": \"-100 kg m2\"",
+            "\"product\": \"0 kg m2\"");
+    assertThat(Samples.refusalOfAeroplane(Samples.write(directory, "no-yaw.json", text)).faults())
+        .extracting(fault -> fault.jsonPath() + ": " + fault.message())
+        .containsExactly(
+            "$.angleOfAttack: \"6 deg\": inertias about turned axes need the yaw inertia; give it"
+                + " too",
+            "$.derivatives.dimensional: N_beta is a moment by yaw inertia; give the yaw inertia"
+                + " too");
+  }
+
+  @ParameterizedTest
+  @MethodSource("printedSets")
+  void aFaultOfAPrintedSetIsReportedWhereItStands(Spoilt spoilt) {
+    Path file = Samples.write(directory, "aeroplane.json", spoilt.text());
+    check(spoilt, file, Samples.refusalOfAeroplane(file));
+  }
+
   static Stream<Spoilt> scenarios() {
     return Stream.of(
         // missing keys
@@ -564,10 +746,41 @@ class SpoiltFilesTest {
         spoilt(
             Samples.SCENARIO,
             "{ \"bank\": \"0 deg\" }",
-            "{ \"trim\": { \"state\": \"steady-turn\" } }",
+            "{ \"trim\": { \"state\": \"level\" } }",
             "$.start.trim.state",
             7,
-            "unknown state \"steady-turn\"; expected \"wings-level\""),
+            "unknown state \"level\"; expected one of \"wings-level\", \"straight-sideslip\", \"steady-turn\""),
+        trim(
+            "\"state\": \"steady-turn\"",
+            ".bank",
+            "the key \"bank\" is missing; a steady turn must have it"),
+        trim(
+            "\"state\": \"steady-turn\", \"bank\": \"30 deg\", \"sideslip\": \"1 deg\"",
+            ".sideslip",
+            "a steady turn takes no sideslip; it follows from the ball in the middle"),
+        trim(
+            "\"state\": \"steady-turn\", \"bank\": \"90 deg\"",
+            ".bank",
+            "\"90 deg\" is out of range; expected inside 90 deg either way"),
+        trim(
+            "\"bank\": \"30 deg\"",
+            ".bank",
+            "wings-level trim has no bank; choose another state, or put it beside \"trim\" as what displaces the trimmed aeroplane"),
+        trim(
+            "\"state\": \"straight-sideslip\"",
+            "",
+            "neither sideslip nor bank is given; a straight sideslip takes one of them, the other follows"),
+        trim(
+            "\"state\": \"straight-sideslip\", \"bank\": \"3 deg\", \"sideslip\": \"1 deg\"",
+            "",
+            "both sideslip and bank are given; a straight sideslip takes one of them, the other follows"),
+        spoilt(
+            Samples.with(Samples.SCENARIO, "\"free\"", "\"held\""),
+            "{ \"bank\": \"0 deg\" }",
+            "{ \"trim\": { \"state\": \"straight-sideslip\", \"bank\": \"3 deg\" } }",
+            "$.start.trim.state",
+            7,
+            "a straight sideslip needs settled or free slip; held slip has the ball centred all the time"),
         spoilt(
             Samples.SCENARIO,
             "rolltrace-scenario/1",
@@ -743,7 +956,7 @@ class SpoiltFilesTest {
             "\"chord\": \"1 m\", \"rudder\"",
             "$.chord",
             7,
-            "unknown key \"chord\". The keys of an aeroplane are format, span, wingArea, inertia, derivatives, name, mass, ailerons, rudder, axes, limits, note"),
+            "unknown key \"chord\". The keys of an aeroplane are format, span, wingArea, inertia, derivatives, name, mass, ailerons, rudder, axes, limits, note, angleOfAttack, lateralImbalance"),
         spoilt(
             Samples.AEROPLANE,
             "\"Cl_p\"",
@@ -919,16 +1132,16 @@ class SpoiltFilesTest {
             Samples.AEROPLANE_WITH_EVERY_KEY,
             "\"stability\"",
             "\"body\"",
-            "$.axes",
-            15,
-            "body axes are not read yet; expected \"stability\". Turn inertias and derivatives to stability axes by the angle of attack"),
+            "$.angleOfAttack",
+            1,
+            "the key \"angleOfAttack\" is missing; body axes are turned to stability axes by the angle of attack"),
         spoilt(
             Samples.AEROPLANE_WITH_EVERY_KEY,
             "\"stability\"",
             "\"wind\"",
             "$.axes",
             15,
-            "unknown axes \"wind\"; expected \"stability\""));
+            "unknown axes \"wind\"; expected one of \"stability\", \"body\""));
   }
 
   @ParameterizedTest

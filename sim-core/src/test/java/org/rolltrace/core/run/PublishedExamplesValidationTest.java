@@ -245,4 +245,63 @@ class PublishedExamplesValidationTest {
           .isCloseTo(sample[2], within(1e-6));
     }
   }
+
+  /**
+   * The light single by the book's rounded dimensional derivatives (from memory): the book's own
+   * way, so its roots −8.435, −0.00877 and −0.487 ± 2.335 i, with the tolerances above.
+   */
+  @Test
+  void lightSingleByItsDimensionalSet() {
+    LateralModes modes = modes(Shipped.scenario("light-single-dimensional-roll-entry"));
+    assertThat(modes.roll().orElseThrow().root()).isCloseTo(-8.435, within(0.01));
+    assertThat(modes.spiral().orElseThrow().root()).isCloseTo(-0.00877, within(0.0007));
+    Mode.Oscillatory dutchRoll = modes.dutchRoll().orElseThrow();
+    assertThat(dutchRoll.real()).isCloseTo(-0.487, within(0.003));
+    assertThat(dutchRoll.imaginary()).isCloseTo(2.335, within(0.015));
+  }
+
+  /**
+   * The four-engine jet by its primed rows (re-read), against the roots that a matrix library finds
+   * for these rows with g 32.174 ft/s²: nothing is rounded between, so six figures agree; and
+   * against the control power L'_δa, printed.
+   */
+  @ParameterizedTest
+  @CsvSource({
+    "approach, -1.1208812, 0.013118609, -0.10877713, 0.98961009, 0.726",
+    "cruise, -1.258007, -0.0039942784, -0.11847211, 1.4932078, 2.12"
+  })
+  void fourEngineJetByItsPrimedSet(
+      String condition, double roll, double spiral, double real, double imaginary, double power) {
+    Scenario scenario = Shipped.scenario("four-engine-jet-" + condition + "-primed-roll-entry");
+    LateralModes modes = modes(scenario);
+    assertThat(modes.roll().orElseThrow().root()).isCloseTo(roll, within(1e-6));
+    assertThat(modes.spiral().orElseThrow().root()).isCloseTo(spiral, within(1e-7));
+    assertThat(modes.dutchRoll().orElseThrow().real()).isCloseTo(real, within(1e-6));
+    assertThat(modes.dutchRoll().orElseThrow().imaginary()).isCloseTo(imaginary, within(1e-6));
+    double[] rates = new double[4];
+    LateralMotion.of(SlipTreatment.FREE, model(scenario)).rates(0, new double[4], 1, 0, rates);
+    assertThat(rates[ROLL_RATE]).isCloseTo(power, within(1e-12));
+  }
+
+  /**
+   * The same by the unprimed rows, which are rounded to three figures apart from the primed ones:
+   * 0.5 % on roll and dutch roll, 5 % on the spiral, and 1 % on the damping ratio, where N_r of
+   * three figures alone leaves half a per cent.
+   */
+  @ParameterizedTest
+  @CsvSource({
+    "approach, -1.1208812, 0.013118609, 0.99557049, 0.10926111",
+    "cruise, -1.258007, -0.0039942784, 1.4979003, 0.079092121"
+  })
+  void fourEngineJetByItsUnprimedSet(
+      String condition, double roll, double spiral, double frequency, double damping) {
+    LateralModes modes =
+        modes(Shipped.scenario("four-engine-jet-" + condition + "-dimensional-roll-entry"));
+    Percentage half = Percentage.withPercentage(0.5);
+    assertThat(modes.roll().orElseThrow().root()).isCloseTo(roll, half);
+    assertThat(modes.spiral().orElseThrow().root()).isCloseTo(spiral, Percentage.withPercentage(5));
+    assertThat(modes.dutchRoll().orElseThrow().naturalFrequency()).isCloseTo(frequency, half);
+    assertThat(modes.dutchRoll().orElseThrow().dampingRatio())
+        .isCloseTo(damping, Percentage.withPercentage(1));
+  }
 }

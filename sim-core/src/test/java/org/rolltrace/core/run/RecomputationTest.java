@@ -34,7 +34,10 @@ class RecomputationTest {
     "light-single-wing-drop, light-single-wing-drop-free, FREE",
     "light-single-wing-drop, light-single-wing-drop-settled, SETTLED",
     "large-jet-roll-entry, large-jet-roll-entry, FREE",
-    "tarnlark-cruise-roll-entry, tarnlark-cruise-roll-entry, FREE"
+    "tarnlark-cruise-roll-entry, tarnlark-cruise-roll-entry, FREE",
+    "tarnlark-turn-reversal, tarnlark-turn-reversal, FREE",
+    "tarnlark-climbing-turn, tarnlark-climbing-turn, FREE",
+    "tarnlark-straight-sideslip, tarnlark-straight-sideslip, FREE"
   })
   void sameHistory(String name, String file, SlipTreatment slip) throws IOException {
     Scenario shipped = Shipped.scenario(name);

@@ -21,6 +21,7 @@ import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.Mode;
+import org.rolltrace.core.motion.SteadyState;
 import org.rolltrace.core.motion.Trim;
 import org.rolltrace.core.pilot.DoubletInput;
 import org.rolltrace.core.pilot.HeldSideslip;
@@ -68,10 +69,20 @@ final class FlyReport {
     Aeroplane aeroplane = scenario.data().aeroplane();
     row("  aeroplane", aeroplane.name());
     row("  size and mass", sizeAndMass(aeroplane));
+    aeroplane
+        .imbalance()
+        .ifPresent(
+            one ->
+                row(
+                    "  on one side",
+                    format(
+                        "%.4g kg of the mass, %.4g m to the %s",
+                        one.mass(), Math.abs(one.arm()), one.arm() < 0 ? "left" : "right")));
     row("  control travel", travel(aeroplane));
     if (!scenario.data().derivatives().source().isBlank()) {
       wrapped(padded("  derivatives from", 20), scenario.data().derivatives().source());
     }
+    wrapped(padded("  given as", 20), scenario.data().derivatives().convention());
   }
 
   private static String sizeAndMass(Aeroplane aeroplane) {
@@ -271,14 +282,19 @@ final class FlyReport {
   private void addTrim() {
     line("");
     double trimmedWith = result.scenario().start().trimmedWith().roll();
+    Trim trim = result.trim();
+    String state = trim.state().kind().word().replace('-', ' ');
     line(
         trimmedWith == result.scenario().propeller().roll()
-            ? "Trim, wings level"
-            : format("Trim, wings level, with a propeller moment of %+.1f N m", trimmedWith));
-    Trim trim = result.trim();
+            ? "Trim, " + state
+            : format("Trim, %s, with a propeller moment of %+.1f N m", state, trimmedWith));
     surface("aileron", trim.aileron(), "stick", trim.stick());
     surface("rudder", trim.rudder(), "pedal", trim.pedal());
     two("sideslip", format("%.2f deg", Math.toDegrees(trim.sideslip())), "");
+    if (trim.state().kind() != SteadyState.Kind.WINGS_LEVEL) {
+      two("bank", format("%.2f deg", Math.toDegrees(trim.bank())), "");
+      two("yaw rate", format("%.2f deg/s", Math.toDegrees(trim.yawRate())), "");
+    }
     for (String shortfall : trim.shortfalls()) {
       line("  " + shortfall);
     }

@@ -72,6 +72,21 @@ class CommandLineProgramTest {
   }
 
   @Test
+  void flyPrintsTheStateItStartsFromAndTheFormOfTheSet() {
+    Answer turn = run("fly", SCENARIOS.resolve("tarnlark-turn-reversal.json").toString());
+    assertThat(turn.out())
+        .contains("Trim, steady turn")
+        .containsPattern("bank +-30\\.00 deg")
+        .containsPattern("yaw rate +-5\\.07 deg/s")
+        .containsPattern("Time from 30 deg one way to 30 deg the other +1\\.788 s");
+    Answer fuel = run("fly", SCENARIOS.resolve("tarnlark-fuel-imbalance.json").toString());
+    assertThat(fuel.out()).contains("on one side       20.00 kg of the mass, 1.450 m to the right");
+    Answer primed =
+        run("fly", SCENARIOS.resolve("four-engine-jet-cruise-primed-roll-entry.json").toString());
+    assertThat(primed.out()).contains("given as          dimensional, primed, per radian");
+  }
+
+  @Test
   void cautionsGoToStandardError() {
     Answer answer = run("fly", SCENARIOS.resolve("light-single-wing-drop.json").toString());
     assertThat(answer.err()).contains("caution: speed and load factor are held constant");
