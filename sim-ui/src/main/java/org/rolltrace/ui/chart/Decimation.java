@@ -10,6 +10,9 @@ final class Decimation {
   /** More points than this in a column are thinned. */
   private static final int DENSE = 3;
 
+  /** A line may pass a point at this distance, px: less than anyone can see. */
+  private static final double UNSEEN = 0.15;
+
   private Decimation() {}
 
   /** The first sample that matters in a window: the last one before it, so that lines enter it. */
@@ -51,7 +54,7 @@ final class Decimation {
         x[size] = area.xOf(time[i]);
         y[size++] = area.yOf(value[i]);
       }
-      return new Mark.Polyline(x, y, curve.stroke());
+      return straightened(x, y, curve.stroke());
     }
     double perSecond = area.width() / area.time().length();
     int i = start;
@@ -84,6 +87,47 @@ final class Decimation {
       }
     }
     return new Mark.Polyline(Arrays.copyOf(x, size), Arrays.copyOf(y, size), curve.stroke());
+  }
+
+  /**
+   * The same line without the points that lie on it: from each kept point as far as one straight
+   * line passes all points between within {@link #UNSEEN}. Painting costs by the piece.
+   */
+  private static Mark.Polyline straightened(double[] x, double[] y, Stroke stroke) {
+    int size = Math.min(1, x.length);
+    int anchor = 0;
+    double least = Double.NEGATIVE_INFINITY;
+    double most = Double.POSITIVE_INFINITY;
+    double[] keptX = x.clone();
+    double[] keptY = y.clone();
+    for (int i = 1; i < x.length; i++) {
+      double run = x[i] - x[anchor];
+      double slope = (y[i] - y[anchor]) / run;
+      boolean straight = run > 0 && slope >= least && slope <= most;
+      if (!straight && anchor < i - 1) {
+        anchor = i - 1;
+        keptX[size] = x[anchor];
+        keptY[size++] = y[anchor];
+        run = x[i] - x[anchor];
+        least = Double.NEGATIVE_INFINITY;
+        most = Double.POSITIVE_INFINITY;
+      }
+      if (run > 0) {
+        least = Math.max(least, (y[i] - UNSEEN - y[anchor]) / run);
+        most = Math.min(most, (y[i] + UNSEEN - y[anchor]) / run);
+      } else {
+        anchor = i; // a jump
+        keptX[size] = x[i];
+        keptY[size++] = y[i];
+        least = Double.NEGATIVE_INFINITY;
+        most = Double.POSITIVE_INFINITY;
+      }
+    }
+    if (anchor < x.length - 1) {
+      keptX[size] = x[x.length - 1];
+      keptY[size++] = y[x.length - 1];
+    }
+    return new Mark.Polyline(Arrays.copyOf(keptX, size), Arrays.copyOf(keptY, size), stroke);
   }
 
   /** The value of a curve at an instant, and that of its nearest end outside of it. */

@@ -11,10 +11,10 @@ final class WingDrawing {
   private static final double EDGE = 8;
 
   /** The least distance from one wing to the next, px. */
-  private static final double SPACING = 17;
+  private static final double SPACING = 26;
 
   /** From one point of a helix to the next, px along the time axis. */
-  private static final double RESOLUTION = 2;
+  private static final double RESOLUTION = 5;
 
   /** And at most so much bank, rad. */
   private static final double TURN = Math.toRadians(4);

@@ -63,6 +63,9 @@ final class StagePane extends Region {
   private double dragFrom;
   private boolean redrawAsked;
 
+  /** What the overlay shows, as far as it depends on anything. */
+  private List<Object> overlaid = List.of();
+
   StagePane(ManoeuvreModel model, ObjectProperty<Palette> palette) {
     this.model = model;
     this.palette = palette;
@@ -256,17 +259,25 @@ final class StagePane extends Region {
   /** The cursor through all strips with its read-out, and the aeroplane seen from behind. */
   private void drawOverlay() {
     GraphicsContext context = overlay.getGraphicsContext2D();
-    context.clearRect(0, 0, overlay.getWidth(), overlay.getHeight());
     RunResult result = model.session().resultProperty().get();
     if (result == null || areas.isEmpty()) {
+      overlaid = List.of();
+      context.clearRect(0, 0, overlay.getWidth(), overlay.getHeight());
       return;
     }
     TimeHistory history = result.history();
-    CanvasPainter painter = new CanvasPainter(context, palette.get());
     OptionalDouble instant = model.shownInstant();
     double shown = instant.orElse(0);
     int index = history.lastAt(shown + 1e-9);
     double bank = history.value(Channel.BANK, index);
+    // Without a cursor only the rear view is here, and mostly it is the one that is here already.
+    List<Object> now = List.of(instant, bank, palette.get(), getWidth(), getHeight());
+    if (instant.isEmpty() && now.equals(overlaid)) {
+      return;
+    }
+    overlaid = now;
+    context.clearRect(0, 0, overlay.getWidth(), overlay.getHeight());
+    CanvasPainter painter = new CanvasPainter(context, palette.get());
     double size = Math.min(0.62 * StripChart.LEFT, 0.56 * traceHeight);
     RearView.draw(bank, INSET + 0.42 * StripChart.LEFT, 0.6 * traceHeight, size)
         .forEach(painter::paint);
