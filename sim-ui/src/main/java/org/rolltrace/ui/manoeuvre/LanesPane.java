@@ -84,7 +84,12 @@ final class LanesPane extends Region {
 
   private void refresh() {
     RunResult result = model.session().resultProperty().get();
-    blocks = result == null ? List.of() : LaneBlock.of(result.scenario().programme().inputs());
+    List<LaneBlock> now =
+        result == null ? List.of() : LaneBlock.of(result.scenario().programme().inputs());
+    if (now.equals(blocks)) {
+      return; // what is drawn is still so
+    }
+    blocks = now;
     draw();
   }
 
