@@ -1,5 +1,7 @@
 package org.rolltrace.core.files;
 
+import org.rolltrace.core.quantity.Visible;
+
 /** Pieces of a file as messages show them: short, on one line, nothing invisible. */
 final class Shown {
   static final int LONGEST = 40;
@@ -18,7 +20,7 @@ final class Shown {
     int end = text.offsetByCodePoints(0, Math.min(LONGEST, text.codePointCount(0, text.length())));
     for (int i = 0; i < end; i += Character.charCount(text.codePointAt(i))) {
       int c = text.codePointAt(i);
-      if (isVisible(c)) {
+      if (Visible.is(c)) {
         out.appendCodePoint(c);
       } else {
         escape(out, c);
@@ -37,20 +39,5 @@ final class Shown {
     for (int shift = 12; shift >= 0; shift -= 4) {
       out.append(HEX.charAt((c >> shift) & 0xf));
     }
-  }
-
-  private static boolean isVisible(int c) {
-    return switch (Character.getType(c)) {
-      case Character.CONTROL,
-          Character.FORMAT,
-          Character.SURROGATE,
-          Character.PRIVATE_USE,
-          Character.UNASSIGNED,
-          Character.LINE_SEPARATOR,
-          Character.PARAGRAPH_SEPARATOR ->
-          false;
-      case Character.SPACE_SEPARATOR -> c == ' ';
-      default -> true;
-    };
   }
 }

@@ -26,27 +26,12 @@ public final class QuantityException extends RuntimeException {
         .codePoints()
         .forEach(
             c -> {
-              if (visible(c)) {
+              if (Visible.is(c)) {
                 out.appendCodePoint(c);
               } else {
                 out.append(String.format(Locale.ROOT, "\\u%04x", c));
               }
             });
     return out.append(cut ? "..." : "").append(mark).toString();
-  }
-
-  private static boolean visible(int c) {
-    return switch (Character.getType(c)) {
-      case Character.CONTROL,
-          Character.FORMAT,
-          Character.SURROGATE,
-          Character.PRIVATE_USE,
-          Character.UNASSIGNED,
-          Character.LINE_SEPARATOR,
-          Character.PARAGRAPH_SEPARATOR ->
-          false;
-      case Character.SPACE_SEPARATOR -> c == ' ';
-      default -> true;
-    };
   }
 }
