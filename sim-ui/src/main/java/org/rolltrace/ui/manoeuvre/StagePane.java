@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import javafx.application.Platform;
 import javafx.beans.property.ObjectProperty;
 import javafx.scene.canvas.Canvas;
 import javafx.scene.canvas.GraphicsContext;
@@ -96,6 +97,17 @@ final class StagePane extends Region {
         });
     addEventHandler(ScrollEvent.SCROLL, this::scrolled);
     addEventHandler(KeyEvent.KEY_PRESSED, this::keyPressed);
+    Runnable atPulse = this::redrawIfAsked;
+    sceneProperty()
+        .addListener(
+            (property, before, now) -> {
+              if (before != null) {
+                before.removePostLayoutPulseListener(atPulse);
+              }
+              if (now != null) {
+                now.addPostLayoutPulseListener(atPulse);
+              }
+            });
     dataChanged();
   }
 
@@ -136,16 +148,20 @@ final class StagePane extends Region {
     }
   }
 
-  /** Several changes within one pulse are drawn once. */
+  /** Several changes within one pulse are drawn once, and by that pulse. */
   private void askRedraw() {
-    if (!redrawAsked) {
-      redrawAsked = true;
-      javafx.application.Platform.runLater(this::redraw);
+    redrawAsked = true;
+    Platform.requestNextPulse();
+  }
+
+  private void redrawIfAsked() {
+    if (redrawAsked) {
+      redrawAsked = false;
+      redraw();
     }
   }
 
   private void redraw() {
-    redrawAsked = false;
     double width = getWidth();
     double height = getHeight();
     RunResult result = model.session().resultProperty().get();

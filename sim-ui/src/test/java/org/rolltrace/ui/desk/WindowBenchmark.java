@@ -44,8 +44,7 @@ public final class WindowBenchmark extends Application {
   private final Figures painted = new Figures("edit to painted");
   private final Figures flown = new Figures("  of it: check and flight, beside the window");
   private final Figures shown = new Figures("  of it: readings, fields, strips, lanes");
-  private final Figures drawn = new Figures("  of it: drawing the stage");
-  private final Figures laying = new Figures("  of it: style and layout");
+  private final Figures laying = new Figures("  of it: style, layout, drawing the stage");
   private final Figures rendering = new Figures("  of it: renderer");
   private final Figures frames = new Figures("from frame to frame");
   private final Figures moving = new Figures("own work: overlay, slider, time");
@@ -69,7 +68,6 @@ public final class WindowBenchmark extends Application {
   private long pulse;
   private double lastFlown;
   private double lastShown;
-  private double lastDrawn;
 
   /** Made by the window toolkit. */
   public WindowBenchmark() {}
@@ -196,7 +194,7 @@ public final class WindowBenchmark extends Application {
             });
   }
 
-  /** Comes behind all that the window does with a result; the stage draws when this returns. */
+  /** Comes behind all that the window does with a result; the next pulse draws the stage. */
   private void watchResultLast() {
     session
         .resultProperty()
@@ -207,13 +205,7 @@ public final class WindowBenchmark extends Application {
               }
               awaitsResult = false;
               lastShown = since(edited) - lastFlown;
-              long begun = System.nanoTime();
-              Platform.runLater(
-                  () -> {
-                    lastDrawn = since(begun);
-                    awaitsPulse = true;
-                    Platform.requestNextPulse();
-                  });
+              awaitsPulse = true;
             });
   }
 
@@ -230,7 +222,6 @@ public final class WindowBenchmark extends Application {
               painted.add(whole + rendered);
               flown.add(lastFlown);
               shown.add(lastShown);
-              drawn.add(lastDrawn);
               laying.add(layout);
               rendering.add(rendered);
             }
@@ -307,7 +298,7 @@ public final class WindowBenchmark extends Application {
         "median",
         "95 %",
         "most");
-    List.of(painted, laidOut, flown, shown, drawn, laying, rendering).forEach(Figures::print);
+    List.of(painted, laidOut, flown, shown, laying, rendering).forEach(Figures::print);
     System.out.printf(
         Locale.ROOT,
         "%nreplay of %.0f s: %.1f frames a second%n",
