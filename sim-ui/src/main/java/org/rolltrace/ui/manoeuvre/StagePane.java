@@ -113,10 +113,8 @@ final class StagePane extends Region {
 
   @Override
   protected void layoutChildren() {
-    for (Canvas canvas : List.of(drawing, overlay)) {
-      canvas.setWidth(getWidth());
-      canvas.setHeight(getHeight());
-    }
+    drawing.setWidth(getWidth());
+    drawing.setHeight(getHeight());
     askRedraw();
   }
 
@@ -278,7 +276,7 @@ final class StagePane extends Region {
     RunResult result = model.session().resultProperty().get();
     if (result == null || areas.isEmpty()) {
       overlaid = List.of();
-      context.clearRect(0, 0, overlay.getWidth(), overlay.getHeight());
+      overlay.setVisible(false);
       return;
     }
     TimeHistory history = result.history();
@@ -292,6 +290,7 @@ final class StagePane extends Region {
       return;
     }
     overlaid = now;
+    coverWithOverlay(instant.isPresent());
     context.clearRect(0, 0, overlay.getWidth(), overlay.getHeight());
     CanvasPainter painter = new CanvasPainter(context, palette.get());
     double size = Math.min(0.62 * StripChart.LEFT, 0.56 * traceHeight);
@@ -311,12 +310,18 @@ final class StagePane extends Region {
     }
     double x = INSET + first.xOf(shown);
     painter.paint(
-        new Mark.Line(
-            x, 6, x, overlay.getHeight() - 22, new Stroke(Ink.CURSOR, 1, Dash.SOLID, 0.8)));
+        new Mark.Line(x, 6, x, getHeight() - 22, new Stroke(Ink.CURSOR, 1, Dash.SOLID, 0.8)));
     for (int i = 0; i < areas.size() && i < strips.size(); i++) {
       readOut(painter, areas.get(i), strips.get(i), shown, x);
     }
     tag(painter, x, traceHeight - 3, figure(shown, " s"));
+  }
+
+  /** An overlay costs the renderer its area, so without a cursor it covers the rear view alone. */
+  private void coverWithOverlay(boolean all) {
+    overlay.setVisible(true);
+    overlay.setWidth(all ? getWidth() : AXIS_FROM);
+    overlay.setHeight(all ? getHeight() : traceHeight);
   }
 
   private void readOut(CanvasPainter painter, PlotArea area, Strip strip, double shown, double x) {
@@ -345,7 +350,7 @@ final class StagePane extends Region {
   /** A short text beside the cursor, on the side that has room. */
   private void tag(CanvasPainter painter, double x, double y, String words) {
     double width = LETTER * words.length() + 8;
-    boolean right = x + width < overlay.getWidth() - StripChart.RIGHT;
+    boolean right = x + width < getWidth() - StripChart.RIGHT;
     double from = right ? x + 4 : x - 4 - width;
     painter.paint(
         new Mark.Area(

@@ -3,10 +3,7 @@ package org.rolltrace.ui.session;
 import java.io.UncheckedIOException;
 import java.nio.file.Path;
 import java.time.Duration;
-import java.util.ArrayList;
-import java.util.List;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import java.util.function.UnaryOperator;
 import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.beans.property.ReadOnlyBooleanWrapper;
@@ -20,7 +17,6 @@ import org.rolltrace.core.files.FileFault;
 import org.rolltrace.core.files.FileFaultsException;
 import org.rolltrace.core.files.ScenarioDocument;
 import org.rolltrace.core.files.ScenarioFile;
-import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.run.RunResult;
 import org.rolltrace.ui.task.Runner;
 
@@ -528,41 +524,6 @@ public final class DeskSession {
       }
     }
     return Optional.empty();
-  }
-
-  /**
-   * The measures of the result beside those of the ghost.
-   *
-   * @return in the order of the result, then what only the ghost has
-   */
-  public List<Difference> differences() {
-    List<Difference> rows = new ArrayList<>();
-    RunResult now = result.get();
-    RunResult then = ghost.get();
-    if (now != null) {
-      for (Measure measure : now.measures()) {
-        OptionalDouble other =
-            then == null
-                ? OptionalDouble.empty()
-                : then.measure(measure.definition().name())
-                    .map(Measure::value)
-                    .orElse(OptionalDouble.empty());
-        rows.add(new Difference(measure.definition(), measure.value(), other, measure.remark()));
-      }
-    }
-    if (now != null && then != null) {
-      for (Measure measure : then.measures()) {
-        if (now.measure(measure.definition().name()).isEmpty()) {
-          rows.add(
-              new Difference(
-                  measure.definition(),
-                  OptionalDouble.empty(),
-                  measure.value(),
-                  "only the ghost has it"));
-        }
-      }
-    }
-    return rows;
   }
 
   /** Ends the session in good order: nothing is left to recover, and nothing is shown any more. */

