@@ -40,7 +40,7 @@
  *       {@code trim}: {@code state}: {@code wings-level} (default), {@code straight-sideslip} with
  *       either {@code sideslip} or {@code bank}, or {@code steady-turn} with {@code bank}, these
  *       inside 90 deg either way; and {@code propellerRollMoment}, the one trimmed with, that of the
- *       condition when absent. A straight sideslip needs settled or free slip</td></tr>
+ *       condition when absent. With held slip a straight sideslip is held all the time</td></tr>
  *   <tr><td>inputs</td><td>list of inputs, below; up to 200, none when absent; those on one control
  *       add up</td></tr>
  *   <tr><td>duration*</td><td>time above 0, up to 3600 s</td></tr>

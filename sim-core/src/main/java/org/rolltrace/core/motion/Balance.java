@@ -38,16 +38,39 @@ final class Balance {
     this.yaw = model.yawMoment();
   }
 
-  /** No sideslip, pedals alone: the ailerons balance the rolling moment. */
+  /** The sideslip is held, pedals alone: the ailerons balance the rolling moment. */
   Found ofRoll() {
-    if (state.kind() == SteadyState.Kind.STRAIGHT_SIDESLIP) {
-      throw new IllegalArgumentException(
-          "a straight sideslip needs settled or free slip; held slip has none");
+    if (state.kind() != SteadyState.Kind.STRAIGHT_SIDESLIP) {
+      double bank = state.bankOfTurn();
+      return balancedByAilerons(bank, turn(bank), 0);
     }
-    double bank = state.bankOfTurn();
-    double yawRate = turn(bank);
+    // The turn of held slip is that of the weight and of the slip: the two cancel.
+    if (state.sideslip().isPresent()) {
+      double sideslip = state.sideslip().getAsDouble();
+      return balancedByAilerons(bankAgainst(side.perSideslip() * sideslip, sideslip), 0, sideslip);
+    }
+    double bank = state.bank().getAsDouble();
+    return balancedByAilerons(bank, 0, slipAgainst(bank));
+  }
+
+  private double slipAgainst(double bank) {
+    double force = weightSideways(bank);
+    double sideslip = force == 0 ? 0 : -force / side.perSideslip();
+    if (!(Math.abs(sideslip) < Math.PI / 2)) {
+      throw new CalculationException(
+          String.format(
+              Locale.ROOT,
+              "%s trim has no answer: at %.4g deg of bank no sideslip below 90 deg has the side force"
+                  + " that balances the weight; give CY_beta, or ask for less bank",
+              word(),
+              Math.toDegrees(bank)));
+    }
+    return sideslip;
+  }
+
+  private Found balancedByAilerons(double bank, double yawRate, double sideslip) {
     double rollRate = rollRate(bank, yawRate);
-    double moment = roll.at(0, rollRate, yawRate, 0, 0);
+    double moment = roll.at(sideslip, rollRate, yawRate, 0, 0);
     if (moment != 0 && roll.perAileron() == 0) {
       throw new CalculationException(
           word()
@@ -56,7 +79,7 @@ final class Balance {
               + " N m has to be balanced and Cl_da is 0; give Cl_da");
     }
     double aileron = moment == 0 ? 0 : -moment / roll.perAileron();
-    return new Found(aileron, 0, bank, rollRate, 0, yawRate);
+    return new Found(aileron, 0, bank, rollRate, sideslip, yawRate);
   }
 
   /** Side force, rolling and yawing moment together. */

@@ -3,8 +3,8 @@ package org.rolltrace.core.motion;
 import org.rolltrace.core.pilot.HeldSideslip;
 
 /**
- * The sideslip is what the pilot holds, none unless one against time is given: one degree of
- * freedom, with the yaw rate of the turn that goes with bank and slip,
+ * The sideslip is what the pilot holds: none, that of the straight sideslip it starts from, or one
+ * against time. One degree of freedom, with the yaw rate of the turn that goes with bank and slip,
  *
  * <p>r = (g/V) sin φ cos γ + q̄ S CY_β β/(m V) − β̇.
  *

@@ -107,16 +107,21 @@ public record LateralModel(
   }
 
   double massForSlip() {
-    return mass.orElseThrow(this::cannotSlip);
+    return mass.orElseThrow(
+        () -> new IllegalArgumentException("a sideslip needs the mass" + stillMissing()));
   }
 
   double yawInertiaForSlip() {
-    return inertia.yaw().orElseThrow(this::cannotSlip);
+    return inertia
+        .yaw()
+        .orElseThrow(
+            () ->
+                new IllegalArgumentException(
+                    "settled and free slip need mass and yaw inertia" + stillMissing()));
   }
 
-  private IllegalArgumentException cannotSlip() {
-    return new IllegalArgumentException(
-        "settled and free slip need mass and yaw inertia; missing: " + missingForSlip());
+  private String stillMissing() {
+    return "; missing: " + missingForSlip();
   }
 
   /** g/V, 1/s. */

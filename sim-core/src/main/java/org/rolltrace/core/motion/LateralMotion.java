@@ -49,7 +49,7 @@ public abstract sealed class LateralMotion permits HeldSlip, SettledSlip, FreeSl
   }
 
   /**
-   * The equations of a slip that is held against time.
+   * The equations of a slip that is held, constant or against time.
    *
    * @param model the dimensional constants
    * @param sideslip what the pilot holds

@@ -34,18 +34,18 @@ public record Trim(
     OptionalDouble pedal) {
 
   /**
-   * The trim in a steady state. With held slip the pedals are left alone and the ailerons balance
-   * the rolling moment; otherwise side force, rolling and yawing moment are balanced together.
+   * The trim in a steady state. With held slip the pedals are left alone, the ailerons balance the
+   * rolling moment, and in a straight sideslip the bank balances the side force of the slip;
+   * otherwise side force, rolling and yawing moment are balanced together.
    *
-   * @param state what is trimmed for; a straight sideslip not with held slip
+   * @param state what is trimmed for; a straight sideslip needs the mass
    * @param slip treatment of the slip
    * @param model the dimensional constants
    * @param stickRun from the stick to the ailerons, where the travel is known
    * @param pedalRun from the pedals to the rudder, where the travel is known
    * @return the trim, which may lie beyond the stops
    * @throws CalculationException when nothing balances the moments; its message says why
-   * @throws IllegalArgumentException for a straight sideslip with held slip, and when the aeroplane
-   *     lacks what the slip needs
+   * @throws IllegalArgumentException when the aeroplane lacks what the slip needs
    */
   public static Trim of(
       SteadyState state,

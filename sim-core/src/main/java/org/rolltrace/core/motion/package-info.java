@@ -15,7 +15,7 @@
  *
  * free:    mV β̇ = Y + m g cos γ sin φ − mV r;   [Ixx −Ixz; −Ixz Izz][ṗ; ṙ] = [L; N]
  * settled: β̇ = 0 and N = 0, solved for β and r at every instant;   Ixx ṗ = L
- * held:    β and β̇ as the pilot holds them, 0 unless against time;   Ixx ṗ = L
+ * held:    β and β̇ as the pilot holds them, 0 unless said;           Ixx ṗ = L
  *          r = (g/V) sin φ cos γ + q̄ S CY_β β/(mV) − β̇
  * </pre>
  *
@@ -33,8 +33,10 @@
  * <p>The load factor is that of the condition. A turn whose condition gives none has n = cos γ /
  * cos φ, which keeps speed, path angle and bank together; straight flight has n = cos γ. With
  * another one that is given the path curves up or down while the manoeuvre starts. A straight
- * sideslip would need n = cos γ cos φ strictly; the difference is left out. With held slip, β = 0,
- * the pedals stay where they are, and L = 0 gives δa; a straight sideslip has no answer then.
+ * sideslip would need n = cos γ cos φ strictly; the difference is left out. With held slip the
+ * pedals stay where they are, β is 0, and L = 0 gives δa. In a straight sideslip β is held at that
+ * of the trim, also while it is flown: m g cos γ sin φ + q̄ S CY_β β = 0, the turn of held slip
+ * being 0, gives φ of a β, or β of a φ.
  *
  * <p>A lateral imbalance of mass m_f at y_f to the right adds n g m_f y_f to L and m_f y_f² to Ixx
  * and Izz; what it does in pitch is left out.

@@ -62,6 +62,16 @@ public final class HeldSideslip {
   }
 
   /**
+   * The same sideslip all the time.
+   *
+   * @param sideslip β, rad, wind from the right positive, at most {@link #LARGEST} either way
+   * @return the sideslip
+   */
+  public static HeldSideslip constant(double sideslip) {
+    return of(List.of(new Point(0, sideslip)));
+  }
+
+  /**
    * The points.
    *
    * @return as given; none for the ball in the middle

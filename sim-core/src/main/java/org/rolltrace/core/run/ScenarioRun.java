@@ -22,7 +22,9 @@ import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.LateralMotion;
 import org.rolltrace.core.motion.Mode;
 import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.motion.SteadyState;
 import org.rolltrace.core.motion.Trim;
+import org.rolltrace.core.pilot.HeldSideslip;
 import org.rolltrace.core.propeller.PropellerMoments;
 import org.rolltrace.core.scenario.Scenario;
 
@@ -51,9 +53,9 @@ public final class ScenarioRun {
    */
   public static RunResult execute(Scenario scenario, FlightSettings settings) {
     LateralModel model = model(scenario, scenario.propeller());
-    LateralMotion motion = motion(scenario, model);
     FreeModes free = FreeModes.of(model, scenario.data().derivatives());
     Trim trim = trim(scenario, scenario.slip());
+    LateralMotion motion = motion(scenario, model, trim);
     Flown flown = Flight.fly(plan(scenario, motion, trim), settings);
 
     Manoeuvre manoeuvre =
@@ -89,14 +91,21 @@ public final class ScenarioRun {
         propeller);
   }
 
-  private static LateralMotion motion(Scenario scenario, LateralModel model) {
+  private static LateralMotion motion(Scenario scenario, LateralModel model, Trim trim) {
     try {
       return scenario.slip() == SlipTreatment.HELD
-          ? LateralMotion.holding(model, scenario.programme().heldSideslip())
+          ? LateralMotion.holding(model, held(scenario, trim))
           : LateralMotion.of(scenario.slip(), model);
     } catch (IllegalArgumentException undetermined) {
       throw new CalculationException(undetermined.getMessage(), undetermined);
     }
+  }
+
+  /** A straight sideslip is held at what it was trimmed at. */
+  private static HeldSideslip held(Scenario scenario, Trim trim) {
+    return scenario.start().state().kind() == SteadyState.Kind.STRAIGHT_SIDESLIP
+        ? HeldSideslip.constant(trim.sideslip())
+        : scenario.programme().heldSideslip();
   }
 
   static Trim trim(Scenario scenario, SlipTreatment slip) {

@@ -117,11 +117,19 @@ public record Scenario(
       }
     }
     if (slip == SlipTreatment.HELD && start.state().kind() == SteadyState.Kind.STRAIGHT_SIDESLIP) {
-      faults.add(
-          new ScenarioFault(
-              "$.start.trim.state",
-              "a straight sideslip needs settled or free slip; held slip has the ball centred all"
-                  + " the time"));
+      if (!programme.heldSideslip().isNone()) {
+        faults.add(
+            new ScenarioFault(
+                "$.heldSlip",
+                "the straight sideslip it starts from is held already; take heldSlip out, or start"
+                    + " from another state"));
+      } else if (aeroplane.mass().isEmpty()) {
+        faults.add(
+            new ScenarioFault(
+                "$.start.trim.state",
+                "a straight sideslip needs mass, which the aeroplane does not give; give it, or"
+                    + " choose another state"));
+      }
     }
     for (int i = 0; i < programme.inputs().size(); i++) {
       PilotInput input = programme.inputs().get(i);

@@ -775,12 +775,25 @@ class SpoiltFilesTest {
             "",
             "both sideslip and bank are given; a straight sideslip takes one of them, the other follows"),
         spoilt(
-            Samples.with(Samples.SCENARIO, "\"free\"", "\"held\""),
+            Samples.with(
+                Samples.SCENARIO,
+                "\"free\"",
+                "\"held\", \"heldSlip\": [{ \"time\": \"0 s\", \"sideslip\": \"2 deg\" }]"),
             "{ \"bank\": \"0 deg\" }",
             "{ \"trim\": { \"state\": \"straight-sideslip\", \"bank\": \"3 deg\" } }",
+            "$.heldSlip",
+            6,
+            "the straight sideslip it starts from is held already; take heldSlip out, or start from another state"),
+        new Spoilt(
+            Samples.with(
+                    Samples.with(Samples.SCENARIO_WITH_EVERY_KEY, "\"mass\": \"1000 kg\",\n", "\n"),
+                    "\"wings-level\"",
+                    "\"straight-sideslip\", \"sideslip\": \"3 deg\"")
+                .replace("\"slip\": \"free\"", "\"slip\": \"held\"")
+                .replace("\"sideslip\": \"0.05 rad\",", ""),
             "$.start.trim.state",
-            7,
-            "a straight sideslip needs settled or free slip; held slip has the ball centred all the time"),
+            29,
+            "a straight sideslip needs mass, which the aeroplane does not give; give it, or choose another state"),
         spoilt(
             Samples.SCENARIO,
             "rolltrace-scenario/1",

@@ -26,6 +26,7 @@ import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.controls.ControlRun;
 import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.derivatives.LateralDerivatives;
+import org.rolltrace.core.pilot.HeldSideslip;
 import org.rolltrace.core.propeller.PropellerMoments;
 import org.rolltrace.core.testing.RandomAeroplane;
 
@@ -196,10 +197,13 @@ class SteadyStateTest {
                 condition,
                 new PropellerMoments(-300));
         for (SlipTreatment slip : SlipTreatment.values()) {
-          if (slip == SlipTreatment.HELD && state.kind() == SteadyState.Kind.STRAIGHT_SIDESLIP) {
-            continue;
-          }
-          assertSteady(trim(state, slip, model), LateralMotion.of(slip, model), seed);
+          Trim trim = trim(state, slip, model);
+          assertSteady(
+              trim,
+              slip == SlipTreatment.HELD
+                  ? LateralMotion.holding(model, HeldSideslip.constant(trim.sideslip()))
+                  : LateralMotion.of(slip, model),
+              seed);
         }
       }
     }
@@ -277,9 +281,51 @@ class SteadyStateTest {
     assertThatExceptionOfType(CalculationException.class)
         .isThrownBy(() -> trim(SteadyState.turn(0.5), SlipTreatment.HELD, model(values, LEVEL, 0)))
         .withMessageStartingWith("steady-turn trim has no answer: a rolling moment of");
+    values.remove(Coefficient.CY_BETA);
+    assertThatExceptionOfType(CalculationException.class)
+        .isThrownBy(
+            () ->
+                trim(SteadyState.straightAtBank(0.1), SlipTreatment.HELD, model(values, LEVEL, 0)))
+        .withMessageStartingWith("straight-sideslip trim has no answer: at 5.730 deg of bank")
+        .withMessageContaining("CY_beta");
+    LateralModel weightless =
+        LateralModel.of(
+            Aeroplane.builder("no mass", 10, 15, Inertia.ofRoll(1000)).build(),
+            LateralDerivatives.ofGiven(SIMPLE, "test"),
+            LEVEL,
+            PropellerMoments.NONE);
     assertThatIllegalArgumentException()
-        .isThrownBy(() -> trim(SteadyState.straightAtBank(0.1), SlipTreatment.HELD, noRudder))
-        .withMessageContaining("held slip has none");
+        .isThrownBy(() -> trim(SteadyState.straightAtSideslip(0), SlipTreatment.HELD, weightless))
+        .withMessageStartingWith("a sideslip needs the mass");
+  }
+
+  /**
+   * Held slip in a straight sideslip: no turn, so the weight balances the side force of the slip,
+   * sin φ = −q̄ S CY_β β/(m g cos γ), and the ailerons its dihedral effect. The rudder, which is
+   * left alone, adds neither.
+   */
+  @ParameterizedTest
+  @CsvSource({"-9, 0", "-2, 10", "0.5, 0", "6, -8"})
+  void heldStraightSideslipWorkedByHand(double degrees, double climbDeg) {
+    double slip = Math.toRadians(degrees);
+    double climb = Math.toRadians(climbDeg);
+    Map<Coefficient, Double> values = new EnumMap<>(SIMPLE);
+    values.put(Coefficient.CY_DR, 0.2);
+    values.put(Coefficient.CL_DR, 0.02);
+    LateralModel model = model(values, LEVEL.withFlightPathAngle(climb), -90);
+    Trim trim = trim(SteadyState.straightAtSideslip(slip), SlipTreatment.HELD, model);
+    double bank = Math.asin(22_500 * 0.5 * slip / (900 * GRAVITY * Math.cos(climb)));
+    assertThat(trim.bank()).isCloseTo(bank, within(1e-14));
+    // the bank stays while the path climbs: p = −q sin φ tan γ, q = (g/V) cos γ (1 − cos φ)
+    double rollRate = -GRAVITY / 50 * (1 - Math.cos(bank)) * Math.sin(bank) * Math.sin(climb);
+    assertThat(trim.rollRate()).isCloseTo(rollRate, within(1e-15));
+    assertThat(trim.aileron())
+        .isCloseTo((0.08 * slip + 0.5 * 0.1 * rollRate + 90 / 225_000.0) / 0.16, within(1e-14));
+    assertThat(trim.rudder()).isZero();
+    assertThat(trim.yawRate()).isZero();
+    Trim other = trim(SteadyState.straightAtBank(trim.bank()), SlipTreatment.HELD, model);
+    assertThat(other.sideslip()).isCloseTo(slip, within(1e-14));
+    assertThat(other.aileron()).isCloseTo(trim.aileron(), within(1e-14));
   }
 
   /** δa = 0.08 β/0.16 = 5 deg at β = 10 deg, of 4 deg: 125 %. */

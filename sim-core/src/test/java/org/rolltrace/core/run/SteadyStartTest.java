@@ -11,12 +11,17 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import java.io.IOException;
 import java.io.StringWriter;
+import java.util.EnumMap;
 import java.util.List;
+import java.util.Map;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.EnumSource;
+import org.rolltrace.core.aeroplane.Aeroplane;
 import org.rolltrace.core.atmosphere.FlightCondition;
+import org.rolltrace.core.derivatives.Coefficient;
+import org.rolltrace.core.derivatives.LateralDerivatives;
 import org.rolltrace.core.files.ResultJson;
 import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.history.TimeHistory;
@@ -86,7 +91,7 @@ class SteadyStartTest {
   }
 
   @ParameterizedTest
-  @EnumSource(value = SlipTreatment.class, names = "HELD", mode = EnumSource.Mode.EXCLUDE)
+  @EnumSource(SlipTreatment.class)
   void aSideslipLeftAloneGoesOn(SlipTreatment slip) {
     for (double climb : new double[] {0, 0.15, -0.1}) {
       FlightCondition condition = ANY.condition().withFlightPathAngle(climb);
@@ -102,6 +107,79 @@ class SteadyStartTest {
       // the wing is down on the side that the wind comes from
       assertThat(history.value(Channel.BANK, 0)).isPositive();
     }
+  }
+
+  /**
+   * A held sideslip of an aeroplane without Cl_r: ṗ = −(p − K δa T)/T from a step of the stick, as
+   * without slip, while the turn is that of the weight less what held the bank against the slip.
+   */
+  @Test
+  void aHeldSideslipRollsByTheClosedFormAndKeepsItsSlip() {
+    double slip = Math.toRadians(6);
+    double t = 0.4;
+    double k = 8;
+    FlightCondition condition = seaLevel(50);
+    AeroplaneData bare = oneDegree(t, k);
+    Map<Coefficient, Double> values = new EnumMap<>(Coefficient.class);
+    for (Coefficient same : List.of(Coefficient.CL_P, Coefficient.CL_DA)) {
+      values.put(same, bare.derivatives().value(same));
+    }
+    values.put(Coefficient.CY_BETA, -0.5);
+    values.put(Coefficient.CL_BETA, -0.08);
+    Aeroplane plane = bare.aeroplane();
+    AeroplaneData data =
+        new AeroplaneData(
+            Aeroplane.builder("slipping", plane.span(), plane.wingArea(), plane.inertia())
+                .mass(900)
+                .ailerons(plane.ailerons().orElseThrow())
+                .build(),
+            LateralDerivatives.ofGiven(values, "test"));
+    RunResult result =
+        fly(
+            data,
+            condition,
+            SlipTreatment.HELD,
+            new Start(
+                SteadyState.straightAtSideslip(slip), PropellerMoments.NONE, Disturbance.NONE),
+            3,
+            stick(new StepInput(0.5, 0.3, 0)));
+    double force = condition.dynamicPressure() * plane.wingArea() * 0.5 * slip;
+    double bank0 = Math.asin(force / (900 * 9.80665));
+    assertThat(result.trim().bank()).isCloseTo(bank0, within(1e-14));
+    double steady = k * 0.3 * FULL_AILERON * t;
+    TimeHistory history = result.history();
+    for (int i = 0; i < history.size(); i++) {
+      double since = Math.max(0, history.time(i) - 0.5);
+      double faded = -Math.expm1(-since / t);
+      double bank = bank0 + steady * (since - t * faded);
+      assertThat(history.value(Channel.SIDESLIP, i)).isEqualTo(result.trim().sideslip());
+      // the local tolerance of some dozen steps
+      assertThat(history.value(Channel.ROLL_RATE, i)).isCloseTo(steady * faded, within(1e-8));
+      assertThat(history.value(Channel.BANK, i)).isCloseTo(bank, within(1e-8));
+      assertThat(history.value(Channel.YAW_RATE, i))
+          .isCloseTo(9.80665 / 50 * (Math.sin(bank) - Math.sin(bank0)), within(1e-8));
+    }
+    assertThat(result.measure("freeSlipBankDifference").orElseThrow().value()).isEmpty();
+  }
+
+  /** Against free slip, which starts from the same slip with the pedals that hold it. */
+  @Test
+  void aHeldSideslipSaysHowFarFreeSlipIs() {
+    RunResult result =
+        fly(
+            ANY.data(),
+            ANY.condition(),
+            SlipTreatment.HELD,
+            from(SteadyState.straightAtSideslip(0.1)),
+            3,
+            stick(new StepInput(0.5, 0.2, 0.1)));
+    double difference =
+        result.measure("freeSlipBankDifference").orElseThrow().value().orElseThrow();
+    // they start with different banks, for the rudder's side force, and swing apart by degrees
+    assertThat(difference).isBetween(Math.toRadians(0.1), Math.toRadians(90));
+    // the pedal that holds it balances Cn_β β, to the left with the wind from the right: from zero
+    // rudder it takes about β Cn_β/Cn_δr
+    assertThat(result.measure("pedalToHoldSlip").orElseThrow().value().orElseThrow()).isNegative();
   }
 
   /** Trimmed at one power and flown with another, a turn rolls off to the side of the torque. */
