@@ -21,7 +21,7 @@ FT, LB = 0.3048, 0.45359237
 SLUG = LB * G0 / FT
 UNITS = {
     "s": 1, "m": 1, "ft": FT, "m2": 1, "ft2": FT**2, "kg": 1, "lb": LB, "kg m2": 1, "slug ft2": SLUG * FT**2,
-    "m/s": 1, "ft/s": FT, "kt": 1852 / 3600, "kg/m3": 1, "slug/ft3": SLUG / FT**3, "K": 1, "N m": 1,
+    "m/s": 1, "ft/s": FT, "kt": 1852 / 3600, "kW": 1000, "rpm": 2 * np.pi / 60, "kg/m3": 1, "slug/ft3": SLUG / FT**3, "K": 1, "N m": 1,
     "deg": np.pi / 180, "rad": 1,
 }
 SCENARIOS = Path("scenarios")
@@ -50,6 +50,25 @@ def air(condition):
     return density, mach * np.sqrt(1.4 * pressure / density)
 
 
+class Engine:
+    """A propeller of fixed pitch that turns clockwise, with its engine, at one airspeed."""
+
+    def __init__(self, given, condition):
+        self.rated, self.lag = si(given["ratedPower"]), si(given["engineLag"])
+        self.power = si(condition["power"])
+        self.taken = 1 - given["straightened"]
+        self.inertia = si(given["rotatingInertia"]["propeller"]) + si(given["rotatingInertia"]["engine"])
+        # the cube of the speed is linear in the power; the condition gives one point of the line
+        idle = given["speedWithoutPower"] ** 3
+        here = idle + (1 - idle) * self.power / self.rated
+        full = si(condition["propellerSpeed"]) ** 3 / here
+        self.cube = np.array([(1 - idle) * full / self.rated, idle * full])
+
+    def moment(self, power, rate):
+        speed = np.polyval(self.cube, power) ** (1 / 3)
+        return -self.taken * power / speed - self.inertia * self.cube[0] * rate / (3 * speed**2)
+
+
 class Case:
     """One scenario: forces per (v, p, r, aileron, rudder), the mass matrix, and what the hands do."""
 
@@ -73,6 +92,9 @@ class Case:
                                 [0, inertia["roll"], -inertia.get("product", 0)],
                                 [0, -inertia.get("product", 0), inertia["yaw"]]])
         self.propeller = np.array([0, si(self.scenario["condition"].get("propellerRollMoment", "0 N m")), 0])
+        self.engine = Engine(plane["propellers"][0], self.scenario["condition"]) if "power" in self.scenario["condition"] else None
+        if self.engine:
+            self.propeller[1] = self.engine.moment(self.engine.power, 0)
         self.full = 0.5 * (si(plane["ailerons"]["up"]) + si(plane["ailerons"]["down"]))
         if plane["rudder"]["left"] != plane["rudder"]["right"]:
             raise ValueError("one travel of the rudder is expected")
@@ -80,7 +102,7 @@ class Case:
         self.climb = si(self.scenario["condition"].get("flightPathAngle", "0 deg"))
         self.load_factor = np.cos(self.climb)
         self.trim(self.scenario.get("start", {}).get("trim", {}))
-        self.corners = {"stick": [(0.0, 0.0)], "pedal": [(0.0, 0.0)]}
+        self.corners = {"stick": [(0.0, 0.0)], "pedal": [(0.0, 0.0)], "power": [(0.0, 0.0)]}
         for move in self.scenario["inputs"]:
             start, hand, size = si(move["start"]), si(move["movement"]), move["size"]
             corners = self.corners[move["control"]]
@@ -124,12 +146,16 @@ class Case:
         return self.aileron + self.full * self.moved("stick", time)
 
     def free(self, time, state):
-        v, p, r, bank = state
+        v, p, r, bank, power = state
+        demand = self.engine.power + self.engine.rated * self.moved("power", time) if self.engine else 0
+        power_rate = (demand - power) / self.engine.lag if self.engine else 0
+        change = self.engine.moment(power, power_rate) - self.propeller[1] if self.engine else 0
         rudder = self.rudder + self.full_rudder * self.moved("pedal", time)
         load = self.per @ [v, p, r, self.stick(time), rudder] + self.propeller
         load[0] += self.mass * G0 * np.cos(self.climb) * np.sin(bank) - self.mass * self.speed * r
+        load[1] += change
         q = G0 / self.speed * (self.load_factor - np.cos(self.climb) * np.cos(bank))
-        return [*np.linalg.solve(self.matrix, load), p + (q * np.sin(bank) + r * np.cos(bank)) * np.tan(self.climb)]
+        return [*np.linalg.solve(self.matrix, load), p + (q * np.sin(bank) + r * np.cos(bank)) * np.tan(self.climb), power_rate]
 
     def slip_and_yaw(self, time, p, bank):
         """Sideways velocity and yaw rate that leave no side force and no yawing moment."""
@@ -160,7 +186,8 @@ class Case:
     def history(self, slip, step=0.5):
         """Rows of time, bank, roll rate, yaw rate and sideslip, in deg; every corner and sample ends a step."""
         bank = self.bank + si(self.scenario.get("start", {}).get("bank", "0 deg"))
-        state = np.array([self.slip, self.p, self.r, bank] if slip == "free" else [self.p, bank], float)
+        power = self.engine.power if self.engine else 0
+        state = np.array([self.slip, self.p, self.r, bank, power] if slip == "free" else [self.p, bank], float)
         samples = np.arange(round(si(self.scenario["duration"]) / step) + 1) * step
         stops = sorted({round(time, 12) for time in [*samples, *(corner[0] for corners in self.corners.values() for corner in corners)]})
         rows, equations = [], getattr(self, slip)
@@ -170,7 +197,7 @@ class Case:
                 state = piece.y[:, -1]
             if np.min(np.abs(samples - end)) < 1e-9:
                 if slip == "free":
-                    v, p, r, bank = state
+                    v, p, r, bank, _ = state
                 else:
                     (p, bank), (v, r) = state, self.slip_and_yaw(end, *state)
                 rows.append([end, *np.degrees([bank, p, r, v / self.speed])])
@@ -184,7 +211,7 @@ def main():
             ("light-single-wing-drop", "free", "-free"), ("light-single-wing-drop", "settled", "-settled"),
             ("tarnlark-cruise-roll-entry", "free", ""), ("large-jet-roll-entry", "free", ""),
             ("tarnlark-turn-reversal", "free", ""), ("tarnlark-climbing-turn", "free", ""),
-            ("tarnlark-straight-sideslip", "free", "")):
+            ("tarnlark-straight-sideslip", "free", ""), ("tarnlark-power-step", "free", "")):
         with open(OUT / f"{name}{suffix}.csv", "w", newline="\n") as file:
             file.write(head + f"# scenario {name}, {slip} slip\n")
             file.write("time[s],bank[deg],rollRate[deg/s],yawRate[deg/s],sideslip[deg]\n")

@@ -1,5 +1,7 @@
 package org.rolltrace.core.aeroplane;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.rolltrace.core.quantity.Check;
@@ -17,6 +19,8 @@ import org.rolltrace.core.quantity.Check;
  * @param limits the aeroplane's own limits
  * @param imbalance what hangs on one side only; empty for nothing. The mass counts it, the inertia
  *     does not
+ * @param propellers each with a name and a place of its own; none for an aeroplane without, or
+ *     whose propellers are not known
  */
 public record Aeroplane(
     String name,
@@ -27,9 +31,11 @@ public record Aeroplane(
     Optional<Ailerons> ailerons,
     Optional<Rudder> rudder,
     Limits limits,
-    Optional<LateralImbalance> imbalance) {
+    Optional<LateralImbalance> imbalance,
+    List<Propeller> propellers) {
 
   public Aeroplane {
+    propellers = List.copyOf(propellers);
     if (name.isBlank()) {
       throw new IllegalArgumentException("aeroplane name is blank; expected some text");
     }
@@ -38,6 +44,39 @@ public record Aeroplane(
     if (mass.isPresent()) {
       Check.positive("mass, kg,", mass.getAsDouble());
     }
+    for (int i = 0; i < propellers.size(); i++) {
+      for (int j = 0; j < i; j++) {
+        checkApart(propellers.get(j), propellers.get(i));
+      }
+    }
+  }
+
+  private static void checkApart(Propeller one, Propeller other) {
+    if (one.name().equals(other.name())) {
+      throw new IllegalArgumentException(
+          "two propellers are called " + one.name() + "; expected a name of its own for each");
+    }
+    if (one.position().equals(other.position())) {
+      throw new IllegalArgumentException(
+          "the propellers "
+              + one.name()
+              + " and "
+              + other.name()
+              + " are at one place; expected a position of its own for each");
+    }
+  }
+
+  /**
+   * The rated power of all propellers together.
+   *
+   * @return W; 0 without propellers
+   */
+  public double ratedPower() {
+    double sum = 0;
+    for (Propeller propeller : propellers) {
+      sum += propeller.engine().ratedPower();
+    }
+    return sum;
   }
 
   /**
@@ -82,6 +121,7 @@ public record Aeroplane(
     private Optional<Rudder> rudder = Optional.empty();
     private Limits limits = Limits.NONE;
     private Optional<LateralImbalance> imbalance = Optional.empty();
+    private final List<Propeller> propellers = new ArrayList<>();
 
     private Builder(String name, double span, double wingArea, Inertia inertia) {
       this.name = name;
@@ -146,6 +186,17 @@ public record Aeroplane(
     }
 
     /**
+     * Adds a propeller.
+     *
+     * @param value one more
+     * @return this builder
+     */
+    public Builder propeller(Propeller value) {
+      propellers.add(value);
+      return this;
+    }
+
+    /**
      * Makes the aeroplane.
      *
      * @return the aeroplane
@@ -153,7 +204,7 @@ public record Aeroplane(
      */
     public Aeroplane build() {
       return new Aeroplane(
-          name, span, wingArea, mass, inertia, ailerons, rudder, limits, imbalance);
+          name, span, wingArea, mass, inertia, ailerons, rudder, limits, imbalance, propellers);
     }
   }
 }

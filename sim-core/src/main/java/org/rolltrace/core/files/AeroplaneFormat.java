@@ -8,6 +8,7 @@ import org.rolltrace.core.aeroplane.Ailerons;
 import org.rolltrace.core.aeroplane.Inertia;
 import org.rolltrace.core.aeroplane.LateralImbalance;
 import org.rolltrace.core.aeroplane.Limits;
+import org.rolltrace.core.aeroplane.Propeller;
 import org.rolltrace.core.aeroplane.Rudder;
 import org.rolltrace.core.aeroplane.SurfaceDynamics;
 import org.rolltrace.core.derivatives.LateralDerivatives;
@@ -27,6 +28,7 @@ final class AeroplaneFormat {
   private static final String AXES = "axes";
   private static final String ANGLE_OF_ATTACK = "angleOfAttack";
   private static final String IMBALANCE = "lateralImbalance";
+  private static final String PROPELLERS = "propellers";
   private static final Range ANGLES =
       Range.fromTo(
           Math.nextUp(-Math.PI / 2), Math.nextDown(Math.PI / 2), "inside 90 deg either way");
@@ -52,7 +54,7 @@ final class AeroplaneFormat {
     return format
         .required("span", "wingArea", "inertia", "derivatives")
         .optional("name", "mass", "ailerons", "rudder", "axes", "limits", "note")
-        .optional(ANGLE_OF_ATTACK, IMBALANCE);
+        .optional(ANGLE_OF_ATTACK, IMBALANCE, PROPELLERS);
   }
 
   static Optional<AeroplaneData> read(JsonValue.ObjectValue object, Keys keys, Faults faults) {
@@ -71,6 +73,7 @@ final class AeroplaneFormat {
     Optional<Rudder> rudder = rudder(in);
     Limits limits = limits(in);
     Optional<LateralImbalance> imbalance = imbalance(in, mass);
+    List<Propeller> propellers = PropellerFormat.read(in, PROPELLERS);
     boolean described = in.isSound();
     Optional<LateralDerivatives> derivatives = Optional.empty();
     Optional<ObjectCursor> set = in.object("derivatives", DerivativesFormat.DERIVATIVES);
@@ -98,7 +101,8 @@ final class AeroplaneFormat {
                 ailerons,
                 rudder,
                 limits,
-                imbalance),
+                imbalance,
+                propellers),
             derivatives.orElseThrow()));
   }
 

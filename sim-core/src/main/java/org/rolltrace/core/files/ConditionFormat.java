@@ -33,8 +33,7 @@ final class ConditionFormat {
           .optional(SPEEDS.get(0), SPEEDS.get(1), SPEEDS.get(2))
           .optional(LOAD_FACTOR, PATH_ANGLE);
 
-  static final Keys CONDITION =
-      VALID_AT.named("a condition").optional(ScenarioFormat.PROPELLER_ROLL_MOMENT);
+  static final Keys CONDITION = VALID_AT.named("a condition").optional(SettingFormat.KEYS);
 
   private ConditionFormat() {}
 

@@ -106,10 +106,16 @@ final class InputFormat {
   }
 
   private static Optional<Control> control(ObjectCursor in) {
-    Optional<String> word = in.word(CONTROL, List.of(Control.STICK.word(), Control.PEDAL.word()));
-    if (word.isEmpty()) {
-      return Optional.empty();
+    List<String> words = new ArrayList<>();
+    for (Control control : Control.values()) {
+      words.add(control.word());
     }
-    return Optional.of(word.get().equals(Control.STICK.word()) ? Control.STICK : Control.PEDAL);
+    Optional<String> word = in.word(CONTROL, words);
+    for (Control control : Control.values()) {
+      if (word.isPresent() && control.word().equals(word.get())) {
+        return Optional.of(control);
+      }
+    }
+    return Optional.empty();
   }
 }

@@ -20,6 +20,8 @@ final class KeyOrder {
           "calibratedAirspeed",
           "loadFactor",
           "flightPathAngle",
+          "power",
+          "propellerSpeed",
           "slip",
           "heldSlip",
           "time",
@@ -54,6 +56,7 @@ final class KeyOrder {
           "rudder",
           "axes",
           "angleOfAttack",
+          "propellers",
           "limits",
           "derivatives");
 

@@ -12,6 +12,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.rolltrace.core.aeroplane.Aeroplane;
 import org.rolltrace.core.aeroplane.Ailerons;
+import org.rolltrace.core.aeroplane.Propeller;
 import org.rolltrace.core.aeroplane.Rudder;
 import org.rolltrace.core.aeroplane.SurfaceDynamics;
 import org.rolltrace.core.atmosphere.FlightCondition;
@@ -28,6 +29,9 @@ import org.rolltrace.core.pilot.MultistepInput;
 import org.rolltrace.core.pilot.PilotInput;
 import org.rolltrace.core.pilot.SweepInput;
 import org.rolltrace.core.pilot.TraceInput;
+import org.rolltrace.core.propeller.PowerSetting;
+import org.rolltrace.core.propeller.Propulsion;
+import org.rolltrace.core.propeller.TurningPropeller;
 import org.rolltrace.core.run.RunResult;
 import org.rolltrace.core.run.Safety;
 import org.rolltrace.core.scenario.Scenario;
@@ -119,7 +123,13 @@ public final class ResultJson {
     number("bank", scenario.start().disturbance().bank());
     number("rollRate", scenario.start().disturbance().rollRate());
     number("sideslip", scenario.start().disturbance().sideslip());
-    number("trimmedWithPropellerRollMoment", scenario.start().trimmedWith().roll());
+    Propulsion propulsion = scenario.propulsion();
+    if (scenario.start().trimmedWith() instanceof PowerSetting trimmedWith) {
+      number("trimmedWithPower", trimmedWith.power());
+    }
+    number(
+        "trimmedWithPropellerRollMoment",
+        propulsion.moments(scenario.start().trimmedWith()).roll());
     json.writeEndObject();
     json.writeArrayFieldStart("inputs");
     for (PilotInput input : scenario.programme().inputs()) {
@@ -195,6 +205,7 @@ public final class ResultJson {
       number("arm", aeroplane.imbalance().get().arm());
       json.writeEndObject();
     }
+    writePropellers(aeroplane.propellers());
     if (aeroplane.ailerons().isPresent()) {
       Ailerons ailerons = aeroplane.ailerons().get();
       json.writeObjectFieldStart("ailerons");
@@ -212,6 +223,39 @@ public final class ResultJson {
       json.writeEndObject();
     }
     json.writeEndObject();
+  }
+
+  private void writePropellers(List<Propeller> propellers) throws IOException {
+    if (propellers.isEmpty()) {
+      return;
+    }
+    json.writeArrayFieldStart("propellers");
+    for (Propeller propeller : propellers) {
+      json.writeStartObject();
+      json.writeStringField("name", propeller.name());
+      json.writeStringField("rotation", propeller.rotation().word());
+      number("ratedPower", propeller.engine().ratedPower());
+      number("speed", propeller.speed());
+      json.writeStringField("pitch", propeller.isFixedPitch() ? "fixed" : "constant-speed");
+      number("speedWithoutPower", propeller.speedWithoutPower());
+      number("gearRatio", propeller.engine().gearRatio());
+      json.writeObjectFieldStart("rotatingInertia");
+      number("propeller", propeller.inertia());
+      number("engine", propeller.engine().inertia());
+      json.writeEndObject();
+      json.writeStringField("engineRotation", propeller.engine().rotation().word());
+      number("engineLag", propeller.engine().lag());
+      json.writeObjectFieldStart("position");
+      number("x", propeller.position().x());
+      number("y", propeller.position().y());
+      number("z", propeller.position().z());
+      json.writeEndObject();
+      number("diameter", propeller.diameter());
+      number("efficiency", propeller.efficiency());
+      number("straightened", propeller.straightened());
+      json.writeEndObject();
+    }
+    json.writeEndArray();
   }
 
   private void writeDynamics(SurfaceDynamics dynamics) throws IOException {
@@ -236,8 +280,34 @@ public final class ResultJson {
     number("loadFactor", condition.loadFactor());
     number("flightPathAngle", condition.flightPathAngle());
     number("liftCoefficient", result.liftCoefficient());
-    number("propellerRollMoment", result.scenario().propeller().roll());
+    writePower(result.scenario().propulsion());
     json.writeEndObject();
+  }
+
+  private void writePower(Propulsion propulsion) throws IOException {
+    double share = propulsion.share();
+    if (result.scenario().propeller() instanceof PowerSetting setting) {
+      number("power", setting.power());
+      number("powerFraction", share);
+    }
+    number("propellerRollMoment", propulsion.moments().roll());
+    number("propellerYawMoment", propulsion.moments().yaw());
+    if (propulsion.propellers().isEmpty()) {
+      return;
+    }
+    json.writeArrayFieldStart("propellers");
+    for (TurningPropeller propeller : propulsion.propellers()) {
+      json.writeStartObject();
+      json.writeStringField("name", propeller.propeller().name());
+      number("power", propeller.power(share));
+      number("speed", propeller.speed(share));
+      number("torque", propeller.torque(share));
+      number("thrust", propeller.thrust(share));
+      number("rollMoment", propeller.rollMoment(share, 0));
+      number("yawMoment", propeller.yawMoment(share));
+      json.writeEndObject();
+    }
+    json.writeEndArray();
   }
 
   private void writeDerivatives(LateralDerivatives derivatives) throws IOException {

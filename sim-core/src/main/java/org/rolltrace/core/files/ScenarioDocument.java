@@ -10,6 +10,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
+import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.scenario.Scenario;
 
 /**
@@ -326,13 +327,16 @@ public final class ScenarioDocument {
   }
 
   /**
-   * The same with every input and every held sideslip to the other side.
+   * The same with every input on stick and pedals and every held sideslip to the other side.
    *
    * @return the edited document; sizes that are no numbers and sideslips that are no angles stay
    */
   public ScenarioDocument mirrored() {
     ScenarioDocument changed = this;
     for (int i = 0; i < inputCount(); i++) {
+      if (text(input(i) + ".control").equals(Optional.of(Control.POWER.word()))) {
+        continue;
+      }
       String size = input(i) + ".size";
       Optional<JsonNode> written = find(size);
       if (written.isPresent()

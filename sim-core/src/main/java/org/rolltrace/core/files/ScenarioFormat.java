@@ -17,6 +17,7 @@ import org.rolltrace.core.pilot.HeldSideslip;
 import org.rolltrace.core.pilot.PilotInput;
 import org.rolltrace.core.pilot.PilotProgramme;
 import org.rolltrace.core.propeller.PropellerMoments;
+import org.rolltrace.core.propeller.PropellerSetting;
 import org.rolltrace.core.quantity.Dimension;
 import org.rolltrace.core.quantity.Quantity;
 import org.rolltrace.core.scenario.AeroplaneData;
@@ -26,7 +27,6 @@ import org.rolltrace.core.scenario.Start;
 
 /** A scenario. */
 final class ScenarioFormat {
-  static final String PROPELLER_ROLL_MOMENT = "propellerRollMoment";
   static final int LONGEST_TITLE = 200;
   static final int MOST_INPUTS = 200;
   static final int MOST_BANK_ANGLES = 100;
@@ -56,7 +56,13 @@ final class ScenarioFormat {
 
   static final Keys START = Keys.of("the start").optional("bank", "rollRate", "sideslip", "trim");
   static final Keys TRIM =
-      Keys.of("the trim").optional("state", "bank", "sideslip", PROPELLER_ROLL_MOMENT);
+      Keys.of("the trim")
+          .optional(
+              "state",
+              "bank",
+              "sideslip",
+              SettingFormat.POWER,
+              SettingFormat.PROPELLER_ROLL_MOMENT);
   static final Keys MEASURES = Keys.of("the measures").optional("settlingBand", BANK_ANGLES);
 
   private ScenarioFormat() {}
@@ -70,27 +76,28 @@ final class ScenarioFormat {
     in.freeText("note", JsonTree.LONGEST_TEXT);
     Optional<AeroplaneData> data = aeroplane(in);
     Optional<FlightCondition> condition = Optional.empty();
-    PropellerMoments propeller = PropellerMoments.NONE;
+    Optional<PropellerSetting> propeller = Optional.of(PropellerMoments.NONE);
     Optional<ObjectCursor> air = in.object("condition", ConditionFormat.CONDITION);
     if (air.isPresent()) {
       condition = ConditionFormat.read(air.get());
-      propeller = propeller(air.get(), PropellerMoments.NONE);
+      propeller = SettingFormat.read(air.get(), PropellerMoments.NONE);
     }
     Optional<SlipTreatment> slip = slip(in);
-    Optional<Start> start = start(in, propeller);
+    Optional<Start> start = start(in, propeller.orElse(PropellerMoments.NONE));
     Optional<PilotProgramme> programme = programme(in);
     Optional<HeldSideslip> held = heldSideslip(in);
     programme = programme.flatMap(inputs -> held.map(inputs::holding));
     double duration = in.quantity("duration", Dimension.TIME, DURATION);
     Optional<MeasureOptions> measures = measures(in);
 
-    if (data.isPresent() && slip.isPresent()) {
+    if (data.isPresent() && slip.isPresent() && propeller.isPresent()) {
       addWhatDoesNotFit(
           in,
           Scenario.faults(
               data.get(),
+              propeller.get(),
               slip.get(),
-              start.orElse(new Start(PropellerMoments.NONE, Disturbance.NONE)),
+              start.orElse(new Start(propeller.get(), Disturbance.NONE)),
               programme.orElse(PilotProgramme.of(List.of()))));
     }
     if (faults.count() > 0) {
@@ -101,7 +108,7 @@ final class ScenarioFormat {
             title.orElseThrow(),
             data.orElseThrow(),
             condition.orElseThrow(),
-            propeller,
+            propeller.orElseThrow(),
             slip.orElseThrow(),
             start.orElseThrow(),
             programme.orElseThrow(),
@@ -166,11 +173,6 @@ final class ScenarioFormat {
     }
   }
 
-  private static PropellerMoments propeller(ObjectCursor in, PropellerMoments fallback) {
-    double roll = in.quantity(PROPELLER_ROLL_MOMENT, Dimension.MOMENT, Range.ANY, fallback.roll());
-    return Double.isNaN(roll) ? fallback : new PropellerMoments(roll);
-  }
-
   private static Optional<SlipTreatment> slip(ObjectCursor in) {
     List<String> words = new ArrayList<>();
     for (SlipTreatment treatment : SlipTreatment.values()) {
@@ -185,7 +187,7 @@ final class ScenarioFormat {
     return Optional.empty();
   }
 
-  private static Optional<Start> start(ObjectCursor scenario, PropellerMoments propeller) {
+  private static Optional<Start> start(ObjectCursor scenario, PropellerSetting propeller) {
     if (!scenario.has("start")) {
       return Optional.of(new Start(propeller, Disturbance.NONE));
     }
@@ -197,16 +199,19 @@ final class ScenarioFormat {
     double bank = in.quantity("bank", Dimension.ANGLE, Range.ANY, 0);
     double rollRate = in.quantity("rollRate", Dimension.ANGULAR_RATE, Range.ANY, 0);
     double sideslip = in.quantity("sideslip", Dimension.ANGLE, Range.ANY, 0);
-    PropellerMoments trimmedWith = propeller;
+    Optional<PropellerSetting> trimmedWith = Optional.of(propeller);
     Optional<SteadyState> state = Optional.of(SteadyState.WINGS_LEVEL);
     Optional<ObjectCursor> trim = in.object("trim", TRIM);
     if (trim.isPresent()) {
       state = state(trim.get());
-      trimmedWith = propeller(trim.get(), propeller);
+      trimmedWith = SettingFormat.read(trim.get(), propeller);
     }
     return in.isSound()
         ? Optional.of(
-            new Start(state.orElseThrow(), trimmedWith, new Disturbance(bank, rollRate, sideslip)))
+            new Start(
+                state.orElseThrow(),
+                trimmedWith.orElseThrow(),
+                new Disturbance(bank, rollRate, sideslip)))
         : Optional.empty();
   }
 

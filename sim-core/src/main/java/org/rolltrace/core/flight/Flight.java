@@ -21,6 +21,7 @@ import org.rolltrace.core.motion.CalculationException;
 import org.rolltrace.core.motion.LateralMotion;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.propeller.AddedMoments;
 
 /** Computes one manoeuvre. */
 public final class Flight {
@@ -53,6 +54,7 @@ public final class Flight {
   private final LateralMotion motion;
   private final SurfaceDrive stick;
   private final SurfaceDrive pedal;
+  private final PowerDrive power;
   private final Optional<PilotInput> leading;
   private final DormandPrince853Integrator integrator;
   private final TimeHistory.Recorder recorder;
@@ -91,6 +93,8 @@ public final class Flight {
             plan.trim().rudder(),
             states);
     states += pedal.hasState() ? 1 : 0;
+    this.power = new PowerDrive(plan.propulsion(), plan.programme().power(), states);
+    states += power.states();
     this.scratch = new double[states];
     this.sample = new double[states];
     this.step = new DenseStep(states);
@@ -149,6 +153,7 @@ public final class Flight {
     }
     stick.initialise(state);
     pedal.initialise(state);
+    power.initialise(state);
 
     double start = 0;
     for (double end : stretchEnds()) {
@@ -176,6 +181,7 @@ public final class Flight {
     }
     begin(stick, start, state);
     begin(pedal, start, state);
+    beginTravel(power.lever(), start);
     record(start, start, state);
     if (nextSampleTime() <= start) {
       nextSample++;
@@ -187,6 +193,7 @@ public final class Flight {
     double look = Math.min(LOOK_EVERY, (end - start) / LOOKS_PER_STRETCH);
     addDetectors(stick, look, last);
     addDetectors(pedal, look, last);
+    addStop(power.lever(), look, last);
     captureFrom.ifPresent(bank -> addCaptures(bank, look));
     integrator.addStepHandler(interpolator -> takeSamples(interpolator, end));
 
@@ -217,10 +224,14 @@ public final class Flight {
     return leading.orElseThrow().shape().start();
   }
 
-  private void begin(SurfaceDrive drive, double time, double[] state) {
-    if (drive.meetsOrLeavesStop(time)) {
-      events.add(new FlightEvent.Stop(time, drive.control(), drive.isOnStop()));
+  private void beginTravel(Travel travel, double time) {
+    if (travel.meetsOrLeavesStop(time)) {
+      events.add(new FlightEvent.Stop(time, travel.control(), travel.isOnStop()));
     }
+  }
+
+  private void begin(SurfaceDrive drive, double time, double[] state) {
+    beginTravel(drive.travel(), time);
     boolean slewed = drive.isSlewing();
     drive.chooseMode(time, state);
     if (drive.isSlewing() != slewed) {
@@ -228,19 +239,23 @@ public final class Flight {
     }
   }
 
-  private void addDetectors(SurfaceDrive drive, double look, double last) {
-    if (drive.mayMeetStop()) {
+  private void addStop(Travel travel, double look, double last) {
+    if (travel.mayMeetStop()) {
       integrator.addEventDetector(
           new EventAt(
               look,
-              s -> drive.beyondStop(Math.min(s.getTime(), last)),
+              s -> travel.beyondStop(Math.min(s.getTime(), last)),
               (s, detector, increasing) -> {
                 recordEvent(s, last);
-                drive.setOnStop(increasing);
-                events.add(new FlightEvent.Stop(s.getTime(), drive.control(), increasing));
+                travel.setOnStop(increasing);
+                events.add(new FlightEvent.Stop(s.getTime(), travel.control(), increasing));
                 return Action.RESET_DERIVATIVES;
               }));
     }
+  }
+
+  private void addDetectors(SurfaceDrive drive, double look, double last) {
+    addStop(drive.travel(), look, last);
     if (drive.hasRateLimit()) {
       integrator.addEventDetector(
           new EventAt(
@@ -315,16 +330,20 @@ public final class Flight {
   private void record(double time, double controlTime, double[] state) {
     double aileron = stick.angle(controlTime, state);
     double rudder = pedal.angle(controlTime, state);
-    motion.rates(controlTime, state, aileron, rudder, scratch);
+    AddedMoments added = power.added(controlTime, state);
+    motion.rates(controlTime, state, aileron, rudder, added, scratch);
     row[Channel.BANK.column()] = state[LateralMotion.BANK];
     row[Channel.ROLL_RATE.column()] = state[LateralMotion.ROLL_RATE];
-    row[Channel.YAW_RATE.column()] = motion.yawRate(controlTime, state, aileron, rudder);
-    row[Channel.SIDESLIP.column()] = motion.sideslip(controlTime, state, aileron, rudder);
+    row[Channel.YAW_RATE.column()] = motion.yawRate(controlTime, state, aileron, rudder, added);
+    row[Channel.SIDESLIP.column()] = motion.sideslip(controlTime, state, aileron, rudder, added);
     row[Channel.STICK.column()] = stick.position(controlTime);
     row[Channel.PEDAL.column()] = pedal.position(controlTime);
     row[Channel.AILERON.column()] = aileron;
     row[Channel.RUDDER.column()] = rudder;
     row[Channel.ROLL_ACCELERATION.column()] = scratch[LateralMotion.ROLL_RATE];
+    row[Channel.POWER.column()] = power.power(controlTime, state);
+    row[Channel.PROPELLER_ROLL_MOMENT.column()] = power.rollMoment();
+    row[Channel.PROPELLER_YAW_MOMENT.column()] = power.yawMoment();
     recorder.add(time, row);
   }
 
@@ -345,9 +364,16 @@ public final class Flight {
     public double[] computeDerivatives(double time, double[] state) {
       double within = Math.min(time, last);
       double[] rates = new double[state.length];
-      motion.rates(within, state, stick.angle(within, state), pedal.angle(within, state), rates);
+      motion.rates(
+          within,
+          state,
+          stick.angle(within, state),
+          pedal.angle(within, state),
+          power.added(within, state),
+          rates);
       stick.rate(within, state, rates);
       pedal.rate(within, state, rates);
+      power.rate(within, state, rates);
       return rates;
     }
   }

@@ -7,6 +7,7 @@ import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.LateralMotion;
 import org.rolltrace.core.motion.Trim;
 import org.rolltrace.core.pilot.PilotProgramme;
+import org.rolltrace.core.propeller.Propulsion;
 import org.rolltrace.core.quantity.Check;
 
 /**
@@ -15,6 +16,8 @@ import org.rolltrace.core.quantity.Check;
  * @param motion the equations
  * @param stickRun from the stick to the ailerons; empty when the stick is not used
  * @param pedalRun from the pedals to the rudder; empty when the pedals are not used
+ * @param propulsion the propellers at the power it is flown with; the equations have the moments
+ *     that they make then
  * @param trim the steady state and the controls before the manoeuvre
  * @param disturbance what displaces the aeroplane at the start
  * @param programme what the pilot does
@@ -26,6 +29,7 @@ public record FlightPlan(
     LateralMotion motion,
     Optional<ControlRun> stickRun,
     Optional<ControlRun> pedalRun,
+    Propulsion propulsion,
     Trim trim,
     Disturbance disturbance,
     PilotProgramme programme,

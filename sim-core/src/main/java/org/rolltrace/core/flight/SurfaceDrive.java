@@ -12,17 +12,12 @@ import org.rolltrace.core.pilot.Movement;
  * as a state; one without is where the control puts it.
  */
 final class SurfaceDrive {
-  /** Beyond a stop by less than this is at it, fraction of travel: rounding, not a hand. */
-  private static final double ROUNDING = 1e-9;
-
-  private final Control control;
+  private final Travel travel;
   private final Optional<ControlRun> run;
-  private final Movement movement;
   private final double trimPosition;
   private final double trimAngle;
   private final int stateIndex;
   private SurfaceMode mode = SurfaceMode.FOLLOWING;
-  private boolean onStop;
 
   /**
    * A drive.
@@ -36,16 +31,19 @@ final class SurfaceDrive {
       double trimPosition,
       double trimAngle,
       int nextState) {
-    this.control = control;
+    this.travel = new Travel(control, movement, trimPosition, -1, 1);
     this.run = run;
-    this.movement = movement;
     this.trimPosition = trimPosition;
     this.trimAngle = trimAngle;
     this.stateIndex = run.isPresent() && !run.get().dynamics().isDirect() ? nextState : -1;
   }
 
+  Travel travel() {
+    return travel;
+  }
+
   Control control() {
-    return control;
+    return travel.control();
   }
 
   boolean hasState() {
@@ -56,46 +54,16 @@ final class SurfaceDrive {
     return hasState() && dynamics().rateLimit() != Double.POSITIVE_INFINITY;
   }
 
-  boolean mayMeetStop() {
-    return run.isPresent()
-        && movement.largestPosition() > 0
-        && Math.abs(trimPosition) + movement.largestPosition() > 1 + ROUNDING;
-  }
-
-  /** Above 0 while the hand wants more than the travel. */
-  double beyondStop(double time) {
-    return Math.abs(wanted(time)) - 1 - ROUNDING;
-  }
-
-  boolean isOnStop() {
-    return onStop;
-  }
-
-  void setOnStop(boolean reached) {
-    onStop = reached;
-  }
-
-  /** Whether a jump has just put the control on its stop, or taken it off. */
-  boolean meetsOrLeavesStop(double time) {
-    boolean before = onStop;
-    onStop = mayMeetStop() && beyondStop(time) > 0;
-    return onStop != before;
-  }
-
-  private double wanted(double time) {
-    return trimPosition + movement.positionAt(time);
-  }
-
   double position(double time) {
-    return ControlRun.atStops(wanted(time));
+    return travel.position(time);
   }
 
   private double demand(double time) {
-    return run.isPresent() ? run.get().angleAt(wanted(time)) : trimAngle;
+    return run.isPresent() ? run.get().angleAt(travel.wanted(time)) : trimAngle;
   }
 
   private double demandRate(double time) {
-    return run.orElseThrow().angleRateAt(wanted(time), movement.rateAt(time));
+    return run.orElseThrow().angleRateAt(travel.wanted(time), travel.wantedRate(time));
   }
 
   double angle(double time, double[] state) {

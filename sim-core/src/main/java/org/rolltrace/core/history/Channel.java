@@ -19,7 +19,13 @@ public enum Channel {
   /** Rudder angle δr, trailing edge left. */
   RUDDER("rudder", "rad", 7),
   /** Roll acceleration ṗ. */
-  ROLL_ACCELERATION("rollAcceleration", "rad/s2", 8);
+  ROLL_ACCELERATION("rollAcceleration", "rad/s2", 8),
+  /** Power that the propellers get, part of the rated power; 0 where it is not given. */
+  POWER("power", "-", 9),
+  /** Rolling moment of the propellers on the airframe, right wing down. */
+  PROPELLER_ROLL_MOMENT("propellerRollMoment", "N m", 10),
+  /** Yawing moment of the propellers on the airframe, nose right. */
+  PROPELLER_YAW_MOMENT("propellerYawMoment", "N m", 11);
 
   /** The number of channels. */
   public static final int COUNT = values().length;
@@ -55,7 +61,7 @@ public enum Channel {
   /**
    * The SI unit of the samples.
    *
-   * @return the unit; {@code -} for a fraction of travel
+   * @return the unit; {@code -} for a fraction of travel or of the rated power
    */
   public String unit() {
     return unit;

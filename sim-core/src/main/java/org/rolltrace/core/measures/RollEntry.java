@@ -51,9 +51,11 @@ final class RollEntry {
         manoeuvre.programme().leading(manoeuvre.duration()).map(PilotInput::shape);
     if (leading.isEmpty()) {
       String reason =
-          manoeuvre.programme().leading(Double.POSITIVE_INFINITY).isEmpty()
-              ? "no control moves in this scenario"
-              : "the first input starts after the end of the manoeuvre";
+          manoeuvre.programme().leading(Double.POSITIVE_INFINITY).isPresent()
+              ? "the first input starts after the end of the manoeuvre"
+              : manoeuvre.programme().isPowerAlone()
+                  ? "neither stick nor pedals move: nothing says which way it should roll"
+                  : "no control moves in this scenario";
       measures.add(Measure.missing(PEAK_ROLL_RATE, reason));
       measures.add(Measure.missing(STEADY_ROLL_RATE, reason));
       measures.add(timeConstant);

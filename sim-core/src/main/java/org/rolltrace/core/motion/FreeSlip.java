@@ -1,5 +1,7 @@
 package org.rolltrace.core.motion;
 
+import org.rolltrace.core.propeller.AddedMoments;
+
 /** Bank, roll rate, sideslip and yaw rate as four states. */
 public final class FreeSlip extends LateralMotion {
   private final LinearLoad side;
@@ -29,12 +31,18 @@ public final class FreeSlip extends LateralMotion {
   }
 
   @Override
-  public void rates(double time, double[] state, double aileron, double rudder, double[] rates) {
+  public void rates(
+      double time,
+      double[] state,
+      double aileron,
+      double rudder,
+      AddedMoments added,
+      double[] rates) {
     double p = state[ROLL_RATE];
     double slip = state[SIDESLIP];
     double r = state[YAW_RATE];
-    double moment = roll.at(slip, p, r, aileron, rudder);
-    double yawing = yaw.at(slip, p, r, aileron, rudder);
+    double moment = roll.at(slip, p, r, aileron, rudder) + added.roll();
+    double yawing = yaw.at(slip, p, r, aileron, rudder) + added.yaw();
     rates[BANK] = bankRate(state[BANK], p, r);
     rates[ROLL_RATE] = (izz * moment + ixz * yawing) / determinant;
     rates[SIDESLIP] = side.at(slip, p, r, aileron, rudder) / momentum + weightTurn(state[BANK]) - r;
@@ -42,12 +50,14 @@ public final class FreeSlip extends LateralMotion {
   }
 
   @Override
-  public double sideslip(double time, double[] state, double aileron, double rudder) {
+  public double sideslip(
+      double time, double[] state, double aileron, double rudder, AddedMoments added) {
     return state[SIDESLIP];
   }
 
   @Override
-  public double yawRate(double time, double[] state, double aileron, double rudder) {
+  public double yawRate(
+      double time, double[] state, double aileron, double rudder, AddedMoments added) {
     return state[YAW_RATE];
   }
 

@@ -1,6 +1,7 @@
 package org.rolltrace.core.motion;
 
 import org.rolltrace.core.pilot.HeldSideslip;
+import org.rolltrace.core.propeller.AddedMoments;
 
 /**
  * The sideslip is what the pilot holds: none, that of the straight sideslip it starts from, or one
@@ -38,20 +39,29 @@ public final class HeldSlip extends LateralMotion {
   }
 
   @Override
-  public void rates(double time, double[] state, double aileron, double rudder, double[] rates) {
-    double yawRate = yawRate(time, state, aileron, rudder);
+  public void rates(
+      double time,
+      double[] state,
+      double aileron,
+      double rudder,
+      AddedMoments added,
+      double[] rates) {
+    double yawRate = yawRate(time, state, aileron, rudder, added);
     rates[BANK] = bankRate(state[BANK], state[ROLL_RATE], yawRate);
     rates[ROLL_RATE] =
-        roll.at(held.at(time), state[ROLL_RATE], yawRate, aileron, rudder) / rollInertia;
+        (roll.at(held.at(time), state[ROLL_RATE], yawRate, aileron, rudder) + added.roll())
+            / rollInertia;
   }
 
   @Override
-  public double sideslip(double time, double[] state, double aileron, double rudder) {
+  public double sideslip(
+      double time, double[] state, double aileron, double rudder, AddedMoments added) {
     return held.at(time);
   }
 
   @Override
-  public double yawRate(double time, double[] state, double aileron, double rudder) {
+  public double yawRate(
+      double time, double[] state, double aileron, double rudder, AddedMoments added) {
     return weightTurn(state[BANK]) + turnPerSlip * held.at(time) - held.rateAt(time);
   }
 
@@ -71,22 +81,24 @@ public final class HeldSlip extends LateralMotion {
    * @param state bank and roll rate
    * @param aileron δa, rad
    * @param rudder the rudder angle flown, which enters the roll, rad
+   * @param added moments beside those of the model
    * @return δr, rad; NaN when yaw inertia or rudder power is not known
    */
-  public double rudderToHold(double time, double[] state, double aileron, double rudder) {
+  public double rudderToHold(
+      double time, double[] state, double aileron, double rudder, AddedMoments added) {
     LinearLoad yaw = model().yawMoment();
     if (model().inertia().yaw().isEmpty() || yaw.perRudder() == 0) {
       return Double.NaN;
     }
     double[] rates = new double[2];
-    rates(time, state, aileron, rudder, rates);
+    rates(time, state, aileron, rudder, added, rates);
     double yawAcceleration =
         weightTurnPerBank() * Math.cos(state[BANK]) * rates[BANK] + turnPerSlip * held.rateAt(time);
     double needed =
         model().inertia().yaw().getAsDouble() * yawAcceleration
             - model().inertia().product() * rates[ROLL_RATE];
-    double yawRate = yawRate(time, state, aileron, rudder);
-    double others = yaw.at(held.at(time), state[ROLL_RATE], yawRate, aileron, 0);
+    double yawRate = yawRate(time, state, aileron, rudder, added);
+    double others = yaw.at(held.at(time), state[ROLL_RATE], yawRate, aileron, 0) + added.yaw();
     return (needed - others) / yaw.perRudder();
   }
 }

@@ -21,7 +21,7 @@ import org.rolltrace.core.propeller.PropellerMoments;
  * @param inertia kg m², with a lateral imbalance
  * @param sideForce Y, N
  * @param rollMoment L, N m, with the propeller's and that of a lateral imbalance
- * @param yawMoment N, N m
+ * @param yawMoment N, N m, with the propeller's
  */
 public record LateralModel(
     double speed,
@@ -39,7 +39,8 @@ public record LateralModel(
    * @param aeroplane span, area, mass and inertia
    * @param derivatives non-dimensional derivatives
    * @param condition speed and density
-   * @param propeller its moments; a lateral imbalance of the aeroplane adds n g m_f y_f in roll
+   * @param propeller the moments that its propellers make all the time; a lateral imbalance of the
+   *     aeroplane adds n g m_f y_f in roll
    * @return the constants
    */
   public static LateralModel of(
@@ -55,6 +56,7 @@ public record LateralModel(
             * FlightCondition.STANDARD_GRAVITY
             * aeroplane.imbalance().map(LateralImbalance::massMoment).orElse(0.0);
     double constantRoll = propeller.roll() + weightOnOneSide;
+    double constantYaw = propeller.yaw();
     return new LateralModel(
         condition.trueAirspeed(),
         condition.loadFactor(),
@@ -63,7 +65,7 @@ public record LateralModel(
         aeroplane.loadedInertia(),
         load(derivatives, force, perRate, 0, CY_BETA, CY_P, CY_R, CY_DA, CY_DR),
         load(derivatives, moment, perRate, constantRoll, CL_BETA, CL_P, CL_R, CL_DA, CL_DR),
-        load(derivatives, moment, perRate, 0, CN_BETA, CN_P, CN_R, CN_DA, CN_DR));
+        load(derivatives, moment, perRate, constantYaw, CN_BETA, CN_P, CN_R, CN_DA, CN_DR));
   }
 
   private static LinearLoad load(

@@ -1,6 +1,7 @@
 package org.rolltrace.core.motion;
 
 import org.rolltrace.core.pilot.HeldSideslip;
+import org.rolltrace.core.propeller.AddedMoments;
 
 /**
  * The equations of motion for one treatment of the slip. The state is an array that begins with
@@ -18,6 +19,8 @@ public abstract sealed class LateralMotion permits HeldSlip, SettledSlip, FreeSl
 
   /** Index of the yaw rate in the state of free slip. */
   public static final int YAW_RATE = 3;
+
+  private static final AddedMoments NOTHING = new AddedMoments();
 
   private final LateralModel model;
   private final double tanClimb;
@@ -68,7 +71,7 @@ public abstract sealed class LateralMotion permits HeldSlip, SettledSlip, FreeSl
   public abstract int dimension();
 
   /**
-   * The rates of the state.
+   * The rates of the state under the moments of the model alone.
    *
    * @param time s; only a slip that is held against time depends on it
    * @param state bank, roll rate and, for free slip, sideslip and yaw rate
@@ -76,30 +79,80 @@ public abstract sealed class LateralMotion permits HeldSlip, SettledSlip, FreeSl
    * @param rudder δr, rad
    * @param rates receives the time derivatives of the states
    */
-  public abstract void rates(
-      double time, double[] state, double aileron, double rudder, double[] rates);
+  public final void rates(
+      double time, double[] state, double aileron, double rudder, double[] rates) {
+    rates(time, state, aileron, rudder, NOTHING, rates);
+  }
 
   /**
-   * The sideslip that goes with a state.
+   * The rates of the state.
    *
-   * @param time as for {@link #rates}
-   * @param state as for {@link #rates}
+   * @param time s; only a slip that is held against time depends on it
+   * @param state bank, roll rate and, for free slip, sideslip and yaw rate
+   * @param aileron δa, rad
+   * @param rudder δr, rad
+   * @param added moments beside those of the model
+   * @param rates receives the time derivatives of the states
+   */
+  public abstract void rates(
+      double time,
+      double[] state,
+      double aileron,
+      double rudder,
+      AddedMoments added,
+      double[] rates);
+
+  /**
+   * The sideslip that goes with a state under the moments of the model alone.
+   *
+   * @param time as for {@code rates}
+   * @param state as for {@code rates}
    * @param aileron δa, rad
    * @param rudder δr, rad
    * @return β, rad
    */
-  public abstract double sideslip(double time, double[] state, double aileron, double rudder);
+  public final double sideslip(double time, double[] state, double aileron, double rudder) {
+    return sideslip(time, state, aileron, rudder, NOTHING);
+  }
 
   /**
-   * The yaw rate that goes with a state.
+   * The sideslip that goes with a state.
    *
-   * @param time as for {@link #rates}
-   * @param state as for {@link #rates}
+   * @param time as for {@code rates}
+   * @param state as for {@code rates}
+   * @param aileron δa, rad
+   * @param rudder δr, rad
+   * @param added moments beside those of the model
+   * @return β, rad
+   */
+  public abstract double sideslip(
+      double time, double[] state, double aileron, double rudder, AddedMoments added);
+
+  /**
+   * The yaw rate that goes with a state under the moments of the model alone.
+   *
+   * @param time as for {@code rates}
+   * @param state as for {@code rates}
    * @param aileron δa, rad
    * @param rudder δr, rad
    * @return r, rad/s
    */
-  public abstract double yawRate(double time, double[] state, double aileron, double rudder);
+  public final double yawRate(double time, double[] state, double aileron, double rudder) {
+    return yawRate(time, state, aileron, rudder, NOTHING);
+  }
+
+  /**
+   * The yaw rate that goes with a state.
+   *
+   * @param time as for {@code rates}
+   * @param state as for {@code rates}
+   * @param aileron δa, rad
+   * @param rudder δr, rad
+   * @param added moments beside those of the model
+   * @return r, rad/s
+   */
+  public abstract double yawRate(
+      double time, double[] state, double aileron, double rudder, AddedMoments added);
 
   /**
    * The dimensional constants.

@@ -1,5 +1,7 @@
 package org.rolltrace.core.motion;
 
+import org.rolltrace.core.propeller.AddedMoments;
+
 /**
  * Sideslip and yaw rate in balance with bank, roll rate and controls at every instant: the
  * side-force equation with β̇ = 0 and the yawing moment N = 0, solved together.
@@ -19,6 +21,9 @@ public final class SettledSlip extends LateralMotion {
 
   /** The rolling moment once slip and yaw rate have followed; the slope 0 is the weight's turn. */
   private final double momentPerTurn;
+
+  /** The same for one unit of yawing moment. */
+  private final double momentPerYaw;
 
   private final LinearLoad moment;
 
@@ -45,16 +50,16 @@ public final class SettledSlip extends LateralMotion {
 
     LinearLoad roll = model.rollMoment();
     double perSide = roll.perSideslip() * slipPerSide + roll.perYawRate() * yawRatePerSide;
-    double perYaw = roll.perSideslip() * slipPerYaw + roll.perYawRate() * yawRatePerYaw;
+    momentPerYaw = roll.perSideslip() * slipPerYaw + roll.perYawRate() * yawRatePerYaw;
     momentPerTurn = perSide * momentum;
     moment =
         new LinearLoad(
             0,
-            roll.perRollRate() + perSide * side.perRollRate() + perYaw * yaw.perRollRate(),
+            roll.perRollRate() + perSide * side.perRollRate() + momentPerYaw * yaw.perRollRate(),
             0,
-            roll.perAileron() + perSide * side.perAileron() + perYaw * yaw.perAileron(),
-            roll.perRudder() + perSide * side.perRudder() + perYaw * yaw.perRudder(),
-            roll.constant() + perSide * side.constant() + perYaw * yaw.constant());
+            roll.perAileron() + perSide * side.perAileron() + momentPerYaw * yaw.perAileron(),
+            roll.perRudder() + perSide * side.perRudder() + momentPerYaw * yaw.perRudder(),
+            roll.constant() + perSide * side.constant() + momentPerYaw * yaw.constant());
   }
 
   @Override
@@ -72,25 +77,36 @@ public final class SettledSlip extends LateralMotion {
   }
 
   @Override
-  public double sideslip(double time, double[] state, double aileron, double rudder) {
+  public double sideslip(
+      double time, double[] state, double aileron, double rudder, AddedMoments added) {
     return slipPerSide * sideRest(state, aileron, rudder)
-        + slipPerYaw * yawRest(state, aileron, rudder);
+        + slipPerYaw * (yawRest(state, aileron, rudder) + added.yaw());
   }
 
   @Override
-  public double yawRate(double time, double[] state, double aileron, double rudder) {
+  public double yawRate(
+      double time, double[] state, double aileron, double rudder, AddedMoments added) {
     return yawRatePerSide * sideRest(state, aileron, rudder)
-        + yawRatePerYaw * yawRest(state, aileron, rudder);
+        + yawRatePerYaw * (yawRest(state, aileron, rudder) + added.yaw());
   }
 
   @Override
-  public void rates(double time, double[] state, double aileron, double rudder, double[] rates) {
+  public void rates(
+      double time,
+      double[] state,
+      double aileron,
+      double rudder,
+      AddedMoments added,
+      double[] rates) {
     double bank = state[BANK];
     double rollRate = state[ROLL_RATE];
-    double yawRate = isLevel() ? 0 : yawRate(time, state, aileron, rudder);
+    double yawRate = isLevel() ? 0 : yawRate(time, state, aileron, rudder, added);
     rates[BANK] = bankRate(bank, rollRate, yawRate);
     rates[ROLL_RATE] =
-        (momentPerTurn * weightTurn(bank) + moment.at(0, rollRate, 0, aileron, rudder))
+        (momentPerTurn * weightTurn(bank)
+                + moment.at(0, rollRate, 0, aileron, rudder)
+                + added.roll()
+                + momentPerYaw * added.yaw())
             / rollInertia;
   }
 

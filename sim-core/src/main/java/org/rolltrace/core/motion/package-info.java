@@ -8,7 +8,7 @@
  *
  * <pre>
  * L = q̄ S b (Cl_β β + Cl_p p̂ + Cl_r r̂ + Cl_δa δa + Cl_δr δr) + L_prop + n g m_f y_f
- * N = q̄ S b (Cn_β β + Cn_p p̂ + Cn_r r̂ + Cn_δa δa + Cn_δr δr)
+ * N = q̄ S b (Cn_β β + Cn_p p̂ + Cn_r r̂ + Cn_δa δa + Cn_δr δr) + N_prop
  * Y = q̄ S   (CY_β β + CY_p p̂ + CY_r r̂ + CY_δa δa + CY_δr δr)
  *
  * φ̇ = p + (q sin φ + r cos φ) tan γ,   q = (g/V)(n − cos γ cos φ)
@@ -18,6 +18,9 @@
  * held:    β and β̇ as the pilot holds them, 0 unless said;           Ixx ṗ = L
  *          r = (g/V) sin φ cos γ + q̄ S CY_β β/(mV) − β̇
  * </pre>
+ *
+ * <p>What the propellers make all the time is in the constants of the {@link
+ * org.rolltrace.core.motion.LateralModel}; what changes with the power is added at every instant.
  *
  * <h2>Trim</h2>
  *

@@ -30,7 +30,7 @@ public interface InputShape {
   /**
    * How far the input goes, to the side to which it goes first.
    *
-   * @return fraction of travel, right positive, −1 to 1
+   * @return fraction of travel, or of the rated power; right or more power positive, −1 to 1
    */
   double size();
 

@@ -15,6 +15,7 @@ public final class PilotProgramme {
   private final List<PilotInput> inputs;
   private final Movement stick;
   private final Movement pedal;
+  private final Movement power;
   private final HeldSideslip heldSideslip;
 
   private PilotProgramme(List<PilotInput> inputs, HeldSideslip heldSideslip) {
@@ -22,6 +23,7 @@ public final class PilotProgramme {
     this.heldSideslip = heldSideslip;
     this.stick = movementOf(Control.STICK);
     this.pedal = movementOf(Control.PEDAL);
+    this.power = movementOf(Control.POWER);
   }
 
   /**
@@ -85,6 +87,26 @@ public final class PilotProgramme {
   }
 
   /**
+   * The movement of the power levers.
+   *
+   * @return the sum of all power inputs, part of the rated power, added to that at the start
+   */
+  public Movement power() {
+    return power;
+  }
+
+  /**
+   * Whether the power moves and nothing else does.
+   *
+   * @return true when there is an input on the power, and none on stick or pedals
+   */
+  public boolean isPowerAlone() {
+    return power.largestPosition() > 0
+        && stick.largestPosition() == 0
+        && pedal.largestPosition() == 0;
+  }
+
+  /**
    * The sideslip that the pilot holds, however the pedals have to be moved for it.
    *
    * @return against time; none unless one was given
@@ -96,10 +118,14 @@ public final class PilotProgramme {
   /**
    * The instants at which the integration has to start anew.
    *
-   * @return breakpoints of stick, pedals and held sideslip, s, increasing
+   * @return breakpoints of stick, pedals, power and held sideslip, s, increasing
    */
   public double[] breakpoints() {
-    return Stream.of(stick.breakpoints(), pedal.breakpoints(), heldSideslip.breakpoints())
+    return Stream.of(
+            stick.breakpoints(),
+            pedal.breakpoints(),
+            power.breakpoints(),
+            heldSideslip.breakpoints())
         .flatMapToDouble(DoubleStream::of)
         .sorted()
         .distinct()
@@ -164,10 +190,10 @@ public final class PilotProgramme {
   }
 
   /**
-   * When stick and pedals have come back to their trimmed positions, to stay there.
+   * When stick, pedals and power have come back to where they were at the start, to stay there.
    *
    * @param end the end of the manoeuvre, s
-   * @return s, 0 when nothing moves; empty when a control is away from trim at the end
+   * @return s, 0 when nothing moves; empty when one is away from there at the end
    */
   public OptionalDouble backAtTrim(double end) {
     double last = 0;
@@ -176,11 +202,10 @@ public final class PilotProgramme {
         last = time;
       }
     }
+    double at = last;
     boolean away =
-        Math.abs(stick.positionAt(last)) >= CENTRED
-            || Math.abs(pedal.positionAt(last)) >= CENTRED
-            || stick.rateAt(last) != 0
-            || pedal.rateAt(last) != 0;
+        Stream.of(stick, pedal, power)
+            .anyMatch(moved -> Math.abs(moved.positionAt(at)) >= CENTRED || moved.rateAt(at) != 0);
     return away ? OptionalDouble.empty() : OptionalDouble.of(last);
   }
 

@@ -1,11 +1,12 @@
 /**
- * What the pilot does with stick and pedals, against time.
+ * What the pilot does with stick, pedals and power, against time.
  *
  * <p>Positions are fractions of travel: stick +1 is full right, pedal +1 is full right pedal
- * forward. An {@link org.rolltrace.core.pilot.InputShape} is added to the trimmed position. The
- * hand moves linearly and takes a stated time; 0 s is a jump, at whose instant the new position
- * holds already. Times are kept to the nanosecond, so that instants which are the same on paper are
- * the same here.
+ * forward. The power levers move together, by parts of the rated power, more power positive. An
+ * {@link org.rolltrace.core.pilot.InputShape} is added to the trimmed position, or to the power at
+ * the start. The hand moves linearly and takes a stated time; 0 s is a jump, at whose instant the
+ * new position holds already. Times are kept to the nanosecond, so that instants which are the same
+ * on paper are the same here.
  *
  * <p>The shapes: {@link org.rolltrace.core.pilot.StepInput step}, {@link
  * org.rolltrace.core.pilot.HoldInput hold}, {@link org.rolltrace.core.pilot.DoubletInput doublet},

@@ -9,6 +9,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Collectors;
 import org.rolltrace.core.aeroplane.Limits;
+import org.rolltrace.core.aeroplane.Propeller;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.flight.FlightEvent;
@@ -20,6 +21,9 @@ import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.motion.SteadyState;
 import org.rolltrace.core.motion.Trim;
 import org.rolltrace.core.pilot.Control;
+import org.rolltrace.core.propeller.PropellerMoments;
+import org.rolltrace.core.propeller.Propulsion;
+import org.rolltrace.core.propeller.TurningPropeller;
 import org.rolltrace.core.scenario.Scenario;
 
 /**
@@ -37,6 +41,10 @@ final class Cautions {
   private static final double LARGEST_BANK_AT_CONSTANT_SPEED = Math.toRadians(60);
   private static final double LONGEST_AT_CONSTANT_SPEED = 10;
   private static final double LARGEST_MACH = 0.7;
+
+  /** Propellers are kept below this (common practice). */
+  private static final double LARGEST_TIP_MACH = 1;
+
   private static final double LIFT_COEFFICIENT_AWAY = 0.1;
   private static final double MACH_AWAY = 0.05;
   private static final double LOAD_FACTOR_AWAY = 0.05;
@@ -58,6 +66,7 @@ final class Cautions {
     cautions.addSigns(model);
     cautions.addLateInputs();
     cautions.addStops();
+    cautions.addPower();
     cautions.addModelLimits(model);
     cautions.addDerivatives();
     cautions.addHeldSlip(measures);
@@ -167,6 +176,69 @@ final class Cautions {
         add("the %s is on its stop from %.2f s", control, flown.history().time(i));
         return;
       }
+    }
+  }
+
+  private void addPower() {
+    List<Propeller> propellers = scenario.data().aeroplane().propellers();
+    if (scenario.propeller() instanceof PropellerMoments given) {
+      if (!propellers.isEmpty() && given.equals(PropellerMoments.NONE)) {
+        add(
+            "the aeroplane has %s, but the condition gives no power: what power does is left out",
+            propellers.size() == 1 ? "a propeller" : "propellers");
+      }
+      return;
+    }
+    Propulsion propulsion = scenario.propulsion();
+    addLeverStops(propulsion);
+    if (largest(Channel.POWER) > 0) {
+      add(
+          "of what power does, swirl at the fin, uneven load of the blades at incidence and"
+              + " gyroscopic moments are left out");
+      for (Propeller propeller : propellers) {
+        if (propeller.position().y() != 0 && propeller.efficiency().isEmpty()) {
+          add(
+              "the propeller %s is off the centre line and gives no efficiency: the yaw of its"
+                  + " thrust is left out",
+              propeller.name());
+        }
+      }
+    }
+    for (TurningPropeller propeller : propulsion.propellers()) {
+      addTips(propeller, propulsion.share());
+    }
+  }
+
+  private void addLeverStops(Propulsion propulsion) {
+    flown.events().stream()
+        .filter(FlightEvent.Stop.class::isInstance)
+        .map(FlightEvent.Stop.class::cast)
+        .filter(stop -> stop.control() == Control.POWER && stop.reached())
+        .forEach(
+            stop ->
+                add(
+                    propulsion.share() + scenario.programme().power().positionAt(stop.time()) > 0.5
+                        ? "the power input goes beyond the rated power from %.2f s; the lever stops"
+                            + " there"
+                        : "the power input goes below no power from %.2f s; the lever stops there",
+                    stop.time()));
+  }
+
+  private void addTips(TurningPropeller propeller, double share) {
+    OptionalDouble diameter = propeller.propeller().diameter();
+    if (diameter.isEmpty()) {
+      return;
+    }
+    double mach =
+        Math.hypot(
+                scenario.condition().trueAirspeed(),
+                0.5 * diameter.getAsDouble() * propeller.speed(share))
+            / scenario.condition().speedOfSound();
+    if (mach > LARGEST_TIP_MACH) {
+      add(
+          "the tips of the propeller %s move at Mach %.2f; is its speed that of the engine, before"
+              + " the gear?",
+          propeller.propeller().name(), mach);
     }
   }
 

@@ -25,7 +25,7 @@ import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.motion.SteadyState;
 import org.rolltrace.core.motion.Trim;
 import org.rolltrace.core.pilot.HeldSideslip;
-import org.rolltrace.core.propeller.PropellerMoments;
+import org.rolltrace.core.propeller.PropellerSetting;
 import org.rolltrace.core.scenario.Scenario;
 
 /** Flies a scenario. */
@@ -83,12 +83,12 @@ public final class ScenarioRun {
         Cautions.of(scenario, model, trim, flown, measures));
   }
 
-  static LateralModel model(Scenario scenario, PropellerMoments propeller) {
+  static LateralModel model(Scenario scenario, PropellerSetting propeller) {
     return LateralModel.of(
         scenario.data().aeroplane(),
         scenario.data().derivatives(),
         scenario.condition(),
-        propeller);
+        scenario.propulsion().moments(propeller));
   }
 
   private static LateralMotion motion(Scenario scenario, LateralModel model, Trim trim) {
@@ -122,6 +122,7 @@ public final class ScenarioRun {
         motion,
         stickRun(scenario.data().aeroplane()),
         pedalRun(scenario.data().aeroplane()),
+        scenario.propulsion(),
         trim,
         scenario.start().disturbance(),
         scenario.programme(),

@@ -18,6 +18,8 @@ import org.rolltrace.core.motion.CalculationException;
 import org.rolltrace.core.motion.HeldSlip;
 import org.rolltrace.core.motion.LateralMotion;
 import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.propeller.AddedMoments;
+import org.rolltrace.core.propeller.PropellerMoments;
 import org.rolltrace.core.scenario.Scenario;
 
 /** What held or settled slip assumes, and how far that is from free slip. */
@@ -47,15 +49,21 @@ final class SlipAssumption {
     }
     double largest = 0;
     double[] state = new double[2];
+    PropellerMoments steady = scenario.propulsion().moments();
+    AddedMoments added = new AddedMoments();
     for (int i = 0; i < history.size(); i++) {
       state[LateralMotion.BANK] = history.value(Channel.BANK, i);
       state[LateralMotion.ROLL_RATE] = history.value(Channel.ROLL_RATE, i);
+      added.set(
+          history.value(Channel.PROPELLER_ROLL_MOMENT, i) - steady.roll(),
+          history.value(Channel.PROPELLER_YAW_MOMENT, i) - steady.yaw());
       double rudder =
           held.rudderToHold(
               history.time(i),
               state,
               history.value(Channel.AILERON, i),
-              history.value(Channel.RUDDER, i));
+              history.value(Channel.RUDDER, i),
+              added);
       if (Double.isNaN(rudder)) {
         return Measure.missing(
             PEDAL_TO_HOLD_SLIP, "the aeroplane gives no yaw inertia or no Cn_dr");

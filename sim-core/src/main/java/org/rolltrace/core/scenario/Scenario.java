@@ -1,5 +1,7 @@
 package org.rolltrace.core.scenario;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Collectors;
@@ -9,10 +11,11 @@ import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.measures.MeasureOptions;
 import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.motion.SteadyState;
-import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.PilotInput;
 import org.rolltrace.core.pilot.PilotProgramme;
-import org.rolltrace.core.propeller.PropellerMoments;
+import org.rolltrace.core.propeller.PowerSetting;
+import org.rolltrace.core.propeller.PropellerSetting;
+import org.rolltrace.core.propeller.Propulsion;
 
 /**
  * Which aeroplane, in which condition, flown how.
@@ -21,7 +24,7 @@ import org.rolltrace.core.propeller.PropellerMoments;
  * @param data the aeroplane and its derivatives
  * @param condition height, speed, load factor and flight-path angle; a load factor that was not
  *     given becomes that of the turn it starts from
- * @param propeller the propeller moments it flies with
+ * @param propeller the propeller moments, or the power, it flies with
  * @param slip the treatment of the slip
  * @param start how it starts
  * @param programme what the pilot does
@@ -32,7 +35,7 @@ public record Scenario(
     String title,
     AeroplaneData data,
     FlightCondition condition,
-    PropellerMoments propeller,
+    PropellerSetting propeller,
     SlipTreatment slip,
     Start start,
     PilotProgramme programme,
@@ -42,12 +45,15 @@ public record Scenario(
   /** The longest manoeuvre, s. */
   public static final double LONGEST = 3600;
 
+  private static final String CONDITION_POWER = "$.condition.power";
+  private static final String TRIM_POWER = "$.start.trim.power";
+
   public Scenario {
     if (!(duration > 0 && duration <= LONGEST)) {
       throw new IllegalArgumentException(
           "duration is " + duration + " s; expected above 0 and at most " + LONGEST + " s");
     }
-    List<ScenarioFault> faults = faults(data, slip, start, programme);
+    List<ScenarioFault> faults = faults(data, propeller, slip, start, programme);
     if (!faults.isEmpty()) {
       throw new IllegalArgumentException(
           faults.stream()
@@ -61,13 +67,18 @@ public record Scenario(
    * What does not fit together.
    *
    * @param data the aeroplane and its derivatives
+   * @param propeller the propeller moments, or the power, it flies with
    * @param slip the treatment of the slip
    * @param start how it starts
    * @param programme what the pilot does
    * @return all faults, or none
    */
   public static List<ScenarioFault> faults(
-      AeroplaneData data, SlipTreatment slip, Start start, PilotProgramme programme) {
+      AeroplaneData data,
+      PropellerSetting propeller,
+      SlipTreatment slip,
+      Start start,
+      PilotProgramme programme) {
     List<ScenarioFault> faults = new ArrayList<>();
     Aeroplane aeroplane = data.aeroplane();
     for (Coefficient needed :
@@ -131,24 +142,105 @@ public record Scenario(
                     + " choose another state"));
       }
     }
+    addPower(faults, aeroplane, propeller, start);
     for (int i = 0; i < programme.inputs().size(); i++) {
       PilotInput input = programme.inputs().get(i);
-      boolean stick = input.control() == Control.STICK;
-      if (stick && aeroplane.ailerons().isEmpty()) {
-        faults.add(
-            new ScenarioFault(
-                "$.inputs[" + i + "].control",
-                "the stick moves, but the aeroplane does not give the travel of its ailerons; add"
-                    + " \"ailerons\""));
-      }
-      if (!stick && aeroplane.rudder().isEmpty()) {
-        faults.add(
-            new ScenarioFault(
-                "$.inputs[" + i + "].control",
-                "the pedals move, but the aeroplane does not give the travel of its rudder; add"
-                    + " \"rudder\""));
+      String missing =
+          switch (input.control()) {
+            case STICK ->
+                aeroplane.ailerons().isEmpty()
+                    ? "the stick moves, but the aeroplane does not give the travel of its ailerons;"
+                        + " add \"ailerons\""
+                    : "";
+            case PEDAL ->
+                aeroplane.rudder().isEmpty()
+                    ? "the pedals move, but the aeroplane does not give the travel of its rudder;"
+                        + " add \"rudder\""
+                    : "";
+            case POWER ->
+                aeroplane.propellers().isEmpty()
+                    ? "the power moves, but the aeroplane has no propellers; add \"propellers\""
+                    : propeller instanceof PowerSetting
+                        ? ""
+                        : "the power moves, but the condition gives none to start from; add"
+                            + " \"power\" to it, such as \"0 W\"";
+          };
+      if (!missing.isEmpty()) {
+        faults.add(new ScenarioFault("$.inputs[" + i + "].control", missing));
       }
     }
     return faults;
+  }
+
+  private static void addPower(
+      List<ScenarioFault> faults, Aeroplane aeroplane, PropellerSetting propeller, Start start) {
+    if (propeller instanceof PowerSetting power) {
+      if (aeroplane.propellers().isEmpty()) {
+        faults.add(
+            new ScenarioFault(
+                CONDITION_POWER,
+                "a power is given, but the aeroplane has no propellers; add \"propellers\" to it, or"
+                    + " give propellerRollMoment instead"));
+      } else {
+        addBeyondRating(faults, CONDITION_POWER, power, aeroplane);
+        if (power.speed().isEmpty()
+            && aeroplane.propellers().stream().anyMatch(one -> one.speed().isEmpty())) {
+          faults.add(
+              new ScenarioFault(
+                  CONDITION_POWER,
+                  "a power is given, but not how fast the propeller turns; give propellerSpeed"
+                      + " beside it, or each propeller its speed"));
+        }
+      }
+    }
+    boolean trimmedByPower = start.trimmedWith() instanceof PowerSetting;
+    if (trimmedByPower && propeller instanceof PowerSetting) {
+      if (!start.trimmedWith().equals(propeller) && !aeroplane.propellers().isEmpty()) {
+        addBeyondRating(faults, TRIM_POWER, (PowerSetting) start.trimmedWith(), aeroplane);
+      }
+    } else if (trimmedByPower) {
+      faults.add(
+          new ScenarioFault(
+              TRIM_POWER,
+              "it is trimmed at a power, but the condition gives none; give both as power, or both"
+                  + " as propellerRollMoment"));
+    } else if (propeller instanceof PowerSetting) {
+      faults.add(
+          new ScenarioFault(
+              "$.start.trim.propellerRollMoment",
+              "it is trimmed with a propeller moment, but flown with a power; give both as power, or"
+                  + " both as propellerRollMoment"));
+    }
+  }
+
+  private static void addBeyondRating(
+      List<ScenarioFault> faults, String path, PowerSetting power, Aeroplane aeroplane) {
+    double rated = aeroplane.ratedPower();
+    if (power.power() > rated) {
+      faults.add(
+          new ScenarioFault(
+              path,
+              kilowatts(power.power())
+                  + " is beyond the rated power of the propellers, "
+                  + kilowatts(rated)
+                  + " in all; expected at most that"));
+    }
+  }
+
+  private static String kilowatts(double power) {
+    return new BigDecimal(power / 1000)
+            .round(new MathContext(6))
+            .stripTrailingZeros()
+            .toPlainString()
+        + " kW";
+  }
+
+  /**
+   * The propellers in the condition, at the power it is flown with.
+   *
+   * @return what is worked out of them
+   */
+  public Propulsion propulsion() {
+    return Propulsion.of(data.aeroplane(), condition, propeller);
   }
 }

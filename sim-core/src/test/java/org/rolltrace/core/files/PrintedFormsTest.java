@@ -307,7 +307,7 @@ class PrintedFormsTest {
             scenario.data().aeroplane(),
             scenario.data().derivatives(),
             scenario.condition(),
-            scenario.propeller());
+            scenario.propulsion().moments());
     double[] found = roots(LateralMotion.of(SlipTreatment.FREE, model).linearised());
 
     double[][] set = printed(form);

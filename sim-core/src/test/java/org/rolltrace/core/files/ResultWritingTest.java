@@ -89,6 +89,26 @@ class ResultWritingTest {
   }
 
   @Test
+  void powerIsInTheResult() throws IOException {
+    JsonNode json = json(ScenarioRun.execute(Shipped.scenario("tarnlark-go-around")));
+    assertThat(json.at("/condition/power").asDouble()).isEqualTo(75_000);
+    assertThat(json.at("/condition/powerFraction").asDouble()).isEqualTo(1);
+    // 75 kW at 2400 rpm, half of it straightened
+    double torque = 75_000 / (80 * Math.PI);
+    assertThat(json.at("/condition/propellers/0/torque").asDouble())
+        .isCloseTo(torque, within(1e-9));
+    assertThat(json.at("/condition/propellerRollMoment").asDouble())
+        .isCloseTo(-0.5 * torque, within(1e-9));
+    assertThat(json.at("/scenario/start/trimmedWithPower").asDouble()).isEqualTo(20_000);
+    // 1901 rpm by the law of the fixed pitch, of which its note says 1900
+    assertThat(json.at("/scenario/start/trimmedWithPropellerRollMoment").asDouble())
+        .isCloseTo(-0.5 * 20_000 / (1900 * Math.PI / 30), within(0.05));
+    assertThat(json.at("/aeroplane/propellers/0/pitch").asText()).isEqualTo("fixed");
+    assertThat(json.at("/aeroplane/propellers/0/rotatingInertia/engine").asDouble())
+        .isEqualTo(0.15);
+  }
+
+  @Test
   void historyHasItsHeaderAndARowEveryHundredth() throws IOException {
     RunResult result = small();
     StringBuilder out = new StringBuilder();
@@ -97,11 +117,12 @@ class ResultWritingTest {
     assertThat(lines.get(0))
         .isEqualTo(
             "time[s],bank[deg],rollRate[deg/s],yawRate[deg/s],sideslip[deg],stick[-],pedal[-],"
-                + "aileron[deg],rudder[deg],rollAcceleration[deg/s2]");
+                + "aileron[deg],rudder[deg],rollAcceleration[deg/s2],"
+                + "power[-],propellerRollMoment[N m],propellerYawMoment[N m]");
     assertThat(lines).hasSize(202);
     for (int k = 0; k <= 200; k++) {
       String[] cells = lines.get(k + 1).split(",");
-      assertThat(cells).hasSize(10);
+      assertThat(cells).hasSize(13);
       assertThat(Double.parseDouble(cells[0])).isEqualTo(k / 100.0);
     }
     // full precision: what is read back is what was computed

@@ -16,6 +16,7 @@ import org.assertj.core.api.ThrowableAssert.ThrowingCallable;
 final class Samples {
   static final String SCENARIO = resource("roll-entry.json");
   static final String SCENARIO_WITH_EVERY_KEY = resource("every-key.json");
+  static final String SCENARIO_WITH_POWER = resource("power.json");
   static final String AEROPLANE = resource("aeroplanes/some-aeroplane.json");
   static final String AEROPLANE_WITH_EVERY_KEY = resource("aeroplanes/every-key.json");
   static final String AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY =

@@ -22,6 +22,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.HoldInput;
 import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.propeller.PropellerMoments;
 import org.rolltrace.core.scenario.Scenario;
 import org.rolltrace.core.testing.Shipped;
 
@@ -142,7 +143,7 @@ class ScenarioDocumentTest {
             "  \"duration\": \"10 s\",",
             "  \"measures\": { \"settlingBand\": 0.10 }",
             "}");
-    assertThat(scenario(edited).start().trimmedWith().roll()).isEqualTo(-7);
+    assertThat(scenario(edited).start().trimmedWith()).isEqualTo(new PropellerMoments(-7));
     assertThat(scenario(edited).programme().inputs())
         .containsExactly(new PilotInput(Control.PEDAL, new HoldInput(1.25, 0.5, 2, 0.15)));
   }
@@ -248,13 +249,16 @@ class ScenarioDocumentTest {
     ScenarioDocument document =
         document(Samples.SCENARIO_WITH_EVERY_KEY)
             .withInputAdded("stick", "step", 5)
-            .withNumber("$.inputs[3].size", "0.0");
+            .withNumber("$.inputs[3].size", "0.0")
+            .withInputAdded("power", "step", 6);
     ScenarioDocument mirrored = document.mirrored();
 
     assertThat(mirrored.text("$.inputs[0].size")).contains("1");
     assertThat(mirrored.text("$.inputs[1].size")).contains("-0.5");
     assertThat(mirrored.text("$.inputs[2].size")).contains("0.25");
     assertThat(mirrored.text("$.inputs[3].size")).contains("0.0");
+    // power has no other side
+    assertThat(mirrored.text("$.inputs[8].size")).contains("0.5");
     assertThat(mirrored.mirrored()).isEqualTo(document);
   }
 

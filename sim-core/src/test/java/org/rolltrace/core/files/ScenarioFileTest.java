@@ -12,6 +12,11 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
+import org.rolltrace.core.aeroplane.Aeroplane;
+import org.rolltrace.core.aeroplane.Engine;
+import org.rolltrace.core.aeroplane.Position;
+import org.rolltrace.core.aeroplane.Propeller;
+import org.rolltrace.core.aeroplane.Rotation;
 import org.rolltrace.core.measures.MeasureOptions;
 import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.SlipTreatment;
@@ -26,6 +31,7 @@ import org.rolltrace.core.pilot.StepInput;
 import org.rolltrace.core.pilot.SweepInput;
 import org.rolltrace.core.pilot.Trace;
 import org.rolltrace.core.pilot.TraceInput;
+import org.rolltrace.core.propeller.PowerSetting;
 import org.rolltrace.core.propeller.PropellerMoments;
 import org.rolltrace.core.scenario.Scenario;
 import org.rolltrace.core.scenario.Start;
@@ -69,7 +75,7 @@ class ScenarioFileTest {
     assertThat(scenario.condition().trueAirspeed()).isEqualTo(60);
     assertThat(scenario.condition().loadFactor()).isEqualTo(1.5);
     assertThat(scenario.condition().flightPathAngle()).isEqualTo(0.1);
-    assertThat(scenario.propeller().roll()).isEqualTo(-400);
+    assertThat(scenario.propeller()).isEqualTo(new PropellerMoments(-400));
     assertThat(scenario.start())
         .isEqualTo(new Start(new PropellerMoments(-100), new Disturbance(-0.2, 0.3, 0.05)));
     assertThat(scenario.programme().inputs())
@@ -96,6 +102,57 @@ class ScenarioFileTest {
     assertThat(scenario.measures().settlingBand()).isEqualTo(0.02);
     assertThat(scenario.measures().bankChanges())
         .containsExactly(30.0, 45.0, 50.0, 60.0, 90.0, 360.0);
+  }
+
+  @Test
+  void readsPowerAndPropellers() {
+    Scenario scenario = read(Samples.SCENARIO_WITH_POWER);
+    double speed = 2400 * 2 * Math.PI / 60;
+    assertThat(((PowerSetting) scenario.propeller()).power()).isEqualTo(90_000);
+    assertThat(((PowerSetting) scenario.propeller()).speed().orElseThrow())
+        .isCloseTo(speed, within(1e-12));
+    assertThat(scenario.start().trimmedWith()).isEqualTo(PowerSetting.of(30_000));
+    assertThat(scenario.programme().inputs())
+        .containsExactly(new PilotInput(Control.POWER, new StepInput(1, 0.2, 0.1)));
+    assertThat(scenario.data().aeroplane().propellers())
+        .containsExactly(
+            Propeller.builder("one", Rotation.CLOCKWISE, Engine.of(100_000))
+                .position(new Position(0, -1, 0))
+                .efficiency(0.8)
+                .build(),
+            Propeller.builder("two", Rotation.CLOCKWISE, Engine.of(50_000))
+                .position(new Position(0, 1, 0))
+                .efficiency(0.8)
+                .build());
+  }
+
+  @Test
+  void readsEveryKeyOfAPropeller() {
+    Aeroplane aeroplane =
+        AeroplaneFile.read(
+                Samples.write(directory, "aeroplane.json", Samples.AEROPLANE_WITH_EVERY_KEY))
+            .aeroplane();
+    Propeller left = aeroplane.propellers().get(0);
+    assertThat(left.speed().orElseThrow()).isCloseTo(2000 * 2 * Math.PI / 60, within(1e-12));
+    assertThat(left)
+        .isEqualTo(
+            Propeller.builder(
+                    "left",
+                    Rotation.ANTICLOCKWISE,
+                    new Engine(100_000, 0.5, 2.4, 0.1, Rotation.CLOCKWISE))
+                .position(new Position(1, -2, -0.1))
+                .speed(left.speed().orElseThrow())
+                .speedWithoutPower(0.5)
+                .inertia(2)
+                .straightened(0.25)
+                .efficiency(0.8)
+                .diameter(2)
+                .build());
+    Propeller right = aeroplane.propellers().get(1);
+    assertThat(right.rotation()).isEqualTo(Rotation.CONTRA_ROTATING);
+    assertThat(right.straightened()).isZero();
+    assertThat(right.isFixedPitch()).isFalse();
+    assertThat(right.momentumPerSpeed()).isZero();
   }
 
   @Test
@@ -137,7 +194,7 @@ class ScenarioFileTest {
             Samples.SCENARIO_WITH_EVERY_KEY,
             "{ \"state\": \"wings-level\", \"propellerRollMoment\": \"-100 N m\" }",
             "{ \"state\": \"wings-level\" }");
-    assertThat(read(text).start().trimmedWith().roll()).isEqualTo(-400);
+    assertThat(read(text).start().trimmedWith()).isEqualTo(new PropellerMoments(-400));
   }
 
   @ParameterizedTest

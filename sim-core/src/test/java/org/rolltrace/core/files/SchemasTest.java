@@ -67,6 +67,10 @@ class SchemasTest {
     objects.put("/$defs/aeroplane/properties/rudder", AeroplaneFormat.RUDDER);
     objects.put("/$defs/aeroplane/properties/limits", AeroplaneFormat.LIMITS);
     objects.put("/$defs/aeroplane/properties/lateralImbalance", AeroplaneFormat.LATERAL_IMBALANCE);
+    String propeller = "/$defs/aeroplane/properties/propellers/items";
+    objects.put(propeller, PropellerFormat.PROPELLER);
+    objects.put(propeller + "/properties/rotatingInertia", PropellerFormat.ROTATING_INERTIA);
+    objects.put(propeller + "/properties/position", PropellerFormat.PLACE);
     objects.put("/$defs/derivatives/properties/dimensional", DerivativesFormat.DIMENSIONAL_VALUES);
     objects.put("/$defs/derivatives", DerivativesFormat.DERIVATIVES);
     objects.put("/$defs/derivatives/properties/values", DerivativesFormat.COEFFICIENTS);
@@ -175,6 +179,7 @@ class SchemasTest {
   void samplesAreAccepted() {
     assertAccepted(SCENARIO, Samples.SCENARIO);
     assertAccepted(SCENARIO, Samples.SCENARIO_WITH_EVERY_KEY);
+    assertAccepted(SCENARIO, Samples.SCENARIO_WITH_POWER);
     assertAccepted(AEROPLANE, Samples.AEROPLANE);
     assertAccepted(AEROPLANE, Samples.AEROPLANE_WITH_EVERY_KEY);
     assertAccepted(AEROPLANE, Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY);
@@ -200,6 +205,13 @@ class SchemasTest {
         .containsExactlyInAnyOrderElementsOf(AeroplaneFormat.IN_FILE.all());
     assertThat(both(keysOf(aeroplane.path("derivatives")), keysOf(dimensional.path("derivatives"))))
         .containsExactlyInAnyOrderElementsOf(DerivativesFormat.DERIVATIVES.all());
+    assertThat(keysOf(aeroplane.at("/propellers/0")))
+        .containsExactlyInAnyOrderElementsOf(PropellerFormat.PROPELLER.all());
+    JsonNode power = JSON.readTree(Samples.SCENARIO_WITH_POWER);
+    Set<String> condition =
+        both(keysOf(scenario.path("condition")), keysOf(power.path("condition")));
+    condition.addAll(List.of("density", "equivalentAirspeed", "calibratedAirspeed")); // instead
+    assertThat(condition).containsExactlyInAnyOrderElementsOf(ConditionFormat.CONDITION.all());
     List<String> values = keysOf(dimensional.at("/derivatives/dimensional"));
     values.addAll(List.of("Y_v", "L_v", "N_v")); // these stand instead of those by beta
     assertThat(values)
@@ -313,6 +325,40 @@ class SchemasTest {
     assertThat(Samples.refusalOfScenario(file).faults()).isNotEmpty();
   }
 
+  static Stream<Arguments> faultsOfPropellers() {
+    return Stream.of(
+        Arguments.of("\"name\": \"two\", ", ""),
+        Arguments.of("\"ratedPower\": \"50 kW\"", "\"ratedPower\": 50"),
+        Arguments.of("\"ratedPower\": \"50 kW\", ", ""),
+        Arguments.of("{ \"y\": \"1 m\" }", "{ \"y\": 1 }"),
+        Arguments.of("{ \"y\": \"1 m\" }", "{ \"y\": \"1 m\", \"w\": \"1 m\" }"),
+        Arguments.of("{ \"y\": \"1 m\" }", "{ \"y\": \"1 m\" }, \"straightened\": 1.1"),
+        Arguments.of("{ \"y\": \"1 m\" }", "{ \"y\": \"1 m\" }, \"straightened\": -0.1"),
+        Arguments.of("{ \"y\": \"1 m\" }", "{ \"y\": \"1 m\" }, \"speedWithoutPower\": 0.5"),
+        Arguments.of("{ \"y\": \"1 m\" }", "{ \"y\": \"1 m\" }, \"pitch\": \"fixed\""),
+        Arguments.of(
+            "{ \"y\": \"1 m\" }",
+            "{ \"y\": \"1 m\" }, \"pitch\": \"fixed\", \"speedWithoutPower\": 0.5"),
+        Arguments.of("{ \"y\": \"1 m\" }", "{ \"y\": \"1 m\" }, \"engineRotation\": \"both\""),
+        Arguments.of("{ \"y\": \"1 m\" }", "{ \"y\": \"1 m\" }, \"gearRatio\": 0"),
+        Arguments.of(
+            "\"power\": \"90 kW\"", "\"power\": \"90 kW\", \"propellerRollMoment\": \"1 N m\""),
+        Arguments.of("\"power\": \"90 kW\", ", ""),
+        Arguments.of(
+            "\"power\": \"30 kW\"", "\"power\": \"30 kW\", \"propellerRollMoment\": \"1 N m\""),
+        Arguments.of("\"power\": \"30 kW\"", "\"power\": \"30 kN\", \"speed\": \"1 rpm\""),
+        Arguments.of("\"control\": \"power\"", "\"control\": \"throttle\""));
+  }
+
+  @ParameterizedTest
+  @MethodSource("faultsOfPropellers")
+  void whatIsStructurallyWrongWithPropellersIsRefusedByBoth(String part, String replacement) {
+    String text = Samples.with(Samples.SCENARIO_WITH_POWER, part, replacement);
+    assertThat(SCENARIO.validate(text, InputFormat.JSON)).isNotEmpty();
+    Path file = Samples.writeScenario(directory, text);
+    assertThat(Samples.refusalOfScenario(file).faults()).isNotEmpty();
+  }
+
   @Test
   void anAeroplaneFileWithoutFormatIsRefusedBySchemaAndReader() {
     String text = Samples.with(Samples.AEROPLANE, "\"format\": \"rolltrace-aeroplane/1\",", "");
@@ -354,6 +400,7 @@ class SchemasTest {
             Map.entry("angularRate", Dimension.ANGULAR_RATE),
             Map.entry("inertia", Dimension.INERTIA),
             Map.entry("moment", Dimension.MOMENT),
+            Map.entry("power", Dimension.POWER),
             Map.entry("density", Dimension.DENSITY),
             Map.entry("acceleration", Dimension.ACCELERATION),
             Map.entry("perTime", Dimension.FREQUENCY),

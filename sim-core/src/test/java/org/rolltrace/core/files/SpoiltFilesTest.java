@@ -154,6 +154,164 @@ class SpoiltFilesTest {
         Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY, part, replacement, path, line, message);
   }
 
+  private static Spoilt power(
+      String part, String replacement, String path, int line, String message) {
+    return spoilt(Samples.SCENARIO_WITH_POWER, part, replacement, path, line, message);
+  }
+
+  private static Spoilt two(String more, String key, String message) {
+    return power(
+        "{ \"y\": \"1 m\" }, \"efficiency\": 0.8",
+        "{ \"y\": \"1 m\" }" + more,
+        "$.aeroplane.propellers[1]" + key,
+        9,
+        message);
+  }
+
+  /** Faults of propellers, their power, and inputs on it. */
+  static Stream<Spoilt> propellers() {
+    return Stream.of(
+        power(
+            "{ \"y\": \"1 m\" }",
+            "{ \"y\": \"-1 m\" }",
+            "$.aeroplane.propellers[1].position",
+            9,
+            "it is at the same place as the propeller \"one\"; expected a position of its own for each"),
+        power(
+            "\"name\": \"two\"",
+            "\"name\": \"one\"",
+            "$.aeroplane.propellers[1].name",
+            9,
+            "another propeller is called \"one\" already; expected a name of its own for each"),
+        power(
+            "\"two\", \"rotation\": \"clockwise\"",
+            "\"two\", \"rotation\": \"left\"",
+            "$.aeroplane.propellers[1].rotation",
+            9,
+            "unknown rotation \"left\"; expected one of \"clockwise\", \"anticlockwise\", \"contra-rotating\""),
+        two(
+            ", \"straightened\": 1.5",
+            ".straightened",
+            "1.5 is out of range; expected a part from 0 to 1"),
+        two(
+            ", \"efficiency\": 1.1",
+            ".efficiency",
+            "1.1 is out of range; expected a part above 0 and at most 1"),
+        two(
+            ", \"speedWithoutPower\": 0.5",
+            ".speedWithoutPower",
+            "a propeller of constant speed has none; write \"pitch\": \"fixed\", or leave it out"),
+        two(
+            ", \"pitch\": \"fixed\", \"engineLag\": \"1 s\"",
+            ".speedWithoutPower",
+            "the key \"speedWithoutPower\" is missing; with fixed pitch it says how fast the air turns the propeller, as a part of its speed at rated power"),
+        two(
+            ", \"pitch\": \"fixed\", \"engineLag\": \"1 s\", \"speedWithoutPower\": 1",
+            ".speedWithoutPower",
+            "1 is out of range; expected a part above 0 and below 1"),
+        two(
+            ", \"pitch\": \"fixed\", \"speedWithoutPower\": 0.5",
+            ".engineLag",
+            "the key \"engineLag\" is missing; with fixed pitch the speed follows the power, and without lag it would jump"),
+        two(
+            ", \"pitch\": \"fixed\", \"speedWithoutPower\": 0.5, \"engineLag\": \"0 s\"",
+            ".engineLag",
+            "with fixed pitch the speed follows the power, and without lag it would jump; expected a time above 0"),
+        two(
+            ", \"engineLag\": \"1 us\"".replace("1 us", "1e-5 s"),
+            ".engineLag",
+            "\"1e-5 s\": engine lag is 1.0E-5 s; expected 0 for none, or at least 1.0E-4 s"),
+        spoilt(
+            Samples.with(
+                Samples.SCENARIO_WITH_POWER,
+                "\"two\", \"rotation\": \"clockwise\"",
+                "\"two\", \"rotation\": \"contra-rotating\""),
+            "{ \"y\": \"1 m\" }, \"efficiency\": 0.8",
+            "{ \"y\": \"1 m\" }, \"rotatingInertia\": { \"engine\": \"0.1 kg m2\" }",
+            "$.aeroplane.propellers[1].engineRotation",
+            9,
+            "the key \"engineRotation\" is missing; the engine has an inertia, and the halves of its propeller do not say which way it turns"),
+        power(
+            "\"power\": \"90 kW\"",
+            "\"power\": \"151 kW\"",
+            "$.condition.power",
+            13,
+            "151 kW is beyond the rated power of the propellers, 150 kW in all; expected at most that"),
+        power(
+            "\"power\": \"30 kW\"",
+            "\"power\": \"210 hp\"",
+            "$.start.trim.power",
+            15,
+            "156.597 kW is beyond the rated power of the propellers, 150 kW in all; expected at most that"),
+        power(
+            "\"power\": \"90 kW\"",
+            "\"power\": \"-1 W\"",
+            "$.condition.power",
+            13,
+            "\"-1 W\" is out of range; expected 0 or more"),
+        power(
+            ", \"propellerSpeed\": \"2400 rpm\"",
+            "",
+            "$.condition.power",
+            13,
+            "a power is given, but not how fast the propeller turns; give propellerSpeed beside it, or each propeller its speed"),
+        power(
+            "\"power\": \"90 kW\"",
+            "\"propellerRollMoment\": \"9 N m\", \"power\": \"90 kW\"",
+            "$.condition.propellerRollMoment",
+            13,
+            "power and propellerRollMoment stand together; keep one, the moment follows from the power"),
+        power(
+            "\"power\": \"90 kW\", ",
+            "",
+            "$.condition.propellerSpeed",
+            13,
+            "propellerSpeed says nothing without power; give power, or take it out"),
+        power(
+            "{ \"power\": \"30 kW\" }",
+            "{ \"propellerRollMoment\": \"-100 N m\" }",
+            "$.start.trim.propellerRollMoment",
+            15,
+            "it is trimmed with a propeller moment, but flown with a power; give both as power, or both as propellerRollMoment"),
+        spoilt(
+            Samples.with(
+                Samples.SCENARIO_WITH_POWER,
+                "{ \"control\": \"power\", \"shape\": \"step\", \"start\": \"1 s\", \"size\": 0.2 }",
+                ""),
+            "\"power\": \"90 kW\", \"propellerSpeed\": \"2400 rpm\"",
+            "\"propellerRollMoment\": \"-100 N m\"",
+            "$.start.trim.power",
+            15,
+            "it is trimmed at a power, but the condition gives none; give both as power, or both as propellerRollMoment"),
+        spoilt(
+            Samples.with(Samples.SCENARIO_WITH_POWER, "{ \"power\": \"30 kW\" }", "{ }"),
+            ", \"power\": \"90 kW\", \"propellerSpeed\": \"2400 rpm\"",
+            "",
+            "$.inputs[0].control",
+            16,
+            "the power moves, but the condition gives none to start from; add \"power\" to it, such as \"0 W\""),
+        spoilt(
+            Samples.SCENARIO,
+            "\"control\": \"stick\"",
+            "\"control\": \"power\"",
+            "$.inputs[0].control",
+            8,
+            "the power moves, but the aeroplane has no propellers; add \"propellers\""),
+        spoilt(
+            Samples.SCENARIO,
+            "\"temperatureOffset\": \"0 K\"",
+            "\"power\": \"150 kW\"",
+            "$.condition.power",
+            5,
+            "a power is given, but the aeroplane has no propellers; add \"propellers\" to it, or give propellerRollMoment instead"),
+        power(
+            "\"control\": \"power\"",
+            "\"control\": \"throttle\"",
+            "$.inputs[0].control",
+            16,
+            "unknown control \"throttle\"; expected one of \"stick\", \"pedal\", \"power\""));
+  }
+
   /** Faults of the other forms of a set, and of what hangs on one side. */
   static Stream<Spoilt> printedSets() {
     return Stream.of(
@@ -742,7 +900,7 @@ class SpoiltFilesTest {
             "\"yoke\"",
             "$.inputs[0].control",
             8,
-            "unknown control \"yoke\"; expected one of \"stick\", \"pedal\""),
+            "unknown control \"yoke\"; expected one of \"stick\", \"pedal\", \"power\""),
         spoilt(
             Samples.SCENARIO,
             "{ \"bank\": \"0 deg\" }",
@@ -969,7 +1127,7 @@ class SpoiltFilesTest {
             "\"chord\": \"1 m\", \"rudder\"",
             "$.chord",
             7,
-            "unknown key \"chord\". The keys of an aeroplane are format, span, wingArea, inertia, derivatives, name, mass, ailerons, rudder, axes, limits, note, angleOfAttack, lateralImbalance"),
+            "unknown key \"chord\". The keys of an aeroplane are format, span, wingArea, inertia, derivatives, name, mass, ailerons, rudder, axes, limits, note, angleOfAttack, lateralImbalance, propellers"),
         spoilt(
             Samples.AEROPLANE,
             "\"Cl_p\"",
@@ -1158,7 +1316,7 @@ class SpoiltFilesTest {
   }
 
   @ParameterizedTest
-  @MethodSource("scenarios")
+  @MethodSource({"scenarios", "propellers"})
   void aFaultOfAScenarioIsReportedWhereItStands(Spoilt spoilt) {
     Path file = Samples.writeScenario(directory, spoilt.text());
     check(spoilt, file, Samples.refusalOfScenario(file));

@@ -16,6 +16,7 @@ import org.rolltrace.core.aeroplane.Inertia;
 import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.derivatives.LateralDerivatives;
 import org.rolltrace.core.pilot.HeldSideslip;
+import org.rolltrace.core.propeller.AddedMoments;
 import org.rolltrace.core.propeller.PropellerMoments;
 import org.rolltrace.core.testing.RandomAeroplane;
 import org.rolltrace.core.testing.Scenarios;
@@ -136,7 +137,7 @@ class SlipTreatmentTest {
     double[] x = {0.5, 0.4};
     double[] rates = new double[2];
     held.rates(0, x, 0.1, 0, rates);
-    double rudder = held.rudderToHold(0, x, 0.1, 0);
+    double rudder = held.rudderToHold(0, x, 0.1, 0, new AddedMoments());
     double r = held.yawRate(0, x, 0.1, 0);
     double yawAcceleration = 9.80665 / m.speed() * Math.cos(0.5) * 0.4;
     double n = m.yawMoment().at(0, 0.4, r, 0.1, rudder);
@@ -177,17 +178,20 @@ class SlipTreatmentTest {
     LateralModel m = model(13, 0);
     HeldSlip held = LateralMotion.holding(m, LED_IN);
     double[] x = {0.5, 0.4};
+    AddedMoments added = new AddedMoments();
     for (double t : new double[] {1.5, 3}) {
+      added.set(-40 * t, 70);
       double[] rates = new double[2];
-      held.rates(t, x, 0.1, 0, rates);
+      held.rates(t, x, 0.1, 0, added, rates);
       double h = 1e-5;
       double[] after = {x[0] + h * rates[0], x[1] + h * rates[1]};
       double[] before = {x[0] - h * rates[0], x[1] - h * rates[1]};
       double yawAcceleration =
           (held.yawRate(t + h, after, 0.1, 0) - held.yawRate(t - h, before, 0.1, 0)) / (2 * h);
-      double rudder = held.rudderToHold(t, x, 0.1, 0);
+      double rudder = held.rudderToHold(t, x, 0.1, 0, added);
       double n =
-          m.yawMoment().at(held.sideslip(t, x, 0, 0), 0.4, held.yawRate(t, x, 0, 0), 0.1, rudder);
+          m.yawMoment().at(held.sideslip(t, x, 0, 0), 0.4, held.yawRate(t, x, 0, 0), 0.1, rudder)
+              + 70;
       double needed =
           m.inertia().yaw().orElseThrow() * yawAcceleration - m.inertia().product() * rates[1];
       // the difference: rounding of 1e-16/h, and h² times slopes of order one

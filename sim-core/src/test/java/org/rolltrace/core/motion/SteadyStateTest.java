@@ -192,7 +192,8 @@ class SteadyStateTest {
                     plane.ailerons(),
                     plane.rudder(),
                     plane.limits(),
-                    Optional.of(new LateralImbalance(20, random.nextDouble() * 4 - 2))),
+                    Optional.of(new LateralImbalance(20, random.nextDouble() * 4 - 2)),
+                    List.of()),
                 any.data().derivatives(),
                 condition,
                 new PropellerMoments(-300));

@@ -10,20 +10,30 @@ import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.rolltrace.core.aeroplane.Aeroplane;
 import org.rolltrace.core.aeroplane.Ailerons;
+import org.rolltrace.core.aeroplane.Engine;
 import org.rolltrace.core.aeroplane.Inertia;
 import org.rolltrace.core.aeroplane.Limits;
+import org.rolltrace.core.aeroplane.Position;
+import org.rolltrace.core.aeroplane.Propeller;
+import org.rolltrace.core.aeroplane.Rotation;
 import org.rolltrace.core.aeroplane.Rudder;
 import org.rolltrace.core.aeroplane.SurfaceDynamics;
 import org.rolltrace.core.atmosphere.AirspeedKind;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.derivatives.LateralDerivatives;
+import org.rolltrace.core.measures.MeasureOptions;
 import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.pilot.PilotProgramme;
 import org.rolltrace.core.pilot.StepInput;
+import org.rolltrace.core.propeller.PowerSetting;
 import org.rolltrace.core.propeller.PropellerMoments;
+import org.rolltrace.core.propeller.PropellerSetting;
 import org.rolltrace.core.scenario.AeroplaneData;
+import org.rolltrace.core.scenario.Scenario;
+import org.rolltrace.core.scenario.Start;
 import org.rolltrace.core.testing.Scenarios;
 
 /** Each caution appears when its limit is met, and not before. */
@@ -225,6 +235,70 @@ class CautionsTest {
     slip = SlipTreatment.SETTLED;
     values.put(Coefficient.CN_BETA, -0.02);
     assertThat(cautions(0.2)).anyMatch(c -> c.startsWith("Cn_beta is not positive"));
+  }
+
+  private static List<String> withPropeller(PropellerSetting setting, Propeller propeller) {
+    AeroplaneData bare = Scenarios.oneDegree(0.4, 8);
+    AeroplaneData data =
+        new AeroplaneData(
+            Aeroplane.builder("test", 10, 15, bare.aeroplane().inertia())
+                .propeller(propeller)
+                .build(),
+            bare.derivatives());
+    return ScenarioRun.execute(
+            new Scenario(
+                "test",
+                data,
+                Scenarios.seaLevel(50),
+                setting,
+                SlipTreatment.HELD,
+                new Start(setting, Disturbance.NONE),
+                PilotProgramme.of(List.of()),
+                1,
+                MeasureOptions.DEFAULT))
+        .cautions();
+  }
+
+  private static Propeller.Builder nose() {
+    return Propeller.builder("nose", Rotation.CLOCKWISE, Engine.of(75_000)).speed(251);
+  }
+
+  @Test
+  void aPropellerWithoutPowerIsLeftOut() {
+    String caution =
+        "the aeroplane has a propeller, but the condition gives no power: what power does is left"
+            + " out";
+    assertThat(withPropeller(PropellerMoments.NONE, nose().build())).contains(caution);
+    assertThat(withPropeller(new PropellerMoments(-9), nose().build())).doesNotContain(caution);
+    assertThat(withPropeller(PowerSetting.of(0), nose().build()))
+        .doesNotContain(caution)
+        .noneMatch(c -> c.startsWith("of what power does"));
+    assertThat(withPropeller(PowerSetting.of(75_000), nose().build()))
+        .doesNotContain(caution)
+        .anyMatch(c -> c.startsWith("of what power does"));
+  }
+
+  @Test
+  void thrustOffTheCentreLineWithoutEfficiency() {
+    Position right = new Position(1, 2, 0);
+    String caution = "the propeller nose is off the centre line and gives no efficiency";
+    assertThat(withPropeller(PowerSetting.of(1000), nose().position(right).build()))
+        .anyMatch(c -> c.startsWith(caution));
+    assertThat(withPropeller(PowerSetting.of(1000), nose().position(right).efficiency(0.8).build()))
+        .noneMatch(c -> c.startsWith(caution));
+    assertThat(withPropeller(PowerSetting.of(1000), nose().build()))
+        .noneMatch(c -> c.startsWith(caution));
+  }
+
+  /** 2.6 m at 251 rad/s and 50 m/s: √(326.3² + 50²)/340.3 = 0.970; 2.8 m: 1.043. */
+  @Test
+  void propellerTipsBeyondTheSpeedOfSound() {
+    assertThat(withPropeller(PowerSetting.of(1000), nose().diameter(2.6).build()))
+        .noneMatch(c -> c.startsWith("the tips"));
+    assertThat(withPropeller(PowerSetting.of(1000), nose().diameter(2.8).build()))
+        .contains(
+            "the tips of the propeller nose move at Mach 1.04; is its speed that of the engine,"
+                + " before the gear?");
   }
 
   @Test

@@ -37,7 +37,8 @@ class RecomputationTest {
     "tarnlark-cruise-roll-entry, tarnlark-cruise-roll-entry, FREE",
     "tarnlark-turn-reversal, tarnlark-turn-reversal, FREE",
     "tarnlark-climbing-turn, tarnlark-climbing-turn, FREE",
-    "tarnlark-straight-sideslip, tarnlark-straight-sideslip, FREE"
+    "tarnlark-straight-sideslip, tarnlark-straight-sideslip, FREE",
+    "tarnlark-power-step, tarnlark-power-step, FREE"
   })
   void sameHistory(String name, String file, SlipTreatment slip) throws IOException {
     Scenario shipped = Shipped.scenario(name);

@@ -33,12 +33,21 @@ public final class RollStrips {
    * @param result the run
    * @param ghost the run it is compared with
    * @return bank; roll rate; sideslip and yaw rate; stick and pedal, in per cent of travel; aileron
-   *     and rudder
+   *     and rudder; and where the power changes, the power that the propellers get
    */
   public static List<Strip> of(RunResult result, Optional<RunResult> ghost) {
     Run run = Run.of(result, false);
     List<Run> runs = new ArrayList<>(List.of(run));
     ghost.ifPresent(other -> runs.add(Run.of(other, true)));
+    List<Strip> strips = new ArrayList<>(always(result, runs));
+    if (runs.stream().anyMatch(Run::changesPower)) {
+      strips.add(
+          new Strip("Power", "% of rated", curves(runs, Channel.POWER), leverMarkers(result)));
+    }
+    return strips;
+  }
+
+  private static List<Strip> always(RunResult result, List<Run> runs) {
     return List.of(
         new Strip("Bank", "deg", curves(runs, Channel.BANK), captures(result)),
         new Strip("Roll rate", "deg/s", curves(runs, Channel.ROLL_RATE), rateMarkers(result)),
@@ -156,10 +165,24 @@ public final class RollStrips {
   private static List<Marker> surfaceMarkers(RunResult result) {
     List<Marker> markers = new ArrayList<>();
     for (FlightEvent event : result.events()) {
-      if (event instanceof FlightEvent.Stop stop && stop.reached()) {
+      if (event instanceof FlightEvent.Stop stop
+          && stop.reached()
+          && stop.control() != Control.POWER) {
         markers.add(new Marker(stop.time(), surface(stop.control()) + " at stop"));
       } else if (event instanceof FlightEvent.RateLimit limit && limit.began()) {
         markers.add(new Marker(limit.time(), surface(limit.control()) + " at rate limit"));
+      }
+    }
+    return markers;
+  }
+
+  private static List<Marker> leverMarkers(RunResult result) {
+    List<Marker> markers = new ArrayList<>();
+    for (FlightEvent event : result.events()) {
+      if (event instanceof FlightEvent.Stop stop
+          && stop.reached()
+          && stop.control() == Control.POWER) {
+        markers.add(new Marker(stop.time(), "lever at stop"));
       }
     }
     return markers;
@@ -169,6 +192,7 @@ public final class RollStrips {
     return switch (control) {
       case STICK -> "aileron";
       case PEDAL -> "rudder";
+      case POWER -> "propeller";
     };
   }
 
@@ -182,6 +206,10 @@ public final class RollStrips {
         time[i] = history.time(i);
       }
       return new Run(history, result.scenario(), List.of(time), RollStrips.side(result), ghost);
+    }
+
+    boolean changesPower() {
+      return scenario.programme().power().largestPosition() > 0;
     }
 
     /** Whether the aeroplane has what the channel is about. */
@@ -220,6 +248,9 @@ public final class RollStrips {
         case AILERON -> "aileron";
         case RUDDER -> "rudder";
         case ROLL_ACCELERATION -> "roll acceleration";
+        case POWER -> "power";
+        case PROPELLER_ROLL_MOMENT -> "propeller roll moment";
+        case PROPELLER_YAW_MOMENT -> "propeller yaw moment";
       };
     }
   }

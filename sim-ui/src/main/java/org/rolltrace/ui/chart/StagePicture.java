@@ -148,7 +148,7 @@ public final class StagePicture {
               input.control().word(),
               shape.name(),
               Ticks.figure(Math.abs(100 * shape.size()), 0),
-              shape.size() < 0 ? "left" : "right",
+              input.control().way(shape.size()),
               Ticks.figure(shape.start(), 2)));
     }
     return parts.isEmpty() ? "hands off" : String.join("; ", parts);

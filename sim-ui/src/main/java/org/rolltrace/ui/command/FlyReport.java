@@ -32,6 +32,11 @@ import org.rolltrace.core.pilot.PilotInput;
 import org.rolltrace.core.pilot.RampInput;
 import org.rolltrace.core.pilot.SweepInput;
 import org.rolltrace.core.pilot.TraceInput;
+import org.rolltrace.core.propeller.PowerSetting;
+import org.rolltrace.core.propeller.PropellerMoments;
+import org.rolltrace.core.propeller.PropellerSetting;
+import org.rolltrace.core.propeller.Propulsion;
+import org.rolltrace.core.propeller.TurningPropeller;
 import org.rolltrace.core.quantity.Quantity;
 import org.rolltrace.core.run.RunResult;
 import org.rolltrace.core.run.Safety;
@@ -162,9 +167,47 @@ final class FlyReport {
             + (condition.flightPathAngle() == 0
                 ? ""
                 : format(", flight path %+.2f deg", Math.toDegrees(condition.flightPathAngle()))));
-    if (result.scenario().propeller().roll() != 0) {
-      row("  propeller moment", format("%+.1f N m in roll", result.scenario().propeller().roll()));
+    addPower(result.scenario());
+  }
+
+  private void addPower(Scenario scenario) {
+    Propulsion propulsion = scenario.propulsion();
+    if (scenario.propeller() instanceof PowerSetting setting) {
+      row(
+          "  power",
+          format(
+              "%s, %s %% of the rated power",
+              power(setting.power()), plain(round(100 * propulsion.share()))));
+      for (TurningPropeller propeller : propulsion.propellers()) {
+        wrapped(padded("  propeller", 20), describe(propeller, propulsion.share()));
+      }
     }
+    PropellerMoments moments = propulsion.moments();
+    if (moments.roll() != 0 || moments.yaw() != 0) {
+      row(
+          "  propeller moment",
+          format("%+.1f N m in roll", moments.roll())
+              + (moments.yaw() == 0 ? "" : format(", %+.1f N m in yaw", moments.yaw())));
+    }
+  }
+
+  private static String power(double watts) {
+    return format("%.4g kW (%.4g hp)", Quantity.toUnit(watts, "kW"), Quantity.toUnit(watts, "hp"));
+  }
+
+  private static double round(double percent) {
+    return Math.rint(percent * 10) / 10;
+  }
+
+  private static String describe(TurningPropeller propeller, double share) {
+    OptionalDouble thrust = propeller.thrust(share);
+    return format(
+            "%s: %s, %.0f rpm, torque %.1f N m",
+            propeller.propeller().name(),
+            propeller.propeller().rotation().word(),
+            Quantity.toUnit(propeller.speed(share), "rpm"),
+            propeller.torque(share))
+        + (thrust.isPresent() ? format(", thrust %.0f N", thrust.getAsDouble()) : "");
   }
 
   private void addManoeuvre(Scenario scenario) {
@@ -208,7 +251,7 @@ final class FlyReport {
         input.control().word(),
         shape.name(),
         plain(100 * Math.abs(shape.size())),
-        shape.size() < 0 ? "left" : "right",
+        input.control().way(shape.size()),
         plain(shape.start()),
         course(shape));
   }
@@ -281,13 +324,18 @@ final class FlyReport {
 
   private void addTrim() {
     line("");
-    double trimmedWith = result.scenario().start().trimmedWith().roll();
+    Scenario scenario = result.scenario();
+    PropellerSetting trimmedWith = scenario.start().trimmedWith();
     Trim trim = result.trim();
     String state = trim.state().kind().word().replace('-', ' ');
     line(
-        trimmedWith == result.scenario().propeller().roll()
+        trimmedWith.equals(scenario.propeller())
             ? "Trim, " + state
-            : format("Trim, %s, with a propeller moment of %+.1f N m", state, trimmedWith));
+            : format(
+                "Trim, %s, with %sa propeller moment of %+.1f N m",
+                state,
+                trimmedWith instanceof PowerSetting setting ? power(setting.power()) + " and " : "",
+                scenario.propulsion().moments(trimmedWith).roll()));
     surface("aileron", trim.aileron(), "stick", trim.stick());
     surface("rudder", trim.rudder(), "pedal", trim.pedal());
     two("sideslip", format("%.2f deg", Math.toDegrees(trim.sideslip())), "");

@@ -124,6 +124,15 @@ final class ConditionStrip extends FlowPane {
             new PathField(
                 session,
                 FieldTarget.quantity(
+                    "$.condition.power",
+                    "Power",
+                    "power",
+                    "none",
+                    "Power of all propellers together; the propeller moment follows from it",
+                    5)),
+            new PathField(
+                session,
+                FieldTarget.quantity(
                     "$.condition.propellerRollMoment",
                     "Propeller moment",
                     "propeller moment",

@@ -57,7 +57,9 @@ final class InputEditor extends FlowPane {
     remove.setMinWidth(USE_PREF_SIZE);
     remove.setOnAction(event -> lanes.removeSelected());
     remove.disableProperty().bind(lanes.selectedProperty().lessThan(0));
-    control.getItems().setAll("stick", "pedal");
+    for (Control moved : Control.values()) {
+      control.getItems().add(moved.word());
+    }
     control.setId("input-control");
     control.setOnAction(
         event ->
@@ -119,7 +121,8 @@ final class InputEditor extends FlowPane {
         "Size",
         "size of the input",
         "0.5",
-        "Fraction of travel, added to the trimmed position; right positive, \u22121 to 1",
+        "Fraction of travel, added to the trimmed position, or of the rated power, added to that at"
+            + " the start; right and more positive, \u22121 to 1",
         5);
   }
 

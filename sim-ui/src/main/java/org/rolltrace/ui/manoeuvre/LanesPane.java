@@ -28,7 +28,8 @@ import org.rolltrace.ui.chart.TimeWindow;
 import org.rolltrace.ui.chart.TypeSize;
 
 /**
- * What the hand did: stick and pedal lanes with their inputs as blocks to drag, stretch and resize.
+ * What the hand did: stick and pedal lanes, and one of the power where it moves, with their inputs
+ * as blocks to drag, stretch and resize.
  */
 final class LanesPane extends Region {
   private static final double LANE = 40;
@@ -60,8 +61,8 @@ final class LanesPane extends Region {
     setFocusTraversable(true);
     setAccessibleText("Stick and pedal lanes");
     getChildren().add(canvas);
-    setMinHeight(2 * LANE + GAP + 6);
-    setPrefHeight(2 * LANE + GAP + 6);
+    setMinHeight(heightOf(lanes().size()));
+    setPrefHeight(heightOf(lanes().size()));
     model.session().documentProperty().addListener((property, before, now) -> keepSelection());
     model.session().resultProperty().addListener((property, before, now) -> refresh());
     model.windowProperty().addListener((property, before, now) -> draw());
@@ -90,7 +91,20 @@ final class LanesPane extends Region {
       return; // what is drawn is still so
     }
     blocks = now;
+    setMinHeight(heightOf(lanes().size()));
+    setPrefHeight(heightOf(lanes().size()));
     draw();
+  }
+
+  /** Stick and pedal always; the power only while there is an input on it. */
+  private List<Control> lanes() {
+    return blocks.stream().anyMatch(block -> block.control() == Control.POWER)
+        ? List.of(Control.STICK, Control.PEDAL, Control.POWER)
+        : List.of(Control.STICK, Control.PEDAL);
+  }
+
+  private static double heightOf(int lanes) {
+    return lanes * (LANE + GAP) - GAP + 6;
   }
 
   private void keepSelection() {
@@ -130,7 +144,13 @@ final class LanesPane extends Region {
   }
 
   private static double middle(Control control) {
-    return 2 + 0.5 * LANE + (control == Control.STICK ? 0 : LANE + GAP);
+    int above =
+        switch (control) {
+          case STICK -> 0;
+          case PEDAL -> 1;
+          case POWER -> 2;
+        };
+    return 2 + 0.5 * LANE + above * (LANE + GAP);
   }
 
   static double yOf(Control control, double position) {
@@ -145,7 +165,7 @@ final class LanesPane extends Region {
       return;
     }
     CanvasPainter painter = new CanvasPainter(context, palette.get());
-    for (Control control : Control.values()) {
+    for (Control control : lanes()) {
       drawLane(painter, control);
     }
     List<Mark> marks = new ArrayList<>();
@@ -167,12 +187,19 @@ final class LanesPane extends Region {
             Ink.PANEL,
             1));
     painter.paint(new Mark.Line(left, y, right, y, Stroke.of(Ink.GRID, 1)));
-    String word = control == Control.STICK ? "Stick" : "Pedal";
+    String word =
+        switch (control) {
+          case STICK -> "Stick";
+          case PEDAL -> "Pedal";
+          case POWER -> "Power";
+        };
     painter.paint(new Mark.Label(10, y + 4, word, Anchor.START, TypeSize.NORMAL, Ink.TEXT));
     painter.paint(
-        new Mark.Label(left - 8, y - FULL + 10, "right", Anchor.END, TypeSize.SMALL, Ink.QUIET));
+        new Mark.Label(
+            left - 8, y - FULL + 10, control.way(1), Anchor.END, TypeSize.SMALL, Ink.QUIET));
     painter.paint(
-        new Mark.Label(left - 8, y + FULL - 2, "left", Anchor.END, TypeSize.SMALL, Ink.QUIET));
+        new Mark.Label(
+            left - 8, y + FULL - 2, control.way(-1), Anchor.END, TypeSize.SMALL, Ink.QUIET));
     if (blocks.stream().noneMatch(block -> block.control() == control)) {
       painter.paint(
           new Mark.Label(
@@ -313,9 +340,16 @@ final class LanesPane extends Region {
 
   private void click(MouseEvent event) {
     if (event.getClickCount() == 2 && hitAt(event.getX(), event.getY()).isEmpty()) {
-      boolean stick = event.getY() < middle(Control.STICK) + FULL + GAP / 2;
-      addInput(stick ? Control.STICK : Control.PEDAL, "hold", Math.max(0, timeAt(event.getX())));
+      addInput(laneAt(event.getY()), "hold", Math.max(0, timeAt(event.getX())));
     }
+  }
+
+  private Control laneAt(double y) {
+    List<Control> lanes = lanes();
+    return lanes.stream()
+        .filter(control -> y < middle(control) + FULL + GAP / 2)
+        .findFirst()
+        .orElse(lanes.get(lanes.size() - 1));
   }
 
   void addInput(Control control, String shape, double start) {

@@ -164,7 +164,7 @@ record Reading(
                         + " "
                         + Written.plain(100 * Math.abs(input.shape().size()), 1)
                         + " % "
-                        + (input.shape().size() < 0 ? "left" : "right"))
+                        + input.control().way(input.shape().size()))
             .collect(Collectors.joining(", "));
     return (inputs.isEmpty() ? "no input" : inputs)
         + "; "
