@@ -39,8 +39,8 @@
  *       {@code sideslip} (wind from the right): displacements from the trimmed state, 0 when absent;
  *       {@code trim}: {@code state}: {@code wings-level} (default), {@code straight-sideslip} with
  *       either {@code sideslip} or {@code bank}, or {@code steady-turn} with {@code bank}, these
- *       inside 90 deg either way; and {@code propellerRollMoment}, the one trimmed with, that of the
- *       condition when absent. With held slip a straight sideslip is held all the time</td></tr>
+ *       inside 90 deg either way; and {@code power} or {@code propellerRollMoment}, the one trimmed
+ *       with, in the way of the condition, that of the condition when absent. With held slip a straight sideslip is held all the time</td></tr>
  *   <tr><td>inputs</td><td>list of inputs, below; up to 200, none when absent; those on one control
  *       add up</td></tr>
  *   <tr><td>duration*</td><td>time above 0, up to 3600 s</td></tr>
@@ -61,21 +61,27 @@
  *   <tr><td>loadFactor</td><td>number; when absent the cosine of the flight-path angle, in a
  *       steady turn divided by that of the bank</td></tr>
  *   <tr><td>flightPathAngle</td><td>angle inside ±90 deg, positive climbing; 0 when absent</td></tr>
- *   <tr><td>propellerRollMoment</td><td>moment, right wing down positive; 0 when absent. Not in
- *       {@code validAt} of derivatives</td></tr>
+ *   <tr><td>power</td><td>power of all propellers together, from 0 to the rated one; not in {@code
+ *       validAt} of derivatives, as the two below</td></tr>
+ *   <tr><td>propellerSpeed</td><td>angular rate above 0 of the propellers with that power; of each
+ *       its own when absent</td></tr>
+ *   <tr><td>propellerRollMoment</td><td>moment instead of power, right wing down positive; 0 when
+ *       both are absent</td></tr>
  * </table>
  *
  * <table>
  *   <caption>Keys of an input</caption>
  *   <tr><th>key</th><th>value</th></tr>
- *   <tr><td>control*</td><td>{@code stick} or {@code pedal}</td></tr>
+ *   <tr><td>control*</td><td>{@code stick}, {@code pedal} or {@code power}: all levers together;
+ *       needs a power of the condition, and stops at 0 and at the rated power</td></tr>
  *   <tr><td>shape*</td><td>{@code step} (stays), {@code hold} (and then back), {@code doublet} (to
  *       one side, the other, and back), {@code multistep} (to either side by turns, 3-2-1-1),
  *       {@code ramp} (slowly, and stays), {@code sweep} (a sine of changing frequency), {@code
  *       trace} (as recorded)</td></tr>
  *   <tr><td>start*</td><td>time of the first movement, 0 or more; of trace, which may do without,
  *       what is added to its times, 0 s when absent</td></tr>
- *   <tr><td>size*</td><td>number, −1 to 1: fraction of the travel, right positive; of sweep
+ *   <tr><td>size*</td><td>number, −1 to 1: fraction of the travel, right positive, or of
+ *       the rated power, more positive; of sweep
  *       how far it goes to each side, of trace, which may do without, a factor, 1 when absent</td></tr>
  *   <tr><td>movement, not of ramp, sweep and trace</td><td>time that the hand takes for a move, 0 or more; 0.1 s when absent, 0 s
  *       for a jump</td></tr>
@@ -131,6 +137,7 @@
  *       each; {@code rateLimit}: angular rate above 0; {@code lag}: time, 0 or more</td></tr>
  *   <tr><td>rudder</td><td>{@code left}*, {@code right}* above 0, up to 90 deg; {@code rateLimit},
  *       {@code lag}</td></tr>
+ *   <tr><td>propellers</td><td>list of propellers, below; up to 20, none when absent</td></tr>
  *   <tr><td>axes</td><td>{@code stability} (default) or {@code body}: the axes of inertia and
  *       derivatives</td></tr>
  *   <tr><td>angleOfAttack</td><td>of body axes*, inside 90 deg either way: inertia and derivatives
@@ -145,6 +152,34 @@
  *       degree}, for beta, da and dr; {@code aileronSign}: {@code right-roll-positive} (default) or
  *       {@code left-roll-positive}; {@code aileronAngle}: {@code mean} (default), {@code total} or
  *       {@code one-side}; {@code validAt}: a condition</td></tr>
+ * </table>
+ *
+ * <table>
+ *   <caption>Keys of a propeller</caption>
+ *   <tr><th>key</th><th>value</th></tr>
+ *   <tr><td>name*</td><td>text, up to 200 characters, no other propeller's</td></tr>
+ *   <tr><td>rotation*</td><td>{@code clockwise}, {@code anticlockwise} (seen from behind) or {@code
+ *       contra-rotating}</td></tr>
+ *   <tr><td>ratedPower*</td><td>power above 0</td></tr>
+ *   <tr><td>speed</td><td>angular rate above 0, of the propeller: the governed one, or with fixed
+ *       pitch that at rated power; that of the condition when absent</td></tr>
+ *   <tr><td>pitch</td><td>{@code constant-speed} (default) or {@code fixed}: the cube of the speed
+ *       grows evenly with the power</td></tr>
+ *   <tr><td>speedWithoutPower, of fixed pitch only*</td><td>number above 0 and below 1: part of the
+ *       speed at rated power with which the air turns it</td></tr>
+ *   <tr><td>gearRatio</td><td>number above 0: turns of the engine for one of the propeller, 1 when
+ *       absent</td></tr>
+ *   <tr><td>rotatingInertia</td><td>{@code propeller}, {@code engine}: inertias, 0 or more, 0 when
+ *       absent</td></tr>
+ *   <tr><td>engineRotation</td><td>{@code clockwise} or {@code anticlockwise}; as the propeller when
+ *       absent, which a contra-rotating one with an inertia of the engine does not allow</td></tr>
+ *   <tr><td>engineLag</td><td>time, 0 or more; 0 s when absent, above 0 with fixed pitch*</td></tr>
+ *   <tr><td>position</td><td>{@code x} ahead, {@code y} right, {@code z} below the centre of gravity:
+ *       lengths, 0 when absent; no other propeller's</td></tr>
+ *   <tr><td>diameter</td><td>length above 0</td></tr>
+ *   <tr><td>efficiency</td><td>number above 0 and up to 1; without it there is no thrust</td></tr>
+ *   <tr><td>straightened</td><td>number from 0 to 1: part of the slipstream's rotation that wing and
+ *       fuselage take out again, 0 when absent</td></tr>
  * </table>
  *
  * <h2>How reading goes</h2>

@@ -62,10 +62,11 @@ class MutatedFilesTest {
     String[] samples = {
       Samples.SCENARIO,
       Samples.SCENARIO_WITH_EVERY_KEY,
+      Samples.SCENARIO_WITH_POWER,
       Samples.AEROPLANE,
       Samples.AEROPLANE_WITH_EVERY_KEY,
-      Samples.TRACE,
-      Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY
+      Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY,
+      Samples.TRACE
     };
     Path traced = Samples.writeScenario(directory, Samples.SCENARIO_WITH_EVERY_KEY);
     Samples.write(directory, "aeroplanes/some-aeroplane.json", Samples.AEROPLANE);
@@ -75,7 +76,7 @@ class MutatedFilesTest {
       byte[] mutated = mutated(samples[sample], random);
       String text = new String(mutated, StandardCharsets.ISO_8859_1);
       boolean isTrace = sample == samples.length - 1;
-      boolean isScenario = sample < 2;
+      boolean isScenario = sample < 3;
       // A file of this size takes about a millisecond; a second is far beyond a slow machine.
       accepted +=
           assertTimeoutPreemptively(

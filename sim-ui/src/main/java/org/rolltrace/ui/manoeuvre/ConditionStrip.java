@@ -108,7 +108,7 @@ final class ConditionStrip extends FlowPane {
             new PathField(
                 session,
                 FieldTarget.quantity(
-                    "$.title", "Scenario", "title", "", "Title of the scenario", 12)),
+                    "$.title", "Scenario", "title", "", "Title of the scenario", 10)),
             new PathField(
                 session,
                 FieldTarget.quantity(
@@ -129,7 +129,7 @@ final class ConditionStrip extends FlowPane {
                     "power",
                     "none",
                     "Power of all propellers together; the propeller moment follows from it",
-                    5)),
+                    4)),
             new PathField(
                 session,
                 FieldTarget.quantity(

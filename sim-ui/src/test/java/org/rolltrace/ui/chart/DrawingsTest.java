@@ -311,6 +311,18 @@ class DrawingsTest {
   }
 
   @Test
+  void powerHasAStripWhereItChanges() {
+    List<Strip> strips = RollStrips.of(Runs.of("tarnlark-power-step"), Optional.empty());
+    assertThat(strips).hasSize(6);
+    assertThat(strips.get(5).title()).isEqualTo("Power");
+    double[] power = strips.get(5).curves().get(0).value();
+    // from 20 kW of 75, and nearly all after eleven time constants
+    assertThat(power[0]).isCloseTo(100 * 20.0 / 75, within(1e-9));
+    assertThat(power[power.length - 1]).isCloseTo(100 * (20.0 / 75 + 0.73), within(0.01));
+    assertThat(RollStrips.of(Runs.of("tarnlark-go-around"), Optional.empty())).hasSize(5);
+  }
+
+  @Test
   void theSideIsThatOfTheInputTheStartOrTheEnd() {
     assertThat(RollStrips.side(Runs.step(0.3))).isEqualTo(Ink.RIGHT);
     assertThat(RollStrips.side(Runs.step(-0.3))).isEqualTo(Ink.LEFT);

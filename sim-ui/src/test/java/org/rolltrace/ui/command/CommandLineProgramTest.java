@@ -63,6 +63,11 @@ class CommandLineProgramTest {
         "ramp | stick ramp, 50 % right at 1 s, reached in 2 s",
         "sweep | stick sweep, 10 % right at 1 s, logarithmic from 0.1 to 2 Hz in 25 s",
         "trace | column stick of traces/roll-and-back.csv times 1, from 0 s",
+        "power-step | power step, 73 % more at 1 s, hand takes 0.5 s",
+        "power-step | 20.00 kW (26.82 hp), 26.7 % of the rated power",
+        "power-step | nose: clockwise, 1900 rpm, torque 100.5 N m, thrust 407 N",
+        "go-around | 75.00 kW (100.6 hp), 100 % of the rated power",
+        "go-around | Trim, wings level, with 20.00 kW (26.82 hp) and a propeller moment of -50.2 N m",
         "held-sideslip | held: sideslip 0 deg at 1 s, 5 deg at 2 s, 5 deg at 4 s, 0 deg at 5 s"
       })
   void theReportSaysWhatTheHandDid(String name, String words) {

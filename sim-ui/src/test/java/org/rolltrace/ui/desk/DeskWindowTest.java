@@ -24,6 +24,7 @@ import javafx.scene.image.PixelReader;
 import javafx.scene.image.WritableImage;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
+import javafx.scene.layout.Region;
 import javafx.stage.Stage;
 import javafx.stage.WindowEvent;
 import org.junit.jupiter.api.AfterEach;
@@ -34,6 +35,8 @@ import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.rolltrace.core.files.ScenarioDocument;
+import org.rolltrace.core.history.Channel;
+import org.rolltrace.core.history.TimeHistory;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.run.RunResult;
 import org.rolltrace.ui.chart.Ink;
@@ -527,6 +530,31 @@ class DeskWindowTest {
     ScenarioDocument saved = ScenarioDocument.open(folder.resolve(STEP));
     assertThat(saved.text(SPEED)).contains("200 ft/s");
     assertThat(saved.text("$.aeroplane")).contains("aeroplanes/light-single.json");
+  }
+
+  @Test
+  void anInputOnThePowerHasALaneOfItsOwn() throws IOException {
+    for (String name :
+        List.of("aeroplanes/tarnlark-trainer-approach.json", "tarnlark-power-step.json")) {
+      Files.copy(SHIPPED.resolve(name), folder.resolve(name));
+    }
+    open(STEP);
+    double two = onWindow(() -> ((Region) node("#lanes")).getHeight());
+
+    open("tarnlark-power-step.json");
+    until("a third lane", () -> ((Region) node("#lanes")).getHeight() > two + 30);
+    Point2D top = onWindow(() -> LanesOnScreen.at(node("#lanes"), Control.POWER, 3, 0.73));
+    Point2D half = onWindow(() -> LanesOnScreen.at(node("#lanes"), Control.POWER, 3, 0.5));
+    drag(top, half);
+
+    until(
+        "less power", () -> Math.abs(Double.parseDouble(written("$.inputs[0].size")) - 0.5) < 0.06);
+    until(
+        "flown with less power",
+        () -> {
+          TimeHistory history = result().history();
+          return history.value(Channel.POWER, history.size() - 1) < 0.85;
+        });
   }
 
   @Test

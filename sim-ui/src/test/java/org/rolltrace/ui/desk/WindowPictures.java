@@ -90,7 +90,7 @@ public final class WindowPictures extends Application {
                   session.edit("spoil", d -> d.with("$.condition.trueAirspeed", "176 kg"));
                   figures(true);
                 }));
-        for (String input : List.of("multistep", "sweep", "trace")) {
+        for (String input : List.of("multistep", "sweep", "trace", "power-step")) {
           shots.add(
               new Shot(
                   input + "-" + suffix,
