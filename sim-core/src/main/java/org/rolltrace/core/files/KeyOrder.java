@@ -27,6 +27,8 @@ final class KeyOrder {
           "shape",
           "file",
           "column",
+          "cutBefore",
+          "cutAfter",
           "start",
           "trim",
           "state",

@@ -37,4 +37,14 @@ public record FlightPlan(
     captures = List.copyOf(captures);
     captures.forEach(angle -> Check.positive("bank change, rad,", angle));
   }
+
+  /**
+   * The same with another programme.
+   *
+   * @param other what the pilot does
+   * @return the plan
+   */
+  public FlightPlan withProgramme(PilotProgramme other) {
+    return new FlightPlan(motion, stickRun, pedalRun, trim, disturbance, other, captures, duration);
+  }
 }

@@ -13,6 +13,7 @@ import org.rolltrace.core.flight.FlightEvent;
 import org.rolltrace.core.flight.FlightPlan;
 import org.rolltrace.core.flight.FlightSettings;
 import org.rolltrace.core.flight.Flown;
+import org.rolltrace.core.flight.LiveFlight;
 import org.rolltrace.core.measures.Manoeuvre;
 import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.measures.Measures;
@@ -79,6 +80,20 @@ public final class ScenarioRun {
         flown.events(),
         measures,
         Cautions.of(scenario, model, trim, flown, measures));
+  }
+
+  /**
+   * Begins to fly a scenario by hand: its aeroplane, condition, slip and start, without its inputs
+   * on stick and pedals. Its duration says nothing.
+   *
+   * @param scenario what is flown
+   * @return the flight at 0 s
+   * @throws CalculationException when trim has no answer
+   */
+  public static LiveFlight byHand(Scenario scenario) {
+    LateralMotion motion = motion(scenario, model(scenario, scenario.propeller()));
+    FlightPlan plan = plan(scenario, motion, trim(scenario, scenario.slip()));
+    return LiveFlight.begin(plan.withProgramme(plan.programme().handsOff()));
   }
 
   static LateralModel model(Scenario scenario, PropellerMoments propeller) {
