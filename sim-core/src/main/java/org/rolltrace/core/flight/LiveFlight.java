@@ -1,6 +1,8 @@
 package org.rolltrace.core.flight;
 
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.List;
 import java.util.Optional;
 import org.hipparchus.exception.MathRuntimeException;
 import org.hipparchus.ode.ODEState;
@@ -43,10 +45,8 @@ public final class LiveFlight {
   private final HandMove pedalMove = new HandMove();
   private final ControlledMotion controlled;
   private final DormandPrince853Integrator integrator;
-  private final TimeHistory.Recorder recorder =
-      TimeHistory.recorder(TICKS_PER_SECOND, 60 * TICKS_PER_SECOND);
+  private final List<double[]> rows = new ArrayList<>();
   private final double[] breakpoints;
-  private final double[] row = new double[Channel.COUNT];
   private double[] stick = new double[60 * TICKS_PER_SECOND];
   private double[] pedal = new double[60 * TICKS_PER_SECOND];
   private double[] state;
@@ -63,7 +63,7 @@ public final class LiveFlight {
             settings.relativeTolerance());
     this.breakpoints = plan.programme().breakpoints();
     this.state = controlled.start();
-    record(0, 0);
+    record(0);
   }
 
   /**
@@ -140,7 +140,8 @@ public final class LiveFlight {
    * @param pedalTo the same of the pedals
    * @throws IllegalArgumentException when a position is no number
    * @throws IllegalStateException when the flight {@linkplain #isOver is over}
-   * @throws CalculationException when the equations cannot be followed; the flight stays as it was
+   * @throws CalculationException when the equations cannot be followed; the record ends before this
+   *     tick
    */
   public void tick(double stickTo, double pedalTo) {
     if (isOver()) {
@@ -169,7 +170,7 @@ public final class LiveFlight {
     }
     state = flown;
     ticks++;
-    record(end, Math.nextDown(end));
+    record(Math.nextDown(end));
   }
 
   private double[] fly(double from, double to, double[] at) {
@@ -211,15 +212,16 @@ public final class LiveFlight {
             }));
   }
 
-  private void record(double time, double controlTime) {
+  private void record(double controlTime) {
     if (ticks == stick.length) {
       stick = Arrays.copyOf(stick, 2 * ticks);
       pedal = Arrays.copyOf(pedal, 2 * ticks);
     }
     stick[ticks] = stickMove.end();
     pedal[ticks] = pedalMove.end();
+    double[] row = new double[Channel.COUNT];
     controlled.row(controlTime, state, row);
-    recorder.add(time, row);
+    rows.add(row);
   }
 
   /**
@@ -247,7 +249,7 @@ public final class LiveFlight {
    * @return the value in the channel's SI unit
    */
   public double now(Channel channel) {
-    return row[channel.column()];
+    return rows.get(ticks)[channel.column()];
   }
 
   /**
@@ -266,6 +268,21 @@ public final class LiveFlight {
    * @return the history
    */
   public TimeHistory history() {
+    return history(0);
+  }
+
+  /**
+   * What has been flown of late, a sample at each tick.
+   *
+   * @param from s; the ticks from the last one at or before this on
+   * @return the history from there on
+   */
+  public TimeHistory history(double from) {
+    int first = (int) Math.max(0, Math.min(ticks, Math.floor(from * TICKS_PER_SECOND)));
+    TimeHistory.Recorder recorder = TimeHistory.recorder(TICKS_PER_SECOND, ticks - first + 1);
+    for (int i = first; i <= ticks; i++) {
+      recorder.add(i / (double) TICKS_PER_SECOND, rows.get(i));
+    }
     return recorder.finish();
   }
 
