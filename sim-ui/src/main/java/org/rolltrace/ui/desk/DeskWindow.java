@@ -262,7 +262,8 @@ public final class DeskWindow {
   private void spacePlays(KeyEvent event) {
     Node focused = stage.getScene().getFocusOwner();
     boolean free = focused == null || PLAYABLE.contains(String.valueOf(focused.getId()));
-    if (event.getCode() == KeyCode.SPACE && free) {
+    boolean flying = model.hand().flyingProperty().get(); // then space begins the flight
+    if (event.getCode() == KeyCode.SPACE && free && !flying) {
       model.clock().toggle();
       event.consume();
     }

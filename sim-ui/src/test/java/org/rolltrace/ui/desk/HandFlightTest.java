@@ -168,7 +168,8 @@ class HandFlightTest {
 
   @Test
   void nothingMovesBeforeTheFirstKeyAndCautionsStayInSight() {
-    click("#fly-by-hand");
+    robot.interact(() -> node("#stage").requestFocus());
+    robot.push(KeyCode.CONTROL, KeyCode.F);
     until("ready", () -> isThere("#hand-flight"));
     WaitForAsyncUtils.sleep(150, TimeUnit.MILLISECONDS);
     assertThat(time()).isZero();
@@ -180,6 +181,7 @@ class HandFlightTest {
 
     robot.push(KeyCode.SPACE);
     untilTime(0.1);
+    assertThat(onWindow(() -> window.model().clock().isPlaying())).as("replay").isFalse();
     assertThat(((Label) node("#hand-state")).getText()).startsWith("Flying");
     assertThat(((Label) node("#hand-time")).getText()).endsWith(" s");
     click("#stop-hand");
