@@ -2,6 +2,7 @@ package org.rolltrace.core.files;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.InputShape;
@@ -42,7 +43,8 @@ final class InputFormat {
 
   private InputFormat() {}
 
-  static Optional<PilotInput> read(JsonValue.ObjectValue object, Faults faults) {
+  static Optional<PilotInput> read(
+      JsonValue.ObjectValue object, Faults faults, Map<String, String> carried) {
     Optional<ShapeFormat> format = format(object);
     ObjectCursor in =
         format.isPresent()
@@ -57,7 +59,8 @@ final class InputFormat {
         new ShapeFormat.Common(
             in.quantity(START, Dimension.TIME, Range.ZERO_OR_MORE, 0),
             in.number(SIZE, FRACTION, 1),
-            in.quantity(MOVEMENT, Dimension.TIME, Range.ZERO_OR_MORE, InputShape.DEFAULT_MOVEMENT));
+            in.quantity(MOVEMENT, Dimension.TIME, Range.ZERO_OR_MORE, InputShape.DEFAULT_MOVEMENT),
+            carried);
     if (format.isEmpty()) {
       return Optional.empty();
     }

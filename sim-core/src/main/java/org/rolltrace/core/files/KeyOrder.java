@@ -29,6 +29,8 @@ final class KeyOrder {
           "shape",
           "file",
           "column",
+          "cutBefore",
+          "cutAfter",
           "start",
           "trim",
           "state",

@@ -171,6 +171,8 @@ public final class ResultJson {
       json.writeStringField("column", trace.trace().column());
       number("scale", trace.scale());
       number("shift", trace.shift());
+      number("from", trace.trace().begin());
+      number("to", trace.trace().end());
     }
   }
 

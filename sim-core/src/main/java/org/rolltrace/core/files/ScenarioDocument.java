@@ -1,16 +1,21 @@
 package org.rolltrace.core.files;
 
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import org.rolltrace.core.pilot.Control;
+import org.rolltrace.core.pilot.HandRecord;
 import org.rolltrace.core.scenario.Scenario;
 
 /**
@@ -21,6 +26,9 @@ import org.rolltrace.core.scenario.Scenario;
  * $.inputs[0].size}. Methods that take one throw {@link IllegalArgumentException} for text that is
  * no path, and {@link IndexOutOfBoundsException} for an index beyond the end of a list.
  *
+ * <p>A document may carry traces that are in no file yet, such as those that were just flown by
+ * hand; writing the document writes them beside it.
+ *
  * <p>Two documents are equal when they would be written alike into the same file.
  */
 public final class ScenarioDocument {
@@ -28,6 +36,9 @@ public final class ScenarioDocument {
   private static final String INPUTS = "$.inputs";
 
   private static final String HELD_SLIP = "$.heldSlip";
+
+  /** What a hand flies. */
+  private static final List<String> HANDS = List.of(Control.STICK.word(), Control.PEDAL.word());
 
   /** A number, a blank and something that may be a unit. */
   private static final Pattern ANGLE =
@@ -41,11 +52,16 @@ public final class ScenarioDocument {
   private final String json;
   private final NamedAeroplane named;
 
-  private ScenarioDocument(Path file, JsonNode.Group root, NamedAeroplane named) {
+  /** Texts of trace files that are in no file yet, by their names here. */
+  private final Map<String, String> carried;
+
+  private ScenarioDocument(
+      Path file, JsonNode.Group root, NamedAeroplane named, Map<String, String> carried) {
     this.file = file;
     this.root = root;
     this.json = JsonPrinter.print(root);
     this.named = named;
+    this.carried = carried;
   }
 
   /**
@@ -69,7 +85,7 @@ public final class ScenarioDocument {
    * @throws FileFaultsException if it cannot be read as a JSON object
    */
   public static ScenarioDocument open(Path file) {
-    return new ScenarioDocument(file, NamedAeroplane.read(file), new NamedAeroplane());
+    return new ScenarioDocument(file, NamedAeroplane.read(file), new NamedAeroplane(), Map.of());
   }
 
   /**
@@ -101,13 +117,13 @@ public final class ScenarioDocument {
     Optional<JsonValue.ObjectValue> object =
         JsonTree.read(json.getBytes(StandardCharsets.UTF_8), faults);
     return new ScenarioDocument(
-        file, JsonNode.group(object.orElseThrow(faults::toException)), named);
+        file, JsonNode.group(object.orElseThrow(faults::toException)), named, Map.of());
   }
 
   private ScenarioDocument of(JsonNode newRoot) {
     return newRoot.equals(root)
         ? this
-        : new ScenarioDocument(file, (JsonNode.Group) newRoot, named);
+        : new ScenarioDocument(file, (JsonNode.Group) newRoot, named, carried);
   }
 
   private ScenarioDocument with(String path, JsonNode value) {
@@ -347,8 +363,7 @@ public final class ScenarioDocument {
         changed = changed.withNumber(size, "-1");
       }
     }
-    int points = group(HELD_SLIP, true).map(list -> list.items().size()).orElse(0);
-    for (int i = 0; i < points; i++) {
+    for (int i = 0; i < heldSlipCount(); i++) {
       String sideslip = HELD_SLIP + "[" + i + "].sideslip";
       Optional<String> angle = text(sideslip);
       if (angle.isPresent() && ANGLE.matcher(angle.get()).matches()) {
@@ -368,6 +383,141 @@ public final class ScenarioDocument {
       return digits.substring(1);
     }
     return "-" + (digits.startsWith("+") ? digits.substring(1) : digits);
+  }
+
+  /**
+   * The same flown by hand: what the hand did in place of all inputs on stick and pedals, as traces
+   * that the document carries until it is written, and its end as the duration. Inputs on other
+   * controls stay.
+   *
+   * @param record what the hand did; it moves at least one control and lasts longer than 0 s
+   * @param fileName what the file of the traces should be called, such as {@code by-hand.csv}; a
+   *     number is added when there is such a file
+   * @return the edited document
+   * @throws IllegalArgumentException if nothing moves, or the record has no length
+   */
+  public ScenarioDocument flownByHand(HandRecord record, String fileName) {
+    List<Control> moved = Stream.of(Control.STICK, Control.PEDAL).filter(record::moves).toList();
+    if (moved.isEmpty() || !(record.end() > 0)) {
+      throw new IllegalArgumentException(
+          "the hand record has "
+              + record
+              + " and moves "
+              + moved
+              + "; expected one longer than 0 s that moves stick or pedals");
+    }
+    String name = freeName(fileName, Optional.empty());
+    ScenarioDocument changed = this;
+    for (int i = inputCount() - 1; i >= 0; i--) {
+      Optional<String> control = text(input(i) + ".control");
+      if (control.isEmpty() || HANDS.contains(control.get())) {
+        changed = changed.withoutInput(i);
+      }
+    }
+    for (Control control : moved) {
+      String at = input(changed.inputCount());
+      changed =
+          changed
+              .with(at + ".control", control.word())
+              .with(at + ".shape", "trace")
+              .with(at + "." + TraceFormat.FILE, name)
+              .with(at + ".column", control.word());
+    }
+    Map<String, String> texts = new TreeMap<>(changed.carriedTraces());
+    texts.put(name, TraceCsv.text(record.simplified()));
+    return changed.with("$.duration", seconds(record.end())).carrying(texts);
+  }
+
+  /** A name beside the document that no other file and no other trace has. */
+  private String freeName(String wanted, Optional<String> text) {
+    int dot = wanted.lastIndexOf('.');
+    String stem = dot > 0 ? wanted.substring(0, dot) : wanted;
+    String ending = dot > 0 ? wanted.substring(dot) : "";
+    String name = wanted;
+    for (int i = 2; isTaken(name, text); i++) {
+      name = stem + "-" + i + ending;
+    }
+    return name;
+  }
+
+  /** Whether a file has a name, and not the text that would be written into it. */
+  private boolean isTaken(String name, Optional<String> text) {
+    try {
+      Path place = file.resolveSibling(name);
+      if (text.isEmpty()) {
+        return carried.containsKey(name) || Files.exists(place);
+      }
+      boolean isOfAnother = carried.containsKey(name) && !text.get().equals(carried.get(name));
+      if (isOfAnother || !Files.exists(place)) {
+        return isOfAnother;
+      }
+      return !Arrays.equals(TextFile.bytes(place), text.get().getBytes(StandardCharsets.UTF_8));
+    } catch (UnusableFileException other) {
+      return true;
+    }
+  }
+
+  /** The same with names for the carried traces that no other file has. */
+  ScenarioDocument withFreeTraceNames() {
+    ScenarioDocument changed = this;
+    Map<String, String> texts = new TreeMap<>();
+    for (Map.Entry<String, String> trace : carriedTraces().entrySet()) {
+      String name = freeName(trace.getKey(), Optional.of(trace.getValue()));
+      texts.put(name, trace.getValue());
+      for (int i = 0; i < inputCount(); i++) {
+        if (traceName(i).equals(Optional.of(trace.getKey()))) {
+          changed = changed.with(traceFile(i), name);
+        }
+      }
+    }
+    return changed.carrying(texts);
+  }
+
+  /**
+   * The traces of this document that are in no file yet.
+   *
+   * @return the texts of CSV files by the names that inputs give them; none that no input names
+   */
+  public Map<String, String> carriedTraces() {
+    Map<String, String> named = new TreeMap<>();
+    for (int i = 0; i < inputCount(); i++) {
+      traceName(i)
+          .filter(carried::containsKey)
+          .ifPresent(name -> named.put(name, carried.get(name)));
+    }
+    return named;
+  }
+
+  /**
+   * The same with other traces that are in no file yet.
+   *
+   * @param traces the texts of CSV files by the names that inputs give them
+   * @return the document
+   */
+  public ScenarioDocument carrying(Map<String, String> traces) {
+    return traces.equals(carried)
+        ? this
+        : new ScenarioDocument(file, root, named, Map.copyOf(traces));
+  }
+
+  /**
+   * How a file is called in this document.
+   *
+   * @param other a file
+   * @return the path that leads there from the folder of this document
+   */
+  public String nameOf(Path other) {
+    Path absolute = other.toAbsolutePath();
+    return NamedAeroplane.seenFrom(file, absolute, String.valueOf(absolute.getFileName()));
+  }
+
+  /**
+   * How many points of a sideslip held against time there are.
+   *
+   * @return 0 also when there is no list of them
+   */
+  public int heldSlipCount() {
+    return group(HELD_SLIP, true).map(list -> list.items().size()).orElse(0);
   }
 
   /**
@@ -432,7 +582,8 @@ public final class ScenarioDocument {
    * The same as it would stand in another file.
    *
    * @param newFile where
-   * @return a document whose paths to aeroplane and trace files lead there from the new place
+   * @return a document whose paths to aeroplane and trace files lead there from the new place;
+   *     traces that it carries keep their names
    */
   public ScenarioDocument at(Path newFile) {
     if (newFile.equals(file)) {
@@ -446,12 +597,12 @@ public final class ScenarioDocument {
     }
     for (int i = 0; i < inputCount(); i++) {
       Optional<String> trace = traceName(i);
-      if (trace.isPresent()) {
+      if (trace.isPresent() && !carried.containsKey(trace.get())) {
         String seen = NamedAeroplane.seenFrom(newFile, file, trace.get());
         moved = JsonNode.with(moved, JsonPath.steps(traceFile(i)), new JsonNode.Text(seen));
       }
     }
-    return new ScenarioDocument(newFile, (JsonNode.Group) moved, named);
+    return new ScenarioDocument(newFile, (JsonNode.Group) moved, named, carried);
   }
 
   /**
@@ -472,7 +623,7 @@ public final class ScenarioDocument {
   public Check check() {
     Faults faults = new Faults(file);
     byte[] bytes = json.getBytes(StandardCharsets.UTF_8);
-    Optional<Scenario> scenario = ScenarioFile.read(bytes, faults);
+    Optional<Scenario> scenario = ScenarioFile.read(bytes, faults, carried);
     if (bytes.length > TextFile.LARGEST) {
       faults.addForWholeFile(TextFile.tooLarge(bytes.length + " bytes").getMessage());
     }
@@ -520,7 +671,8 @@ public final class ScenarioDocument {
   public boolean equals(Object other) {
     return other instanceof ScenarioDocument document
         && document.json.equals(json)
-        && document.file.equals(file);
+        && document.file.equals(file)
+        && document.carried.equals(carried);
   }
 
   @Override

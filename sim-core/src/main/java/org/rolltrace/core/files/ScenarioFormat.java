@@ -6,6 +6,7 @@ import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.rolltrace.core.atmosphere.FlightCondition;
@@ -67,7 +68,8 @@ final class ScenarioFormat {
 
   private ScenarioFormat() {}
 
-  static Optional<Scenario> read(JsonValue.ObjectValue object, Faults faults) {
+  static Optional<Scenario> read(
+      JsonValue.ObjectValue object, Faults faults, Map<String, String> carried) {
     if (!FormatName.mayBe(FormatName.SCENARIO, object, faults)) {
       return Optional.empty();
     }
@@ -84,7 +86,7 @@ final class ScenarioFormat {
     }
     Optional<SlipTreatment> slip = slip(in);
     Optional<Start> start = start(in, propeller.orElse(PropellerMoments.NONE));
-    Optional<PilotProgramme> programme = programme(in);
+    Optional<PilotProgramme> programme = programme(in, carried);
     Optional<HeldSideslip> held = heldSideslip(in);
     programme = programme.flatMap(inputs -> held.map(inputs::holding));
     double duration = in.quantity("duration", Dimension.TIME, DURATION);
@@ -263,12 +265,12 @@ final class ScenarioFormat {
     return in.isSound() ? Optional.of(new SteadyState(kind, bank, sideslip)) : Optional.empty();
   }
 
-  private static Optional<PilotProgramme> programme(ObjectCursor in) {
+  private static Optional<PilotProgramme> programme(ObjectCursor in, Map<String, String> carried) {
     List<JsonValue> elements = in.list(INPUTS, MOST_INPUTS);
     List<PilotInput> inputs = new ArrayList<>();
     for (JsonValue element : elements) {
       if (element instanceof JsonValue.ObjectValue object) {
-        Optional<PilotInput> input = InputFormat.read(object, in.faults());
+        Optional<PilotInput> input = InputFormat.read(object, in.faults(), carried);
         if (input.isPresent()) {
           inputs.add(input.get());
         }

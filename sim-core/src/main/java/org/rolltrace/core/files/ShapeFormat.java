@@ -25,7 +25,7 @@ interface ShapeFormat {
    * Makes the shape of its own keys and of what all shapes share.
    *
    * @param in the input; what is wrong is added to its faults
-   * @param common start, size and movement
+   * @param common start, size and movement, and what the scenario carries
    * @return the shape, or empty when something is wrong
    */
   Optional<InputShape> read(ObjectCursor in, Common common);
@@ -33,6 +33,8 @@ interface ShapeFormat {
   /**
    * What all shapes share, s and fraction of travel; NaN where it was refused. Where a shape may do
    * without, start is 0 and size 1.
+   *
+   * @param carried texts of trace files, by their names, that are in no file yet
    */
-  record Common(double start, double size, double movement) {}
+  record Common(double start, double size, double movement, Map<String, String> carried) {}
 }

@@ -6,13 +6,15 @@ import java.util.Iterator;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
+import org.rolltrace.core.pilot.Control;
+import org.rolltrace.core.pilot.HandRecord;
 import org.rolltrace.core.pilot.Trace;
 import org.rolltrace.core.quantity.Dimension;
 import org.rolltrace.core.quantity.Quantity;
 import org.rolltrace.core.quantity.QuantityException;
 import org.rolltrace.core.quantity.Unit;
 
-/** One column of a CSV file against its time. */
+/** Recorded movements as CSV: one column of a file against its time. */
 final class TraceCsv {
   static final int MOST_ROWS = 100_000;
 
@@ -23,6 +25,7 @@ final class TraceCsv {
   private final Faults faults;
   private final double shift;
   private final double scale;
+  private final double cutBefore;
 
   private int line;
   private int rows;
@@ -35,11 +38,27 @@ final class TraceCsv {
    * @param faults of the CSV file
    * @param shift s to be added to its times; NaN when it was refused
    * @param scale what its positions will be multiplied by; NaN when it was refused
+   * @param cutBefore s before which nothing of it is wanted; NaN when it was refused
    */
-  TraceCsv(Faults faults, double shift, double scale) {
+  TraceCsv(Faults faults, double shift, double scale, double cutBefore) {
     this.faults = faults;
     this.shift = Double.isNaN(shift) ? 0 : shift;
     this.scale = Double.isNaN(scale) ? 0 : scale;
+    this.cutBefore = Double.isNaN(cutBefore) ? Double.NEGATIVE_INFINITY : cutBefore;
+  }
+
+  /** What a hand did, as a file of three columns with all digits that are needed. */
+  static String text(HandRecord record) {
+    StringBuilder text = new StringBuilder("time[s],stick[-],pedal[-]\n");
+    for (int i = 0; i < record.size(); i++) {
+      text.append(record.time(i))
+          .append(',')
+          .append(record.position(Control.STICK, i))
+          .append(',')
+          .append(record.position(Control.PEDAL, i))
+          .append('\n');
+    }
+    return text.toString();
   }
 
   /** A column of the header. */
@@ -233,7 +252,7 @@ final class TraceCsv {
       add(
           timePlace,
           "the time is " + at + " s after " + times[rows - 1] + " s; expected increasing times");
-    } else if (rows == 0 && !(at + shift >= 0)) {
+    } else if (rows == 0 && !(Math.max(at, cutBefore) + shift >= 0)) {
       add(
           timePlace,
           "the time is "

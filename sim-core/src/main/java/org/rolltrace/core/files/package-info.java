@@ -100,6 +100,8 @@
  *       through zero after the duration</td></tr>
  *   <tr><td>file*, column*, of trace only</td><td>the path of a CSV file from the directory of the
  *       scenario; the name of a column there, below</td></tr>
+ *   <tr><td>cutBefore, cutAfter, of trace only</td><td>times in that file; what is before the one and
+ *       after the other is not flown</td></tr>
  * </table>
  *
  * <table>

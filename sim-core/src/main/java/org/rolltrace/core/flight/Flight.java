@@ -11,7 +11,6 @@ import java.util.stream.DoubleStream;
 import org.hipparchus.exception.MathRuntimeException;
 import org.hipparchus.ode.ODEState;
 import org.hipparchus.ode.ODEStateAndDerivative;
-import org.hipparchus.ode.OrdinaryDifferentialEquation;
 import org.hipparchus.ode.events.Action;
 import org.hipparchus.ode.nonstiff.DormandPrince853Integrator;
 import org.hipparchus.ode.sampling.ODEStateInterpolator;
@@ -19,9 +18,7 @@ import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.history.TimeHistory;
 import org.rolltrace.core.motion.CalculationException;
 import org.rolltrace.core.motion.LateralMotion;
-import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.PilotInput;
-import org.rolltrace.core.propeller.AddedMoments;
 
 /** Computes one manoeuvre. */
 public final class Flight {
@@ -51,7 +48,7 @@ public final class Flight {
 
   private final FlightPlan plan;
   private final FlightSettings settings;
-  private final LateralMotion motion;
+  private final ControlledMotion controlled;
   private final SurfaceDrive stick;
   private final SurfaceDrive pedal;
   private final PowerDrive power;
@@ -60,7 +57,6 @@ public final class Flight {
   private final TimeHistory.Recorder recorder;
   private final List<FlightEvent> events = new ArrayList<>();
   private final List<Double> openCaptures;
-  private final double[] scratch;
   private final double[] sample;
   private final double[] row = new double[Channel.COUNT];
   private final DenseStep step;
@@ -72,30 +68,13 @@ public final class Flight {
   private Flight(FlightPlan plan, FlightSettings settings) {
     this.plan = plan;
     this.settings = settings;
-    this.motion = plan.motion();
     this.leading = plan.programme().leading(plan.duration());
-    int states = motion.dimension();
-    this.stick =
-        new SurfaceDrive(
-            Control.STICK,
-            plan.stickRun(),
-            plan.programme().stick(),
-            plan.trim().stick().orElse(0),
-            plan.trim().aileron(),
-            states);
-    states += stick.hasState() ? 1 : 0;
-    this.pedal =
-        new SurfaceDrive(
-            Control.PEDAL,
-            plan.pedalRun(),
-            plan.programme().pedal(),
-            plan.trim().pedal().orElse(0),
-            plan.trim().rudder(),
-            states);
-    states += pedal.hasState() ? 1 : 0;
-    this.power = new PowerDrive(plan.propulsion(), plan.programme().power(), states);
-    states += power.states();
-    this.scratch = new double[states];
+    this.controlled =
+        new ControlledMotion(plan, plan.programme().stick(), plan.programme().pedal());
+    this.stick = controlled.stick();
+    this.pedal = controlled.pedal();
+    this.power = controlled.power();
+    int states = controlled.dimension();
     this.sample = new double[states];
     this.step = new DenseStep(states);
     this.integrator =
@@ -144,17 +123,7 @@ public final class Flight {
   }
 
   private Flown run() {
-    double[] state = new double[scratch.length];
-    state[LateralMotion.BANK] = plan.trim().bank() + plan.disturbance().bank();
-    state[LateralMotion.ROLL_RATE] = plan.trim().rollRate() + plan.disturbance().rollRate();
-    if (motion.dimension() > LateralMotion.SIDESLIP) {
-      state[LateralMotion.SIDESLIP] = plan.trim().sideslip() + plan.disturbance().sideslip();
-      state[LateralMotion.YAW_RATE] = plan.trim().yawRate();
-    }
-    stick.initialise(state);
-    pedal.initialise(state);
-    power.initialise(state);
-
+    double[] state = controlled.start();
     double start = 0;
     for (double end : stretchEnds()) {
       state = flyStretch(start, end, state);
@@ -201,7 +170,7 @@ public final class Flight {
     try {
       reachedState =
           integrator
-              .integrate(new Stretch(last), new ODEState(start, state), end)
+              .integrate(controlled.until(last), new ODEState(start, state), end)
               .getPrimaryState();
     } catch (MathRuntimeException failure) {
       throw new CalculationException(
@@ -328,53 +297,7 @@ public final class Flight {
   }
 
   private void record(double time, double controlTime, double[] state) {
-    double aileron = stick.angle(controlTime, state);
-    double rudder = pedal.angle(controlTime, state);
-    AddedMoments added = power.added(controlTime, state);
-    motion.rates(controlTime, state, aileron, rudder, added, scratch);
-    row[Channel.BANK.column()] = state[LateralMotion.BANK];
-    row[Channel.ROLL_RATE.column()] = state[LateralMotion.ROLL_RATE];
-    row[Channel.YAW_RATE.column()] = motion.yawRate(controlTime, state, aileron, rudder, added);
-    row[Channel.SIDESLIP.column()] = motion.sideslip(controlTime, state, aileron, rudder, added);
-    row[Channel.STICK.column()] = stick.position(controlTime);
-    row[Channel.PEDAL.column()] = pedal.position(controlTime);
-    row[Channel.AILERON.column()] = aileron;
-    row[Channel.RUDDER.column()] = rudder;
-    row[Channel.ROLL_ACCELERATION.column()] = scratch[LateralMotion.ROLL_RATE];
-    row[Channel.POWER.column()] = power.power(controlTime, state);
-    row[Channel.PROPELLER_ROLL_MOMENT.column()] = power.rollMoment();
-    row[Channel.PROPELLER_YAW_MOMENT.column()] = power.yawMoment();
+    controlled.row(controlTime, state, row);
     recorder.add(time, row);
-  }
-
-  /** The equations between two breakpoints. */
-  private final class Stretch implements OrdinaryDifferentialEquation {
-    private final double last;
-
-    Stretch(double last) {
-      this.last = last;
-    }
-
-    @Override
-    public int getDimension() {
-      return scratch.length;
-    }
-
-    @Override
-    public double[] computeDerivatives(double time, double[] state) {
-      double within = Math.min(time, last);
-      double[] rates = new double[state.length];
-      motion.rates(
-          within,
-          state,
-          stick.angle(within, state),
-          pedal.angle(within, state),
-          power.added(within, state),
-          rates);
-      stick.rate(within, state, rates);
-      pedal.rate(within, state, rates);
-      power.rate(within, state, rates);
-      return rates;
-    }
   }
 }

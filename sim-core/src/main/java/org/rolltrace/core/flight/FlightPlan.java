@@ -41,4 +41,15 @@ public record FlightPlan(
     captures = List.copyOf(captures);
     captures.forEach(angle -> Check.positive("bank change, rad,", angle));
   }
+
+  /**
+   * The same with another programme.
+   *
+   * @param other what the pilot does
+   * @return the plan
+   */
+  public FlightPlan withProgramme(PilotProgramme other) {
+    return new FlightPlan(
+        motion, stickRun, pedalRun, propulsion, trim, disturbance, other, captures, duration);
+  }
 }

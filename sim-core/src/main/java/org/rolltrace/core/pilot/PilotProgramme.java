@@ -46,6 +46,19 @@ public final class PilotProgramme {
     return new PilotProgramme(inputs, sideslip);
   }
 
+  /**
+   * The same with stick and pedals left to somebody else.
+   *
+   * @return a programme without inputs on them
+   */
+  public PilotProgramme handsOff() {
+    return new PilotProgramme(
+        inputs.stream()
+            .filter(input -> input.control() != Control.STICK && input.control() != Control.PEDAL)
+            .toList(),
+        heldSideslip);
+  }
+
   private Movement movementOf(Control control) {
     Movement[] parts =
         inputs.stream()

@@ -1,6 +1,7 @@
 package org.rolltrace.core.pilot;
 
 import java.util.Arrays;
+import java.util.stream.DoubleStream;
 import org.rolltrace.core.quantity.Check;
 
 /** A recorded movement: positions at instants. Immutable. */
@@ -93,6 +94,70 @@ public final class Trace {
    */
   public double[] positions() {
     return positions.clone();
+  }
+
+  /**
+   * When it begins.
+   *
+   * @return s
+   */
+  public double begin() {
+    return times[0];
+  }
+
+  /**
+   * When it ends.
+   *
+   * @return s
+   */
+  public double end() {
+    return times[times.length - 1];
+  }
+
+  /**
+   * A piece of it.
+   *
+   * @param from s; what is before is left out
+   * @param to s; what is after is left out
+   * @return the trace from {@code from} to {@code to}, where these lie inside it
+   * @throws IllegalArgumentException when nothing is left
+   */
+  public Trace between(double from, double to) {
+    double first = Math.max(from, begin());
+    double last = Math.min(to, end());
+    if (!(last > first)) {
+      throw new IllegalArgumentException(
+          "the piece lasts from "
+              + first
+              + " s to "
+              + last
+              + " s; expected a piece of "
+              + begin()
+              + " s to "
+              + end()
+              + " s");
+    }
+    if (first == begin() && last == end()) {
+      return this;
+    }
+    double[] cut =
+        DoubleStream.concat(
+                DoubleStream.of(first, last),
+                Arrays.stream(times).filter(time -> time > first && time < last))
+            .sorted()
+            .toArray();
+    return new Trace(file, column, cut, Arrays.stream(cut).map(this::at).toArray());
+  }
+
+  /** The position at an instant inside, straight between samples. */
+  private double at(double time) {
+    int found = Arrays.binarySearch(times, time);
+    if (found >= 0) {
+      return positions[found];
+    }
+    int next = -found - 1;
+    double share = (time - times[next - 1]) / (times[next] - times[next - 1]);
+    return positions[next - 1] + share * (positions[next] - positions[next - 1]);
   }
 
   /** How many samples there are. */

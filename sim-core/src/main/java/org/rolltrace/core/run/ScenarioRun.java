@@ -13,6 +13,7 @@ import org.rolltrace.core.flight.FlightEvent;
 import org.rolltrace.core.flight.FlightPlan;
 import org.rolltrace.core.flight.FlightSettings;
 import org.rolltrace.core.flight.Flown;
+import org.rolltrace.core.flight.LiveFlight;
 import org.rolltrace.core.measures.Manoeuvre;
 import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.measures.Measures;
@@ -81,6 +82,21 @@ public final class ScenarioRun {
         flown.events(),
         measures,
         Cautions.of(scenario, model, trim, flown, measures));
+  }
+
+  /**
+   * Begins to fly a scenario by hand: its aeroplane, condition, slip and start, without its inputs
+   * on stick and pedals. Its duration says nothing.
+   *
+   * @param scenario what is flown
+   * @return the flight at 0 s
+   * @throws CalculationException when trim has no answer
+   */
+  public static LiveFlight byHand(Scenario scenario) {
+    Trim trim = trim(scenario, scenario.slip());
+    LateralMotion motion = motion(scenario, model(scenario, scenario.propeller()), trim);
+    FlightPlan plan = plan(scenario, motion, trim);
+    return LiveFlight.begin(plan.withProgramme(plan.programme().handsOff()));
   }
 
   static LateralModel model(Scenario scenario, PropellerSetting propeller) {

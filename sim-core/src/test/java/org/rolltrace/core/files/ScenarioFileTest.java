@@ -95,8 +95,9 @@ class ScenarioFileTest {
                     Trace.of(
                         "traces/hand.csv",
                         "stick",
-                        new double[] {0, 0.5, 1, 1.5},
-                        new double[] {0, 0.25, 1, 0}))));
+                        // the cuts fall half way between samples
+                        new double[] {0.25, 0.5, 1, 1.25},
+                        new double[] {0.125, 0.25, 1, 0.5}))));
     assertThat(scenario.programme().heldSideslip()).isSameAs(HeldSideslip.NONE);
     assertThat(scenario.duration()).isEqualTo(30);
     assertThat(scenario.measures().settlingBand()).isEqualTo(0.02);

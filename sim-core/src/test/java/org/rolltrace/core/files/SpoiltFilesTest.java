@@ -854,6 +854,21 @@ class SpoiltFilesTest {
             "\"size\": -1.5",
             "size",
             "-1.5 is out of range; expected from -1 to 1, a fraction of the travel, right positive"),
+        ofTrace(
+            "\"0.25 s\"",
+            "\"0.25 m\"",
+            "cutBefore",
+            "\"0.25 m\" is a length; expected a time (s, ms, min, h)"),
+        ofTrace(
+            "\"0.25 s\"",
+            "\"1.5 s\"",
+            "cutBefore",
+            "nothing of the trace is left: it lasts from 0.0 s to 1.5 s, and the cuts leave what is after 1.5 s and before 1.25 s"),
+        ofTrace(
+            "\"cutBefore\": \"0.25 s\", \"cutAfter\": \"1250 ms\"",
+            "\"cutAfter\": \"0 s\"",
+            "cutAfter",
+            "nothing of the trace is left: it lasts from 0.0 s to 1.5 s, and the cuts leave what is after 0.0 s and before 0.0 s"),
         // held slip
         ofHeldSlip(
             "{ \"time\": \"1 s\" }",
@@ -1325,7 +1340,11 @@ class SpoiltFilesTest {
   @ParameterizedTest
   @MethodSource("traces")
   void aFaultOfATraceIsReportedWhereItStands(Spoilt spoilt) {
-    Path scenario = Samples.writeScenario(directory, Samples.SCENARIO_WITH_EVERY_KEY);
+    Path scenario =
+        Samples.writeScenario(
+            directory,
+            // What is cut off may begin before 0 s.
+            Samples.with(Samples.SCENARIO_WITH_EVERY_KEY, ", \"cutBefore\": \"0.25 s\"", ""));
     Path file = Samples.write(directory, "traces/hand.csv", spoilt.text());
     check(spoilt, file, Samples.refusalOfScenario(scenario));
     ScenarioDocument document = ScenarioDocument.open(scenario);

@@ -109,13 +109,23 @@ final class StripDrawing {
         ValueRange.isAngle(strip.unit()));
   }
 
-  /** The title beside the figures, broken into lines after its commas, and the unit below. */
+  /**
+   * The title beside the figures, broken into lines after its commas, and the unit below; in a low
+   * strip the unit stands behind the title where it fits.
+   */
   private void addTitle() {
     double room = area.x() - FIGURES;
     double y = area.y() + 0.5 * TypeSize.NORMAL.pixels();
+    double behind = 0;
     for (String line : TextLines.brokenAtCommas(strip.title(), TypeSize.NORMAL, room)) {
       marks.add(new Mark.Label(0, y, line, Anchor.START, TypeSize.NORMAL, Ink.TEXT));
+      behind = TypeWidths.of(line + " ", TypeSize.NORMAL);
       y += 16;
+    }
+    if (y > bottom() && behind + TypeWidths.of(strip.unit(), TypeSize.SMALL) <= room) {
+      marks.add(
+          new Mark.Label(behind, y - 16, strip.unit(), Anchor.START, TypeSize.SMALL, Ink.QUIET));
+      return;
     }
     for (String line : TextLines.brokenAtCommas(strip.unit(), TypeSize.SMALL, room)) {
       if (y > bottom() + HALF_SMALL) {

@@ -96,7 +96,10 @@ final class WingDrawing {
   }
 
   void addWings(RunResult result) {
-    BankPath path = BankPath.of(result);
+    addWings(BankPath.of(result));
+  }
+
+  void addWings(BankPath path) {
     double[] instants = instants(path);
     if (instants.length < 2) {
       return;

@@ -2,6 +2,7 @@ package org.rolltrace.ui.chart;
 
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.rolltrace.core.history.TimeHistory;
 import org.rolltrace.core.run.RunResult;
 
 /**
@@ -44,6 +45,35 @@ public final class WingTrace {
     ghost.ifPresent(drawing::addGhost);
     drawing.addWings(result);
     cursorTime.ifPresent(instant -> drawing.addRearView(result, instant));
+    return new Sheet(width, height, drawing.marks());
+  }
+
+  /**
+   * Draws the wing trace of a flight that goes on: the wing of now is strong.
+   *
+   * @param history what has been flown, at least a piece of it
+   * @param span m
+   * @param window the time that is seen
+   * @param width of the sheet, px
+   * @param height of the sheet, px
+   * @param left margin of the time axis, px
+   * @param right margin of the time axis, px
+   * @return the drawing
+   */
+  public static Sheet drawLive(
+      TimeHistory history,
+      double span,
+      TimeWindow window,
+      double width,
+      double height,
+      double left,
+      double right) {
+    PlotArea area = new PlotArea(left, 0, width - left - right, height, window, 0, 1);
+    BankPath path = new BankPath(history);
+    WingDrawing drawing = new WingDrawing(area, OptionalDouble.of(path.end()));
+    drawing.addTitle(span);
+    drawing.addPath();
+    drawing.addWings(path);
     return new Sheet(width, height, drawing.marks());
   }
 

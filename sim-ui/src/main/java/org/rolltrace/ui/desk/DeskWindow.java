@@ -54,6 +54,10 @@ public final class DeskWindow {
   private final RecoveryStore recovery;
   private final Dialogs dialogs;
   private final ManoeuvreModel model;
+  private final SaveFolder saveFolder =
+      new SaveFolder(
+          Path.of(System.getProperty("user.home", ".")),
+          () -> ShippedScenarios.folder(RecoveryStore.defaultFolder()));
   private final BorderPane root = new BorderPane();
   private final ObjectProperty<Palette> palette =
       new SimpleObjectProperty<>(this, "palette", Palette.LIGHT);
@@ -72,7 +76,7 @@ public final class DeskWindow {
     this.dialogs = new Dialogs(stage);
     this.model = new ManoeuvreModel(session);
     root.getStyleClass().add("desk");
-    ManoeuvreView manoeuvre = new ManoeuvreView(model, palette);
+    ManoeuvreView manoeuvre = new ManoeuvreView(model, palette, dialogs::askTrace);
     MenuBar menus = menus();
     HBox.setHgrow(menus, Priority.ALWAYS);
     HBox top = new HBox(menus, manoeuvre.actions());
@@ -89,6 +93,14 @@ public final class DeskWindow {
     stage.setMinWidth(900);
     stage.setMinHeight(640);
     stage.setOnCloseRequest(this::closeAsked);
+    stage
+        .focusedProperty()
+        .addListener(
+            (property, before, now) -> {
+              if (!now) {
+                model.hand().letGo(); // keys that go up elsewhere are not heard of
+              }
+            });
     stage
         .titleProperty()
         .bind(
@@ -171,12 +183,17 @@ public final class DeskWindow {
             new SeparatorMenuItem(),
             item("Close", "Shortcut+W", this::close));
     MenuItem undo = item("Undo", UNDO, session::undo);
-    undo.disableProperty().bind(session.canUndoProperty().not());
+    undo.disableProperty().bind(session.canUndoProperty().not().or(model.hand().flyingProperty()));
     undo.textProperty().bind(Bindings.concat("Undo: ", session.undoWordProperty()));
     MenuItem redo = item("Redo", REDO, session::redo);
-    redo.disableProperty().bind(session.canRedoProperty().not());
+    redo.disableProperty().bind(session.canRedoProperty().not().or(model.hand().flyingProperty()));
     redo.textProperty().bind(Bindings.concat("Redo: ", session.redoWordProperty()));
     Menu edit = new Menu("Edit", null, undo, redo);
+    MenuItem fly = item("Fly by hand", "Shortcut+F", model.hand()::begin);
+    fly.disableProperty().bind(model.hand().flyingProperty());
+    MenuItem stop = item("End the flight", "Esc", model.hand()::stop);
+    stop.disableProperty().bind(model.hand().flyingProperty().not());
+    Menu flight = new Menu("Flight", null, fly, stop);
     RadioMenuItem light = new RadioMenuItem("Paper");
     RadioMenuItem dark = new RadioMenuItem("Slate");
     light.setId("theme-paper");
@@ -194,8 +211,9 @@ public final class DeskWindow {
             light,
             dark,
             new SeparatorMenuItem(),
-            item("Whole manoeuvre", "Shortcut+0", model::resetView));
-    return new MenuBar(file, edit, view);
+            item("Whole manoeuvre", "Shortcut+0", model::resetView),
+            item("As far as the inputs", "Shortcut+9", model::showInputs));
+    return new MenuBar(file, edit, flight, view);
   }
 
   private static MenuItem item(String words, String keys, Runnable action) {
@@ -244,7 +262,8 @@ public final class DeskWindow {
   private void spacePlays(KeyEvent event) {
     Node focused = stage.getScene().getFocusOwner();
     boolean free = focused == null || PLAYABLE.contains(String.valueOf(focused.getId()));
-    if (event.getCode() == KeyCode.SPACE && free) {
+    boolean flying = model.hand().flyingProperty().get(); // then space begins the flight
+    if (event.getCode() == KeyCode.SPACE && free && !flying) {
       model.clock().toggle();
       event.consume();
     }
@@ -252,12 +271,19 @@ public final class DeskWindow {
 
   /** A text field would undo its own typing and so make one more edit of it. */
   private void undoInFields(KeyEvent event) {
-    if (KeyCombination.keyCombination(UNDO).match(event)) {
+    boolean undoes = KeyCombination.keyCombination(UNDO).match(event);
+    boolean redoes = KeyCombination.keyCombination(REDO).match(event);
+    if (!undoes && !redoes) {
+      return;
+    }
+    event.consume();
+    if (model.hand().flyingProperty().get()) {
+      return;
+    }
+    if (undoes) {
       session.undo();
-      event.consume();
-    } else if (KeyCombination.keyCombination(REDO).match(event)) {
+    } else {
       session.redo();
-      event.consume();
     }
   }
 
@@ -281,17 +307,22 @@ public final class DeskWindow {
   }
 
   private boolean save() {
+    model.hand().stop();
     return session.fileProperty().get() == null ? saveAs() : session.save();
   }
 
   private boolean saveAs() {
+    model.hand().stop();
     Path file = session.fileProperty().get();
     String name = file == null ? "scenario.json" : file.getFileName().toString();
-    return dialogs.askSaveAs(folder(), name).map(session::saveAs).orElse(false);
+    Optional<Path> chosen = dialogs.askSaveAs(saveFolder.toBeginIn(file), name);
+    chosen.ifPresent(saveFolder::remember);
+    return chosen.map(session::saveAs).orElse(false);
   }
 
   /** Whether the present scenario may be left, after asking about unsaved changes. */
   private boolean mayLeave() {
+    model.hand().stop(); // what was flown is work, too
     if (!session.dirtyProperty().get()) {
       return true;
     }

@@ -123,10 +123,26 @@ public final class Dialogs {
     return Optional.ofNullable(chooser.showSaveDialog(owner)).map(java.io.File::toPath);
   }
 
+  /**
+   * Asks for the file of a trace.
+   *
+   * @param folder where to begin
+   * @return the file, or empty when none was chosen
+   */
+  public Optional<Path> askTrace(Path folder) {
+    return Optional.ofNullable(
+            chooser("Choose a recorded trace", folder, "Traces", "*.csv").showOpenDialog(owner))
+        .map(java.io.File::toPath);
+  }
+
   private static FileChooser chooser(String title, Path folder) {
+    return chooser(title, folder, "Scenarios", "*.json");
+  }
+
+  private static FileChooser chooser(String title, Path folder, String what, String pattern) {
     FileChooser chooser = new FileChooser();
     chooser.setTitle(title);
-    chooser.getExtensionFilters().add(new FileChooser.ExtensionFilter("Scenarios", "*.json"));
+    chooser.getExtensionFilters().add(new FileChooser.ExtensionFilter(what, pattern));
     if (folder != null && folder.toFile().isDirectory()) {
       chooser.setInitialDirectory(folder.toFile());
     }

@@ -37,7 +37,13 @@ final class FiguresPane extends ScrollPane {
                 quantity("mass", "Mass", "900 kg"),
                 quantity("inertia.roll", "Roll inertia", "1200 kg m2"),
                 quantity("inertia.yaw", "Yaw inertia", "2500 kg m2"),
-                quantity("inertia.product", "Product of inertia", "0 kg m2")),
+                quantity("inertia.product", "Product of inertia", "0 kg m2"),
+                quantity("lateralImbalance.mass", "One-sided load", "none"),
+                quantity("lateralImbalance.arm", "Its arm to the right", "none")),
+            heading("Axes of the figures"),
+            grid(
+                text("axes", "Axes", 10, "stability", "stability or body"),
+                quantity("angleOfAttack", "Angle of attack", "body axes only")),
             heading("Controls"),
             grid(
                 quantity("ailerons.up", "Aileron up", "20 deg"),
@@ -76,18 +82,24 @@ final class FiguresPane extends ScrollPane {
   private static Label heading(String words) {
     Label label = new Label(words);
     label.getStyleClass().add("heading");
+    label.setWrapText(true);
+    label.setMinHeight(USE_PREF_SIZE);
     return label;
   }
 
   private PathField text(String key, String title, int columns) {
+    return text(key, title, columns, "", title);
+  }
+
+  private PathField text(String key, String title, int columns, String prompt, String hint) {
     return new PathField(
         session,
         FieldTarget.quantity(
             "$.aeroplane." + key,
             title,
             title.toLowerCase(java.util.Locale.ROOT),
-            "",
-            title,
+            prompt,
+            hint,
             columns));
   }
 

@@ -1,7 +1,10 @@
 package org.rolltrace.ui.manoeuvre;
 
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.function.Function;
 import java.util.function.UnaryOperator;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
@@ -9,6 +12,7 @@ import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.MenuButton;
 import javafx.scene.control.MenuItem;
+import javafx.scene.control.Tooltip;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
@@ -21,7 +25,7 @@ final class InputEditor extends FlowPane {
   private static final List<String> SHAPES = ScenarioDocument.shapes();
 
   /** The most fields that a shape has beside start and size. */
-  private static final int MOST_OWN = 3;
+  private static final int MOST_OWN = 4;
 
   private final DeskSession session;
   private final LanesPane lanes;
@@ -32,10 +36,11 @@ final class InputEditor extends FlowPane {
   private final List<PathField> own = new ArrayList<>();
   private final ComboBox<String> law = new ComboBox<>();
   private final Node labelledLaw;
+  private final Node chooseFile;
   private final List<Node> ofInput;
   private boolean showing;
 
-  InputEditor(DeskSession session, LanesPane lanes) {
+  InputEditor(DeskSession session, LanesPane lanes, Function<Path, Optional<Path>> askTrace) {
     super(10, 6);
     this.session = session;
     this.lanes = lanes;
@@ -87,6 +92,21 @@ final class InputEditor extends FlowPane {
     ofInput.addAll(List.of(labelled("Control", control), labelled("Shape", shape), start, size));
     ofInput.addAll(own);
     ofInput.add(labelledLaw);
+    Button choose = new Button("Choose\u2026");
+    choose.setId("choose-trace");
+    choose.setMinWidth(USE_PREF_SIZE);
+    choose.setTooltip(new Tooltip("Chooses the CSV file of the trace"));
+    choose.setOnAction(
+        event ->
+            askTrace
+                .apply(session.documentProperty().get().directory())
+                .ifPresent(
+                    file ->
+                        choose(
+                            "choose trace",
+                            document -> document.with(path("file"), document.nameOf(file)))));
+    chooseFile = labelled(" ", choose);
+    ofInput.add(ofInput.indexOf(own.get(0)) + 1, chooseFile); // behind the field of the file
     getChildren().add(labelled("Inputs", new HBox(6, add, remove)));
     getChildren().addAll(ofInput);
     lanes.selectedProperty().addListener((property, before, now) -> show());
@@ -191,6 +211,16 @@ final class InputEditor extends FlowPane {
         14);
   }
 
+  private FieldTarget cutTarget(String key, String title, String word) {
+    return FieldTarget.quantity(
+        path(key),
+        title,
+        word + " of the trace",
+        word,
+        "What is flown of the trace, in the times of its file; left empty, its " + word,
+        5);
+  }
+
   private FieldTarget columnTarget() {
     return FieldTarget.quantity(
         path("column"),
@@ -213,7 +243,12 @@ final class InputEditor extends FlowPane {
               frequencyTarget("from", "From", "0.2 Hz"),
               frequencyTarget("to", "To", "2 Hz"),
               durationTarget(kind));
-      case "trace" -> List.of(fileTarget(), columnTarget());
+      case "trace" ->
+          List.of(
+              fileTarget(),
+              columnTarget(),
+              cutTarget("cutBefore", "From", "beginning"),
+              cutTarget("cutAfter", "To", "end"));
       default -> List.of(handTarget());
     };
   }
@@ -258,5 +293,7 @@ final class InputEditor extends FlowPane {
     }
     labelledLaw.setVisible(kind.equals("sweep"));
     labelledLaw.setManaged(kind.equals("sweep"));
+    chooseFile.setVisible(isTrace);
+    chooseFile.setManaged(isTrace);
   }
 }

@@ -32,6 +32,9 @@ record LaneBlock(int index, PilotInput input) {
   /** With more corners than this in view a movement is drawn by points instead. */
   private static final int MOST_CORNERS = 2000;
 
+  /** More recorded points than this are not told apart. */
+  private static final int MOST_POINTS = 120;
+
   /** The part of a block that is dragged. */
   enum Part {
     /** The whole block, along the time axis. */
@@ -114,6 +117,27 @@ record LaneBlock(int index, PilotInput input) {
       return document.with(path("duration"), seconds(Math.max(least, duration)));
     }
     return document;
+  }
+
+  /**
+   * The points of a recorded movement that are in view, as far as they can be told apart.
+   *
+   * @param window what is looked at, s
+   * @return time, s, and position of each; none when there are too many, or nothing was recorded
+   */
+  List<double[]> recordedPoints(TimeWindow window) {
+    List<double[]> points = new ArrayList<>();
+    if (shape() instanceof TraceInput recorded) {
+      double[] times = recorded.trace().times();
+      double[] positions = recorded.trace().positions();
+      for (int i = 0; i < times.length && points.size() <= MOST_POINTS; i++) {
+        double time = times[i] + recorded.shift();
+        if (time >= window.from() && time <= window.to()) {
+          points.add(new double[] {time, recorded.scale() * positions[i]});
+        }
+      }
+    }
+    return points.size() <= MOST_POINTS ? points : List.of();
   }
 
   boolean canStretch() {

@@ -39,6 +39,9 @@ final class LanesPane extends Region {
   /** How far apart the points of a smooth movement lie, px. */
   private static final double STEP = 0.5;
 
+  /** Radius of a recorded point, px. */
+  private static final double POINT = 1.8;
+
   /** Half the height of full travel. */
   private static final double FULL = 0.5 * LANE - 3;
 
@@ -232,6 +235,9 @@ final class LanesPane extends Region {
       if (block.hasHand()) {
         double hand = xOf(block.shape().start() + block.shape().handTime());
         marks.add(new Mark.Dot(hand, top, 3.5, ink, true));
+      }
+      for (double[] point : block.recordedPoints(window)) {
+        marks.add(new Mark.Dot(xOf(point[0]), yOf(block.control(), point[1]), POINT, ink, true));
       }
       if (block.canStretch()) {
         marks.add(new Mark.Dot(xOf(end), middle(block.control()), 3.5, ink, true));

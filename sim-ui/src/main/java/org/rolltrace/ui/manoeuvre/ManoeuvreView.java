@@ -1,14 +1,20 @@
 package org.rolltrace.ui.manoeuvre;
 
+import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
+import java.util.function.Function;
 import javafx.beans.property.ObjectProperty;
 import javafx.geometry.Pos;
 import javafx.scene.control.Button;
 import javafx.scene.control.ToggleButton;
+import javafx.scene.control.ToggleGroup;
 import javafx.scene.control.Tooltip;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import org.rolltrace.ui.chart.Palette;
 import org.rolltrace.ui.session.DeskSession;
@@ -28,54 +34,93 @@ public final class ManoeuvreView extends BorderPane {
 
   private final ManoeuvreModel model;
   private final FiguresPane figures;
+  private final ScenarioPane scenario;
   private final ReadingsPane readings;
   private final CautionsPane cautions;
   private final VBox left = new VBox();
   private final VBox right = new VBox();
   private final ToggleButton showFigures = new ToggleButton("Aeroplane\u2026");
+  private final ToggleButton showScenario = new ToggleButton("Scenario\u2026");
+  private final VBox centre;
+  private final StagePane stage;
+  private final HandFlightView handFlight;
+  private final ConditionStrip conditions;
 
   /**
    * A view.
    *
    * @param model what it shows
    * @param palette the colours of the drawings
+   * @param askTrace asks for the file of a trace, beginning in a folder
    */
-  public ManoeuvreView(ManoeuvreModel model, ObjectProperty<Palette> palette) {
+  public ManoeuvreView(
+      ManoeuvreModel model,
+      ObjectProperty<Palette> palette,
+      Function<Path, Optional<Path>> askTrace) {
     this.model = model;
     DeskSession session = model.session();
     getStyleClass().add("manoeuvre");
     figures = new FiguresPane(session);
+    scenario = new ScenarioPane(session);
     left.setPrefWidth(SIDE);
     left.setMinWidth(SIDE);
-    StagePane stage = new StagePane(model, palette);
+    stage = new StagePane(model, palette);
     LanesPane lanes = new LanesPane(model, palette, stage);
     VBox.setVgrow(stage, Priority.ALWAYS);
     ReplayBar replay = new ReplayBar(model);
-    InputEditor editor = new InputEditor(session, lanes);
-    VBox centre = new VBox(stage, lanes, replay, editor);
+    InputEditor editor = new InputEditor(session, lanes, askTrace);
+    centre = new VBox(stage, lanes, replay, editor);
     centre.getStyleClass().add("centre");
+    handFlight = new HandFlightView(model.hand(), palette);
     setCenter(centre);
-    readings = new ReadingsPane(session);
+    readings = new ReadingsPane(session, model.hand().flyingProperty());
     cautions = new CautionsPane(session);
     VBox.setVgrow(readings, Priority.ALWAYS);
     VBox.setVgrow(figures, Priority.ALWAYS);
+    VBox.setVgrow(scenario, Priority.ALWAYS);
     right.getStyleClass().add("side");
     left.getStyleClass().add("side");
     right.setPrefWidth(READINGS);
     right.setMinWidth(READINGS);
     arrange();
-    setTop(new ConditionStrip(session));
+    conditions = new ConditionStrip(session);
+    setTop(conditions);
+    model.hand().flyingProperty().addListener((property, before, now) -> fly(now));
+    sceneProperty()
+        .addListener(
+            (property, before, now) -> {
+              if (now != null) {
+                now.addEventFilter(KeyEvent.ANY, handFlight::key);
+              }
+            });
     showFigures.setId("show-figures");
     showFigures.setTooltip(new Tooltip("Figures and derivatives of the aeroplane"));
     showFigures.selectedProperty().addListener((property, before, now) -> arrange());
+    showScenario.setId("show-scenario");
+    showScenario.setTooltip(new Tooltip("Note, start and held slip of the scenario"));
+    showScenario.selectedProperty().addListener((property, before, now) -> arrange());
+    ToggleGroup sides = new ToggleGroup();
+    showFigures.setToggleGroup(sides);
+    showScenario.setToggleGroup(sides);
     widthProperty().addListener((property, before, now) -> arrange());
   }
 
+  /** While a hand flies, nothing else can be edited. */
+  private void fly(boolean flying) {
+    setCenter(flying ? handFlight : centre);
+    conditions.setDisable(flying);
+    left.setDisable(flying);
+    if (!flying) {
+      stage.requestFocus();
+    }
+  }
+
   private void arrange() {
-    boolean shown = showFigures.isSelected();
+    Region side = showScenario.isSelected() ? scenario : figures;
+    boolean shown = showFigures.isSelected() || showScenario.isSelected();
     boolean narrow = getWidth() > 0 && getWidth() < NARROW;
     boolean replaced = shown && narrow;
-    left.getChildren().setAll(replaced ? List.of(figures, cautions) : List.of(figures));
+    left.getChildren().setAll(replaced ? List.of(side, cautions) : List.of(side));
     right.getChildren().setAll(replaced ? List.of(readings) : List.of(readings, cautions));
     setLeft(shown ? left : null);
     setRight(replaced ? null : right);
@@ -103,8 +148,9 @@ public final class ManoeuvreView extends BorderPane {
     mirror.setTooltip(
         new Tooltip("Keeps the present curves and turns all inputs to the other side"));
     mirror.setOnAction(event -> model.compareMirrored());
-    HBox actions = new HBox(8, showFigures, keep, drop, mirror);
+    HBox actions = new HBox(8, showScenario, showFigures, keep, drop, mirror);
     actions.getStyleClass().add("actions");
+    actions.disableProperty().bind(model.hand().flyingProperty());
     actions.setAlignment(Pos.CENTER_RIGHT);
     return actions;
   }

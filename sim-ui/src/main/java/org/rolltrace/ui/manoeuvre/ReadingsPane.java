@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import javafx.animation.PauseTransition;
+import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.collections.ListChangeListener;
 import javafx.css.PseudoClass;
 import javafx.geometry.Insets;
@@ -35,6 +36,7 @@ final class ReadingsPane extends VBox {
   private static final double FIGURE = 80;
 
   private final DeskSession session;
+  private final ReadOnlyBooleanProperty flying;
   private final VBox list = new VBox(3);
   private final HBox header = new HBox();
   private final Label differenceTitle = figure("");
@@ -43,8 +45,10 @@ final class ReadingsPane extends VBox {
   private final List<Row> rows = new ArrayList<>();
   private final Label state = new Label();
 
-  ReadingsPane(DeskSession session) {
+  ReadingsPane(DeskSession session, ReadOnlyBooleanProperty flying) {
     this.session = session;
+    this.flying = flying;
+    flying.addListener((property, before, now) -> showState());
     getStyleClass().add("readings-pane");
     setPadding(new Insets(8, 10, 8, 10));
     setSpacing(6);
@@ -94,7 +98,9 @@ final class ReadingsPane extends VBox {
   private void showState() {
     int faults = session.faults().size();
     String words;
-    if (faults > 0) {
+    if (flying.get()) {
+      words = "Flying by hand: these are the readings of the run before.";
+    } else if (faults > 0) {
       words =
           (faults == 1 ? "One value cannot be used" : faults + " values cannot be used")
               + "; the curves are from before: "
@@ -108,7 +114,7 @@ final class ReadingsPane extends VBox {
     state.setManaged(!words.isEmpty());
     state.setVisible(!words.isEmpty());
     late.stop();
-    list.setOpacity(session.staleProperty().get() ? DIMMED : 1);
+    list.setOpacity(session.staleProperty().get() || flying.get() ? DIMMED : 1);
   }
 
   private void show() {

@@ -73,8 +73,14 @@ final class ReplayBar extends HBox {
     ToggleButton loop = new ToggleButton("Loop");
     loop.setId("loop");
     loop.selectedProperty().bindBidirectional(clock.loopProperty());
+    Button fly = new Button("Fly by hand");
+    fly.setId("fly-by-hand");
+    fly.setTooltip(
+        new Tooltip("Flies the scenario in real time with mouse or keys, in place of its inputs"));
+    fly.setOnAction(event -> model.hand().begin());
     getChildren()
         .addAll(
+            fly,
             button(START, "To the start", () -> clock.moveTo(clock.fromProperty().get())),
             button(BACK, "One frame back", () -> clock.step(-1)),
             play,

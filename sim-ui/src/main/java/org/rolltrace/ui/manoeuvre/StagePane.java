@@ -321,7 +321,7 @@ final class StagePane extends Region {
   private void coverWithOverlay(boolean all) {
     overlay.setVisible(true);
     overlay.setWidth(all ? getWidth() : AXIS_FROM);
-    overlay.setHeight(all ? getHeight() : traceHeight);
+    overlay.setHeight(all ? getHeight() : traceHeight + TypeSize.SMALL.pixels());
   }
 
   private void readOut(CanvasPainter painter, PlotArea area, Strip strip, double shown, double x) {

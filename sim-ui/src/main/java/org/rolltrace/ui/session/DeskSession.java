@@ -7,6 +7,8 @@ import java.util.Optional;
 import java.util.function.UnaryOperator;
 import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.beans.property.ReadOnlyBooleanWrapper;
+import javafx.beans.property.ReadOnlyIntegerProperty;
+import javafx.beans.property.ReadOnlyIntegerWrapper;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.ReadOnlyStringProperty;
@@ -17,6 +19,7 @@ import org.rolltrace.core.files.FileFault;
 import org.rolltrace.core.files.FileFaultsException;
 import org.rolltrace.core.files.ScenarioDocument;
 import org.rolltrace.core.files.ScenarioFile;
+import org.rolltrace.core.pilot.HandRecord;
 import org.rolltrace.core.run.RunResult;
 import org.rolltrace.ui.task.Runner;
 
@@ -56,7 +59,7 @@ public final class DeskSession {
   private Optional<ScenarioDocument> saved = Optional.empty();
 
   /** Counts what was opened, so that what came of another document is not shown with this one. */
-  private int opened;
+  private final ReadOnlyIntegerWrapper opened = new ReadOnlyIntegerWrapper();
 
   private int shown;
 
@@ -192,6 +195,15 @@ public final class DeskSession {
   }
 
   /**
+   * How many documents were opened: another number means another document, not an edit.
+   *
+   * @return the count
+   */
+  public ReadOnlyIntegerProperty openedProperty() {
+    return opened.getReadOnlyProperty();
+  }
+
+  /**
    * What could not be opened, saved or done last.
    *
    * @return null inside when nothing, or {@linkplain #dismissProblem dismissed}
@@ -207,6 +219,15 @@ public final class DeskSession {
    */
   public ReadOnlyStringProperty recoveryProblemProperty() {
     return recoveryProblem.getReadOnlyProperty();
+  }
+
+  /**
+   * Tells of something that could not be done.
+   *
+   * @param what could not be done, and the way out
+   */
+  public void tell(Problem what) {
+    problem.set(what);
   }
 
   /** Takes note of the problem. */
@@ -268,7 +289,7 @@ public final class DeskSession {
   }
 
   private void begin(Path newFile, ScenarioDocument newDocument) {
-    opened++;
+    opened.set(opened.get() + 1);
     history.clear();
     problem.set(null);
     file.set(newFile);
@@ -338,6 +359,17 @@ public final class DeskSession {
     edit("Swap left and right", ScenarioDocument::mirrored);
   }
 
+  /**
+   * Puts what a hand flew in the place of all inputs on stick and pedals, as one edit. The trace is
+   * kept with the document, and written beside the scenario when that is saved.
+   *
+   * @param record what the hand did; it moves something and lasts longer than 0 s
+   */
+  public void takeFlown(HandRecord record) {
+    String stem = file.get() == null ? "scenario" : name(file.get()).replaceFirst("\\.json$", "");
+    edit("fly by hand", document -> document.flownByHand(record, stem + "-by-hand.csv"));
+  }
+
   /** Undoes the last edit, if there is one. */
   public void undo() {
     history.undo(document.get()).ifPresent(this::become);
@@ -356,7 +388,7 @@ public final class DeskSession {
             .filter(text -> !text.isBlank())
             .orElse(file.get() == null ? "Untitled" : name(file.get())));
     follow();
-    int of = opened;
+    int of = opened.get();
     runner.run(
         () -> Outcome.of(present),
         outcome -> show(of, outcome),
@@ -378,7 +410,7 @@ public final class DeskSession {
   }
 
   private void show(int of, Outcome outcome) {
-    if (of != opened) {
+    if (of != opened.get()) {
       return;
     }
     boolean isFirst = shown != of;
@@ -528,7 +560,7 @@ public final class DeskSession {
 
   /** Ends the session in good order: nothing is left to recover, and nothing is shown any more. */
   public void close() {
-    opened++;
+    opened.set(opened.get() + 1);
     giveUpKept();
   }
 }

@@ -17,6 +17,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
 import java.util.zip.CRC32;
 import org.rolltrace.core.files.FileFaultsException;
 import org.rolltrace.core.files.ScenarioDocument;
@@ -26,13 +27,19 @@ import org.rolltrace.core.files.WholeFile;
  * Keeps unsaved work where a crash does not reach it: one file for each running program, in a
  * folder of the user, gone when there is nothing unsaved. Safe for use by several threads.
  *
- * <p>A file begins with lines that say what it is, then comes the text of the document. A check sum
- * tells whole files from damaged ones; those are neither offered nor touched.
+ * <p>A file begins with lines that say what it is, among them the traces that the document carries,
+ * then comes the text of the document. A check sum tells whole files from damaged ones; those are
+ * neither offered nor touched.
  */
 public final class RecoveryStore {
   private static final String FORMAT = "rolltrace-recovery/1";
   private static final String ENDING = ".recovery";
-  private static final int LINES = 6;
+  private static final String TRACE = "trace ";
+  private static final String SUM = "sum ";
+
+  /** Lines before those of the traces. */
+  private static final int LINES = 5;
+
   private static final int LARGEST = 1 << 22;
 
   private final Path folder;
@@ -114,14 +121,20 @@ public final class RecoveryStore {
    */
   public synchronized void keep(Optional<Path> origin, ScenarioDocument document) {
     String json = document.json();
-    String head =
-        String.join(
-            "\n",
-            FORMAT,
-            "process " + ProcessHandle.current().pid() + " " + started(ProcessHandle.current()),
-            "time " + Instant.now(),
-            "origin " + origin.map(path -> quoted(path.toAbsolutePath())).orElse(""),
-            "directory " + quoted(document.directory()));
+    List<String> lines = new ArrayList<>();
+    lines.add(FORMAT);
+    lines.add("process " + ProcessHandle.current().pid() + " " + started(ProcessHandle.current()));
+    lines.add("time " + Instant.now());
+    lines.add("origin " + origin.map(path -> quoted(path.toAbsolutePath().toString())).orElse(""));
+    lines.add("directory " + quoted(document.directory().toString()));
+    document
+        .carriedTraces()
+        .forEach(
+            (name, text) -> {
+              lines.add(TRACE + quoted(name));
+              lines.add(TRACE + quoted(text));
+            });
+    String head = String.join("\n", lines);
     try {
       Files.createDirectories(folder);
     } catch (FileAlreadyExistsException taken) {
@@ -135,16 +148,16 @@ public final class RecoveryStore {
               + "; see that its disk has room and that you may write there",
           failure);
     }
-    WholeFile.write(own, head + "\nsum " + sum(head + json) + "\n" + json);
+    WholeFile.write(own, head + "\n" + SUM + sum(head + json) + "\n" + json);
   }
 
-  /** A path on one line, whatever its name has in it. */
-  private static String quoted(Path path) {
-    return path.toString().replace("%", "%25").replace("\n", "%0A").replace("\r", "%0D");
+  /** A text on one line, whatever it has in it. */
+  private static String quoted(String text) {
+    return text.replace("%", "%25").replace("\n", "%0A").replace("\r", "%0D");
   }
 
-  private static Path unquoted(String text) {
-    return Path.of(text.replace("%0D", "\r").replace("%0A", "\n").replace("%25", "%"));
+  private static String unquoted(String text) {
+    return text.replace("%0D", "\r").replace("%0A", "\n").replace("%25", "%");
   }
 
   private static long started(ProcessHandle process) {
@@ -195,24 +208,35 @@ public final class RecoveryStore {
       if (!Files.isRegularFile(file) || Files.size(file) > LARGEST) {
         return Optional.empty();
       }
-      String[] parts = Files.readString(file).split("\n", LINES + 1);
-      if (parts.length <= LINES
-          || !parts[0].equals(FORMAT)
-          || !value(parts[5], "sum")
-              .equals(sum(String.join("\n", List.of(parts).subList(0, LINES - 1)) + parts[LINES]))
-          || isAlive(value(parts[1], "process"))) {
+      String all = Files.readString(file);
+      int sumAt = all.indexOf("\n" + SUM);
+      int jsonAt = sumAt < 0 ? 0 : all.indexOf('\n', sumAt + 1) + 1;
+      if (jsonAt == 0) {
         return Optional.empty();
       }
-      String origin = value(parts[3], "origin");
+      String head = all.substring(0, sumAt);
+      String json = all.substring(jsonAt);
+      List<String> lines = List.of(head.split("\n", -1));
+      if (lines.size() < LINES
+          || !lines.get(0).equals(FORMAT)
+          || !all.substring(sumAt + 1 + SUM.length(), jsonAt - 1).equals(sum(head + json))
+          || isAlive(value(lines.get(1), "process"))) {
+        return Optional.empty();
+      }
+      Optional<Path> origin =
+          Optional.of(unquoted(value(lines.get(3), "origin")))
+              .filter(path -> !path.isEmpty())
+              .map(Path::of);
+      Path directory = Path.of(unquoted(value(lines.get(4), "directory")));
       ScenarioDocument document =
           origin.isEmpty()
-              ? ScenarioDocument.ofText(parts[LINES], unquoted(value(parts[4], "directory")))
-              : ScenarioDocument.ofFileText(parts[LINES], unquoted(origin));
+              ? ScenarioDocument.ofText(json, directory)
+              : ScenarioDocument.ofFileText(json, origin.get());
       return Optional.of(
           new Pending(
-              origin.isEmpty() ? Optional.empty() : Optional.of(unquoted(origin)),
-              Instant.parse(value(parts[2], "time")),
-              document,
+              origin,
+              Instant.parse(value(lines.get(2), "time")),
+              document.carrying(traces(lines.subList(LINES, lines.size()))),
               file));
     } catch (IOException
         | IllegalArgumentException
@@ -220,6 +244,17 @@ public final class RecoveryStore {
         | FileFaultsException damaged) {
       return Optional.empty();
     }
+  }
+
+  /** Each trace has a line with its name and one with its text. */
+  private static Map<String, String> traces(List<String> lines) {
+    Map<String, String> traces = new TreeMap<>();
+    for (int i = 0; i + 1 < lines.size(); i += 2) {
+      traces.put(
+          unquoted(lines.get(i).substring(TRACE.length())),
+          unquoted(lines.get(i + 1).substring(TRACE.length())));
+    }
+    return traces;
   }
 
   private static String value(String line, String key) {

@@ -7,7 +7,8 @@
  * faults of the text, failure of the calculation, a problem with a file. All of it belongs to one
  * thread, to which the runner hands over its results.
  *
- * <p>{@link org.rolltrace.ui.session.RecoveryStore} keeps unsaved work until it is saved, undone or
- * given up. {@link org.rolltrace.ui.session.ReplayClock} is where a replay stands.
+ * <p>{@link org.rolltrace.ui.session.RecoveryStore} keeps unsaved work, with the traces that were
+ * flown by hand, until it is saved, undone or given up. {@link
+ * org.rolltrace.ui.session.ReplayClock} is where a replay stands.
  */
 package org.rolltrace.ui.session;

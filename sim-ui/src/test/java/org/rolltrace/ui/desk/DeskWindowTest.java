@@ -344,7 +344,8 @@ class DeskWindowTest {
   void theRightEdgeOfAHoldSetsItsDuration() {
     open(HOLD);
     robot.interact(() -> session.edit("shorten", document -> document.with("$.duration", "12 s")));
-    until("12 s", () -> window.model().windowProperty().get().to() == 12);
+    until("12 s", () -> session.resultProperty().get().scenario().duration() == 12);
+    robot.interact(window.model()::resetView);
     drawn();
 
     drag(onLanes(4.65, 0.0), onLanes(6.65, 0.0));

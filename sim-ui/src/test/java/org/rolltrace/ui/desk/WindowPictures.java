@@ -18,6 +18,8 @@ import javafx.scene.robot.Robot;
 import javafx.stage.Stage;
 import javafx.util.Duration;
 import javax.imageio.ImageIO;
+import org.rolltrace.core.pilot.Control;
+import org.rolltrace.ui.manoeuvre.HandFlightModel;
 import org.rolltrace.ui.session.DeskSession;
 import org.rolltrace.ui.session.RecoveryStore;
 import org.rolltrace.ui.task.Background;
@@ -102,6 +104,23 @@ public final class WindowPictures extends Application {
         }
         shots.add(
             new Shot(
+                "scenario-" + suffix,
+                () -> {
+                  session.open(SCENARIOS.resolve("tarnlark-held-sideslip.json"));
+                  toggle("#show-scenario", true);
+                }));
+        shots.add(
+            new Shot(
+                "hand-ready-" + suffix,
+                () -> {
+                  toggle("#show-scenario", false);
+                  session.open(SCENARIOS.resolve("tarnlark-cruise-roll-entry.json"));
+                  window.model().hand().begin();
+                }));
+        shots.add(new Shot("hand-flying-" + suffix, this::flyToAndFro));
+        shots.add(new Shot("hand-flown-" + suffix, () -> window.model().hand().stop()));
+        shots.add(
+            new Shot(
                 "drop-" + suffix,
                 () -> {
                   figures(false);
@@ -113,7 +132,24 @@ public final class WindowPictures extends Application {
   }
 
   private void figures(boolean shown) {
-    ((ToggleButton) stage.getScene().lookup("#show-figures")).setSelected(shown);
+    toggle("#show-figures", shown);
+  }
+
+  private void toggle(String button, boolean on) {
+    ((ToggleButton) stage.getScene().lookup(button)).setSelected(on);
+  }
+
+  /** Twelve seconds of stick and pedals, then the stick held while the picture is taken. */
+  private void flyToAndFro() {
+    HandFlightModel hand = window.model().hand();
+    for (int i = 0; i < 120; i++) {
+      int phase = i / 10 % 4;
+      hand.key(Control.STICK, true, phase == 0);
+      hand.key(Control.STICK, false, phase == 2);
+      hand.key(Control.PEDAL, true, i % 40 == 4);
+      hand.advance(0.1);
+    }
+    hand.grab(Control.STICK, -0.35);
   }
 
   private void next() {

@@ -8,8 +8,13 @@ import java.util.List;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.rolltrace.core.files.ScenarioDocument;
+import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.InputShape;
 import org.rolltrace.core.pilot.Movement;
+import org.rolltrace.core.pilot.PilotInput;
+import org.rolltrace.core.pilot.StepInput;
+import org.rolltrace.core.pilot.Trace;
+import org.rolltrace.core.pilot.TraceInput;
 import org.rolltrace.ui.chart.TimeWindow;
 
 /** What dragging a block writes into the scenario. */
@@ -117,5 +122,35 @@ class FurtherShapesOnLanesTest {
       assertThat(made.name()).isEqualTo(shape);
       assertThat(IntStream.range(0, added.inputCount())).hasSize(2);
     }
+  }
+
+  private static LaneBlock recorded(int samples) {
+    double[] times = new double[samples];
+    double[] positions = new double[samples];
+    for (int i = 0; i < samples; i++) {
+      times[i] = i;
+      positions[i] = i % 2;
+    }
+    return new LaneBlock(
+        0,
+        new PilotInput(
+            Control.STICK, new TraceInput(2, -0.5, Trace.of("x.csv", "stick", times, positions))));
+  }
+
+  @Test
+  void theRecordedPointsOfATraceInViewAreShownWhereTheyAreFlown() {
+    assertThat(recorded(5).recordedPoints(new TimeWindow(2.5, 5)))
+        .containsExactly(new double[] {3, -0.5}, new double[] {4, -0.0}, new double[] {5, -0.5});
+    assertThat(recorded(500).recordedPoints(new TimeWindow(0, 50))).hasSize(49);
+    assertThat(recorded(500).recordedPoints(new TimeWindow(0, 500)))
+        .as("too many to be told apart")
+        .isEmpty();
+  }
+
+  @Test
+  void whatIsNotRecordedHasNoRecordedPoints() {
+    LaneBlock step = new LaneBlock(0, new PilotInput(Control.STICK, new StepInput(1, 0.5, 0.1)));
+
+    assertThat(step.recordedPoints(new TimeWindow(0, 10))).isEmpty();
   }
 }

@@ -52,6 +52,23 @@ class RecoveryStoreTest {
   }
 
   @Test
+  void tracesThatAreInNoFileYetComeBackToo() {
+    ScenarioDocument flown =
+        ScenarioDocument.ofText(
+                "{ \"inputs\": [ { \"shape\": \"trace\", \"file\": \"100 %0A odd.csv\" } ] }",
+                directory)
+            .carrying(Map.of("100 %0A odd.csv", "time[s],stick[%]\n0,0\r\nsum 1\n1,5\n"));
+
+    new RecoveryStore(folder()).keep(Optional.empty(), flown);
+
+    assertThat(afterTheCrash())
+        .singleElement()
+        .satisfies(left -> assertThat(left.document()).isEqualTo(flown))
+        .satisfies(
+            left -> assertThat(left.document().carriedTraces()).isEqualTo(flown.carriedTraces()));
+  }
+
+  @Test
   void onlyTheLastIsKeptAndOnlyUntilItIsGivenUp() throws IOException {
     RecoveryStore store = new RecoveryStore(folder());
     store.keep(Optional.empty(), work());

@@ -1,0 +1,135 @@
+package org.rolltrace.core.flight;
+
+import org.hipparchus.ode.OrdinaryDifferentialEquation;
+import org.rolltrace.core.history.Channel;
+import org.rolltrace.core.motion.LateralMotion;
+import org.rolltrace.core.pilot.Control;
+import org.rolltrace.core.pilot.Movement;
+import org.rolltrace.core.propeller.AddedMoments;
+
+/**
+ * The equations of motion with stick, pedals and power: one state for all that has inertia or lag.
+ */
+final class ControlledMotion {
+  private final FlightPlan plan;
+  private final LateralMotion motion;
+  private final SurfaceDrive stick;
+  private final SurfaceDrive pedal;
+  private final PowerDrive power;
+  private final int states;
+  private final double[] rates;
+
+  ControlledMotion(FlightPlan plan, Movement stickMovement, Movement pedalMovement) {
+    this.plan = plan;
+    this.motion = plan.motion();
+    int next = motion.dimension();
+    this.stick =
+        new SurfaceDrive(
+            Control.STICK,
+            plan.stickRun(),
+            stickMovement,
+            plan.trim().stick().orElse(0),
+            plan.trim().aileron(),
+            next);
+    next += stick.hasState() ? 1 : 0;
+    this.pedal =
+        new SurfaceDrive(
+            Control.PEDAL,
+            plan.pedalRun(),
+            pedalMovement,
+            plan.trim().pedal().orElse(0),
+            plan.trim().rudder(),
+            next);
+    next += pedal.hasState() ? 1 : 0;
+    this.power = new PowerDrive(plan.propulsion(), plan.programme().power(), next);
+    next += power.states();
+    this.states = next;
+    this.rates = new double[states];
+  }
+
+  SurfaceDrive stick() {
+    return stick;
+  }
+
+  SurfaceDrive pedal() {
+    return pedal;
+  }
+
+  PowerDrive power() {
+    return power;
+  }
+
+  int dimension() {
+    return states;
+  }
+
+  /** The state at 0 s: in trim, displaced by the disturbance. */
+  double[] start() {
+    double[] state = new double[states];
+    state[LateralMotion.BANK] = plan.trim().bank() + plan.disturbance().bank();
+    state[LateralMotion.ROLL_RATE] = plan.trim().rollRate() + plan.disturbance().rollRate();
+    if (motion.dimension() > LateralMotion.SIDESLIP) {
+      state[LateralMotion.SIDESLIP] = plan.trim().sideslip() + plan.disturbance().sideslip();
+      state[LateralMotion.YAW_RATE] = plan.trim().yawRate();
+    }
+    stick.initialise(state);
+    pedal.initialise(state);
+    power.initialise(state);
+    return state;
+  }
+
+  /** All channels of a state; controls are where they are at {@code controlTime}. */
+  void row(double controlTime, double[] state, double[] row) {
+    double aileron = stick.angle(controlTime, state);
+    double rudder = pedal.angle(controlTime, state);
+    AddedMoments added = power.added(controlTime, state);
+    motion.rates(controlTime, state, aileron, rudder, added, rates);
+    row[Channel.BANK.column()] = state[LateralMotion.BANK];
+    row[Channel.ROLL_RATE.column()] = state[LateralMotion.ROLL_RATE];
+    row[Channel.YAW_RATE.column()] = motion.yawRate(controlTime, state, aileron, rudder, added);
+    row[Channel.SIDESLIP.column()] = motion.sideslip(controlTime, state, aileron, rudder, added);
+    row[Channel.STICK.column()] = stick.position(controlTime);
+    row[Channel.PEDAL.column()] = pedal.position(controlTime);
+    row[Channel.AILERON.column()] = aileron;
+    row[Channel.RUDDER.column()] = rudder;
+    row[Channel.ROLL_ACCELERATION.column()] = rates[LateralMotion.ROLL_RATE];
+    row[Channel.POWER.column()] = power.power(controlTime, state);
+    row[Channel.PROPELLER_ROLL_MOMENT.column()] = power.rollMoment();
+    row[Channel.PROPELLER_YAW_MOMENT.column()] = power.yawMoment();
+  }
+
+  /** The equations between two breakpoints; controls never pass {@code last}. */
+  OrdinaryDifferentialEquation until(double last) {
+    return new Stretch(last);
+  }
+
+  private final class Stretch implements OrdinaryDifferentialEquation {
+    private final double last;
+
+    Stretch(double last) {
+      this.last = last;
+    }
+
+    @Override
+    public int getDimension() {
+      return states;
+    }
+
+    @Override
+    public double[] computeDerivatives(double time, double[] state) {
+      double within = Math.min(time, last);
+      double[] derivatives = new double[state.length];
+      motion.rates(
+          within,
+          state,
+          stick.angle(within, state),
+          pedal.angle(within, state),
+          power.added(within, state),
+          derivatives);
+      stick.rate(within, state, derivatives);
+      pedal.rate(within, state, derivatives);
+      power.rate(within, state, derivatives);
+      return derivatives;
+    }
+  }
+}
