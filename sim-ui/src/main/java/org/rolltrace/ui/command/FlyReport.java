@@ -163,7 +163,7 @@ final class FlyReport {
                 ? ""
                 : format(", flight path %+.2f deg", Math.toDegrees(condition.flightPathAngle()))));
     if (result.scenario().propeller().roll() != 0) {
-      row("  propeller moment", format("%+.1f N m in roll", result.scenario().propeller().roll()));
+      row("  propeller moment", moment(result.scenario().propeller().roll()) + " in roll");
     }
   }
 
@@ -287,7 +287,7 @@ final class FlyReport {
     line(
         trimmedWith == result.scenario().propeller().roll()
             ? "Trim, " + state
-            : format("Trim, %s, with a propeller moment of %+.1f N m", state, trimmedWith));
+            : "Trim, " + state + ", with a propeller moment of " + moment(trimmedWith));
     surface("aileron", trim.aileron(), "stick", trim.stick());
     surface("rudder", trim.rudder(), "pedal", trim.pedal());
     two("sideslip", format("%.2f deg", Math.toDegrees(trim.sideslip())), "");
@@ -392,6 +392,11 @@ final class FlyReport {
 
   private static String measureRow(String title, double value, String unit) {
     return "  " + padded(title, LABEL) + format("%" + VALUE + "s %-8s", number(value), unit);
+  }
+
+  /** Of a big single or of a model: hundreds of N m, or fractions of one. */
+  private static String moment(double value) {
+    return (value > 0 ? "+" : "") + number(value) + " N m";
   }
 
   /** Four figures, which is what the data behind them are worth at best. */

@@ -87,6 +87,14 @@ class CommandLineProgramTest {
   }
 
   @Test
+  void smallMomentsKeepTheirFigures() {
+    Answer answer = run("fly", SCENARIOS.resolve("mosspipit-torque-right.json").toString());
+    assertThat(answer.out())
+        .contains("propeller moment  -0.8800 N m in roll")
+        .contains("Trim, wings level, with a propeller moment of -0.3800 N m");
+  }
+
+  @Test
   void cautionsGoToStandardError() {
     Answer answer = run("fly", SCENARIOS.resolve("light-single-wing-drop.json").toString());
     assertThat(answer.err()).contains("caution: speed and load factor are held constant");
