@@ -206,9 +206,15 @@ final class AeroplaneFormat {
         in.quantity(
             "rateLimit", Dimension.ANGULAR_RATE, Range.ABOVE_ZERO, Double.POSITIVE_INFINITY);
     double lag = in.quantity("lag", Dimension.TIME, Range.ZERO_OR_MORE, 0);
-    return Double.isNaN(rate) || Double.isNaN(lag)
-        ? Optional.empty()
-        : Optional.of(new SurfaceDynamics(rate, lag));
+    if (Double.isNaN(rate) || Double.isNaN(lag)) {
+      return Optional.empty();
+    }
+    try {
+      return Optional.of(new SurfaceDynamics(rate, lag));
+    } catch (IllegalArgumentException e) {
+      in.refuse("lag", e); // not 0, and too short
+      return Optional.empty();
+    }
   }
 
   private static Limits limits(ObjectCursor aeroplane) {

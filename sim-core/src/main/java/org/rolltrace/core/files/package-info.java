@@ -136,7 +136,7 @@
  *   <tr><td>inertia*</td><td>{@code roll}* Ixx and {@code yaw} Izz, above 0, {@code product} Ixz with
  *       Ixz² &lt; Ixx Izz, 0 when absent. Settled and free slip need yaw</td></tr>
  *   <tr><td>ailerons</td><td>{@code up}* above 0 and {@code down}* from 0, up to 90 deg: travel of
- *       each; {@code rateLimit}: angular rate above 0; {@code lag}: time, 0 or more</td></tr>
+ *       each; {@code rateLimit}: angular rate above 0; {@code lag}: time, 0 or 0.1 ms and more</td></tr>
  *   <tr><td>rudder</td><td>{@code left}*, {@code right}* above 0, up to 90 deg; {@code rateLimit},
  *       {@code lag}</td></tr>
  *   <tr><td>propellers</td><td>list of propellers, below; up to 20, none when absent</td></tr>

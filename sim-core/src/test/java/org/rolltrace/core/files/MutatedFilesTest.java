@@ -3,175 +3,211 @@ package org.rolltrace.core.files;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.junit.jupiter.api.Assertions.assertTimeoutPreemptively;
 
+import com.fasterxml.jackson.databind.JsonNode;
+import com.networknt.schema.InputFormat;
+import com.networknt.schema.Schema;
+import com.networknt.schema.SchemaRegistry;
+import com.networknt.schema.SpecificationVersion;
 import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
-import java.util.ArrayList;
-import java.util.Collections;
-import java.util.List;
 import java.util.Random;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.rolltrace.core.motion.CalculationException;
+import org.rolltrace.core.run.ScenarioRun;
+import org.rolltrace.core.scenario.Scenario;
 
-/** Valid files changed at random: whatever comes of it is a value or a list of faults. */
+/**
+ * Valid files changed at random: whatever comes of it is the value that stands there or a list of
+ * faults, in time, and nothing half-written. The profile "mutated" takes many more files.
+ */
 class MutatedFilesTest {
-  private static final int FILES = 2000;
-  private static final long SEED = 20_240_229;
+  private static final int FILES = Integer.getInteger("rolltrace.mutatedFiles", 2000);
+  private static final long SEED = Long.getLong("rolltrace.mutationSeed", 20_240_229);
 
-  /** What people and programs put in the wrong place. */
-  private static final String[] TOKENS = {
-    "{",
-    "}",
-    "[",
-    "]",
-    ",",
-    ":",
-    "\"",
-    "null",
-    "true",
-    "0",
-    "-1",
-    "1e308",
-    "-1e308",
-    "1e999",
-    "NaN",
-    "-Infinity",
-    "5e-324",
-    "\"0 s\"",
-    "\"1e308 s\"",
-    "\"1e300 deg\"",
-    "\"-1 ft\"",
-    "\"\"",
-    "\\",
-    "//",
-    "\u0000",
-    "\ufeff",
-    "{}",
-    "[]",
-    "\"trueAirspeed\": \"1e-200 m/s\",",
-    "\"movement\": \"1e308 s\","
+  /** One accepted file in so many is also flown, or saved from the window's document. */
+  private static final int SELDOM = 20;
+
+  private static final SchemaRegistry REGISTRY =
+      SchemaRegistry.withDefaultDialect(SpecificationVersion.DRAFT_2020_12);
+  private static final Schema SCENARIO_SCHEMA = REGISTRY.getSchema(Schemas.text("scenario"));
+  private static final Schema AEROPLANE_SCHEMA = REGISTRY.getSchema(Schemas.text("aeroplane"));
+
+  /** A dimensional set whose rows stand alone, so that each can be checked by itself. */
+  private static final String PLAIN_DIMENSIONAL_SET =
+      Samples.with(
+          Samples.with(
+              Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY,
+              "\"axes\": \"body\",\n  \"angleOfAttack\": \"6 deg\",",
+              "\"axes\": \"stability\","),
+          "\"primed\": true",
+          "\"primed\": false");
+
+  private enum Kind {
+    SCENARIO,
+    AEROPLANE,
+    TRACE,
+    TRACE_IN_PER_CENT
+  }
+
+  private record Sample(Kind kind, String text) {}
+
+  private static final Sample[] SAMPLES = {
+    new Sample(Kind.SCENARIO, Samples.SCENARIO),
+    new Sample(Kind.SCENARIO, Samples.SCENARIO_WITH_EVERY_KEY),
+    new Sample(Kind.SCENARIO, Samples.SCENARIO_WITH_POWER),
+    new Sample(Kind.AEROPLANE, Samples.AEROPLANE),
+    new Sample(Kind.AEROPLANE, Samples.AEROPLANE_WITH_EVERY_KEY),
+    new Sample(Kind.AEROPLANE, Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY),
+    new Sample(Kind.AEROPLANE, PLAIN_DIMENSIONAL_SET),
+    new Sample(Kind.TRACE, Samples.TRACE),
+    new Sample(Kind.TRACE_IN_PER_CENT, Samples.TRACE),
   };
 
   @TempDir Path directory;
 
+  private final SecondReading second = new SecondReading();
+  private int flown;
+  private int saved;
+
   @Test
-  void nothingButAValueOrFaultsComesOfAnyFile() {
+  void nothingButTheValueOrFaultsComesOfAnyFile() {
     Random random = new Random(SEED);
-    String[] samples = {
-      Samples.SCENARIO,
-      Samples.SCENARIO_WITH_EVERY_KEY,
-      Samples.SCENARIO_WITH_POWER,
-      Samples.AEROPLANE,
-      Samples.AEROPLANE_WITH_EVERY_KEY,
-      Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY,
-      Samples.TRACE
-    };
-    Path traced = Samples.writeScenario(directory, Samples.SCENARIO_WITH_EVERY_KEY);
     Samples.write(directory, "aeroplanes/some-aeroplane.json", Samples.AEROPLANE);
     int accepted = 0;
     for (int i = 0; i < FILES; i++) {
-      int sample = i % samples.length;
-      byte[] mutated = mutated(samples[sample], random);
-      String text = new String(mutated, StandardCharsets.ISO_8859_1);
-      boolean isTrace = sample == samples.length - 1;
-      boolean isScenario = sample < 3;
-      // A file of this size takes about a millisecond; a second is far beyond a slow machine.
+      Sample sample = SAMPLES[i % SAMPLES.length];
+      byte[] mutated = Mutations.of(sample.text(), random);
+      boolean seldom = random.nextInt(SELDOM) == 0;
+      String told =
+          "file " + i + " of seed " + SEED + ":\n" + new String(mutated, StandardCharsets.UTF_8);
+      // A file of this size takes a millisecond and a flight of an hour a second or two; half a
+      // minute is far beyond a slow machine with a hard disk.
       accepted +=
           assertTimeoutPreemptively(
-              Duration.ofSeconds(1),
-              () -> isAccepted(mutated, isScenario, isTrace, traced) ? 1 : 0,
-              text);
-      if (isTrace) {
-        Samples.write(directory, "traces/hand.csv", Samples.TRACE);
-      }
+              Duration.ofSeconds(seldom ? 30 : 2),
+              () -> isAccepted(sample.kind(), mutated, seldom, told) ? 1 : 0,
+              told);
     }
     // Some changes hit blanks, titles and digits; most do harm.
-    assertThat(accepted).isBetween(FILES / 50, FILES / 2);
+    assertThat(accepted).isBetween(FILES / 20, FILES / 2);
+    assertThat(second.compared()).as("numbers compared").isGreaterThan(5 * accepted);
+    assertThat(flown).isGreaterThan(FILES / 2000);
+    assertThat(saved).isGreaterThan(FILES / 2000);
   }
 
-  private boolean isAccepted(byte[] bytes, boolean isScenario, boolean isTrace, Path traced)
-      throws IOException {
-    Path file = Files.write(directory.resolve(isTrace ? "traces/hand.csv" : "mutated.json"), bytes);
+  private boolean isAccepted(Kind kind, byte[] bytes, boolean seldom, String told) {
     try {
-      if (isTrace) {
-        assertThat(ScenarioFile.read(traced)).isNotNull();
-      } else if (isScenario) {
-        assertThat(ScenarioFile.read(file)).isNotNull();
-      } else {
-        assertThat(AeroplaneFile.read(file)).isNotNull();
-      }
-      return true;
+      return switch (kind) {
+        case SCENARIO -> scenario(bytes, seldom);
+        case AEROPLANE -> aeroplane(bytes);
+        case TRACE -> trace(bytes, "stick", seldom);
+        case TRACE_IN_PER_CENT -> trace(bytes, "pedal", seldom);
+      };
     } catch (FileFaultsException e) {
-      assertThat(e.faults()).isNotEmpty();
+      assertThat(e.faults()).as(told).isNotEmpty();
       for (FileFault fault : e.faults()) {
-        assertThat(fault.jsonPath()).startsWith("$");
-        assertThat(fault.message()).isNotBlank().doesNotContain("\n");
-        assertThat(fault.message()).doesNotContainIgnoringCase("jackson", "redacted", "exception");
+        assertThat(fault.jsonPath()).as(told).startsWith("$");
+        assertThat(fault.message()).as(told).isNotBlank().doesNotContain("\n");
+        assertThat(fault.message())
+            .as(told)
+            .doesNotContainIgnoringCase("jackson", "redacted", "exception");
       }
       return false;
+    } catch (IOException | RuntimeException | AssertionError e) {
+      throw new AssertionError(told, e);
     }
   }
 
-  private static byte[] mutated(String sample, Random random) {
-    if (random.nextBoolean()) {
-      return mutatedBytes(sample.getBytes(StandardCharsets.UTF_8), random);
+  private boolean scenario(byte[] bytes, boolean seldom) throws IOException {
+    Samples.write(directory, "traces/hand.csv", Samples.TRACE);
+    Path file = Files.write(directory.resolve("mutated.json"), bytes);
+    if (seldom) {
+      save(file);
     }
-    List<String> tokens = tokens(sample);
-    for (int changes = 1 + random.nextInt(3); changes > 0; changes--) {
-      int at = random.nextInt(tokens.size());
-      int other = random.nextInt(tokens.size());
-      switch (random.nextInt(5)) {
-        case 0 -> tokens.remove(at);
-        case 1 -> tokens.add(at, tokens.get(at));
-        case 2 -> Collections.swap(tokens, at, other);
-        case 3 -> tokens.set(at, tokens.get(other));
-        default -> tokens.set(at, TOKENS[random.nextInt(TOKENS.length)]);
-      }
+    Scenario scenario = ScenarioFile.read(file);
+    JsonNode tree = SecondReading.tree(bytes);
+    second.scenario(tree, scenario, directory);
+    assertThat(SCENARIO_SCHEMA.validate(tree.toString(), InputFormat.JSON)).isEmpty();
+    if (seldom) {
+      fly(scenario);
     }
-    return String.join("", tokens).getBytes(StandardCharsets.UTF_8);
+    return true;
   }
 
-  private static byte[] mutatedBytes(byte[] sample, Random random) {
-    List<Byte> bytes = new ArrayList<>();
-    for (byte b : sample) {
-      bytes.add(b);
-    }
-    for (int changes = 1 + random.nextInt(3); changes > 0; changes--) {
-      int at = random.nextInt(bytes.size());
-      switch (random.nextInt(5)) {
-        case 0 -> bytes.remove(at);
-        case 1 -> bytes.add(at, bytes.get(at));
-        case 2 -> Collections.swap(bytes, at, random.nextInt(bytes.size()));
-        case 3 -> bytes.set(at, (byte) random.nextInt(256));
-        default -> bytes.subList(at, Math.min(at + random.nextInt(20), bytes.size())).clear();
-      }
-    }
-    byte[] mutated = new byte[bytes.size()];
-    for (int i = 0; i < mutated.length; i++) {
-      mutated[i] = bytes.get(i);
-    }
-    return mutated;
+  private boolean aeroplane(byte[] bytes) throws IOException {
+    Path file = Files.write(directory.resolve("mutated.json"), bytes);
+    var data = AeroplaneFile.read(file);
+    JsonNode tree = SecondReading.tree(bytes);
+    second.aeroplane(tree, data);
+    assertThat(AEROPLANE_SCHEMA.validate(tree.toString(), InputFormat.JSON)).isEmpty();
+    return true;
   }
 
-  /** Texts, words and single marks; what stands between them goes with them. */
-  private static List<String> tokens(String sample) {
-    List<String> tokens = new ArrayList<>();
-    int i = 0;
-    while (i < sample.length()) {
-      int end = i + 1;
-      if (sample.charAt(i) == '"') {
-        end = sample.indexOf('"', i + 1) + 1;
-      } else if (Character.isLetterOrDigit(sample.charAt(i))) {
-        while (end < sample.length()
-            && (Character.isLetterOrDigit(sample.charAt(end)) || sample.charAt(end) == '.')) {
-          end++;
-        }
-      }
-      tokens.add(sample.substring(i, end));
-      i = end;
+  private boolean trace(byte[] bytes, String column, boolean seldom) throws IOException {
+    Path file =
+        Samples.writeScenario(
+            directory,
+            Samples.with(
+                Samples.SCENARIO_WITH_EVERY_KEY,
+                "\"column\": \"stick\"",
+                "\"column\": \"" + column + "\""));
+    Files.write(directory.resolve("traces/hand.csv"), bytes);
+    Scenario scenario = ScenarioFile.read(file);
+    second.scenario(SecondReading.tree(Files.readAllBytes(file)), scenario, directory);
+    if (seldom) {
+      fly(scenario);
     }
-    return tokens;
+    return true;
+  }
+
+  /** What the window keeps of a file, right or wrong, is written whole and means the same. */
+  private void save(Path file) throws IOException {
+    ScenarioDocument document = ScenarioDocument.open(file);
+    Path folder = Files.createTempDirectory(directory, "saved");
+    Files.createDirectories(folder.resolve("traces"));
+    Files.copy(directory.resolve("traces/hand.csv"), folder.resolve("traces/hand.csv"));
+    Path copy = folder.resolve("copy.json");
+    ScenarioDocument written = ScenarioFile.write(copy, document);
+    assertThat(Files.readString(copy)).isEqualTo(written.json());
+    assertThat(namesIn(folder)).containsExactlyInAnyOrder("copy.json", "traces");
+    assertThat(ScenarioDocument.open(copy)).isEqualTo(written);
+    saved++;
+  }
+
+  /** A result is there whole or not at all. */
+  private void fly(Scenario scenario) throws IOException {
+    Path folder = Files.createTempDirectory(directory, "flown");
+    flown++;
+    try {
+      ResultFolder.write(folder, ScenarioRun.execute(scenario), "a test");
+    } catch (CalculationException e) {
+      assertThat(e.getMessage()).isNotBlank();
+      assertThat(namesIn(folder)).isEmpty();
+      return;
+    }
+    assertThat(namesIn(folder)).containsExactlyInAnyOrder("history.csv", "result.json");
+    assertThat(
+            SecondReading.tree(Files.readAllBytes(folder.resolve("result.json")))
+                .get("format")
+                .textValue())
+        .isEqualTo("rolltrace-result/1");
+    assertThat(Files.readString(folder.resolve("history.csv")))
+        .endsWith("\n")
+        .doesNotContain("NaN", "Infinity");
+    Files.delete(folder.resolve("history.csv")); // up to an hour of samples
+  }
+
+  private static String[] namesIn(Path folder) {
+    try (Stream<Path> files = Files.list(folder)) {
+      return files.map(file -> file.getFileName().toString()).toArray(String[]::new);
+    } catch (IOException unreadable) {
+      throw new UncheckedIOException(unreadable);
+    }
   }
 }

@@ -1266,6 +1266,13 @@ class SpoiltFilesTest {
             "\"-50 ms\" is out of range; expected 0 or more"),
         spoilt(
             Samples.AEROPLANE_WITH_EVERY_KEY,
+            "\"50 ms\"",
+            "\"50e-3 ms\"",
+            "$.ailerons.lag",
+            13,
+            "\"50e-3 ms\": lag is 5.0E-5 s; expected 0 for none, or at least 1.0E-4 s"),
+        spoilt(
+            Samples.AEROPLANE_WITH_EVERY_KEY,
             "2.5,",
             "0,",
             "$.limits.rollingLoadFactor",

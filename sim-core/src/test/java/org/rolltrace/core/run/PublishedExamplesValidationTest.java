@@ -13,6 +13,8 @@ import org.hipparchus.linear.RealMatrix;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.rolltrace.core.derivatives.Coefficient;
+import org.rolltrace.core.derivatives.LateralDerivatives;
 import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.history.TimeHistory;
 import org.rolltrace.core.motion.LateralModel;
@@ -281,6 +283,56 @@ class PublishedExamplesValidationTest {
     double[] rates = new double[4];
     LateralMotion.of(SlipTreatment.FREE, model(scenario)).rates(0, new double[4], 1, 0, rates);
     assertThat(rates[ROLL_RATE]).isCloseTo(power, within(1e-12));
+  }
+
+  /**
+   * M.V. Cook, Flight Dynamics Principles, example 7.1 (from memory): bank from aileron is 1.62 (s²
+   * + 0.362 s + 1.359) / ((s + 0.0065)(s + 1.329)(s² + 0.254 s + 1.433)); spiral 154 s, roll 0.75
+   * s, dutch roll 1.2 rad/s at 0.106. Last digits as printed. The numerator holds the derivatives
+   * of the ailerons to their mark: its roots are those of slip and yaw rate with the bank held at
+   * zero by the ailerons.
+   */
+  @Test
+  void fourEngineJetHolding() {
+    Scenario scenario = Shipped.scenario("four-engine-jet-holding-roll-entry");
+    LateralModes modes = modes(scenario);
+    assertThat(modes.roll().orElseThrow().root()).isCloseTo(-1.329, within(0.0005));
+    assertThat(modes.roll().orElseThrow().timeConstant()).isCloseTo(0.75, within(0.005));
+    assertThat(modes.spiral().orElseThrow().root()).isCloseTo(-0.0065, within(0.00005));
+    assertThat(modes.spiral().orElseThrow().timeConstant()).isCloseTo(154, within(0.5));
+    Mode.Oscillatory dutchRoll = modes.dutchRoll().orElseThrow();
+    assertThat(-2 * dutchRoll.real()).isCloseTo(0.254, within(0.0005));
+    assertThat(Math.pow(dutchRoll.naturalFrequency(), 2)).isCloseTo(1.433, within(0.0005));
+    assertThat(dutchRoll.naturalFrequency()).isCloseTo(1.2, within(0.05));
+    assertThat(dutchRoll.dampingRatio()).isCloseTo(0.106, within(0.0005));
+
+    LateralMotion motion = LateralMotion.of(SlipTreatment.FREE, model(scenario));
+    double[][] a = motion.linearised();
+    double[] aileron = new double[4];
+    motion.rates(0, new double[4], 1, 0, aileron);
+    assertThat(aileron[ROLL_RATE]).isCloseTo(1.62, within(1e-9));
+    double yawForRoll = aileron[YAW_RATE] / aileron[ROLL_RATE];
+    double slipYaw = a[YAW_RATE][SIDESLIP] - yawForRoll * a[ROLL_RATE][SIDESLIP];
+    double yawYaw = a[YAW_RATE][YAW_RATE] - yawForRoll * a[ROLL_RATE][YAW_RATE];
+    assertThat(-a[SIDESLIP][SIDESLIP] - yawYaw).isCloseTo(0.362, within(0.0005));
+    assertThat(a[SIDESLIP][SIDESLIP] * yawYaw - a[SIDESLIP][YAW_RATE] * slipYaw)
+        .isCloseTo(1.359, within(0.0005));
+  }
+
+  /**
+   * The coefficients printed for the same condition by Schmidt, app. B.4, where they can be told
+   * from misprints: N_da 0.036 1/s² and N_p −0.048 1/s, unprimed, need Cn_da 0.0035 and Cn_p
+   * −0.0306 (re-read); CY_dr 0.1865 and Cn_dr −0.0834 are the same in all conditions. From the
+   * primed set, through the inertias, to a unit of three figures.
+   */
+  @Test
+  void fourEngineJetHoldingCoefficients() {
+    LateralDerivatives set =
+        Shipped.scenario("four-engine-jet-holding-roll-entry").data().derivatives();
+    assertThat(set.value(Coefficient.CN_DA)).isCloseTo(0.0035, within(0.00005));
+    assertThat(set.value(Coefficient.CN_P)).isCloseTo(-0.0306, within(0.0002));
+    assertThat(set.value(Coefficient.CY_DR)).isCloseTo(0.1865, within(0.0005));
+    assertThat(set.value(Coefficient.CN_DR)).isCloseTo(-0.0834, within(0.0001));
   }
 
   /**

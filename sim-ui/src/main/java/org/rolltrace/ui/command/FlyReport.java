@@ -186,8 +186,9 @@ final class FlyReport {
     if (moments.roll() != 0 || moments.yaw() != 0) {
       row(
           "  propeller moment",
-          format("%+.1f N m in roll", moments.roll())
-              + (moments.yaw() == 0 ? "" : format(", %+.1f N m in yaw", moments.yaw())));
+          moment(moments.roll())
+              + " in roll"
+              + (moments.yaw() == 0 ? "" : ", " + moment(moments.yaw()) + " in yaw"));
     }
   }
 
@@ -332,10 +333,10 @@ final class FlyReport {
         trimmedWith.equals(scenario.propeller())
             ? "Trim, " + state
             : format(
-                "Trim, %s, with %sa propeller moment of %+.1f N m",
+                "Trim, %s, with %sa propeller moment of %s",
                 state,
                 trimmedWith instanceof PowerSetting setting ? power(setting.power()) + " and " : "",
-                scenario.propulsion().moments(trimmedWith).roll()));
+                moment(scenario.propulsion().moments(trimmedWith).roll())));
     surface("aileron", trim.aileron(), "stick", trim.stick());
     surface("rudder", trim.rudder(), "pedal", trim.pedal());
     two("sideslip", format("%.2f deg", Math.toDegrees(trim.sideslip())), "");
@@ -440,6 +441,11 @@ final class FlyReport {
 
   private static String measureRow(String title, double value, String unit) {
     return "  " + padded(title, LABEL) + format("%" + VALUE + "s %-8s", number(value), unit);
+  }
+
+  /** Of a big single or of a model: hundreds of N m, or fractions of one. */
+  private static String moment(double value) {
+    return (value > 0 ? "+" : "") + number(value) + " N m";
   }
 
   /** Four figures, which is what the data behind them are worth at best. */

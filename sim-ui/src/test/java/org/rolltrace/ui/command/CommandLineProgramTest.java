@@ -67,7 +67,7 @@ class CommandLineProgramTest {
         "power-step | 20.00 kW (26.82 hp), 26.7 % of the rated power",
         "power-step | nose: clockwise, 1900 rpm, torque 100.5 N m, thrust 407 N",
         "go-around | 75.00 kW (100.6 hp), 100 % of the rated power",
-        "go-around | Trim, wings level, with 20.00 kW (26.82 hp) and a propeller moment of -50.2 N m",
+        "go-around | Trim, wings level, with 20.00 kW (26.82 hp) and a propeller moment of -50.22 N m",
         "held-sideslip | held: sideslip 0 deg at 1 s, 5 deg at 2 s, 5 deg at 4 s, 0 deg at 5 s"
       })
   void theReportSaysWhatTheHandDid(String name, String words) {
@@ -89,6 +89,14 @@ class CommandLineProgramTest {
     Answer primed =
         run("fly", SCENARIOS.resolve("four-engine-jet-cruise-primed-roll-entry.json").toString());
     assertThat(primed.out()).contains("given as          dimensional, primed, per radian");
+  }
+
+  @Test
+  void smallMomentsKeepTheirFigures() {
+    Answer answer = run("fly", SCENARIOS.resolve("mosspipit-torque-right.json").toString());
+    assertThat(answer.out())
+        .contains("propeller moment  -0.8800 N m in roll")
+        .contains("Trim, wings level, with a propeller moment of -0.3800 N m");
   }
 
   @Test

@@ -1,6 +1,7 @@
 package org.rolltrace.ui.command;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assumptions.assumeThat;
 
 import java.io.File;
 import java.io.IOException;
@@ -17,6 +18,7 @@ import org.junit.jupiter.api.io.TempDir;
 /** The jar that users run. */
 class RunnableJarIT {
   private static final Path JAR = Path.of("target", "rolltrace.jar");
+  private static final Path ARCHIVE = Path.of("target", "rolltrace.jsa");
   private static final String ROLL_ENTRY =
       Path.of("..", "scenarios", "light-single-roll-entry.json").toString();
 
@@ -26,12 +28,17 @@ class RunnableJarIT {
 
   private Answer java(List<String> options, String... arguments)
       throws IOException, InterruptedException {
+    List<String> all = new ArrayList<>(options);
+    all.add("-jar");
+    all.add(JAR.toString());
+    all.addAll(List.of(arguments));
+    return virtualMachine(all);
+  }
+
+  private Answer virtualMachine(List<String> arguments) throws IOException, InterruptedException {
     List<String> command = new ArrayList<>();
     command.add(Path.of(System.getProperty("java.home"), "bin", "java").toString());
-    command.addAll(options);
-    command.add("-jar");
-    command.add(JAR.toString());
-    command.addAll(List.of(arguments));
+    command.addAll(arguments);
     File out = folder.resolve("out").toFile();
     File err = folder.resolve("err").toFile();
     ProcessBuilder builder = new ProcessBuilder(command).redirectOutput(out).redirectError(err);
@@ -102,6 +109,44 @@ class RunnableJarIT {
     Path taken = Files.writeString(folder.resolve("taken"), "x");
     assertThat(java(List.of(), "fly", ROLL_ENTRY, "--out", taken.toString()).exitCode())
         .isEqualTo(3);
+  }
+
+  private static List<String> withArchive(Path archive) {
+    return List.of("-Xlog:disable", "-XX:SharedArchiveFile=" + archive);
+  }
+
+  /** Only a virtual machine that shares its own classes, which not every JDK does, can make one. */
+  @Test
+  void theBuildMakesAClassDataArchiveWhereItCan() throws IOException, InterruptedException {
+    assumeThat(virtualMachine(List.of("-Xshare:on", "-version")).exitCode()).isZero();
+    assertThat(ARCHIVE).isNotEmptyFile();
+    Path loaded = folder.resolve("loaded");
+    Answer answer =
+        java(
+            List.of(
+                "-XX:SharedArchiveFile=" + ARCHIVE,
+                "-Xlog:class+load=info:file=" + loaded.toAbsolutePath()),
+            "fly",
+            ROLL_ENTRY);
+    assertThat(answer.exitCode()).as(answer.err()).isZero();
+    assertThat(Files.readString(loaded))
+        .containsPattern(
+            "org\\.rolltrace\\.core\\.run\\.ScenarioRun .*shared objects file \\(top\\)");
+  }
+
+  /** With the archive, without it, and with one that is damaged. */
+  @Test
+  void anArchiveChangesNothingInWhatIsPrinted() throws IOException, InterruptedException {
+    Path damaged = Files.writeString(folder.resolve("damaged.jsa"), "no archive");
+    for (String form : new String[] {"--json", "--tolerance=1e-9"}) {
+      Answer plain = java(List.of(), "fly", ROLL_ENTRY, form);
+      assertThat(plain.exitCode()).isZero();
+      for (Path archive : List.of(ARCHIVE, folder.resolve("none.jsa"), damaged)) {
+        assertThat(java(withArchive(archive), "fly", ROLL_ENTRY, form))
+            .as("%s %s", archive, form)
+            .isEqualTo(plain);
+      }
+    }
   }
 
   /** A history of a million samples, some 80 MB, in a quarter of that. */
