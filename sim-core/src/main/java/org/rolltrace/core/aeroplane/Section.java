@@ -1,0 +1,48 @@
+package org.rolltrace.core.aeroplane;
+
+import java.util.OptionalDouble;
+import org.rolltrace.core.quantity.Check;
+
+/**
+ * A wing section.
+ *
+ * @param liftSlope a0, 1/rad, in incompressible flow; above 0, at most 8
+ * @param zeroLift incidence of the chord at which it does not lift, rad; negative for a cambered
+ *     section
+ * @param stall incidence of the chord at which its lift is largest, rad; empty when not known
+ * @param profileDrag drag coefficient at small lift, 0 or more
+ */
+public record Section(double liftSlope, double zeroLift, OptionalDouble stall, double profileDrag) {
+
+  /** The slope of a thin section, 1/rad (thin-aerofoil theory). */
+  public static final double THIN = 2 * Math.PI;
+
+  /** What is taken for the profile drag when it is not given: a plain light aeroplane's. */
+  public static final double USUAL_DRAG = 0.010;
+
+  private static final double STEEPEST = 8;
+
+  public Section {
+    Check.positive("lift slope of the section, 1/rad,", liftSlope);
+    Check.inRange("lift slope of the section, 1/rad,", liftSlope, 0, STEEPEST);
+    Check.inRange("zero-lift incidence, rad,", zeroLift, -0.3, 0.3);
+    Check.notNegative("profile drag coefficient", profileDrag);
+    if (stall.isPresent() && !(stall.getAsDouble() > zeroLift)) {
+      throw new IllegalArgumentException(
+          "stalling incidence is "
+              + stall.getAsDouble()
+              + " rad; expected one above the zero-lift incidence, "
+              + zeroLift
+              + " rad");
+    }
+  }
+
+  /**
+   * A thin uncambered section of unknown stall.
+   *
+   * @return a0 = 2π
+   */
+  public static Section thin() {
+    return new Section(THIN, 0, OptionalDouble.empty(), USUAL_DRAG);
+  }
+}
