@@ -10,9 +10,12 @@ import org.rolltrace.core.quantity.Check;
  * @param zeroLift incidence of the chord at which it does not lift, rad; negative for a cambered
  *     section
  * @param stall incidence of the chord at which its lift is largest, rad; empty when not known
+ * @param stallFall how fast its lift falls beyond the stall, by how fast it rose before, 0 or more;
+ *     small for thick sections that stall gently, above 1 for those that stall at once
  * @param profileDrag drag coefficient at small lift, 0 or more
  */
-public record Section(double liftSlope, double zeroLift, OptionalDouble stall, double profileDrag) {
+public record Section(
+    double liftSlope, double zeroLift, OptionalDouble stall, double stallFall, double profileDrag) {
 
   /** The slope of a thin section, 1/rad (thin-aerofoil theory). */
   public static final double THIN = 2 * Math.PI;
@@ -20,12 +23,16 @@ public record Section(double liftSlope, double zeroLift, OptionalDouble stall, d
   /** What is taken for the profile drag when it is not given: a plain light aeroplane's. */
   public static final double USUAL_DRAG = 0.010;
 
+  /** What is taken for the fall when it is not given; common practice: expect the worse. */
+  public static final double USUAL_FALL = 1.5;
+
   private static final double STEEPEST = 8;
 
   public Section {
     Check.positive("lift slope of the section, 1/rad,", liftSlope);
     Check.inRange("lift slope of the section, 1/rad,", liftSlope, 0, STEEPEST);
     Check.inRange("zero-lift incidence, rad,", zeroLift, -0.3, 0.3);
+    Check.notNegative("fall of the lift beyond the stall", stallFall);
     Check.notNegative("profile drag coefficient", profileDrag);
     if (stall.isPresent() && !(stall.getAsDouble() > zeroLift)) {
       throw new IllegalArgumentException(
@@ -43,6 +50,6 @@ public record Section(double liftSlope, double zeroLift, OptionalDouble stall, d
    * @return a0 = 2π
    */
   public static Section thin() {
-    return new Section(THIN, 0, OptionalDouble.empty(), USUAL_DRAG);
+    return new Section(THIN, 0, OptionalDouble.empty(), USUAL_FALL, USUAL_DRAG);
   }
 }

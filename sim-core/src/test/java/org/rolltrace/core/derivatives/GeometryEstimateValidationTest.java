@@ -29,7 +29,8 @@ class GeometryEstimateValidationTest {
   private static final double HALF = 5;
   private static final double DIHEDRAL = Math.toRadians(5);
 
-  private static final Section NO_DRAG = new Section(Section.THIN, 0, OptionalDouble.empty(), 0);
+  private static final Section NO_DRAG =
+      new Section(Section.THIN, 0, OptionalDouble.empty(), Section.USUAL_FALL, 0);
 
   private static Wing trapezoid(double aspectRatio, double taper, double sweep, double dihedral) {
     double root = 4 * HALF / (aspectRatio * (1 + taper));
@@ -115,7 +116,8 @@ class GeometryEstimateValidationTest {
 
   @Test
   void profileDragOfARectangleDampsYawByAThirdOfItself() {
-    Section section = new Section(Section.THIN, 0, OptionalDouble.empty(), 0.012);
+    Section section =
+        new Section(Section.THIN, 0, OptionalDouble.empty(), Section.USUAL_FALL, 0.012);
     Wing wing = new Wing(List.of(new WingPanel(0, HALF, 1, 1, 0, 0, 0, section)), 0, 0);
     assertThat(line(wing, 0.5).profileYawDamping()).isCloseTo(-0.012 / 3, within(1e-15));
   }

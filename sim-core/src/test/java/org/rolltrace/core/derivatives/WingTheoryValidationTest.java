@@ -44,7 +44,7 @@ class WingTheoryValidationTest {
                 0,
                 0,
                 0,
-                new Section(slope, 0, OptionalDouble.empty(), 0.01))),
+                new Section(slope, 0, OptionalDouble.empty(), Section.USUAL_FALL, 0.01))),
         0,
         0);
   }
