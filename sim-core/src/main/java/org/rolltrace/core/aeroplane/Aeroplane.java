@@ -21,6 +21,8 @@ import org.rolltrace.core.quantity.Check;
  *     does not
  * @param propellers each with a name and a place of its own; none for an aeroplane without, or
  *     whose propellers are not known
+ * @param geometry its shape; empty when not known, which leaves only given derivatives
+ * @param inertiaBasis where the moments of inertia come from
  */
 public record Aeroplane(
     String name,
@@ -32,7 +34,9 @@ public record Aeroplane(
     Optional<Rudder> rudder,
     Limits limits,
     Optional<LateralImbalance> imbalance,
-    List<Propeller> propellers) {
+    List<Propeller> propellers,
+    Optional<Geometry> geometry,
+    InertiaBasis inertiaBasis) {
 
   public Aeroplane {
     propellers = List.copyOf(propellers);
@@ -121,6 +125,8 @@ public record Aeroplane(
     private Optional<Rudder> rudder = Optional.empty();
     private Limits limits = Limits.NONE;
     private Optional<LateralImbalance> imbalance = Optional.empty();
+    private Optional<Geometry> geometry = Optional.empty();
+    private InertiaBasis inertiaBasis = InertiaBasis.GIVEN;
     private final List<Propeller> propellers = new ArrayList<>();
 
     private Builder(String name, double span, double wingArea, Inertia inertia) {
@@ -197,6 +203,28 @@ public record Aeroplane(
     }
 
     /**
+     * Sets the shape.
+     *
+     * @param value the shape
+     * @return this builder
+     */
+    public Builder geometry(Geometry value) {
+      geometry = Optional.of(value);
+      return this;
+    }
+
+    /**
+     * Says where the moments of inertia come from.
+     *
+     * @param value given unless this is called
+     * @return this builder
+     */
+    public Builder inertiaBasis(InertiaBasis value) {
+      inertiaBasis = value;
+      return this;
+    }
+
+    /**
      * Makes the aeroplane.
      *
      * @return the aeroplane
@@ -204,7 +232,18 @@ public record Aeroplane(
      */
     public Aeroplane build() {
       return new Aeroplane(
-          name, span, wingArea, mass, inertia, ailerons, rudder, limits, imbalance, propellers);
+          name,
+          span,
+          wingArea,
+          mass,
+          inertia,
+          ailerons,
+          rudder,
+          limits,
+          imbalance,
+          propellers,
+          geometry,
+          inertiaBasis);
     }
   }
 }

@@ -10,7 +10,7 @@ import org.rolltrace.core.quantity.Check;
 
 /**
  * A set of lateral-directional derivatives in the convention of the package page. A derivative that
- * was not given is 0 and says that it is absent.
+ * was neither given nor estimated is 0 and says that it is absent.
  */
 public final class LateralDerivatives {
   private static final String AS_IN_THE_MODEL =
@@ -20,6 +20,7 @@ public final class LateralDerivatives {
   private final String source;
   private final Optional<FlightCondition> validAt;
   private final String convention;
+  private final EnumMap<Coefficient, Estimate> estimates = new EnumMap<>(Coefficient.class);
 
   private LateralDerivatives(
       Map<Coefficient, Double> given,
@@ -67,13 +68,41 @@ public final class LateralDerivatives {
   }
 
   /**
+   * The same set with what follows from the shape of the aeroplane. A given value wins over an
+   * estimate, which then stands beside it.
+   *
+   * @param shape the estimates, in place of any from before
+   * @return the set
+   */
+  public LateralDerivatives completedBy(GeometryEstimate shape) {
+    LateralDerivatives set = new LateralDerivatives(given, source, validAt, convention);
+    shape.estimates().forEach(estimate -> set.estimates.put(estimate.coefficient(), estimate));
+    return set;
+  }
+
+  /**
    * A derivative.
    *
    * @param coefficient which one
-   * @return its value; 0 when absent
+   * @return its value: the given one, or else the estimate; 0 when absent
    */
   public double value(Coefficient coefficient) {
-    return given.getOrDefault(coefficient, 0.0);
+    Double set = given.get(coefficient);
+    if (set != null) {
+      return set;
+    }
+    Estimate estimate = estimates.get(coefficient);
+    return estimate == null ? 0 : estimate.value();
+  }
+
+  /**
+   * The estimate of a derivative.
+   *
+   * @param coefficient which one
+   * @return the estimate, also where a given value wins over it; empty when there is none
+   */
+  public Optional<Estimate> estimate(Coefficient coefficient) {
+    return Optional.ofNullable(estimates.get(coefficient));
   }
 
   /**
@@ -83,17 +112,21 @@ public final class LateralDerivatives {
    * @return its origin
    */
   public Origin origin(Coefficient coefficient) {
-    return given.containsKey(coefficient) ? Origin.GIVEN : Origin.ABSENT;
+    boolean estimated = estimates.containsKey(coefficient);
+    if (given.containsKey(coefficient)) {
+      return estimated ? Origin.SET : Origin.GIVEN;
+    }
+    return estimated ? Origin.ESTIMATED : Origin.ABSENT;
   }
 
   /**
-   * The derivatives among some that were not given.
+   * The derivatives among some that are neither given nor estimated.
    *
    * @param wanted those asked about
    * @return the absent ones, in the order of the enumeration
    */
   public List<Coefficient> absentAmong(Collection<Coefficient> wanted) {
-    return wanted.stream().filter(c -> !given.containsKey(c)).sorted().toList();
+    return wanted.stream().filter(c -> origin(c) == Origin.ABSENT).sorted().toList();
   }
 
   /**

@@ -4,7 +4,11 @@ package org.rolltrace.core.derivatives;
 public enum Origin {
   /** Given by the user. */
   GIVEN("given"),
-  /** Not given: taken as 0. */
+  /** Estimated from the shape of the aeroplane. */
+  ESTIMATED("estimated"),
+  /** Given by the user where there is an estimate as well. */
+  SET("set over an estimate"),
+  /** Neither given nor estimated: taken as 0. */
   ABSENT("absent");
 
   private final String word;

@@ -1,16 +1,19 @@
 package org.rolltrace.core.files;
 
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.rolltrace.core.aeroplane.Aeroplane;
 import org.rolltrace.core.aeroplane.Ailerons;
+import org.rolltrace.core.aeroplane.Geometry;
 import org.rolltrace.core.aeroplane.Inertia;
 import org.rolltrace.core.aeroplane.LateralImbalance;
 import org.rolltrace.core.aeroplane.Limits;
 import org.rolltrace.core.aeroplane.Propeller;
 import org.rolltrace.core.aeroplane.Rudder;
 import org.rolltrace.core.aeroplane.SurfaceDynamics;
+import org.rolltrace.core.aeroplane.Wing;
 import org.rolltrace.core.derivatives.LateralDerivatives;
 import org.rolltrace.core.quantity.Dimension;
 import org.rolltrace.core.scenario.AeroplaneData;
@@ -25,6 +28,10 @@ final class AeroplaneFormat {
       Range.aboveZeroTo(Math.PI / 2, "a travel above 0 and at most 90 deg");
   private static final Range TRAVEL_OR_NONE = Range.fromTo(0, Math.PI / 2, "from 0 to 90 deg");
 
+  private static final String SPAN = "span";
+  private static final String AREA = "wingArea";
+  private static final String DERIVATIVES = "derivatives";
+  private static final String AILERONS_KEY = "ailerons";
   private static final String AXES = "axes";
   private static final String ANGLE_OF_ATTACK = "angleOfAttack";
   private static final String IMBALANCE = "lateralImbalance";
@@ -39,7 +46,9 @@ final class AeroplaneFormat {
   static final Keys INLINE = withTheRest(Keys.of("an aeroplane").optional(FormatName.KEY));
   static final Keys INERTIA = Keys.of("the inertia").required("roll").optional("yaw", "product");
   static final Keys AILERONS =
-      Keys.of("the ailerons").required("up", "down").optional("rateLimit", "lag");
+      Keys.of("the ailerons")
+          .required("up", "down")
+          .optional("rateLimit", "lag", "from", "to", "chordShare");
   static final Keys RUDDER =
       Keys.of("the rudder").required("left", "right").optional("rateLimit", "lag");
   static final Keys LATERAL_IMBALANCE = Keys.of("the imbalance").required("mass", "arm");
@@ -48,44 +57,53 @@ final class AeroplaneFormat {
           .optional(
               "manoeuvringSpeed", "neverExceedSpeed", "rollingLoadFactor", "rollRate", "bank");
 
+  /** How far span and area may be from those of the panels. */
+  private static final double MISFIT = 1e-3;
+
   private AeroplaneFormat() {}
 
   private static Keys withTheRest(Keys format) {
     return format
-        .required("span", "wingArea", "inertia", "derivatives")
-        .optional("name", "mass", "ailerons", "rudder", "axes", "limits", "note")
-        .optional(ANGLE_OF_ATTACK, IMBALANCE, PROPELLERS);
+        .optional(SPAN, AREA, MassFormat.INERTIA, DERIVATIVES)
+        .optional("name", "mass", AILERONS_KEY, "rudder", "axes", "limits", "note")
+        .optional(ANGLE_OF_ATTACK, IMBALANCE, PROPELLERS, MassFormat.MASSES, Variants.KEY)
+        .optional(
+            GeometryFormat.WING, GeometryFormat.TAILPLANE, GeometryFormat.FIN, GeometryFormat.BODY);
   }
 
   static Optional<AeroplaneData> read(JsonValue.ObjectValue object, Keys keys, Faults faults) {
     if (!FormatName.mayBe(FormatName.AEROPLANE, object, faults)) {
       return Optional.empty();
     }
+    Variants.check(object, faults);
     ObjectCursor in = ObjectCursor.of(object, keys, faults);
     Optional<String> name = in.text("name", LONGEST_NAME);
-    double span = in.quantity("span", Dimension.LENGTH, Range.ABOVE_ZERO);
-    double wingArea = in.quantity("wingArea", Dimension.AREA, Range.ABOVE_ZERO);
-    OptionalDouble mass = in.optionalQuantity("mass", Dimension.MASS, Range.ABOVE_ZERO);
+    GeometryFormat.Shape shape = GeometryFormat.read(in, AILERONS_KEY);
+    Optional<Wing> wing = shape.geometry().map(Geometry::wing);
+    double span = ofWing(in, SPAN, Dimension.LENGTH, wing.map(Wing::span));
+    double wingArea = ofWing(in, AREA, Dimension.AREA, wing.map(Wing::area));
+    OptionalDouble given = in.optionalQuantity("mass", Dimension.MASS, Range.ABOVE_ZERO);
+    MassFormat.Masses masses =
+        MassFormat.read(in, given, inertia(in), span, shape.geometry().flatMap(Geometry::body));
+    OptionalDouble mass = masses.mass();
+    if (in.has(GeometryFormat.WING) && mass.isEmpty() && !in.has("mass")) {
+      in.addMissing("mass", "the lift of the wing, on which its derivatives depend, carries it");
+    }
     double turn = angleOfAttack(in);
     in.freeText("note", JsonTree.LONGEST_TEXT);
-    Optional<Inertia> inertia = inertia(in);
+    Optional<Inertia> inertia = masses.inertia();
     Optional<Ailerons> ailerons = ailerons(in);
     Optional<Rudder> rudder = rudder(in);
     Limits limits = limits(in);
     Optional<LateralImbalance> imbalance = imbalance(in, mass);
     List<Propeller> propellers = PropellerFormat.read(in, PROPELLERS);
     boolean described = in.isSound();
-    Optional<LateralDerivatives> derivatives = Optional.empty();
-    Optional<ObjectCursor> set = in.object("derivatives", DerivativesFormat.DERIVATIVES);
-    if (set.isPresent()) {
-      derivatives =
-          DerivativesFormat.read(
-              set.get(),
-              described
-                  ? Optional.of(
-                      new DerivativesFormat.Body(span, wingArea, mass, inertia.orElseThrow(), turn))
-                  : Optional.empty());
-    }
+    Optional<DerivativesFormat.Body> body =
+        described
+            ? Optional.of(
+                new DerivativesFormat.Body(span, wingArea, mass, inertia.orElseThrow(), turn))
+            : Optional.empty();
+    Optional<LateralDerivatives> derivatives = derivatives(in, body);
     Optional<Inertia> turned = described ? turned(in, inertia.orElseThrow(), turn) : inertia;
     if (!in.isSound()) {
       return Optional.empty();
@@ -102,8 +120,49 @@ final class AeroplaneFormat {
                 rudder,
                 limits,
                 imbalance,
-                propellers),
-            derivatives.orElseThrow()));
+                propellers,
+                shape.geometry(),
+                masses.basis()),
+            derivatives.orElseThrow(),
+            shape.theory()));
+  }
+
+  /** What follows from the wing and may be given as well, but not otherwise. */
+  private static double ofWing(
+      ObjectCursor in, String key, Dimension dimension, Optional<Double> wing) {
+    if (!in.has(key)) {
+      if (wing.isEmpty() && !in.has(GeometryFormat.WING)) {
+        in.addMissing(key, "an aeroplane must have it, or a \"wing\"");
+      }
+      return wing.orElse(Double.NaN);
+    }
+    double given = in.quantity(key, dimension, Range.ABOVE_ZERO);
+    if (wing.isPresent()
+        && !Double.isNaN(given)
+        && !(Math.abs(given - wing.get()) <= MISFIT * wing.get())) {
+      in.refuse(
+          key,
+          "the panels of the wing make it "
+              + wing.get()
+              + " in SI units; expected the same to 0.1 %, or no "
+              + key);
+    }
+    return wing.orElse(given);
+  }
+
+  private static Optional<LateralDerivatives> derivatives(
+      ObjectCursor in, Optional<DerivativesFormat.Body> body) {
+    Optional<ObjectCursor> set = in.object(DERIVATIVES, DerivativesFormat.DERIVATIVES);
+    if (set.isPresent()) {
+      return DerivativesFormat.read(set.get(), body);
+    }
+    if (!in.has(DERIVATIVES)) {
+      if (in.has(GeometryFormat.WING)) {
+        return Optional.of(LateralDerivatives.ofGiven(Map.of(), "")); // all follow from the shape
+      }
+      in.addMissing(DERIVATIVES, "an aeroplane must have them, or a \"wing\" they follow from");
+    }
+    return Optional.empty();
   }
 
   /** The angle by which the axes of the file are turned to stability axes; NaN when refused. */
@@ -174,7 +233,7 @@ final class AeroplaneFormat {
   }
 
   private static Optional<Ailerons> ailerons(ObjectCursor aeroplane) {
-    Optional<ObjectCursor> object = aeroplane.object("ailerons", AILERONS);
+    Optional<ObjectCursor> object = aeroplane.object(AILERONS_KEY, AILERONS);
     if (object.isEmpty()) {
       return Optional.empty();
     }

@@ -3,8 +3,6 @@ package org.rolltrace.core.run;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import org.rolltrace.core.aeroplane.Aeroplane;
-import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.flight.FlightEvent;
 import org.rolltrace.core.flight.FlightSettings;
 import org.rolltrace.core.history.TimeHistory;
@@ -59,15 +57,6 @@ public record RunResult(
    * @return CL = n m g/(q̄ S); empty when the mass is not known
    */
   public OptionalDouble liftCoefficient() {
-    Aeroplane aeroplane = scenario.data().aeroplane();
-    FlightCondition condition = scenario.condition();
-    if (aeroplane.mass().isEmpty()) {
-      return OptionalDouble.empty();
-    }
-    return OptionalDouble.of(
-        condition.loadFactor()
-            * aeroplane.mass().getAsDouble()
-            * FlightCondition.STANDARD_GRAVITY
-            / (condition.dynamicPressure() * aeroplane.wingArea()));
+    return scenario.data().liftCoefficient(scenario.condition());
   }
 }

@@ -61,6 +61,7 @@ public record Scenario(
               .collect(Collectors.joining("; ")));
     }
     condition = condition.inTurn(start.state().bankOfTurn());
+    data = data.in(condition);
   }
 
   /**
@@ -83,6 +84,9 @@ public record Scenario(
     Aeroplane aeroplane = data.aeroplane();
     for (Coefficient needed :
         data.derivatives().absentAmong(List.of(Coefficient.CL_P, Coefficient.CL_DA))) {
+      if (followsFromShape(needed, aeroplane)) {
+        continue;
+      }
       faults.add(
           new ScenarioFault("$.aeroplane", needed.symbol() + " is missing; every roll needs it"));
     }
@@ -242,5 +246,13 @@ public record Scenario(
    */
   public Propulsion propulsion() {
     return Propulsion.of(data.aeroplane(), condition, propeller);
+  }
+
+  private static boolean followsFromShape(Coefficient coefficient, Aeroplane aeroplane) {
+    return aeroplane.geometry().isPresent()
+        && aeroplane.mass().isPresent()
+        && (coefficient == Coefficient.CL_P
+            || (aeroplane.geometry().get().ailerons().isPresent()
+                && aeroplane.ailerons().isPresent()));
   }
 }
