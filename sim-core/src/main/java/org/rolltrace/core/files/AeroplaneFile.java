@@ -1,6 +1,8 @@
 package org.rolltrace.core.files;
 
 import java.nio.file.Path;
+import java.util.LinkedHashMap;
+import java.util.Map;
 import java.util.Optional;
 import org.rolltrace.core.scenario.AeroplaneData;
 
@@ -19,7 +21,8 @@ public final class AeroplaneFile {
     Faults faults = new Faults(file);
     Optional<AeroplaneData> data = Optional.empty();
     try {
-      data = read(TextFile.bytes(file), faults);
+      Optional<JsonValue.ObjectValue> object = JsonTree.read(TextFile.bytes(file), faults);
+      data = object.flatMap(found -> AeroplaneFormat.read(found, AeroplaneFormat.IN_FILE, faults));
     } catch (UnusableFileException e) {
       faults.addForWholeFile(e.getMessage());
     }
@@ -29,10 +32,32 @@ public final class AeroplaneFile {
     return data.get();
   }
 
-  static Optional<AeroplaneData> read(byte[] bytes, Faults faults) {
-    Optional<JsonValue.ObjectValue> object = JsonTree.read(bytes, faults);
-    return object.isPresent()
-        ? AeroplaneFormat.read(object.get(), AeroplaneFormat.IN_FILE, faults)
-        : Optional.empty();
+  /**
+   * Reads an aeroplane with all its variants.
+   *
+   * @param file an aeroplane file
+   * @return the base under an empty name, then the variants by name, in the order of the file
+   * @throws FileFaultsException with all faults of the file, if there are any
+   */
+  public static Map<String, AeroplaneData> readAll(Path file) {
+    Faults faults = new Faults(file);
+    Map<String, AeroplaneData> all = new LinkedHashMap<>();
+    try {
+      Optional<JsonValue.ObjectValue> object = JsonTree.read(TextFile.bytes(file), faults);
+      if (object.isPresent()) {
+        AeroplaneFormat.read(object.get(), AeroplaneFormat.IN_FILE, faults)
+            .ifPresent(base -> all.put("", base));
+        for (String variant : Variants.names(object.get())) {
+          AeroplaneFormat.readVariant(object.get(), variant, AeroplaneFormat.IN_FILE, faults)
+              .ifPresent(data -> all.put(variant, data));
+        }
+      }
+    } catch (UnusableFileException e) {
+      faults.addForWholeFile(e.getMessage());
+    }
+    if (all.isEmpty() || faults.count() > 0) {
+      throw faults.toException();
+    }
+    return all;
   }
 }

@@ -71,11 +71,30 @@ final class AeroplaneFormat {
             GeometryFormat.WING, GeometryFormat.TAILPLANE, GeometryFormat.FIN, GeometryFormat.BODY);
   }
 
+  /** Reads the aeroplane as its variants take it for their base. */
   static Optional<AeroplaneData> read(JsonValue.ObjectValue object, Keys keys, Faults faults) {
     if (!FormatName.mayBe(FormatName.AEROPLANE, object, faults)) {
       return Optional.empty();
     }
     Variants.check(object, faults);
+    return readOne(object, keys, faults, "");
+  }
+
+  /** Reads one of its variants, which must be there. */
+  static Optional<AeroplaneData> readVariant(
+      JsonValue.ObjectValue object, String variant, Keys keys, Faults faults) {
+    if (!FormatName.mayBe(FormatName.AEROPLANE, object, faults)) {
+      return Optional.empty();
+    }
+    Variants.check(object, faults);
+    Optional<JsonValue.ObjectValue> merged = Variants.of(object, variant);
+    return merged.isPresent()
+        ? readOne(merged.get(), keys, faults, " (" + variant + ")")
+        : Optional.empty();
+  }
+
+  private static Optional<AeroplaneData> readOne(
+      JsonValue.ObjectValue object, Keys keys, Faults faults, String suffix) {
     ObjectCursor in = ObjectCursor.of(object, keys, faults);
     Optional<String> name = in.text("name", LONGEST_NAME);
     GeometryFormat.Shape shape = GeometryFormat.read(in, AILERONS_KEY);
@@ -111,7 +130,7 @@ final class AeroplaneFormat {
     return Optional.of(
         new AeroplaneData(
             new Aeroplane(
-                name.orElse(UNNAMED),
+                name.orElse(UNNAMED) + suffix,
                 span,
                 wingArea,
                 mass,

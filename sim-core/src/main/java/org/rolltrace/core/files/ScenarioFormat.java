@@ -9,6 +9,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.Collectors;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.measures.MeasureOptions;
 import org.rolltrace.core.motion.Disturbance;
@@ -34,6 +35,7 @@ final class ScenarioFormat {
   static final int MOST_SLIP_POINTS = 1000;
 
   private static final String AEROPLANE = "aeroplane";
+  private static final String VARIANT = "variant";
   private static final String INPUTS = "inputs";
   private static final String HELD_SLIP = "heldSlip";
   private static final String BANK_ANGLES = "bankAngles";
@@ -51,7 +53,7 @@ final class ScenarioFormat {
   static final Keys SCENARIO =
       Keys.of("a scenario")
           .required(FormatName.KEY, "title", AEROPLANE, "condition", "slip", "duration")
-          .optional("start", HELD_SLIP, INPUTS, "measures", "note");
+          .optional(VARIANT, "start", HELD_SLIP, INPUTS, "measures", "note");
 
   static final Keys HELD_SLIP_POINT = Keys.of("a held slip").required("time", "sideslip");
 
@@ -102,6 +104,17 @@ final class ScenarioFormat {
               start.orElse(new Start(propeller.get(), Disturbance.NONE)),
               programme.orElse(PilotProgramme.of(List.of()))));
     }
+    if (data.isPresent()
+        && data.get().aeroplane().geometry().isPresent()
+        && condition.isPresent()
+        && !(condition.get().mach() < 1)) {
+      in.refuse(
+          "condition",
+          "it is at Mach "
+              + condition.get().mach()
+              + ", but derivatives follow from a shape only below the speed of sound; fly slower, or"
+              + " give the derivatives and take the wing out");
+    }
     if (faults.count() > 0) {
       return Optional.empty();
     }
@@ -120,21 +133,48 @@ final class ScenarioFormat {
 
   private static Optional<AeroplaneData> aeroplane(ObjectCursor in) {
     Optional<JsonValue> value = in.value(AEROPLANE);
+    Optional<String> variant = in.text(VARIANT, AeroplaneFormat.LONGEST_NAME);
     if (value.isEmpty()) {
       return Optional.empty();
     }
     if (value.get() instanceof JsonValue.ObjectValue object) {
-      return AeroplaneFormat.read(object, AeroplaneFormat.INLINE, in.faults());
+      return variant(in, object, variant, AeroplaneFormat.INLINE, in.faults());
     }
     if (value.get() instanceof JsonValue.Text text) {
-      return aeroplaneFile(in, text.text());
+      return aeroplaneFile(in, text.text(), variant);
     }
     in.addWrongType(
         value.get(), "the path of an aeroplane file in quotation marks, or the aeroplane itself");
     return Optional.empty();
   }
 
-  private static Optional<AeroplaneData> aeroplaneFile(ObjectCursor in, String name) {
+  /** The aeroplane, or the variant of it that the scenario picks. */
+  private static Optional<AeroplaneData> variant(
+      ObjectCursor in,
+      JsonValue.ObjectValue aeroplane,
+      Optional<String> variant,
+      Keys keys,
+      Faults faults) {
+    if (variant.isEmpty()) {
+      return AeroplaneFormat.read(aeroplane, keys, faults);
+    }
+    List<String> names = Variants.names(aeroplane);
+    if (!names.contains(variant.get())) {
+      in.refuse(
+          VARIANT,
+          names.isEmpty()
+              ? "the aeroplane has no variants; take it out"
+              : "the aeroplane has no variant "
+                  + Shown.text(variant.get())
+                  + "; expected one of "
+                  + names.stream().map(Shown::text).collect(Collectors.joining(", ")));
+      return AeroplaneFormat.read(aeroplane, keys, faults);
+    }
+    return AeroplaneFormat.readVariant(aeroplane, variant.get(), keys, faults);
+  }
+
+  private static Optional<AeroplaneData> aeroplaneFile(
+      ObjectCursor in, String name, Optional<String> variant) {
     if (name.isBlank()) {
       in.refuse(AEROPLANE, "the path is blank; expected one from here to an aeroplane file");
       return Optional.empty();
@@ -164,7 +204,11 @@ final class ScenarioFormat {
               + ". The path counts from the directory of the scenario");
       return Optional.empty();
     }
-    return AeroplaneFile.read(bytes, in.faults().of(file));
+    Faults faults = in.faults().of(file);
+    Optional<JsonValue.ObjectValue> object = JsonTree.read(bytes, faults);
+    return object.isPresent()
+        ? variant(in, object.get(), variant, AeroplaneFormat.IN_FILE, faults)
+        : Optional.empty();
   }
 
   private static boolean isSameFile(Path one, Path other) {
