@@ -65,7 +65,9 @@ class PowerFlightTest {
             plane.rudder(),
             plane.limits(),
             plane.imbalance(),
-            List.of(propellers)),
+            List.of(propellers),
+            plane.geometry(),
+            plane.inertiaBasis()),
         data.derivatives());
   }
 

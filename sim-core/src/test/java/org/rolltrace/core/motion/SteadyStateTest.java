@@ -193,7 +193,9 @@ class SteadyStateTest {
                     plane.rudder(),
                     plane.limits(),
                     Optional.of(new LateralImbalance(20, random.nextDouble() * 4 - 2)),
-                    List.of()),
+                    List.of(),
+                    plane.geometry(),
+                    plane.inertiaBasis()),
                 any.data().derivatives(),
                 condition,
                 new PropellerMoments(-300));
