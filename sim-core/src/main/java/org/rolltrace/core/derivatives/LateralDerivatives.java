@@ -1,5 +1,6 @@
 package org.rolltrace.core.derivatives;
 
+import java.util.Arrays;
 import java.util.Collection;
 import java.util.EnumMap;
 import java.util.List;
@@ -117,6 +118,25 @@ public final class LateralDerivatives {
       return estimated ? Origin.SET : Origin.GIVEN;
     }
     return estimated ? Origin.ESTIMATED : Origin.ABSENT;
+  }
+
+  /**
+   * The derivatives that come from somewhere.
+   *
+   * @param origin from where
+   * @return those of that origin, in the order of the enumeration
+   */
+  public List<Coefficient> of(Origin origin) {
+    return Arrays.stream(Coefficient.values()).filter(c -> origin(c) == origin).toList();
+  }
+
+  /**
+   * Whether any derivative is given.
+   *
+   * @return false for a set that follows from the shape alone
+   */
+  public boolean hasGiven() {
+    return !given.isEmpty();
   }
 
   /**

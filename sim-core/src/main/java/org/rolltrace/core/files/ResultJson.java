@@ -17,6 +17,7 @@ import org.rolltrace.core.aeroplane.Rudder;
 import org.rolltrace.core.aeroplane.SurfaceDynamics;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
+import org.rolltrace.core.derivatives.Estimate;
 import org.rolltrace.core.derivatives.LateralDerivatives;
 import org.rolltrace.core.flight.FlightEvent;
 import org.rolltrace.core.measures.Measure;
@@ -115,6 +116,7 @@ public final class ResultJson {
     json.writeObjectFieldStart("scenario");
     json.writeStringField("title", scenario.title());
     json.writeStringField("aeroplane", scenario.data().aeroplane().name());
+    json.writeStringField("inertiaBasis", scenario.data().aeroplane().inertiaBasis().words());
     json.writeStringField("derivativesSource", scenario.data().derivatives().source());
     json.writeStringField("derivativesConvention", scenario.data().derivatives().convention());
     json.writeStringField("slip", scenario.slip().word());
@@ -318,9 +320,29 @@ public final class ResultJson {
       json.writeObjectFieldStart(coefficient.symbol());
       number("value", derivatives.value(coefficient));
       json.writeStringField("origin", derivatives.origin(coefficient).word());
+      Optional<Estimate> estimate = derivatives.estimate(coefficient);
+      if (estimate.isPresent()) {
+        writeEstimate(estimate.get());
+      }
       json.writeEndObject();
     }
     json.writeEndObject();
+  }
+
+  private void writeEstimate(Estimate estimate) throws IOException {
+    number("estimate", estimate.value());
+    json.writeArrayFieldStart("parts");
+    for (Estimate.Term term : estimate.terms()) {
+      json.writeStartObject();
+      json.writeStringField("part", term.part());
+      number("value", term.value());
+      json.writeStringField("method", term.method().title());
+      if (!term.extrapolated().isEmpty()) {
+        json.writeStringField("extrapolated", term.extrapolated());
+      }
+      json.writeEndObject();
+    }
+    json.writeEndArray();
   }
 
   private void writeTrim(Trim trim) throws IOException {

@@ -8,10 +8,13 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Collectors;
+import org.rolltrace.core.aeroplane.InertiaBasis;
 import org.rolltrace.core.aeroplane.Limits;
 import org.rolltrace.core.aeroplane.Propeller;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
+import org.rolltrace.core.derivatives.LateralDerivatives;
+import org.rolltrace.core.derivatives.Origin;
 import org.rolltrace.core.flight.FlightEvent;
 import org.rolltrace.core.flight.Flown;
 import org.rolltrace.core.history.Channel;
@@ -291,13 +294,15 @@ final class Cautions {
   }
 
   private void addDerivatives() {
-    if (scenario.data().derivatives().source().isBlank()) {
+    LateralDerivatives derivatives = scenario.data().derivatives();
+    if (derivatives.hasGiven() && derivatives.source().isBlank()) {
       add("the aeroplane file does not say where its derivatives are from");
     }
-    Optional<FlightCondition> validAt = scenario.data().derivatives().validAt();
-    if (validAt.isEmpty()) {
+    addEstimates(derivatives);
+    Optional<FlightCondition> validAt = derivatives.validAt();
+    if (derivatives.hasGiven() && validAt.isEmpty()) {
       add("the aeroplane file does not say at which condition its derivatives hold");
-    } else {
+    } else if (derivatives.hasGiven()) {
       FlightCondition here = scenario.condition();
       FlightCondition there = validAt.get();
       boolean weightless = there.loadFactor() == 0;
@@ -328,6 +333,25 @@ final class Cautions {
             "absent and taken as 0: %s; sideslip and yaw mean little without them",
             absent.stream().map(Coefficient::symbol).collect(Collectors.joining(", ")));
       }
+    }
+  }
+
+  private void addEstimates(LateralDerivatives derivatives) {
+    List<Coefficient> estimated = derivatives.of(Origin.ESTIMATED);
+    if (!estimated.isEmpty()) {
+      add(
+          "estimated from the shape and never checked in flight: %s",
+          !derivatives.hasGiven()
+              ? "all derivatives"
+              : estimated.stream().map(Coefficient::symbol).collect(Collectors.joining(", ")));
+    }
+    estimated.stream()
+        .map(coefficient -> derivatives.estimate(coefficient).orElseThrow().extrapolated())
+        .filter(words -> !words.isEmpty())
+        .distinct()
+        .forEach(words -> add("estimates are extrapolated: %s", words));
+    if (scenario.data().aeroplane().inertiaBasis() == InertiaBasis.RADII_OF_GYRATION) {
+      add("the moments of inertia are estimated by radii of gyration, a fifth either way");
     }
   }
 

@@ -12,6 +12,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Collectors;
 import org.rolltrace.core.aeroplane.Aeroplane;
+import org.rolltrace.core.aeroplane.InertiaBasis;
 import org.rolltrace.core.aeroplane.SurfaceDynamics;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
@@ -87,7 +88,9 @@ final class FlyReport {
     if (!scenario.data().derivatives().source().isBlank()) {
       wrapped(padded("  derivatives from", 20), scenario.data().derivatives().source());
     }
-    wrapped(padded("  given as", 20), scenario.data().derivatives().convention());
+    if (scenario.data().derivatives().hasGiven()) {
+      wrapped(padded("  given as", 20), scenario.data().derivatives().convention());
+    }
   }
 
   private static String sizeAndMass(Aeroplane aeroplane) {
@@ -98,6 +101,9 @@ final class FlyReport {
     aeroplane.inertia().yaw().ifPresent(yaw -> words.append(format(", yaw %.5g kg m2", yaw)));
     if (aeroplane.inertia().product() != 0) {
       words.append(format(", product %.4g kg m2", aeroplane.inertia().product()));
+    }
+    if (aeroplane.inertiaBasis() != InertiaBasis.GIVEN) {
+      words.append(", ").append(aeroplane.inertiaBasis().words());
     }
     return words.toString();
   }
@@ -315,6 +321,16 @@ final class FlyReport {
       if (coefficient.symbol().endsWith("_dr")) {
         line(row.toString());
         row.setLength(0);
+      }
+    }
+    for (Origin origin : List.of(Origin.ESTIMATED, Origin.SET)) {
+      List<Coefficient> some = derivatives.of(origin);
+      if (!some.isEmpty()) {
+        wrapped(
+            "  ",
+            origin.word()
+                + ": "
+                + some.stream().map(Coefficient::symbol).collect(Collectors.joining(", ")));
       }
     }
   }
