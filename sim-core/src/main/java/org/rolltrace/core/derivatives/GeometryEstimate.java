@@ -29,6 +29,7 @@ public final class GeometryEstimate {
   private final Theory theory;
   private final double mach;
   private final WingEstimate wing;
+  private final double aileronEffectiveness;
   private final Map<Coefficient, List<Estimate.Term>> terms = new EnumMap<>(Coefficient.class);
 
   private record Theory(WingEstimate.Theory kind, EstimateMethod method) {}
@@ -50,6 +51,8 @@ public final class GeometryEstimate {
     this.mach = mach;
     this.wing =
         WingEstimate.of(geometry.wing(), geometry.ailerons(), theory, mach, liftCoefficient);
+    this.aileronEffectiveness =
+        ailerons.map(travel -> FlapFactor.left(0.25 * (travel.up() + travel.down()))).orElse(1.0);
     addWing(liftCoefficient);
     wing.aileron().ifPresent(thin -> ailerons.ifPresent(travel -> addAilerons(thin, travel)));
     geometry.body().ifPresent(this::addBody);
@@ -109,6 +112,17 @@ public final class GeometryEstimate {
    */
   public WingEstimate wing() {
     return wing;
+  }
+
+  /**
+   * The wing with sections that stall.
+   *
+   * @return empty when no section has a known stall
+   */
+  public Optional<StallingWing> stallingWing() {
+    return StallingWing.isKnownFor(geometry.wing())
+        ? Optional.of(StallingWing.of(geometry.wing(), wing, aileronEffectiveness))
+        : Optional.empty();
   }
 
   private void add(
@@ -179,8 +193,7 @@ public final class GeometryEstimate {
   }
 
   private void addAilerons(SpanLoading thin, Ailerons travel) {
-    double angle = 0.25 * (travel.up() + travel.down());
-    SpanLoading loading = thin.times(FlapFactor.left(angle));
+    SpanLoading loading = thin.times(aileronEffectiveness);
     String beyond =
         0.5 * (travel.up() + travel.down()) > FlapFactor.LARGEST
             ? "aileron travel is beyond the charts of flap losses"

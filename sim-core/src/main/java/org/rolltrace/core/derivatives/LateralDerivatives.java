@@ -22,6 +22,7 @@ public final class LateralDerivatives {
   private final Optional<FlightCondition> validAt;
   private final String convention;
   private final EnumMap<Coefficient, Estimate> estimates = new EnumMap<>(Coefficient.class);
+  private Optional<GeometryEstimate> shape = Optional.empty();
 
   private LateralDerivatives(
       Map<Coefficient, Double> given,
@@ -78,7 +79,17 @@ public final class LateralDerivatives {
   public LateralDerivatives completedBy(GeometryEstimate shape) {
     LateralDerivatives set = new LateralDerivatives(given, source, validAt, convention);
     shape.estimates().forEach(estimate -> set.estimates.put(estimate.coefficient(), estimate));
+    set.shape = Optional.of(shape);
     return set;
+  }
+
+  /**
+   * What the set was completed by.
+   *
+   * @return all estimates with the loadings of the wing; empty without a shape
+   */
+  public Optional<GeometryEstimate> shape() {
+    return shape;
   }
 
   /**

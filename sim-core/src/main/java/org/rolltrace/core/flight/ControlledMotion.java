@@ -1,8 +1,10 @@
 package org.rolltrace.core.flight;
 
+import java.util.Optional;
 import org.hipparchus.ode.OrdinaryDifferentialEquation;
 import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.motion.LateralMotion;
+import org.rolltrace.core.motion.StalledRoll;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.Movement;
 import org.rolltrace.core.propeller.AddedMoments;
@@ -16,6 +18,8 @@ final class ControlledMotion {
   private final SurfaceDrive stick;
   private final SurfaceDrive pedal;
   private final PowerDrive power;
+  private final Optional<StalledRoll> stalled;
+  private final AddedMoments withStall = new AddedMoments();
   private final int states;
   private final double[] rates;
 
@@ -43,6 +47,7 @@ final class ControlledMotion {
     next += pedal.hasState() ? 1 : 0;
     this.power = new PowerDrive(plan.propulsion(), plan.programme().power(), next);
     next += power.states();
+    this.stalled = plan.stalled();
     this.states = next;
     this.rates = new double[states];
   }
@@ -82,7 +87,7 @@ final class ControlledMotion {
   void row(double controlTime, double[] state, double[] row) {
     double aileron = stick.angle(controlTime, state);
     double rudder = pedal.angle(controlTime, state);
-    AddedMoments added = power.added(controlTime, state);
+    AddedMoments added = added(controlTime, state, aileron, rudder);
     motion.rates(controlTime, state, aileron, rudder, added, rates);
     row[Channel.BANK.column()] = state[LateralMotion.BANK];
     row[Channel.ROLL_RATE.column()] = state[LateralMotion.ROLL_RATE];
@@ -96,6 +101,24 @@ final class ControlledMotion {
     row[Channel.POWER.column()] = power.power(controlTime, state);
     row[Channel.PROPELLER_ROLL_MOMENT.column()] = power.rollMoment();
     row[Channel.PROPELLER_YAW_MOMENT.column()] = power.yawMoment();
+  }
+
+  /** What propellers and stalled sections add; the next call changes what it returns. */
+  private AddedMoments added(double time, double[] state, double aileron, double rudder) {
+    AddedMoments byPower = power.added(time, state);
+    if (stalled.isEmpty()) {
+      return byPower;
+    }
+    double lost =
+        stalled
+            .get()
+            .moment(
+                state[LateralMotion.ROLL_RATE],
+                motion.yawRate(time, state, aileron, rudder, byPower),
+                motion.sideslip(time, state, aileron, rudder, byPower),
+                aileron);
+    withStall.set(byPower.roll() + lost, byPower.yaw());
+    return withStall;
   }
 
   /** The equations between two breakpoints; controls never pass {@code last}. */
@@ -119,13 +142,10 @@ final class ControlledMotion {
     public double[] computeDerivatives(double time, double[] state) {
       double within = Math.min(time, last);
       double[] derivatives = new double[state.length];
+      double aileron = stick.angle(within, state);
+      double rudder = pedal.angle(within, state);
       motion.rates(
-          within,
-          state,
-          stick.angle(within, state),
-          pedal.angle(within, state),
-          power.added(within, state),
-          derivatives);
+          within, state, aileron, rudder, added(within, state, aileron, rudder), derivatives);
       stick.rate(within, state, derivatives);
       pedal.rate(within, state, derivatives);
       power.rate(within, state, derivatives);

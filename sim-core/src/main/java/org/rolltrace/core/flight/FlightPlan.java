@@ -5,6 +5,7 @@ import java.util.Optional;
 import org.rolltrace.core.controls.ControlRun;
 import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.LateralMotion;
+import org.rolltrace.core.motion.StalledRoll;
 import org.rolltrace.core.motion.Trim;
 import org.rolltrace.core.pilot.PilotProgramme;
 import org.rolltrace.core.propeller.Propulsion;
@@ -18,6 +19,7 @@ import org.rolltrace.core.quantity.Check;
  * @param pedalRun from the pedals to the rudder; empty when the pedals are not used
  * @param propulsion the propellers at the power it is flown with; the equations have the moments
  *     that they make then
+ * @param stalled what sections that stall add in roll; empty when no stall is known
  * @param trim the steady state and the controls before the manoeuvre
  * @param disturbance what displaces the aeroplane at the start
  * @param programme what the pilot does
@@ -30,6 +32,7 @@ public record FlightPlan(
     Optional<ControlRun> stickRun,
     Optional<ControlRun> pedalRun,
     Propulsion propulsion,
+    Optional<StalledRoll> stalled,
     Trim trim,
     Disturbance disturbance,
     PilotProgramme programme,
@@ -50,6 +53,15 @@ public record FlightPlan(
    */
   public FlightPlan withProgramme(PilotProgramme other) {
     return new FlightPlan(
-        motion, stickRun, pedalRun, propulsion, trim, disturbance, other, captures, duration);
+        motion,
+        stickRun,
+        pedalRun,
+        propulsion,
+        stalled,
+        trim,
+        disturbance,
+        other,
+        captures,
+        duration);
   }
 }

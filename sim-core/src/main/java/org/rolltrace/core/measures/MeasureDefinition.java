@@ -132,6 +132,15 @@ public record MeasureDefinition(String name, String title, String unit, String d
       new MeasureDefinition(
           "finalBank", "Bank at the end", "rad", "bank at the end of the manoeuvre, not wrapped");
 
+  /** When a wing whose sections stall no longer damps. */
+  public static final MeasureDefinition DAMPING_LOST =
+      new MeasureDefinition(
+          "dampingLostTime",
+          "Roll damping lost at",
+          "s",
+          "first instant at which sections beyond their stall lose more lift by rolling than the"
+              + " rest of the wing gains, so that the wing goes on by itself");
+
   /** The pedal that held slip would need. */
   public static final MeasureDefinition PEDAL_TO_HOLD_SLIP =
       new MeasureDefinition(

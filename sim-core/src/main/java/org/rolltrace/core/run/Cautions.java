@@ -62,7 +62,12 @@ final class Cautions {
   }
 
   static List<String> of(
-      Scenario scenario, LateralModel model, Trim trim, Flown flown, List<Measure> measures) {
+      Scenario scenario,
+      LateralModel model,
+      Trim trim,
+      Flown flown,
+      List<Measure> measures,
+      StallMeasure stall) {
     Cautions cautions = new Cautions(scenario, flown);
     cautions.addTrim(trim);
     cautions.addOwnLimits();
@@ -73,6 +78,7 @@ final class Cautions {
     cautions.addModelLimits(model);
     cautions.addDerivatives();
     cautions.addHeldSlip(measures);
+    cautions.addStall(stall);
     return cautions.sentences;
   }
 
@@ -333,6 +339,19 @@ final class Cautions {
             "absent and taken as 0: %s; sideslip and yaw mean little without them",
             absent.stream().map(Coefficient::symbol).collect(Collectors.joining(", ")));
       }
+    }
+  }
+
+  private void addStall(StallMeasure stall) {
+    if (!Double.isNaN(stall.dampingLost())) {
+      add(
+          "roll damping is lost at %.2f s: sections beyond their stall, from %.2f s, make the wing go"
+              + " on by itself; what follows is a guess",
+          stall.dampingLost(), stall.firstStalled());
+    } else if (!Double.isNaN(stall.firstStalled())) {
+      add(
+          "sections of the wing are beyond their stall from %.2f s; their damping is a guess",
+          stall.firstStalled());
     }
   }
 

@@ -8,6 +8,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.rolltrace.core.aeroplane.Aeroplane;
 import org.rolltrace.core.controls.ControlRun;
+import org.rolltrace.core.derivatives.GeometryEstimate;
 import org.rolltrace.core.flight.Flight;
 import org.rolltrace.core.flight.FlightEvent;
 import org.rolltrace.core.flight.FlightPlan;
@@ -23,6 +24,7 @@ import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.LateralMotion;
 import org.rolltrace.core.motion.Mode;
 import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.motion.StalledRoll;
 import org.rolltrace.core.motion.SteadyState;
 import org.rolltrace.core.motion.Trim;
 import org.rolltrace.core.pilot.HeldSideslip;
@@ -71,6 +73,9 @@ public final class ScenarioRun {
             scenario.data().aeroplane().span() / (2 * scenario.condition().trueAirspeed()),
             scenario.duration());
     List<Measure> measures = new ArrayList<>(Measures.of(manoeuvre, scenario.measures()));
+    Optional<StalledRoll> stalled = stalled(scenario);
+    StallMeasure stall = StallMeasure.of(stalled, flown.history());
+    measures.addAll(stall.measures(stalled));
     measures.addAll(SlipAssumption.measures(scenario, motion, free, flown.history(), settings));
     return new RunResult(
         scenario,
@@ -81,7 +86,7 @@ public final class ScenarioRun {
         flown.history(),
         flown.events(),
         measures,
-        Cautions.of(scenario, model, trim, flown, measures));
+        Cautions.of(scenario, model, trim, flown, measures, stall));
   }
 
   /**
@@ -133,12 +138,28 @@ public final class ScenarioRun {
         pedalRun(scenario.data().aeroplane()));
   }
 
+  private static Optional<StalledRoll> stalled(Scenario scenario) {
+    return scenario
+        .data()
+        .derivatives()
+        .shape()
+        .flatMap(GeometryEstimate::stallingWing)
+        .map(
+            wing ->
+                StalledRoll.of(
+                    wing,
+                    scenario.data().aeroplane(),
+                    scenario.data().derivatives(),
+                    scenario.condition()));
+  }
+
   static FlightPlan plan(Scenario scenario, LateralMotion motion, Trim trim) {
     return new FlightPlan(
         motion,
         stickRun(scenario.data().aeroplane()),
         pedalRun(scenario.data().aeroplane()),
         scenario.propulsion(),
+        stalled(scenario),
         trim,
         scenario.start().disturbance(),
         scenario.programme(),
