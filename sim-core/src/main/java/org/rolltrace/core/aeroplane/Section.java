@@ -23,8 +23,12 @@ public record Section(
   /** What is taken for the profile drag when it is not given: a plain light aeroplane's. */
   public static final double USUAL_DRAG = 0.010;
 
-  /** What is taken for the fall when it is not given; common practice: expect the worse. */
-  public static final double USUAL_FALL = 1.5;
+  /**
+   * What is taken for the fall when it is not given: a section that stalls at once, as it is wise
+   * to expect. The trailing vortices of the unstalled wing, which ease what a strip meets, stay in
+   * the loadings; the fall stands for what they no longer do as well.
+   */
+  public static final double USUAL_FALL = 3;
 
   private static final double STEEPEST = 8;
 

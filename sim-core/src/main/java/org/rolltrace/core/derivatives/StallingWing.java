@@ -131,20 +131,4 @@ public final class StallingWing {
   public boolean isStalled(double rollRate, double yawRate, double sideslip, double angle) {
     return lost(rollRate, yawRate, sideslip, angle) != 0;
   }
-
-  /**
-   * How the loss changes with the roll rate.
-   *
-   * @param rollRate pb/2V
-   * @param yawRate rb/2V
-   * @param sideslip β, rad
-   * @param angle δa, rad
-   * @return ∂ΔCl/∂(pb/2V); where it exceeds −Cl_p, the damping is lost
-   */
-  public double slope(double rollRate, double yawRate, double sideslip, double angle) {
-    double step = 1e-4; // far below a rate that matters, far above rounding
-    return (lost(rollRate + step, yawRate, sideslip, angle)
-            - lost(rollRate - step, yawRate, sideslip, angle))
-        / (2 * step);
-  }
 }

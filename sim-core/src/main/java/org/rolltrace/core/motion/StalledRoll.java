@@ -55,15 +55,20 @@ public final class StalledRoll {
   }
 
   /**
-   * Whether more damping is lost than there is, ∂ΔCl/∂(pb/2V) ≥ −Cl_p: the wing goes on by itself.
+   * Whether rolling takes more from the stalled sections than the rest of the wing damps, ΔCl(p) −
+   * ΔCl(0) ≥ −Cl_p pb/2V in the direction of the roll: the wing goes on by itself.
    *
    * @param rollRate p, rad/s
    * @param yawRate r, rad/s
    * @param sideslip β, rad
    * @param aileron δa, rad
-   * @return true when it does
+   * @return true when it does; false at rest in roll
    */
   public boolean isDampingLost(double rollRate, double yawRate, double sideslip, double aileron) {
-    return wing.slope(perRate * rollRate, perRate * yawRate, sideslip, aileron) >= -damping;
+    double rolling = perRate * rollRate;
+    double byRolling =
+        wing.lost(rolling, perRate * yawRate, sideslip, aileron)
+            - wing.lost(0, perRate * yawRate, sideslip, aileron);
+    return rolling != 0 && (byRolling + damping * rolling) * rolling >= 0;
   }
 }

@@ -96,8 +96,8 @@ class StalledRollTest {
   /** Autorotation: common practice, a wing near its stall goes on once it rolls. */
   @Test
   void nearTheStallTheWingGoesOnByItself() {
-    RunResult stalled = flown(OptionalDouble.of(0.25), 1.30);
-    RunResult linear = flown(OptionalDouble.empty(), 1.30);
+    RunResult stalled = flown(OptionalDouble.of(0.25), 1.45);
+    RunResult linear = flown(OptionalDouble.empty(), 1.45);
     assertThat(lastRate(linear)).isLessThan(0.1); // a fifth of it, and falling
     assertThat(lastRate(stalled)).isGreaterThan(0.3);
     assertThat(stalled.measure("dampingLostTime").orElseThrow().value()).isPresent();
