@@ -2,6 +2,7 @@ package org.rolltrace.core.files;
 
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.rolltrace.core.scenario.AeroplaneData;
@@ -11,25 +12,14 @@ public final class AeroplaneFile {
   private AeroplaneFile() {}
 
   /**
-   * Reads an aeroplane with its derivatives.
+   * Reads an aeroplane with its derivatives, as its variants take it for their base.
    *
    * @param file an aeroplane file
    * @return the aeroplane, in SI units, radians and the conventions of the model
-   * @throws FileFaultsException with all faults of the file, if there are any
+   * @throws FileFaultsException with all faults of the file, its variants included
    */
   public static AeroplaneData read(Path file) {
-    Faults faults = new Faults(file);
-    Optional<AeroplaneData> data = Optional.empty();
-    try {
-      Optional<JsonValue.ObjectValue> object = JsonTree.read(TextFile.bytes(file), faults);
-      data = object.flatMap(found -> AeroplaneFormat.read(found, AeroplaneFormat.IN_FILE, faults));
-    } catch (UnusableFileException e) {
-      faults.addForWholeFile(e.getMessage());
-    }
-    if (data.isEmpty() || faults.count() > 0) {
-      throw faults.toException();
-    }
-    return data.get();
+    return readAll(file).get("");
   }
 
   /**
@@ -47,7 +37,9 @@ public final class AeroplaneFile {
       if (object.isPresent()) {
         AeroplaneFormat.read(object.get(), AeroplaneFormat.IN_FILE, faults)
             .ifPresent(base -> all.put("", base));
-        for (String variant : Variants.names(object.get())) {
+        // On a base with faults each variant would repeat them.
+        List<String> variants = faults.count() > 0 ? List.of() : Variants.names(object.get());
+        for (String variant : variants) {
           AeroplaneFormat.readVariant(object.get(), variant, AeroplaneFormat.IN_FILE, faults)
               .ifPresent(data -> all.put(variant, data));
         }

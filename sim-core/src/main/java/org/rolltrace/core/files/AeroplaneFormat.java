@@ -5,8 +5,8 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.rolltrace.core.aeroplane.Aeroplane;
+import org.rolltrace.core.aeroplane.AileronPlace;
 import org.rolltrace.core.aeroplane.Ailerons;
-import org.rolltrace.core.aeroplane.Geometry;
 import org.rolltrace.core.aeroplane.Inertia;
 import org.rolltrace.core.aeroplane.LateralImbalance;
 import org.rolltrace.core.aeroplane.Limits;
@@ -89,7 +89,11 @@ final class AeroplaneFormat {
     Variants.check(object, faults);
     Optional<JsonValue.ObjectValue> merged = Variants.of(object, variant);
     return merged.isPresent()
-        ? readOne(merged.get(), keys, faults, " (" + variant + ")")
+        ? readOne(
+            merged.get(),
+            keys,
+            faults.about("as variant " + Shown.text(variant) + ", "),
+            " (" + variant + ")")
         : Optional.empty();
   }
 
@@ -97,21 +101,20 @@ final class AeroplaneFormat {
       JsonValue.ObjectValue object, Keys keys, Faults faults, String suffix) {
     ObjectCursor in = ObjectCursor.of(object, keys, faults);
     Optional<String> name = in.text("name", LONGEST_NAME);
-    GeometryFormat.Shape shape = GeometryFormat.read(in, AILERONS_KEY);
-    Optional<Wing> wing = shape.geometry().map(Geometry::wing);
-    double span = ofWing(in, SPAN, Dimension.LENGTH, wing.map(Wing::span));
-    double wingArea = ofWing(in, AREA, Dimension.AREA, wing.map(Wing::area));
+    GeometryFormat.ReadWing wing = GeometryFormat.wing(in);
+    ReadAilerons ailerons = ailerons(in, wing.shape());
+    GeometryFormat.Shape shape = GeometryFormat.read(in, wing.shape(), ailerons.place());
+    double span = ofWing(in, SPAN, Dimension.LENGTH, wing.shape().map(Wing::span));
+    double wingArea = ofWing(in, AREA, Dimension.AREA, wing.shape().map(Wing::area));
     OptionalDouble given = in.optionalQuantity("mass", Dimension.MASS, Range.ABOVE_ZERO);
-    MassFormat.Masses masses =
-        MassFormat.read(in, given, inertia(in), span, shape.geometry().flatMap(Geometry::body));
+    MassFormat.Masses masses = MassFormat.read(in, given, inertia(in), span, shape.body());
     OptionalDouble mass = masses.mass();
-    if (in.has(GeometryFormat.WING) && mass.isEmpty() && !in.has("mass")) {
+    if (in.has(GeometryFormat.WING) && !in.has("mass") && !in.has(MassFormat.MASSES)) {
       in.addMissing("mass", "the lift of the wing, on which its derivatives depend, carries it");
     }
     double turn = angleOfAttack(in);
     in.freeText("note", JsonTree.LONGEST_TEXT);
     Optional<Inertia> inertia = masses.inertia();
-    Optional<Ailerons> ailerons = ailerons(in);
     Optional<Rudder> rudder = rudder(in);
     Limits limits = limits(in);
     Optional<LateralImbalance> imbalance = imbalance(in, mass);
@@ -135,7 +138,7 @@ final class AeroplaneFormat {
                 wingArea,
                 mass,
                 turned.orElseThrow(),
-                ailerons,
+                ailerons.travel(),
                 rudder,
                 limits,
                 imbalance,
@@ -143,7 +146,7 @@ final class AeroplaneFormat {
                 shape.geometry(),
                 masses.basis()),
             derivatives.orElseThrow(),
-            shape.theory()));
+            wing.theory()));
   }
 
   /** What follows from the wing and may be given as well, but not otherwise. */
@@ -163,8 +166,9 @@ final class AeroplaneFormat {
           key,
           "the panels of the wing make it "
               + wing.get()
-              + " in SI units; expected the same to 0.1 %, or no "
-              + key);
+              + (dimension.equals(Dimension.AREA) ? " m2" : " m")
+              + "; expected the same to 0.1 %, or no "
+              + Shown.text(key));
     }
     return wing.orElse(given);
   }
@@ -251,18 +255,24 @@ final class AeroplaneFormat {
     }
   }
 
-  private static Optional<Ailerons> ailerons(ObjectCursor aeroplane) {
+  /** The travel of the ailerons, and where on the wing they are. */
+  private record ReadAilerons(Optional<Ailerons> travel, Optional<AileronPlace> place) {}
+
+  private static ReadAilerons ailerons(ObjectCursor aeroplane, Optional<Wing> wing) {
     Optional<ObjectCursor> object = aeroplane.object(AILERONS_KEY, AILERONS);
     if (object.isEmpty()) {
-      return Optional.empty();
+      return new ReadAilerons(Optional.empty(), Optional.empty());
     }
     ObjectCursor in = object.get();
     double up = in.quantity("up", Dimension.ANGLE, TRAVEL);
     double down = in.quantity("down", Dimension.ANGLE, TRAVEL_OR_NONE);
     Optional<SurfaceDynamics> dynamics = dynamics(in);
-    return in.isSound()
-        ? Optional.of(new Ailerons(up, down, dynamics.orElseThrow()))
-        : Optional.empty();
+    Optional<AileronPlace> place = GeometryFormat.place(in, aeroplane, wing);
+    return new ReadAilerons(
+        in.isSound()
+            ? Optional.of(new Ailerons(up, down, dynamics.orElseThrow()))
+            : Optional.empty(),
+        place);
   }
 
   private static Optional<Rudder> rudder(ObjectCursor aeroplane) {

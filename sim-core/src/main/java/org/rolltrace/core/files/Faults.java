@@ -11,20 +11,27 @@ final class Faults {
   static final int MOST = 200;
 
   private final Path file;
+  private final String about;
   private final Collection collection;
 
   Faults(Path file) {
-    this(file, new Collection());
+    this(file, "", new Collection());
   }
 
-  private Faults(Path file, Collection collection) {
+  private Faults(Path file, String about, Collection collection) {
     this.file = file;
+    this.about = about;
     this.collection = collection;
   }
 
   /** The collector of a file that this one names. */
   Faults of(Path named) {
-    return new Faults(named, collection);
+    return new Faults(named, "", collection);
+  }
+
+  /** The same collector, whose messages begin with what was read there, and in what sense. */
+  Faults about(String words) {
+    return new Faults(file, words, collection);
   }
 
   Path file() {
@@ -32,7 +39,7 @@ final class Faults {
   }
 
   void add(JsonValue.Place place, String message) {
-    add(new FileFault(file, place.path(), place.line(), place.column(), message));
+    add(new FileFault(file, place.path(), place.line(), place.column(), about + message));
   }
 
   void addForWholeFile(String message) {

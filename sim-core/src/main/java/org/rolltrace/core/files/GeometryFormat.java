@@ -33,7 +33,12 @@ final class GeometryFormat {
   private static final String RUDDER_SHARE = "rudderShare";
   private static final String THEORY = "theory";
   private static final String HEIGHT = "height";
+  private static final String WIDTH = "width";
   private static final String SWEEP = "sweep";
+  private static final String OUTER_CHORD = "outerChord";
+  private static final List<String> PLACE = List.of(FROM, TO, CHORD_SHARE);
+  private static final String NOTHING_WITHOUT_WING =
+      "it says nothing without the wing; give the wing too, or take it out";
 
   static final List<String> THEORIES =
       List.of(WingEstimate.Theory.LIFTING_SURFACE.word(), WingEstimate.Theory.LIFTING_LINE.word());
@@ -42,7 +47,7 @@ final class GeometryFormat {
       Keys.of("a wing").required(PANELS).optional(SECTION, "incidence", HEIGHT, THEORY);
   static final Keys PANEL =
       Keys.of("a panel")
-          .required(FROM, TO, "innerChord", "outerChord")
+          .required(FROM, TO, "innerChord", OUTER_CHORD)
           .optional(SWEEP, "dihedral", "twist", SECTION);
   static final Keys SECTION_KEYS =
       Keys.of("a section").optional("liftSlope", "zeroLift", STALL, "stallFall", "profileDrag");
@@ -50,10 +55,16 @@ final class GeometryFormat {
       Keys.of("a tailplane").required("area", "span", "arm").optional(HEIGHT);
   static final Keys FIN_KEYS =
       Keys.of("a fin").required("area", "span", "arm", HEIGHT).optional(SWEEP, RUDDER_SHARE);
-  static final Keys BODY_KEYS = Keys.of("a body").required("length", "width", HEIGHT);
+  static final Keys BODY_KEYS = Keys.of("a body").required("length", WIDTH, HEIGHT);
 
   private static final Range SHARE =
       Range.aboveZeroTo(Math.nextDown(1), "a share above 0 and below 1");
+
+  /** Wings with a wider tip than root have been built, but none so wide. */
+  private static final double WIDEST_TIP = 2;
+
+  private static final Range STATION = Range.fromTo(0, 1000, "from 0 to 1000 m");
+  private static final Range CHORD = Range.fromTo(1e-3, 1000, "a chord from 1 mm to 1000 m");
   private static final Range LEAN = either(60);
   private static final Range TILT = either(15);
   private static final Range FIN_SWEEP = either(70);
@@ -61,7 +72,8 @@ final class GeometryFormat {
       Range.aboveZeroTo(
           8, "a lift slope above 0 and at most 8 per radian; thin sections have 6.28");
   private static final Range ZERO_LIFT = either(17);
-  private static final Range STALLS = Range.aboveZeroTo(Math.toRadians(60), "from 0 to 60 deg");
+  private static final Range STALLS =
+      Range.aboveZeroTo(Math.toRadians(60), "an incidence above 0 and at most 60 deg");
 
   private GeometryFormat() {}
 
@@ -70,45 +82,35 @@ final class GeometryFormat {
         -Math.toRadians(degrees), Math.toRadians(degrees), "up to " + degrees + " deg either way");
   }
 
-  /** What was read of a shape. */
-  record Shape(Optional<Geometry> geometry, WingEstimate.Theory theory) {
-    static final Shape UNKNOWN = new Shape(Optional.empty(), WingEstimate.Theory.LIFTING_SURFACE);
+  /** What was read of a wing, and the theory by which it is estimated. */
+  record ReadWing(Optional<Wing> shape, WingEstimate.Theory theory) {}
+
+  /** The wing, if there is one. */
+  static ReadWing wing(ObjectCursor aeroplane) {
+    Optional<ObjectCursor> wing = aeroplane.object(WING, WING_KEYS);
+    return wing.isPresent()
+        ? new ReadWing(shape(wing.get()), theory(wing.get()))
+        : new ReadWing(Optional.empty(), WingEstimate.Theory.LIFTING_SURFACE);
   }
 
-  /** The shape, if there is a wing; without one, tail and body are faults, as they say nothing. */
-  static Shape read(ObjectCursor aeroplane, String ailerons) {
-    Optional<ObjectCursor> wing = aeroplane.object(WING, WING_KEYS);
+  /** What was read of a shape; a body may be known without a wing. */
+  record Shape(Optional<Geometry> geometry, Optional<Body> body) {}
+
+  /** The shape about a wing; without one, tail and fin are faults, as they say nothing. */
+  static Shape read(ObjectCursor aeroplane, Optional<Wing> wing, Optional<AileronPlace> ailerons) {
     Optional<Tailplane> tailplane = tailplane(aeroplane);
     Optional<Fin> fin = fin(aeroplane);
-    Optional<Body> body = body(aeroplane);
-    if (!aeroplane.has(WING)) {
-      for (String part : List.of(TAILPLANE, FIN)) {
-        if (aeroplane.has(part)) {
-          aeroplane.refuse(part, "it says nothing without the wing; give the wing too");
-        }
+    Optional<Body> body = body(aeroplane, wing);
+    for (String part : List.of(TAILPLANE, FIN)) {
+      if (aeroplane.has(part) && !aeroplane.has(WING)) {
+        aeroplane.refuse(part, NOTHING_WITHOUT_WING);
       }
     }
-    if (wing.isEmpty()) {
-      return Shape.UNKNOWN;
-    }
-    Optional<Wing> shape = wing(wing.get());
-    WingEstimate.Theory theory = theory(wing.get());
-    Optional<AileronPlace> place = Optional.empty();
-    if (aeroplane.value(ailerons).orElse(null) instanceof JsonValue.ObjectValue object) {
-      place =
-          ailerons(ObjectCursor.of(object, AeroplaneFormat.AILERONS, new Faults(null)), aeroplane);
-    }
-    if (!aeroplane.isSound() || shape.isEmpty()) {
-      return new Shape(Optional.empty(), theory);
-    }
-    try {
-      return new Shape(Optional.of(new Geometry(shape.get(), place, tailplane, fin, body)), theory);
-    } catch (IllegalArgumentException e) {
-      aeroplane.refuse(
-          place.isPresent() && e.getMessage().contains("aileron") ? ailerons : BODY,
-          e.getMessage());
-      return new Shape(Optional.empty(), theory);
-    }
+    return new Shape(
+        aeroplane.isSound()
+            ? wing.map(shape -> new Geometry(shape, ailerons, tailplane, fin, body))
+            : Optional.empty(),
+        body);
   }
 
   private static WingEstimate.Theory theory(ObjectCursor wing) {
@@ -118,7 +120,7 @@ final class GeometryFormat {
         : WingEstimate.Theory.LIFTING_SURFACE;
   }
 
-  private static Optional<Wing> wing(ObjectCursor in) {
+  private static Optional<Wing> shape(ObjectCursor in) {
     double incidence = in.quantity("incidence", Dimension.ANGLE, TILT, 0);
     double height = in.quantity(HEIGHT, Dimension.LENGTH, Range.ANY, 0);
     Optional<Section> section = section(in, Section.thin());
@@ -128,12 +130,13 @@ final class GeometryFormat {
       in.refuse(PANELS, "there are no panels; expected at least one, from 0 m to the tip");
     }
     double end = 0;
+    ObjectCursor each = in;
     for (JsonValue element : elements) {
       if (!(element instanceof JsonValue.ObjectValue object)) {
         in.addWrongType(element, "a panel in braces { }");
         continue;
       }
-      ObjectCursor each = ObjectCursor.of(object, PANEL, in.faults());
+      each = ObjectCursor.of(object, PANEL, in.faults());
       Optional<WingPanel> panel = panel(each, section.orElse(Section.thin()));
       if (panel.isPresent()) {
         if (!(Math.abs(panel.get().from() - end) <= Wing.JOINT)) {
@@ -151,14 +154,32 @@ final class GeometryFormat {
         panels.add(panel.get());
       }
     }
+    if (in.isSound()) {
+      checkTip(each, panels);
+    }
     return in.isSound() ? Optional.of(new Wing(panels, incidence, height)) : Optional.empty();
   }
 
+  /** A tip so wide is a slip of the pen. */
+  private static void checkTip(ObjectCursor last, List<WingPanel> panels) {
+    double tip = panels.get(panels.size() - 1).outerChord();
+    double root = panels.get(0).innerChord();
+    if (!(tip <= WIDEST_TIP * root)) {
+      last.refuse(
+          OUTER_CHORD,
+          "the tip is "
+              + tip
+              + " m wide, the root "
+              + root
+              + " m; expected at most twice the root");
+    }
+  }
+
   private static Optional<WingPanel> panel(ObjectCursor in, Section ofWing) {
-    double from = in.quantity(FROM, Dimension.LENGTH, Range.ZERO_OR_MORE);
-    double to = in.quantity(TO, Dimension.LENGTH, Range.ABOVE_ZERO);
-    double innerChord = in.quantity("innerChord", Dimension.LENGTH, Range.ABOVE_ZERO);
-    double outerChord = in.quantity("outerChord", Dimension.LENGTH, Range.ABOVE_ZERO);
+    double from = in.quantity(FROM, Dimension.LENGTH, STATION);
+    double to = in.quantity(TO, Dimension.LENGTH, STATION);
+    double innerChord = in.quantity("innerChord", Dimension.LENGTH, CHORD);
+    double outerChord = in.quantity(OUTER_CHORD, Dimension.LENGTH, CHORD);
     double sweep = in.quantity(SWEEP, Dimension.ANGLE, LEAN, 0);
     double dihedral = in.quantity("dihedral", Dimension.ANGLE, LEAN, 0);
     double twist = in.quantity("twist", Dimension.ANGLE, TILT, 0);
@@ -166,14 +187,19 @@ final class GeometryFormat {
     if (!in.isSound()) {
       return Optional.empty();
     }
-    try {
-      return Optional.of(
-          new WingPanel(
-              from, to, innerChord, outerChord, sweep, dihedral, twist, section.orElseThrow()));
-    } catch (IllegalArgumentException e) {
-      in.refuse(TO, e); // each by itself is in range
+    if (!(to > from)) {
+      in.refuse(
+          TO,
+          "the panel begins at "
+              + from
+              + " m and ends at "
+              + to
+              + " m; expected an outer end further out");
       return Optional.empty();
     }
+    return Optional.of(
+        new WingPanel(
+            from, to, innerChord, outerChord, sweep, dihedral, twist, section.orElseThrow()));
   }
 
   private static Optional<Section> section(ObjectCursor owner, Section usual) {
@@ -199,14 +225,24 @@ final class GeometryFormat {
     }
   }
 
-  /** Where the ailerons are; the travel is read elsewhere, and so are unknown keys. */
-  private static Optional<AileronPlace> ailerons(ObjectCursor keys, ObjectCursor aeroplane) {
-    boolean any = keys.has(FROM) || keys.has(TO) || keys.has(CHORD_SHARE);
-    if (!any) {
+  /**
+   * Where the ailerons are, if that is known.
+   *
+   * @param in the object of the ailerons
+   * @param aeroplane the one they are on
+   * @param wing its wing; empty when there is none or it has faults
+   */
+  static Optional<AileronPlace> place(
+      ObjectCursor in, ObjectCursor aeroplane, Optional<Wing> wing) {
+    List<String> given = PLACE.stream().filter(in::has).toList();
+    if (given.isEmpty()) {
       return Optional.empty();
     }
-    ObjectCursor in = keys.reportingTo(aeroplane.faults());
-    for (String key : List.of(FROM, TO, CHORD_SHARE)) {
+    if (!aeroplane.has(WING)) {
+      in.refuse(given.get(0), NOTHING_WITHOUT_WING);
+      return Optional.empty();
+    }
+    for (String key : PLACE) {
       if (!in.has(key)) {
         in.addMissing(key, "the place of an aileron needs \"from\", \"to\" and \"chordShare\"");
       }
@@ -214,15 +250,30 @@ final class GeometryFormat {
     double from = in.quantity(FROM, Dimension.LENGTH, Range.ZERO_OR_MORE);
     double to = in.quantity(TO, Dimension.LENGTH, Range.ABOVE_ZERO);
     double share = in.number(CHORD_SHARE, SHARE);
-    if (!in.isSound()) {
+    if (Double.isNaN(from) || Double.isNaN(to) || Double.isNaN(share)) {
       return Optional.empty();
     }
-    try {
-      return Optional.of(new AileronPlace(from, to, share));
-    } catch (IllegalArgumentException e) {
-      in.refuse(TO, e);
+    if (!(to > from)) {
+      in.refuse(
+          TO,
+          "the aileron begins at "
+              + from
+              + " m and ends at "
+              + to
+              + " m; expected an outer end further out");
       return Optional.empty();
     }
+    if (wing.isPresent() && !(to <= wing.get().halfSpan() + Wing.JOINT)) {
+      in.refuse(
+          TO,
+          "the aileron ends at "
+              + to
+              + " m, beyond the tip of the wing at "
+              + wing.get().halfSpan()
+              + " m; expected an aileron on the wing");
+      return Optional.empty();
+    }
+    return Optional.of(new AileronPlace(from, to, share));
   }
 
   private static Optional<Tailplane> tailplane(ObjectCursor aeroplane) {
@@ -255,15 +306,24 @@ final class GeometryFormat {
         : Optional.empty();
   }
 
-  private static Optional<Body> body(ObjectCursor aeroplane) {
+  private static Optional<Body> body(ObjectCursor aeroplane, Optional<Wing> wing) {
     Optional<ObjectCursor> object = aeroplane.object(BODY, BODY_KEYS);
     if (object.isEmpty()) {
       return Optional.empty();
     }
     ObjectCursor in = object.get();
     double length = in.quantity("length", Dimension.LENGTH, Range.ABOVE_ZERO);
-    double width = in.quantity("width", Dimension.LENGTH, Range.ABOVE_ZERO);
+    double width = in.quantity(WIDTH, Dimension.LENGTH, Range.ABOVE_ZERO);
     double height = in.quantity(HEIGHT, Dimension.LENGTH, Range.ABOVE_ZERO);
+    if (wing.isPresent() && width >= wing.get().span()) {
+      in.refuse(
+          WIDTH,
+          "the body is "
+              + width
+              + " m wide, and the wing spans "
+              + wing.get().span()
+              + " m; expected a wing that sticks out of the body");
+    }
     return in.isSound() ? Optional.of(new Body(length, width, height)) : Optional.empty();
   }
 }

@@ -100,9 +100,15 @@ final class MassFormat {
       }
       item(ObjectCursor.of(object, ITEM, aeroplane.faults())).ifPresent(items::add);
     }
-    return aeroplane.faults().count() == before
-        ? Optional.of(new MassBreakdown(items))
-        : Optional.empty();
+    if (aeroplane.faults().count() != before) {
+      return Optional.empty();
+    }
+    MassBreakdown parts = new MassBreakdown(items);
+    if (!(parts.mass() <= Double.MAX_VALUE)) {
+      aeroplane.refuse(MASSES, "together they are too large to be computed with");
+      return Optional.empty();
+    }
+    return Optional.of(parts);
   }
 
   private static Optional<MassItem> item(ObjectCursor in) {

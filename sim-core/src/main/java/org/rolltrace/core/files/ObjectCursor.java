@@ -153,11 +153,6 @@ final class ObjectCursor {
     return faults;
   }
 
-  /** The same object, whose keys were looked at before, with another list of faults. */
-  ObjectCursor reportingTo(Faults others) {
-    return new ObjectCursor(object, keys, others, others.count());
-  }
-
   void refuse(String key, String message) {
     faults.add(placeOf(key), message);
   }

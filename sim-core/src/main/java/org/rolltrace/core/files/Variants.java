@@ -37,7 +37,7 @@ final class Variants {
       } else {
         faults.add(
             member.value().place(),
-            "it is " + member.value().described() + "; expected variants by name in braces { }");
+            "found " + member.value().described() + "; expected variants by name in braces { }");
       }
       return;
     }
@@ -53,10 +53,23 @@ final class Variants {
       if (variant.key().isBlank()) {
         faults.add(variant.keyPlace(), "the name of a variant is blank; expected some text");
       }
+      int length = variant.key().codePointCount(0, variant.key().length());
+      if (length > AeroplaneFormat.LONGEST_NAME) {
+        faults.add(
+            variant.keyPlace(),
+            "the name has "
+                + length
+                + " characters; expected at most "
+                + AeroplaneFormat.LONGEST_NAME);
+      }
+      if (variant.value() instanceof JsonValue.Refused refused) {
+        faults.add(refused.place(), refused.reason());
+        continue;
+      }
       if (!(variant.value() instanceof JsonValue.ObjectValue changes)) {
         faults.add(
             variant.value().place(),
-            "it is "
+            "found "
                 + variant.value().described()
                 + "; expected what the variant changes, in braces { }");
         continue;
@@ -75,27 +88,32 @@ final class Variants {
               "a variant cannot change " + Shown.text(key) + "; take it out");
         }
       }
-      addWhatIsNotThere(aeroplane, changes, faults);
+      checkChanges(aeroplane, changes, faults);
     }
   }
 
-  /** A null must have something to take out. */
-  private static void addWhatIsNotThere(
+  /** No key twice, and a null must have something to take out. */
+  private static void checkChanges(
       JsonValue.ObjectValue base, JsonValue.ObjectValue changes, Faults faults) {
+    for (JsonValue.Member duplicate : changes.duplicates()) {
+      faults.add(
+          duplicate.keyPlace(),
+          "the key " + Shown.text(duplicate.key()) + " stands here again. Keep one of the two");
+    }
     for (JsonValue.Member change : changes.members().values()) {
       JsonValue.Member there = base.members().get(change.key());
       if (isNull(change.value())) {
         if (there == null) {
           faults.add(
               change.keyPlace(),
-              "the variant takes "
+              "null takes "
                   + Shown.text(change.key())
-                  + " out, which the base does not have");
+                  + " out, which the base does not have; leave it out here as well");
         }
       } else if (there != null
           && there.value() instanceof JsonValue.ObjectValue inner
           && change.value() instanceof JsonValue.ObjectValue deeper) {
-        addWhatIsNotThere(inner, deeper, faults);
+        checkChanges(inner, deeper, faults);
       }
     }
   }
@@ -133,6 +151,8 @@ final class Variants {
         members.put(change.key(), change);
       }
     }
-    return new JsonValue.ObjectValue(base.place(), members, base.duplicates());
+    List<JsonValue.Member> duplicates =
+        base.duplicates().stream().filter(again -> members.containsKey(again.key())).toList();
+    return new JsonValue.ObjectValue(base.place(), members, duplicates);
   }
 }

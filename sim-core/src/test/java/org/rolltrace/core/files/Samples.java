@@ -17,10 +17,13 @@ final class Samples {
   static final String SCENARIO = resource("roll-entry.json");
   static final String SCENARIO_WITH_EVERY_KEY = resource("every-key.json");
   static final String SCENARIO_WITH_POWER = resource("power.json");
+  static final String SCENARIO_OF_A_VARIANT = resource("variant.json");
   static final String AEROPLANE = resource("aeroplanes/some-aeroplane.json");
   static final String AEROPLANE_WITH_EVERY_KEY = resource("aeroplanes/every-key.json");
   static final String AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY =
       resource("aeroplanes/every-dimensional-key.json");
+
+  static final String AEROPLANE_WITH_SHAPE = resource("aeroplanes/shape.json");
 
   static final String TRACE = resource("traces/hand.csv");
 
@@ -54,6 +57,7 @@ final class Samples {
   static Path writeScenario(Path directory, String text) {
     write(directory, "traces/hand.csv", TRACE);
     write(directory, "aeroplanes/some-aeroplane.json", AEROPLANE);
+    write(directory, "aeroplanes/shape.json", AEROPLANE_WITH_SHAPE);
     return write(directory, "scenario.json", text);
   }
 

@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.assertThatIllegalArgumentException
 import com.fasterxml.jackson.core.JsonPointer;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import com.networknt.schema.Error;
 import com.networknt.schema.InputFormat;
 import com.networknt.schema.Schema;
@@ -67,6 +68,13 @@ class SchemasTest {
     objects.put("/$defs/aeroplane/properties/rudder", AeroplaneFormat.RUDDER);
     objects.put("/$defs/aeroplane/properties/limits", AeroplaneFormat.LIMITS);
     objects.put("/$defs/aeroplane/properties/lateralImbalance", AeroplaneFormat.LATERAL_IMBALANCE);
+    objects.put("/$defs/aeroplane/properties/wing", GeometryFormat.WING_KEYS);
+    objects.put("/$defs/aeroplane/properties/wing/properties/panels/items", GeometryFormat.PANEL);
+    objects.put("/$defs/section", GeometryFormat.SECTION_KEYS);
+    objects.put("/$defs/aeroplane/properties/tailplane", GeometryFormat.TAILPLANE_KEYS);
+    objects.put("/$defs/aeroplane/properties/fin", GeometryFormat.FIN_KEYS);
+    objects.put("/$defs/aeroplane/properties/body", GeometryFormat.BODY_KEYS);
+    objects.put("/$defs/aeroplane/properties/masses/items", MassFormat.ITEM);
     String propeller = "/$defs/aeroplane/properties/propellers/items";
     objects.put(propeller, PropellerFormat.PROPELLER);
     objects.put(propeller + "/properties/rotatingInertia", PropellerFormat.ROTATING_INERTIA);
@@ -183,6 +191,8 @@ class SchemasTest {
     assertAccepted(AEROPLANE, Samples.AEROPLANE);
     assertAccepted(AEROPLANE, Samples.AEROPLANE_WITH_EVERY_KEY);
     assertAccepted(AEROPLANE, Samples.AEROPLANE_WITH_EVERY_DIMENSIONAL_KEY);
+    assertAccepted(AEROPLANE, Samples.AEROPLANE_WITH_SHAPE);
+    assertAccepted(SCENARIO, Samples.SCENARIO_OF_A_VARIANT);
   }
 
   private static void assertAccepted(Schema schema, String text) {
@@ -194,7 +204,8 @@ class SchemasTest {
   void theSamplesHaveEveryKeyBetweenThem() throws IOException {
     JsonNode scenario = JSON.readTree(Samples.SCENARIO_WITH_EVERY_KEY);
     JsonNode aeroplane = JSON.readTree(Samples.AEROPLANE_WITH_EVERY_KEY);
-    assertThat(keysOf(scenario)).containsExactlyInAnyOrderElementsOf(ScenarioFormat.SCENARIO.all());
+    assertThat(both(keysOf(scenario), keysOf(JSON.readTree(Samples.SCENARIO_OF_A_VARIANT))))
+        .containsExactlyInAnyOrderElementsOf(ScenarioFormat.SCENARIO.all());
     assertThat(keysOf(scenario.path("start")))
         .containsExactlyInAnyOrderElementsOf(ScenarioFormat.START.all());
     assertThat(keysOf(scenario.path("measures")))
@@ -218,6 +229,100 @@ class SchemasTest {
         .containsExactlyInAnyOrderElementsOf(DerivativesFormat.DIMENSIONAL_VALUES.all());
     assertThat(keysOf(aeroplane.at("/derivatives/values")))
         .containsExactlyInAnyOrderElementsOf(DerivativesFormat.COEFFICIENTS.all());
+  }
+
+  @Test
+  void theSampleWithAShapeHasEveryKeyOfShapes() throws IOException {
+    JsonNode shape = JSON.readTree(Samples.AEROPLANE_WITH_SHAPE);
+    Map<String, Keys> objects =
+        Map.of(
+            "/wing", GeometryFormat.WING_KEYS,
+            "/wing/panels/1", GeometryFormat.PANEL,
+            "/wing/panels/1/section", GeometryFormat.SECTION_KEYS,
+            "/tailplane", GeometryFormat.TAILPLANE_KEYS,
+            "/fin", GeometryFormat.FIN_KEYS,
+            "/body", GeometryFormat.BODY_KEYS);
+    objects.forEach(
+        (pointer, keys) ->
+            assertThat(keysOf(shape.at(pointer)))
+                .as(pointer)
+                .containsExactlyInAnyOrderElementsOf(keys.all()));
+    assertThat(both(keysOf(shape.at("/masses/0")), keysOf(shape.at("/masses/1"))))
+        .containsExactlyInAnyOrderElementsOf(MassFormat.ITEM.all());
+    JsonNode everyKey = JSON.readTree(Samples.AEROPLANE_WITH_EVERY_KEY);
+    assertThat(keysOf(everyKey.path("ailerons")))
+        .containsExactlyInAnyOrderElementsOf(AeroplaneFormat.AILERONS.all());
+  }
+
+  static Stream<Arguments> faultsOfShapes() {
+    return Stream.of(
+        Arguments.of(
+            "\"innerChord\": \"1.8 m\", \"outerChord\": \"1.8 m\"", "\"innerChord\": \"1.8 m\""),
+        Arguments.of("\"to\": \"2 m\"", "\"to\": 2"),
+        Arguments.of("\"twist\": \"-2 deg\"", "\"twist\": -2"),
+        Arguments.of("\"liftSlope\": 6", "\"liftSlope\": 8.1"),
+        Arguments.of("\"liftSlope\": 6", "\"liftSlope\": 0"),
+        Arguments.of("\"profileDrag\": 0.009", "\"profileDrag\": -0.009"),
+        Arguments.of("\"stallFall\": 1.2", "\"stallFall\": -1"),
+        Arguments.of("\"stallFall\": 1.2", "\"fall\": 1"),
+        Arguments.of("\"lifting-line\"", "\"strips\""),
+        Arguments.of("\"chordShare\": 0.25", "\"chordShare\": 1"),
+        Arguments.of(", \"chordShare\": 0.25", ""),
+        Arguments.of("\"from\": \"3 m\", ", ""),
+        Arguments.of("\"rudderShare\": 0.4", "\"rudderShare\": 0"),
+        Arguments.of("\"wing\": {\n    \"panels\"", "\"wings\": {\n    \"panels\""),
+        Arguments.of("\"arm\": \"4.5 m\", ", ""),
+        Arguments.of("\"arm\": \"4.4 m\", ", ""),
+        Arguments.of("\"width\": \"1.1 m\", ", ""),
+        Arguments.of("\"name\": \"front\", ", ""),
+        Arguments.of("\"name\": \"front\"", "\"name\": \" \""),
+        Arguments.of("\"mass\": \"150 kg\", ", ""),
+        Arguments.of("\"pair\": true", "\"pair\": \"yes\""),
+        Arguments.of("\"clipped\": { \"wing\"", "\" \": { \"wing\""),
+        Arguments.of("\"clipped\": { \"wing\"", "\"" + "x".repeat(201) + "\": { \"wing\""),
+        Arguments.of("\"clipped\": { \"wing\"", "\"clipped\": {}, \"more\": { \"wing\""),
+        Arguments.of("\"clipped\": { \"wing\"", "\"clipped\": 3, \"more\": { \"wing\""),
+        Arguments.of("\"clipped\": { \"wing\"", "\"clipped\": { \"variants\": null, \"wing\""));
+  }
+
+  @ParameterizedTest
+  @MethodSource("faultsOfShapes")
+  void whatIsStructurallyWrongWithAShapeIsRefusedByBoth(String part, String replacement) {
+    String text = Samples.with(Samples.AEROPLANE_WITH_SHAPE, part, replacement);
+    assertThat(AEROPLANE.validate(text, InputFormat.JSON)).isNotEmpty();
+    Path file = Samples.write(directory, "a.json", text);
+    assertThat(Samples.refusalOfAeroplane(file).faults()).isNotEmpty();
+  }
+
+  /** What may be left out when something else says the same. */
+  @Test
+  void eitherAShapeOrWhatFollowsFromItMustBeThere() throws IOException {
+    for (String text : List.of(Samples.AEROPLANE_WITH_SHAPE, Samples.AEROPLANE_WITH_EVERY_KEY)) {
+      for (int without = 0; without < 1 << 8; without++) {
+        ObjectNode file = (ObjectNode) JSON.readTree(text);
+        String[] keys = {
+          "wing", "span", "wingArea", "derivatives", "inertia", "masses", "mass", "body"
+        };
+        for (int i = 0; i < keys.length; i++) {
+          if ((without >> i & 1) == 1) {
+            file.remove(keys[i]);
+          }
+        }
+        file.remove("variants");
+        if (!file.has("wing")) {
+          file.remove(List.of("tailplane", "fin"));
+          ((ObjectNode) file.path("ailerons")).remove(List.of("from", "to", "chordShare"));
+        }
+        boolean bySchema = AEROPLANE.validate(file.toString(), InputFormat.JSON).isEmpty();
+        boolean byReader = true;
+        try {
+          AeroplaneFile.read(Samples.write(directory, "a.json", file.toString()));
+        } catch (FileFaultsException e) {
+          byReader = false;
+        }
+        assertThat(byReader).as(file.toString()).isEqualTo(bySchema);
+      }
+    }
   }
 
   private static Set<String> both(List<String> one, List<String> other) {

@@ -6,6 +6,7 @@ import com.fasterxml.jackson.core.StreamReadFeature;
 import com.fasterxml.jackson.databind.DeserializationFeature;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.json.JsonMapper;
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.IOException;
 import java.math.BigDecimal;
 import java.math.MathContext;
@@ -22,9 +23,13 @@ import java.util.function.Function;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import org.rolltrace.core.aeroplane.Aeroplane;
+import org.rolltrace.core.aeroplane.Geometry;
 import org.rolltrace.core.aeroplane.Inertia;
+import org.rolltrace.core.aeroplane.InertiaBasis;
 import org.rolltrace.core.aeroplane.Propeller;
+import org.rolltrace.core.aeroplane.Section;
 import org.rolltrace.core.aeroplane.SurfaceDynamics;
+import org.rolltrace.core.aeroplane.WingPanel;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.derivatives.LateralDerivatives;
@@ -172,18 +177,79 @@ final class SecondReading {
     }
   }
 
-  /** Compares an aeroplane. */
-  void aeroplane(JsonNode file, AeroplaneData data) {
+  /** Compares an aeroplane and its variants. */
+  void aeroplanes(JsonNode file, Map<String, AeroplaneData> all) {
+    List<String> names = new ArrayList<>(List.of(""));
+    file.path("variants").fieldNames().forEachRemaining(names::add);
+    assertThat(all.keySet()).containsExactlyElementsOf(names);
+    all.forEach((name, data) -> aeroplane(file, name, data));
+  }
+
+  private void aeroplane(JsonNode file, String variant, AeroplaneData data) {
+    if (variant.isEmpty()) {
+      aeroplane(file, data);
+      return;
+    }
+    ObjectNode changed = merged(file, file.get("variants").get(variant));
+    String name = changed.path("name").asText("Unnamed aeroplane");
+    aeroplane(changed.put("name", name + " (" + variant + ")"), data);
+  }
+
+  /** A scenario with the variant that it picks in place of an aeroplane that stands in it. */
+  static JsonNode picked(JsonNode scenario) {
+    if (!scenario.has("variant") || !scenario.path("aeroplane").isObject()) {
+      return scenario;
+    }
+    ObjectNode picked = scenario.deepCopy();
+    JsonNode aeroplane = scenario.get("aeroplane");
+    JsonNode changes = aeroplane.get("variants").get(picked.remove("variant").textValue());
+    picked.set("aeroplane", merged(aeroplane, changes));
+    return picked;
+  }
+
+  /** RFC 7396, section 2. */
+  private static ObjectNode merged(JsonNode target, JsonNode patch) {
+    ObjectNode result = target.isObject() ? target.deepCopy() : JSON.createObjectNode();
+    patch
+        .properties()
+        .forEach(
+            change -> {
+              if (change.getValue().isNull()) {
+                result.remove(change.getKey());
+              } else if (change.getValue().isObject()) {
+                result.set(
+                    change.getKey(), merged(result.path(change.getKey()), change.getValue()));
+              } else {
+                result.set(change.getKey(), change.getValue());
+              }
+            });
+    return result;
+  }
+
+  private void aeroplane(JsonNode file, AeroplaneData data) {
     Aeroplane aeroplane = data.aeroplane();
     assertThat(aeroplane.name()).isEqualTo(file.path("name").asText("Unnamed aeroplane"));
-    same(file, "span", aeroplane.span(), Double.NaN);
-    same(file, "wingArea", aeroplane.wingArea(), Double.NaN);
-    same(file, "mass", aeroplane.mass());
+    shape(file, data);
+    if (!file.has("wing")) {
+      same(file, "span", aeroplane.span(), Double.NaN);
+      same(file, "wingArea", aeroplane.wingArea(), Double.NaN);
+    }
+    if (file.has("mass")) {
+      same(file, "mass", aeroplane.mass());
+    }
     double turn =
         file.path("axes").asText().equals("body")
             ? value(file.get("angleOfAttack")).doubleValue()
             : 0;
-    if (turn == 0) {
+    assertThat(aeroplane.inertiaBasis())
+        .isEqualTo(
+            file.has("inertia")
+                ? InertiaBasis.GIVEN
+                : file.has("masses") ? InertiaBasis.MASSES : InertiaBasis.RADII_OF_GYRATION);
+    if (turn == 0 && file.has("masses")) {
+      masses(file, aeroplane);
+    }
+    if (turn == 0 && file.has("inertia")) {
       JsonNode inertia = file.get("inertia");
       same(inertia, "roll", aeroplane.inertia().roll(), Double.NaN);
       same(inertia, "yaw", aeroplane.inertia().yaw());
@@ -227,12 +293,153 @@ final class SecondReading {
               same(file.get("lateralImbalance"), "mass", imbalance.mass(), Double.NaN);
               same(file.get("lateralImbalance"), "arm", imbalance.arm(), Double.NaN);
             });
-    if (turn == 0) {
+    if (turn == 0 && file.has("derivatives")) {
       derivatives(file.get("derivatives"), data.derivatives(), aeroplane);
     }
-    JsonNode validAt = file.get("derivatives").path("validAt");
+    JsonNode validAt = file.path("derivatives").path("validAt");
     assertThat(data.derivatives().validAt().isPresent()).isEqualTo(!validAt.isMissingNode());
     data.derivatives().validAt().ifPresent(condition -> condition(validAt, condition));
+  }
+
+  private void shape(JsonNode file, AeroplaneData data) {
+    Aeroplane aeroplane = data.aeroplane();
+    assertThat(aeroplane.geometry().isPresent()).isEqualTo(file.has("wing"));
+    if (aeroplane.geometry().isEmpty()) {
+      return;
+    }
+    Geometry shape = aeroplane.geometry().get();
+    JsonNode wing = file.get("wing");
+    same(wing, "incidence", shape.wing().incidence(), 0);
+    same(wing, "height", shape.wing().height(), 0);
+    assertThat(data.theory().word()).isEqualTo(wing.path("theory").asText("lifting-surface"));
+    List<WingPanel> panels = shape.wing().panels();
+    assertThat(wing.get("panels")).hasSameSizeAs(panels);
+    BigDecimal area = BigDecimal.ZERO;
+    for (int i = 0; i < panels.size(); i++) {
+      JsonNode written = wing.get("panels").get(i);
+      WingPanel panel = panels.get(i);
+      same(written, "from", panel.from(), Double.NaN);
+      same(written, "to", panel.to(), Double.NaN);
+      same(written, "innerChord", panel.innerChord(), Double.NaN);
+      same(written, "outerChord", panel.outerChord(), Double.NaN);
+      same(written, "sweep", panel.sweep(), 0);
+      same(written, "dihedral", panel.dihedral(), 0);
+      same(written, "twist", panel.twist(), 0);
+      section(written.path("section"), wing.path("section"), panel.section());
+      area =
+          area.add(
+              value(written.get("to"))
+                  .subtract(value(written.get("from")))
+                  .multiply(
+                      value(written.get("innerChord")).add(value(written.get("outerChord")))));
+    }
+    same("area", aeroplane.wingArea(), area, ROUNDING * 10); // a sum of differences
+    BigDecimal tip = value(wing.get("panels").get(panels.size() - 1).get("to"));
+    same("span", aeroplane.span(), tip.add(tip), ROUNDING);
+    JsonNode ailerons = file.path("ailerons");
+    assertThat(shape.ailerons().isPresent()).isEqualTo(ailerons.has("from"));
+    shape
+        .ailerons()
+        .ifPresent(
+            place -> {
+              same(ailerons, "from", place.from(), Double.NaN);
+              same(ailerons, "to", place.to(), Double.NaN);
+              same(ailerons, "chordShare", place.chordShare(), Double.NaN);
+            });
+    assertThat(shape.tailplane().isPresent()).isEqualTo(file.has("tailplane"));
+    shape
+        .tailplane()
+        .ifPresent(
+            tail -> {
+              same(file.get("tailplane"), "area", tail.area(), Double.NaN);
+              same(file.get("tailplane"), "span", tail.span(), Double.NaN);
+              same(file.get("tailplane"), "arm", tail.arm(), Double.NaN);
+              same(file.get("tailplane"), "height", tail.height(), 0);
+            });
+    assertThat(shape.fin().isPresent()).isEqualTo(file.has("fin"));
+    shape
+        .fin()
+        .ifPresent(
+            fin -> {
+              same(file.get("fin"), "area", fin.area(), Double.NaN);
+              same(file.get("fin"), "span", fin.span(), Double.NaN);
+              same(file.get("fin"), "arm", fin.arm(), Double.NaN);
+              same(file.get("fin"), "height", fin.height(), Double.NaN);
+              same(file.get("fin"), "sweep", fin.sweep(), 0);
+              same(file.get("fin"), "rudderShare", fin.rudderShare());
+            });
+    assertThat(shape.body().isPresent()).isEqualTo(file.has("body"));
+    shape
+        .body()
+        .ifPresent(
+            body -> {
+              same(file.get("body"), "length", body.length(), Double.NaN);
+              same(file.get("body"), "width", body.width(), Double.NaN);
+              same(file.get("body"), "height", body.height(), Double.NaN);
+            });
+  }
+
+  private void section(JsonNode own, JsonNode ofWing, Section understood) {
+    same(own.has("liftSlope") ? own : ofWing, "liftSlope", understood.liftSlope(), 2 * Math.PI);
+    same(own.has("zeroLift") ? own : ofWing, "zeroLift", understood.zeroLift(), 0);
+    same(own.has("stall") ? own : ofWing, "stall", understood.stall());
+    same(own.has("stallFall") ? own : ofWing, "stallFall", understood.stallFall(), 1.5);
+    same(own.has("profileDrag") ? own : ofWing, "profileDrag", understood.profileDrag(), 0.01);
+  }
+
+  /** Mass and inertia by the definitions, of both sides one after the other. */
+  private void masses(JsonNode file, Aeroplane aeroplane) {
+    List<BigDecimal[]> points = new ArrayList<>();
+    BigDecimal mass = BigDecimal.ZERO;
+    BigDecimal[] moments = {BigDecimal.ZERO, BigDecimal.ZERO, BigDecimal.ZERO};
+    for (JsonNode item : file.get("masses")) {
+      for (int side = item.path("pair").asBoolean() ? -1 : 1; side <= 1; side += 2) {
+        BigDecimal[] point = {
+          value(item.get("mass")),
+          of(item, "x"),
+          of(item, "y").multiply(BigDecimal.valueOf(side)),
+          of(item, "z"),
+          of(item, "length").pow(2),
+          of(item, "width").pow(2),
+          of(item, "height").pow(2)
+        };
+        points.add(point);
+        mass = mass.add(point[0]);
+        for (int axis = 0; axis < 3; axis++) {
+          moments[axis] = moments[axis].add(point[0].multiply(point[1 + axis]));
+        }
+      }
+    }
+    if (!file.has("mass")) {
+      same("mass", aeroplane.mass().orElseThrow(), mass, ROUNDING);
+    }
+    if (file.has("inertia")) {
+      return;
+    }
+    BigDecimal roll = BigDecimal.ZERO;
+    BigDecimal yaw = BigDecimal.ZERO;
+    BigDecimal product = BigDecimal.ZERO;
+    BigDecimal twelve = new BigDecimal("12");
+    for (BigDecimal[] point : points) {
+      BigDecimal[] at = new BigDecimal[3];
+      for (int axis = 0; axis < 3; axis++) {
+        at[axis] = point[1 + axis].subtract(moments[axis].divide(mass, DIGITS));
+      }
+      BigDecimal y2 = at[1].pow(2).add(point[5].divide(twelve, DIGITS));
+      roll = roll.add(point[0].multiply(y2.add(at[2].pow(2)).add(point[6].divide(twelve, DIGITS))));
+      yaw = yaw.add(point[0].multiply(y2.add(at[0].pow(2)).add(point[4].divide(twelve, DIGITS))));
+      product = product.add(point[0].multiply(at[0]).multiply(at[2]));
+    }
+    // positions far from their middle lose figures by their difference
+    same("roll inertia", aeroplane.inertia().roll(), roll, AIRSPEED);
+    same("yaw inertia", aeroplane.inertia().yaw().orElseThrow(), yaw, AIRSPEED);
+    assertThat(Math.abs(aeroplane.inertia().product() - product.doubleValue()))
+        .isLessThanOrEqualTo(AIRSPEED * yaw.doubleValue());
+    compared++;
+  }
+
+  private static BigDecimal of(JsonNode item, String key) {
+    return item.has(key) ? value(item.get(key)) : BigDecimal.ZERO;
   }
 
   private void dynamics(JsonNode surface, SurfaceDynamics dynamics) {
@@ -248,7 +455,8 @@ final class SecondReading {
           set.has("values")
               ? set.get("values").path(symbol)
               : dimensional(set.get("dimensional"), symbol);
-      assertThat(understood.origin(coefficient) != Origin.ABSENT)
+      Origin origin = understood.origin(coefficient);
+      assertThat(origin == Origin.GIVEN || origin == Origin.SET)
           .as(symbol)
           .isEqualTo(!printed.isMissingNode());
       if (printed.isMissingNode()) {
@@ -357,7 +565,7 @@ final class SecondReading {
       Path place = folder.resolve(aeroplane.textValue());
       aeroplane = tree(Files.readAllBytes(place));
     }
-    aeroplane(aeroplane, scenario.data());
+    aeroplane(aeroplane, file.path("variant").asText(""), scenario.data());
     JsonNode condition = file.get("condition");
     condition(condition, scenario.condition());
     setting(condition, scenario.propeller(), PropellerMoments.NONE);

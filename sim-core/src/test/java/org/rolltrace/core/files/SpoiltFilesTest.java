@@ -530,14 +530,14 @@ class SpoiltFilesTest {
             "\"note\": \"\", \"durations\": 3, \"duration\"",
             "$.durations",
             9,
-            "unknown key \"durations\"; did you mean \"duration\"? The keys of a scenario are format, title, aeroplane, condition, slip, duration, start, heldSlip, inputs, measures, note"),
+            "unknown key \"durations\"; did you mean \"duration\"? The keys of a scenario are format, title, aeroplane, condition, slip, duration, variant, start, heldSlip, inputs, measures, note"),
         spoilt(
             Samples.SCENARIO,
             "\"duration\"",
             "\"odd key\": 3, \"duration\"",
             "$[\"odd key\"]",
             9,
-            "unknown key \"odd key\". The keys of a scenario are format, title, aeroplane, condition, slip, duration, start, heldSlip, inputs, measures, note"),
+            "unknown key \"odd key\". The keys of a scenario are format, title, aeroplane, condition, slip, duration, variant, start, heldSlip, inputs, measures, note"),
         spoilt(
             Samples.SCENARIO,
             "\"size\": 1.0",
@@ -1142,7 +1142,7 @@ class SpoiltFilesTest {
             "\"chord\": \"1 m\", \"rudder\"",
             "$.chord",
             7,
-            "unknown key \"chord\". The keys of an aeroplane are format, span, wingArea, inertia, derivatives, name, mass, ailerons, rudder, axes, limits, note, angleOfAttack, lateralImbalance, propellers"),
+            "unknown key \"chord\". The keys of an aeroplane are format, span, wingArea, inertia, derivatives, name, mass, ailerons, rudder, axes, limits, note, angleOfAttack, lateralImbalance, propellers, masses, variants, wing, tailplane, fin, body"),
         spoilt(
             Samples.AEROPLANE,
             "\"Cl_p\"",
