@@ -1,6 +1,7 @@
 package org.rolltrace.core.files;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.tuple;
 
 import java.nio.file.Path;
 import java.util.List;
@@ -166,6 +167,450 @@ class SpoiltFilesTest {
         "$.aeroplane.propellers[1]" + key,
         9,
         message);
+  }
+
+  /** Faults of shapes, masses and variants. */
+  static Stream<Spoilt> shapes() {
+    return Stream.of(
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"from\": \"2 m\", \"to\": \"500 cm\"",
+            "\"from\": \"1.9 m\", \"to\": \"500 cm\"",
+            "$.wing.panels[1].from",
+            7,
+            "this panel overlaps the one before it, which ends at 2.0 m; expected panels that join"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"from\": \"2 m\", \"to\": \"500 cm\"",
+            "\"from\": \"2.1 m\", \"to\": \"500 cm\"",
+            "$.wing.panels[1].from",
+            7,
+            "there is a gap to the panel before it, or to the plane of symmetry, at 2.0 m; expected panels that join, the first from 0 m"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"from\": \"0 m\", \"to\": \"2 m\"",
+            "\"from\": \"0.1 m\", \"to\": \"2 m\"",
+            "$.wing.panels[0].from",
+            6,
+            "there is a gap to the panel before it, or to the plane of symmetry, at 0.0 m; expected panels that join, the first from 0 m"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"500 cm\"",
+            "\"100 cm\"",
+            "$.wing.panels[1].to",
+            7,
+            "the panel begins at 2.0 m and ends at 1.0 m; expected an outer end further out"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"500 cm\"",
+            "\"1e6 m\"",
+            "$.wing.panels[1].to",
+            7,
+            "\"1e6 m\" is out of range; expected from 0 to 1000 m"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"outerChord\": \"0.8 m\"",
+            "\"outerChord\": \"0 m\"",
+            "$.wing.panels[1].outerChord",
+            7,
+            "\"0 m\" is out of range; expected a chord from 1 mm to 1000 m"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"outerChord\": \"0.8 m\"",
+            "\"outerChord\": \"3.7 m\"",
+            "$.wing.panels[1].outerChord",
+            7,
+            "the tip is 3.7 m wide, the root 1.8 m; expected at most twice the root"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"3 deg\", \"dihedral\"",
+            "\"90 deg\", \"dihedral\"",
+            "$.wing.panels[1].sweep",
+            7,
+            "\"90 deg\" is out of range; expected up to 60 deg either way"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"-2 deg\"",
+            "\"-20 deg\"",
+            "$.wing.panels[1].twist",
+            7,
+            "\"-20 deg\" is out of range; expected up to 15 deg either way"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"0.1 rad\"",
+            "0.1",
+            "$.wing.panels[1].dihedral",
+            7,
+            "the number stands bare: \"0.1\" has no unit; expected an angle such as \"0.1 deg\" (deg, rad, mrad, rev)"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"liftSlope\": 6",
+            "\"liftSlope\": 9",
+            "$.wing.panels[1].section.liftSlope",
+            7,
+            "9 is out of range; expected a lift slope above 0 and at most 8 per radian; thin sections have 6.28"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"14 deg\"",
+            "\"0 deg\"",
+            "$.wing.panels[1].section.stall",
+            7,
+            "\"0 deg\" is out of range; expected an incidence above 0 and at most 60 deg"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"zeroLift\": \"-3 deg\", \"stall\": \"14 deg\"",
+            "\"zeroLift\": \"5 deg\", \"stall\": \"4 deg\"",
+            "$.wing.panels[1].section.stall",
+            7,
+            "\"4 deg\": stalling incidence is 0.06981317007977318 rad; expected one above the zero-lift incidence, 0.08726646259971647 rad"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"profileDrag\": 0.009",
+            "\"profileDrag\": -0.009",
+            "$.wing.panels[1].section.profileDrag",
+            7,
+            "-0.009 is out of range; expected 0 or more"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"incidence\": \"2 deg\"",
+            "\"incidence\": \"20 deg\"",
+            "$.wing.incidence",
+            10,
+            "\"20 deg\" is out of range; expected up to 15 deg either way"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"theory\": \"lifting-line\"",
+            "\"theory\": \"lifting-lines\"",
+            "$.wing.theory",
+            12,
+            "unknown theory \"lifting-lines\"; expected one of \"lifting-surface\", \"lifting-line\"; did you mean \"lifting-line\"?"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"to\": \"190 in\"",
+            "\"to\": \"5.1 m\"",
+            "$.ailerons.to",
+            14,
+            "the aileron ends at 5.1 m, beyond the tip of the wing at 5.0 m; expected an aileron on the wing"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"from\": \"3 m\"",
+            "\"from\": \"5 m\"",
+            "$.ailerons.to",
+            14,
+            "the aileron begins at 5.0 m and ends at 4.826 m; expected an outer end further out"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"from\": \"3 m\"",
+            "\"from\": \"-3 m\"",
+            "$.ailerons.from",
+            14,
+            "\"-3 m\" is out of range; expected 0 or more"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"chordShare\": 0.25",
+            "\"chordShare\": 1",
+            "$.ailerons.chordShare",
+            14,
+            "1 is out of range; expected a share above 0 and below 1"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            ", \"chordShare\": 0.25",
+            "",
+            "$.ailerons.chordShare",
+            14,
+            "the key \"chordShare\" is missing; the place of an aileron needs \"from\", \"to\" and \"chordShare\""),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"arm\": \"4.5 m\"",
+            "\"arm\": \"0 m\"",
+            "$.tailplane.arm",
+            16,
+            "\"0 m\" is out of range; expected a value above 0"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"arm\": \"4.4 m\"",
+            "\"arm\": \"0 m\"",
+            "$.fin.arm",
+            17,
+            "\"0 m\" is out of range; expected a value above 0"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"area\": \"2.5 m2\"",
+            "\"area\": \"2.5 m\"",
+            "$.tailplane.area",
+            16,
+            "\"2.5 m\" is a length; expected an area (m2, ft2, in2, cm2)"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"rudderShare\": 0.4",
+            "\"rudderShare\": 1.4",
+            "$.fin.rudderShare",
+            17,
+            "1.4 is out of range; expected a share above 0 and below 1"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"20 deg\", \"rudderShare\"",
+            "\"80 deg\", \"rudderShare\"",
+            "$.fin.sweep",
+            17,
+            "\"80 deg\" is out of range; expected up to 70 deg either way"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"width\": \"1.1 m\"",
+            "\"width\": \"10 m\"",
+            "$.body.width",
+            18,
+            "the body is 10.0 m wide, and the wing spans 10.0 m; expected a wing that sticks out of the body"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"length\": \"7 m\", ",
+            "",
+            "$.body.length",
+            18,
+            "the key \"length\" is missing; a body must have it"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"name\": \"Shape\",",
+            "\"name\": \"Shape\", \"span\": \"9.9 m\",",
+            "$.span",
+            3,
+            "the panels of the wing make it 10.0 m; expected the same to 0.1 %, or no \"span\""),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"name\": \"Shape\",",
+            "\"name\": \"Shape\", \"wingArea\": \"14 m2\",",
+            "$.wingArea",
+            3,
+            "the panels of the wing make it 15.0 m2; expected the same to 0.1 %, or no \"wingArea\""),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"name\": \"Shape\",",
+            "\"name\": \"Shape\", \"mass\": \"900 kg\",",
+            "$.masses",
+            19,
+            "together they are 1000.0 kg, the mass is given as 900.0 kg; expected the same to 1 %, or no mass"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"mass\": \"400 kg\"",
+            "\"mass\": \"0 kg\"",
+            "$.masses[0].mass",
+            20,
+            "\"0 kg\" is out of range; expected a value above 0"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"name\": \"back\", ",
+            "",
+            "$.masses[2].name",
+            22,
+            "the key \"name\" is missing; a mass must have it"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"pair\": true",
+            "\"pair\": 1",
+            "$.masses[1].pair",
+            21,
+            "found the number 1; expected true or false, without quotation marks"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"clipped\": { \"wing\"",
+            "\"\": { \"wing\"",
+            "$.variants[\"\"]",
+            25,
+            "the name of a variant is blank; expected some text"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"clipped\": { \"wing\"",
+            "\"none\": {}, \"clipped\": { \"wing\"",
+            "$.variants.none",
+            25,
+            "the variant \"none\" changes nothing; name what it changes, or take it out"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"clipped\": { \"wing\"",
+            "\"none\": \"less span\", \"clipped\": { \"wing\"",
+            "$.variants.none",
+            25,
+            "found the text \"less span\"; expected what the variant changes, in braces { }"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"clipped\": { \"wing\"",
+            "\"clipped\": { \"format\": \"rolltrace-aeroplane/1\", \"wing\"",
+            "$.variants.clipped.format",
+            25,
+            "a variant cannot change \"format\"; take it out"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"clipped\": { \"wing\"",
+            "\"clipped\": { \"limits\": null, \"wing\"",
+            "$.variants.clipped.limits",
+            25,
+            "null takes \"limits\" out, which the base does not have; leave it out here as well"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"theory\": null",
+            "\"stall\": null",
+            "$.variants.clipped.wing.stall",
+            25,
+            "null takes \"stall\" out, which the base does not have; leave it out here as well"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"clipped\": { \"wing\"",
+            "\"clipped\": { \"wnig\": {}, \"wing\"",
+            "$.variants.clipped.wnig",
+            25,
+            "as variant \"clipped\", unknown key \"wnig\"; did you mean \"wing\"? The keys of an aeroplane are format, span, wingArea, inertia, derivatives, name, mass, ailerons, rudder, axes, limits, note, angleOfAttack, lateralImbalance, propellers, masses, variants, wing, tailplane, fin, body"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"to\": \"4.9 m\"",
+            "\"to\": \"4.7 m\"",
+            "$.ailerons.to",
+            14,
+            "as variant \"clipped\", the aileron ends at 4.826 m, beyond the tip of the wing at 4.7 m; expected an aileron on the wing"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"given\": {",
+            "\"clipped\": { \"mass\": \"1 kg\" }, \"given\": {",
+            "$.variants.clipped",
+            26,
+            "the variant \"clipped\" stands here a second time"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"theory\": null",
+            "\"theory\": null, \"theory\": \"lifting-line\"",
+            "$.variants.clipped.wing.theory",
+            25,
+            "the key \"theory\" stands here again. Keep one of the two"),
+        spoilt(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"theory\": null",
+            "\"height\": \"1 m\", \"height\": \"2 m\"",
+            "$.variants.clipped.wing.height",
+            25,
+            "the key \"height\" stands here again. Keep one of the two"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"span\": \"33.4 ft\"",
+            "\"fin\": { \"area\": \"1 m2\", \"span\": \"1 m\", \"arm\": \"4 m\", \"height\": \"1 m\" }, \"span\": \"33.4 ft\"",
+            "$.fin",
+            4,
+            "it says nothing without the wing; give the wing too, or take it out"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"span\": \"33.4 ft\"",
+            "\"tailplane\": { \"area\": \"1 m2\", \"span\": \"1 m\", \"arm\": \"4 m\" }, \"span\": \"33.4 ft\"",
+            "$.tailplane",
+            4,
+            "it says nothing without the wing; give the wing too, or take it out"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"down\": \"20 deg\"",
+            "\"down\": \"20 deg\", \"chordShare\": 0.2",
+            "$.ailerons.chordShare",
+            6,
+            "it says nothing without the wing; give the wing too, or take it out"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"span\": \"33.4 ft\", ",
+            "",
+            "$.span",
+            1,
+            "the key \"span\" is missing; an aeroplane must have it, or a \"wing\""),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"span\": \"33.4 ft\"",
+            "\"masses\": [], \"span\": \"33.4 ft\"",
+            "$.masses",
+            4,
+            "there are no masses; expected at least one, or an inertia"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"span\": \"33.4 ft\"",
+            "\"masses\": [3], \"span\": \"33.4 ft\"",
+            "$.masses[0]",
+            4,
+            "found the number 3; expected a mass in braces { }"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"span\": \"33.4 ft\"",
+            "\"variants\": [], \"span\": \"33.4 ft\"",
+            "$.variants",
+            4,
+            "found a list; expected variants by name in braces { }"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"span\": \"33.4 ft\"",
+            "\"wing\": { \"panels\": [] }, \"span\": \"33.4 ft\"",
+            "$.wing.panels",
+            4,
+            "there are no panels; expected at least one, from 0 m to the tip"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"span\": \"33.4 ft\"",
+            "\"wing\": { \"panels\": [7] }, \"span\": \"33.4 ft\"",
+            "$.wing.panels[0]",
+            4,
+            "found the number 7; expected a panel in braces { }"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"inertia\": { \"roll\": \"1048 slug ft2\", \"yaw\": \"3530 slug ft2\", \"product\": \"0 slug ft2\" }",
+            "\"masses\": [ { \"name\": \"a\", \"mass\": \"2750 lb\", \"x\": \"1 m\" } ]",
+            "$.masses",
+            5,
+            "they have no extent: roll inertia, kg m2, is 0.0; expected a finite number above 0"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"inertia\": { \"roll\": \"1048 slug ft2\", \"yaw\": \"3530 slug ft2\", \"product\": \"0 slug ft2\" },",
+            "",
+            "$.inertia",
+            1,
+            "the key \"inertia\" is missing; an aeroplane must have it, or \"masses\" at stations; with \"mass\" and \"body\" it can be estimated by radii of gyration"),
+        spoilt(
+            Samples.AEROPLANE,
+            "\"mass\": \"2750 lb\"",
+            "\"masses\": [ { \"name\": \"a\", \"mass\": \"1e308 kg\", \"pair\": true } ]",
+            "$.masses",
+            4,
+            "together they are too large to be computed with"));
+  }
+
+  /** Faults of a scenario that picks a variant. */
+  static Stream<Spoilt> pickedVariants() {
+    return Stream.of(
+        spoilt(
+            Samples.SCENARIO_OF_A_VARIANT,
+            "\"variant\": \"clipped\"",
+            "\"variant\": \"Clipped\"",
+            "$.variant",
+            5,
+            "the aeroplane has no variant \"Clipped\"; expected one of \"clipped\", \"given\""),
+        spoilt(
+            Samples.SCENARIO_OF_A_VARIANT,
+            "\"variant\": \"clipped\"",
+            "\"variant\": \"\"",
+            "$.variant",
+            5,
+            "the text is blank; expected some words"),
+        spoilt(
+            Samples.SCENARIO_OF_A_VARIANT,
+            "\"variant\": \"clipped\"",
+            "\"variant\": 1",
+            "$.variant",
+            5,
+            "found the number 1; expected text in double quotation marks"),
+        spoilt(
+            Samples.SCENARIO_OF_A_VARIANT,
+            "\"aeroplanes/shape.json\"",
+            "\"aeroplanes/some-aeroplane.json\"",
+            "$.variant",
+            5,
+            "the aeroplane has no variants; take it out"),
+        spoilt(
+            Samples.SCENARIO_OF_A_VARIANT,
+            "\"trueAirspeed\": \"60 m/s\"",
+            "\"trueAirspeed\": \"339 m/s\"",
+            "$.condition.trueAirspeed",
+            6,
+            "\"339 m/s\": true airspeed, m/s, is 339.0, which is flight at Mach 1.019459136139584; expected below Mach 1, as the subsonic pitot relation does not hold beyond. Lower the speed or the altitude, and check the unit and the kind of airspeed"));
   }
 
   /** Faults of propellers, their power, and inputs on it. */
@@ -1338,7 +1783,7 @@ class SpoiltFilesTest {
   }
 
   @ParameterizedTest
-  @MethodSource({"scenarios", "propellers"})
+  @MethodSource({"scenarios", "propellers", "pickedVariants"})
   void aFaultOfAScenarioIsReportedWhereItStands(Spoilt spoilt) {
     Path file = Samples.writeScenario(directory, spoilt.text());
     check(spoilt, file, Samples.refusalOfScenario(file));
@@ -1375,7 +1820,7 @@ class SpoiltFilesTest {
   }
 
   @ParameterizedTest
-  @MethodSource("aeroplanes")
+  @MethodSource({"aeroplanes", "shapes"})
   void aFaultOfAnAeroplaneIsReportedWhereItStands(Spoilt spoilt) {
     Path file = Samples.write(directory, "aeroplane.json", spoilt.text());
     check(spoilt, file, Samples.refusalOfAeroplane(file));
@@ -1389,6 +1834,30 @@ class SpoiltFilesTest {
     assertThat(fault.column()).isPositive();
     assertThat(refusal)
         .hasMessage(file + ":" + spoilt.line() + ": " + spoilt.path() + ": " + spoilt.message());
+  }
+
+  @Test
+  void aVariantThatIsNoAeroplaneSaysWhichItIs() {
+    String text =
+        Samples.with(
+            Samples.AEROPLANE_WITH_SHAPE,
+            "\"given\": { \"masses\": null, \"mass\": \"1000 kg\"",
+            "\"given\": { \"masses\": null");
+    assertThat(Samples.refusalOfAeroplane(Samples.write(directory, "a.json", text)).faults())
+        .extracting(FileFault::jsonPath, fault -> fault.message().split(";")[0])
+        .containsExactly(
+            tuple("$.inertia", "as variant \"given\", the key \"inertia\" is missing"),
+            tuple("$.mass", "as variant \"given\", the key \"mass\" is missing"));
+  }
+
+  @Test
+  void whatAVariantReplacesIsNotLookedAtWhenAScenarioPicksIt() {
+    Path scenario = Samples.writeScenario(directory, Samples.SCENARIO_OF_A_VARIANT);
+    Samples.write(
+        directory,
+        "aeroplanes/shape.json",
+        Samples.with(Samples.AEROPLANE_WITH_SHAPE, "\"500 cm\"", "\"500 kg\""));
+    assertThat(ScenarioFile.read(scenario).data().aeroplane().span()).isEqualTo(9.8);
   }
 
   @Test
