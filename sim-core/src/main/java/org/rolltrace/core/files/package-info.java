@@ -30,6 +30,8 @@
  *   <tr><td>note</td><td>text, not looked at</td></tr>
  *   <tr><td>aeroplane*</td><td>the path of an aeroplane file from the directory of the scenario, or
  *       the aeroplane itself</td></tr>
+ *   <tr><td>variant</td><td>the name of a variant of that aeroplane, up to 200 characters: it is flown
+ *       in place of the base, and what it replaces is not looked at</td></tr>
  *   <tr><td>condition*</td><td>a condition, below</td></tr>
  *   <tr><td>slip*</td><td>{@code held}, {@code settled} or {@code free}</td></tr>
  *   <tr><td>heldSlip</td><td>list of held slips, below; up to 1000, straight between them, the first
@@ -129,14 +131,24 @@
  *   <tr><td>format*</td><td>{@code rolltrace-aeroplane/1}; may be absent inside a scenario</td></tr>
  *   <tr><td>name</td><td>text, up to 200 characters</td></tr>
  *   <tr><td>note</td><td>text, not looked at</td></tr>
- *   <tr><td>span*, wingArea*, mass</td><td>length, area, mass; above 0. Settled and free slip need
- *       the mass</td></tr>
+ *   <tr><td>span*, wingArea*, mass</td><td>length, area, mass; above 0. With a wing, span and area
+ *       follow from its panels and may be absent, or are the same to 0.1 %. With masses the mass may
+ *       be absent, or is the same to 1 %. Settled and free slip need the mass, and so does a
+ *       wing</td></tr>
+ *   <tr><td>wing, tailplane, fin, body</td><td>the shape, below; tailplane and fin need a wing</td></tr>
+ *   <tr><td>masses</td><td>list of masses, below, 1 to 500</td></tr>
+ *   <tr><td>variants</td><td>changed aeroplanes, below</td></tr>
  *   <tr><td>lateralImbalance</td><td>{@code mass}* above 0 and {@code arm}*, positive to the right:
  *       fuel or stores on one side only, which the mass counts and the inertia does not</td></tr>
- *   <tr><td>inertia*</td><td>{@code roll}* Ixx and {@code yaw} Izz, above 0, {@code product} Ixz with
+ *   <tr><td>inertia*</td><td>may be absent where there are masses, or mass and body, from which it is
+ *       estimated by {@linkplain org.rolltrace.core.aeroplane.RadiiOfGyration radii of gyration};
+ *       a given one wins; {@code roll}* Ixx and {@code yaw} Izz, above 0, {@code product} Ixz with
  *       Ixz² &lt; Ixx Izz, 0 when absent. Settled and free slip need yaw</td></tr>
  *   <tr><td>ailerons</td><td>{@code up}* above 0 and {@code down}* from 0, up to 90 deg: travel of
- *       each; {@code rateLimit}: angular rate above 0; {@code lag}: time, 0 or 0.1 ms and more</td></tr>
+ *       each; {@code rateLimit}: angular rate above 0; {@code lag}: time, 0 or 0.1 ms and more; with a
+ *       wing, and then all three or none: {@code from}, {@code to}: lengths from the plane of symmetry
+ *       to the ends, inside the wing, and {@code chordShare}: number above 0 and below 1, their chord
+ *       behind the hinge by that of the wing</td></tr>
  *   <tr><td>rudder</td><td>{@code left}*, {@code right}* above 0, up to 90 deg; {@code rateLimit},
  *       {@code lag}</td></tr>
  *   <tr><td>propellers</td><td>list of propellers, below; up to 20, none when absent</td></tr>
@@ -147,14 +159,92 @@
  *   <tr><td>limits</td><td>{@code manoeuvringSpeed}, {@code neverExceedSpeed} (calibrated
  *       airspeeds), {@code rollingLoadFactor} (number), {@code rollRate}, {@code bank}; above
  *       0</td></tr>
- *   <tr><td>derivatives*</td><td>{@code source}: text; {@code values}: numbers by name,
- *       C{Y,l,n}_{beta,p,r,da,dr}, 0 when absent; or instead of them {@code dimensional}: quantities
+ *   <tr><td>derivatives*</td><td>with a wing they may be absent, and those that are absent in them
+ *       follow from it; {@code source}: text; {@code values}: numbers by name,
+ *       C{Y,l,n}_{beta,p,r,da,dr}, without a wing 0 when absent; or instead of them {@code dimensional}: quantities
  *       by name, {Y,L,N}_{beta,p,r,da,dr,v}, as {@link org.rolltrace.core.derivatives} has them,
  *       with {@code primed}*: true or false, and {@code validAt}*; {@code per}: {@code radian} (default) or {@code
  *       degree}, for beta, da and dr; {@code aileronSign}: {@code right-roll-positive} (default) or
  *       {@code left-roll-positive}; {@code aileronAngle}: {@code mean} (default), {@code total} or
  *       {@code one-side}; {@code validAt}: a condition</td></tr>
  * </table>
+ *
+ * <h2>The shape</h2>
+ *
+ * <p>Lengths lie in the ground plan. {@link org.rolltrace.core.derivatives} has what follows from a
+ * shape, in the condition that is flown.
+ *
+ * <table>
+ *   <caption>Keys of a wing</caption>
+ *   <tr><th>key</th><th>value</th></tr>
+ *   <tr><td>panels*</td><td>list of 1 to 200 panels from the plane of symmetry to the tip, each
+ *       beginning where the one before ends; the wing is the same on both sides</td></tr>
+ *   <tr><td>section</td><td>the section of all panels that do not give their own</td></tr>
+ *   <tr><td>incidence</td><td>angle of the root chord to the x axis of the body, up to 15 deg either
+ *       way; 0 deg when absent</td></tr>
+ *   <tr><td>height</td><td>length by which the root quarter chord is above the centre line of the
+ *       body, negative for a low wing; 0 m when absent</td></tr>
+ *   <tr><td>theory</td><td>{@code lifting-surface} (default: nearer to published values) or {@code
+ *       lifting-line}</td></tr>
+ * </table>
+ *
+ * <table>
+ *   <caption>Keys of a panel</caption>
+ *   <tr><th>key</th><th>value</th></tr>
+ *   <tr><td>from*, to*</td><td>lengths from the plane of symmetry to its ends, up to 1000 m; the first
+ *       begins at 0 m</td></tr>
+ *   <tr><td>innerChord*, outerChord*</td><td>lengths from 1 mm to 1000 m; the tip is at most twice as
+ *       wide as the root</td></tr>
+ *   <tr><td>sweep, dihedral</td><td>angles up to 60 deg either way, of its quarter-chord line; backwards
+ *       and upwards positive; 0 deg when absent</td></tr>
+ *   <tr><td>twist</td><td>angle up to 15 deg either way by which its outer end has more incidence than
+ *       its inner one, negative for washout; 0 deg when absent</td></tr>
+ *   <tr><td>section</td><td>its section; what is absent in it is that of the wing</td></tr>
+ * </table>
+ *
+ * <table>
+ *   <caption>Keys of a section</caption>
+ *   <tr><th>key</th><th>value</th></tr>
+ *   <tr><td>liftSlope</td><td>number above 0 and up to 8, per radian at low speed; 2π when
+ *       absent</td></tr>
+ *   <tr><td>zeroLift</td><td>incidence of the chord without lift, up to 17 deg either way; 0 deg when
+ *       absent</td></tr>
+ *   <tr><td>stall</td><td>incidence of the chord with the most lift, above 0, up to 60 deg, above
+ *       zeroLift; unknown when absent</td></tr>
+ *   <tr><td>stallFall</td><td>number, 0 or more: how fast the lift falls beyond it, by how fast it rose
+ *       before; 1.5 when absent</td></tr>
+ *   <tr><td>profileDrag</td><td>number, 0 or more; 0.010 when absent</td></tr>
+ * </table>
+ *
+ * <table>
+ *   <caption>Keys of tailplane, fin, body and a mass</caption>
+ *   <tr><th>of</th><th>keys</th></tr>
+ *   <tr><td>tailplane</td><td>{@code area}*, {@code span}*, {@code arm}* from the centre of gravity back
+ *       to its quarter chord, above 0; {@code height} above the centre of gravity, 0 m when
+ *       absent</td></tr>
+ *   <tr><td>fin</td><td>{@code area}* with the rudder, {@code span}*, {@code arm}* back to its
+ *       aerodynamic centre, above 0; {@code height}* of that above the centre of gravity, both by the
+ *       axes of the body; {@code sweep} up to 70 deg either way, 0 deg when absent; {@code
+ *       rudderShare}: number above 0 and below 1, chord of the rudder by that of the fin</td></tr>
+ *   <tr><td>body</td><td>{@code length}*, {@code width}*, {@code height}*, the largest, above 0; narrower
+ *       than the wing spans</td></tr>
+ *   <tr><td>mass</td><td>{@code name}*: text; {@code mass}* above 0; {@code x} forward, {@code y} right,
+ *       {@code z} down from any one point in the plane of symmetry; {@code length}, {@code width},
+ *       {@code height} over which it is spread evenly, 0 or more; 0 m when absent; {@code pair}: true
+ *       when the same is on the other side too, false when absent</td></tr>
+ * </table>
+ *
+ * <p>Masses give inertias about the axes that {@code axes} names; stability axes differ from those of
+ * the drawing by the angle of attack, which {@code axes} and {@code angleOfAttack} can say.
+ *
+ * <h2>Variants</h2>
+ *
+ * <p>{@code variants} holds up to 50 objects by name. Each has the keys that differ from the base
+ * around it, and is merged into it (JSON Merge Patch, RFC 7396): an object is gone into, null takes a
+ * key out that the base must have, anything else, lists too, stands in place of what the base has.
+ * {@code format} and {@code variants} cannot be changed, and no variant is empty. What comes of it is
+ * read as an aeroplane of its own; its name is that of the aeroplane with the variant's in brackets,
+ * and its faults begin with "as variant". Reading an aeroplane file reads all of them.
  *
  * <table>
  *   <caption>Keys of a propeller</caption>
