@@ -20,9 +20,9 @@
  *
  * <p>with what the body covers. Dihedral Γ is positive with the tip higher, sweep Λ of the
  * quarter-chord line positive backwards, twist positive with more incidence outside (washout is
- * negative). Heights are upwards positive: of the wing above the centre line of the body, of tail and
- * fin above the centre of gravity. Arms are backwards positive from the centre of gravity, along the
- * body.
+ * negative). Heights are upwards positive: of the wing above the centre line of the body, of tail
+ * and fin above the centre of gravity. Arms are backwards positive from the centre of gravity,
+ * along the body.
  *
  * <h2>Mass and inertia</h2>
  *

@@ -57,6 +57,13 @@ public enum EstimateMethod {
       "−2 k volume / (S b), the volume as 0.6 of its box, k by fineness",
       "M.M. Munk, NACA Report 184, 1924",
       "30 % of itself"),
+  /** Side force of the body in sideslip. */
+  BODY_SIDE_FORCE(
+      "body in sideslip",
+      "−2 K (π/4) width height / S of a slender body, K = 1 + 0.85 h above its centre line and 1 +"
+          + " 0.49 |h| below it, h = z_w/(d/2)",
+      "R.D. Finck and D.E. Hoak, USAF Stability and Control Datcom, sec. 5.2.1.1",
+      "25 % of itself"),
   /** Loads of the fin. */
   FIN(
       "fin",

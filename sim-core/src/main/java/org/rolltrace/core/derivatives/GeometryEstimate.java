@@ -231,6 +231,14 @@ public final class GeometryEstimate {
         Math.abs(shape.height()) > 0.5 * body.height()
             ? "the wing lies outside the body, the charts do not"
             : "");
+    double offset = 2 * shape.height() / body.diameter();
+    double carried = 1 + (offset > 0 ? 0.85 : -0.49) * offset;
+    add(
+        Coefficient.CY_BETA,
+        "body",
+        -2 * carried * 0.25 * Math.PI * body.width() * body.height() / shape.area(),
+        EstimateMethod.BODY_SIDE_FORCE,
+        Math.abs(offset) > 1 ? "the wing lies outside the body, the charts do not" : "");
     double fineness = body.length() / body.diameter();
     add(
         Coefficient.CN_BETA,

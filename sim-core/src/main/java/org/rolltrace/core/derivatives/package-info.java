@@ -65,7 +65,8 @@
  *
  * <p>{@link org.rolltrace.core.derivatives.GeometryEstimate} works out what a shape gives, in one
  * condition (M, C_L), part by part; {@link org.rolltrace.core.derivatives.EstimateMethod} has the
- * source and the known error of each part. A given derivative wins, and the estimate stands beside it.
+ * source and the known error of each part. A given derivative wins, and the estimate stands beside
+ * it.
  *
  * <p><b>Wing.</b> One of two theories answers with the circulation by an incidence α(y):
  *
@@ -75,11 +76,11 @@
  * lifting surface:  Σ upwash of strips (Biot and Savart) at ¾ c = V (α − (1/a0 − 1/2π) c_l)
  * </pre>
  *
- * <p>The line is solved with weights sin mθ over the half span (Galerkin), in which an incidence that
- * jumps is integrated exactly; C_l of an aileron with 120 terms is the same as with more to 1e-5 of
- * itself. The surface has 60 strips a side, even in θ, and averages an incidence that jumps inside a
- * strip. Prandtl-Glauert holds up to Mach 0.7, beyond which the estimates count as extrapolated. The
- * causes are
+ * <p>The line is solved with weights sin mθ over the half span (Galerkin), in which an incidence
+ * that jumps is integrated exactly; C_l of an aileron with 120 terms is the same as with more to
+ * 1e-5 of itself. The surface has 60 strips a side, even in θ, and averages an incidence that jumps
+ * inside a strip. Prandtl-Glauert holds up to Mach 0.7, beyond which the estimates count as
+ * extrapolated. The causes are
  *
  * <pre>
  * roll           α = 2y/b per p̂                 Cl_p
@@ -89,38 +90,40 @@
  * yaw            α = −2y/b α_steady per r̂, as the speed is V − r y; and the steady Γ at that speed
  * </pre>
  *
- * <p>where Cl_r is the sum of both parts of the last. With g = Σ Aₙ sin nθ, index 0 for steady, 1 for
- * the change, u the change of incidence by p and β, which tilts the lift:
+ * <p>where Cl_r is the sum of both parts of the last. With g = Σ Aₙ sin nθ, index 0 for steady, 1
+ * for the change, u the change of incidence by p and β, which tilts the lift:
  *
  * <pre>
  * C_n = −A ∫ [g0 (u − w1/V) − g1 w0/V] sin θ cos θ dθ      Cn_p, Cn_β, Cn_δa; Cn_r with u = 0
  * Cn_r of profile drag = −4 ∫ c_d c y² dy / (S b²), both sides
  * </pre>
  *
- * <p>Elliptic wing by lifting line, for checks: C_Lα = a0 A/(A + a0/π), Cl_p = −(a0/8) A/(A + 2a0/π),
- * Cn_p = −(C_L/8)(1 − 3a0/(πA + 2a0)).
+ * <p>Elliptic wing by lifting line, for checks: C_Lα = a0 A/(A + a0/π), Cl_p = −(a0/8) A/(A +
+ * 2a0/π), Cn_p = −(C_L/8)(1 − 3a0/(πA + 2a0)).
  *
- * <p><b>Ailerons and rudder.</b> τ = η (1 − (θ − sin θ)/π), cos θ = 2E − 1, E the chord share; η what
- * a plain flap keeps of it: 0.85 up to 10°, 0.70 at 20°, 0.58 at 30°, 0.50 at 40°, taken at half the
- * mean travel, so that the derivative is right on the way and a little large at the stop.
+ * <p><b>Ailerons and rudder.</b> τ = η (1 − (θ − sin θ)/π), cos θ = 2E − 1, E the chord share; η
+ * what a plain flap keeps of it: 0.85 up to 10°, 0.70 at 20°, 0.58 at 30°, 0.50 at 40°, taken at
+ * half the mean travel, so that the derivative is right on the way and a little large at the stop.
  *
- * <p><b>Sweep.</b> Λ is the mean over the area. With the lifting line Cl_p, Cl_δa and the dihedral's
- * Cl_β are multiplied by (A + 4) cos Λ/(A + 4 cos Λ); the surface has the sweep in it. With both,
- * Cl_β = −C_L tan Λ · 4/(3π) · A/(A + 4 cos Λ).
+ * <p><b>Sweep.</b> Λ is the mean over the area. With the lifting line Cl_p, Cl_δa and the
+ * dihedral's Cl_β are multiplied by (A + 4) cos Λ/(A + 4 cos Λ); the surface has the sweep in it.
+ * With both, Cl_β = −C_L tan Λ · 4/(3π) · A/(A + 4 cos Λ).
  *
  * <p><b>Body.</b> d = √(width · height), z_w the height of the wing on it:
  *
  * <pre>
  * Cl_β = −1.2 √A (z_w/b)(2 d/b)
  * Cn_β = −2 (k2 − k1) · 0.6 length width height / (S b)
+ * CY_β = −2 K (π/4) width height / S,   K = 1 + 0.85 h with the wing above the centre line,
+ *        1 − 0.49 h below it, h = 2 z_w/d
  * </pre>
  *
  * <p>k2 − k1 of the ellipsoid of the same fineness.
  *
- * <p><b>Fin.</b> Slope a_v = 2πA_v/(2 + √(A_v² (1 − M² + tan² Λ_v) + 4)), A_v = b_v²/S_v, 1.55 times
- * that on a body. l and z are arm and height turned by the angle of attack α of the body, l = l' cos α
- * + z' sin α, z = z' cos α − l' sin α. With Y = a_v S_v/S and the sidewash of wing and body σ = 0.724 +
- * 3.06 (S_v/S)/(1 + cos Λ) − 0.4 z_w/d + 0.009 A:
+ * <p><b>Fin.</b> Slope a_v = 2πA_v/(2 + √(A_v² (1 − M² + tan² Λ_v) + 4)), A_v = b_v²/S_v, 1.55
+ * times that on a body. l and z are arm and height turned by the angle of attack α of the body, l =
+ * l' cos α + z' sin α, z = z' cos α − l' sin α. With Y = a_v S_v/S and the sidewash of wing and
+ * body σ = 0.724 + 3.06 (S_v/S)/(1 + cos Λ) − 0.4 z_w/d + 0.009 A:
  *
  * <pre>
  * by β     CY = −σ Y           Cl = −σ Y z/b         Cn = σ Y l/b
@@ -133,6 +136,6 @@
  *
  * <p><b>Tailplane.</b> Cl_p = ½ · (−(π/4) A_h/(A_h + 4)) (S_h/S)(b_h/b)².
  *
- * <p>Not estimated: CY_δa, and the side force of wing and body.
+ * <p>Not estimated: CY_δa, and the side force of the wing.
  */
 package org.rolltrace.core.derivatives;

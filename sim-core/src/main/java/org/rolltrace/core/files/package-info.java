@@ -234,17 +234,17 @@
  *       when the same is on the other side too, false when absent</td></tr>
  * </table>
  *
- * <p>Masses give inertias about the axes that {@code axes} names; stability axes differ from those of
- * the drawing by the angle of attack, which {@code axes} and {@code angleOfAttack} can say.
+ * <p>Masses give inertias about the axes that {@code axes} names; stability axes differ from those
+ * of the drawing by the angle of attack, which {@code axes} and {@code angleOfAttack} can say.
  *
  * <h2>Variants</h2>
  *
  * <p>{@code variants} holds up to 50 objects by name. Each has the keys that differ from the base
- * around it, and is merged into it (JSON Merge Patch, RFC 7396): an object is gone into, null takes a
- * key out that the base must have, anything else, lists too, stands in place of what the base has.
- * {@code format} and {@code variants} cannot be changed, and no variant is empty. What comes of it is
- * read as an aeroplane of its own; its name is that of the aeroplane with the variant's in brackets,
- * and its faults begin with "as variant". Reading an aeroplane file reads all of them.
+ * around it, and is merged into it (JSON Merge Patch, RFC 7396): an object is gone into, null takes
+ * a key out that the base must have, anything else, lists too, stands in place of what the base
+ * has. {@code format} and {@code variants} cannot be changed, and no variant is empty. What comes
+ * of it is read as an aeroplane of its own; its name is that of the aeroplane with the variant's in
+ * brackets, and its faults begin with "as variant". Reading an aeroplane file reads all of them.
  *
  * <table>
  *   <caption>Keys of a propeller</caption>
