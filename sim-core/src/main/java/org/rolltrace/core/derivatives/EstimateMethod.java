@@ -68,7 +68,7 @@ public enum EstimateMethod {
   FIN(
       "fin",
       "slope of the fin with 1.55 times its own aspect ratio beside a body, sidewash and"
-          + " dynamic pressure as 0.724 + 3.06 (S_v/S)/(1 + cos Λ) + 0.4 z_w/d + 0.009 A",
+          + " dynamic pressure as 0.724 + 3.06 (S_v/S)/(1 + cos Λ) − 0.4 z_w/d + 0.009 A, z_w above the centre line",
       "R.D. Finck and D.E. Hoak, USAF Stability and Control Datcom, sec. 5.4.1",
       "10 to 15 %"),
   /** Rudder by the flap factor. */

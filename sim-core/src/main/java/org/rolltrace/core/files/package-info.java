@@ -212,7 +212,7 @@
  *   <tr><td>stall</td><td>incidence of the chord with the most lift, above 0, up to 60 deg, above
  *       zeroLift; unknown when absent</td></tr>
  *   <tr><td>stallFall</td><td>number, 0 or more: how fast the lift falls beyond it, by how fast it rose
- *       before; 1.5 when absent</td></tr>
+ *       before; 3 when absent</td></tr>
  *   <tr><td>profileDrag</td><td>number, 0 or more; 0.010 when absent</td></tr>
  * </table>
  *

@@ -383,7 +383,7 @@ final class SecondReading {
     same(own.has("liftSlope") ? own : ofWing, "liftSlope", understood.liftSlope(), 2 * Math.PI);
     same(own.has("zeroLift") ? own : ofWing, "zeroLift", understood.zeroLift(), 0);
     same(own.has("stall") ? own : ofWing, "stall", understood.stall());
-    same(own.has("stallFall") ? own : ofWing, "stallFall", understood.stallFall(), 1.5);
+    same(own.has("stallFall") ? own : ofWing, "stallFall", understood.stallFall(), 3);
     same(own.has("profileDrag") ? own : ofWing, "profileDrag", understood.profileDrag(), 0.01);
   }
 

@@ -9,7 +9,9 @@ import org.junit.jupiter.params.provider.CsvSource;
 import org.rolltrace.core.aeroplane.Aeroplane;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
+import org.rolltrace.core.derivatives.Estimate;
 import org.rolltrace.core.derivatives.LateralDerivatives;
+import org.rolltrace.core.derivatives.Origin;
 import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.Mode;
 import org.rolltrace.core.propeller.Propulsion;
@@ -17,8 +19,8 @@ import org.rolltrace.core.scenario.Scenario;
 import org.rolltrace.core.testing.Shipped;
 
 /**
- * The invented aeroplanes against closed forms that their numbers were not made with, and against
- * what such aeroplanes are like. The geometry is that of {@code scenarios/README.md}.
+ * The invented aeroplanes, whose derivatives follow from their shapes, against closed forms and
+ * against what such aeroplanes are like. The figures are those of {@code scenarios/README.md}.
  */
 class OwnAeroplanesValidationTest {
   private static final String GEOMETRY =
@@ -51,8 +53,10 @@ class OwnAeroplanesValidationTest {
    * The elliptic wing by lifting line (closed forms, derived): Cl_p −(a₀/8) AR/(AR + 2a₀/π), Cn_p
    * −(CL/8)(1 − 3a₀/(πAR + 2a₀)); CL/4 for the wing's Cl_r by strips with elliptic chord (common
    * practice). Straight tapers of 0.55 to 0.7 damp 3 to 10 % more than the ellipse of the same span
-   * (lifting line, series of 120 terms), and tail and fin add one; yaw due to roll, a difference of
-   * two larger terms, and the rule for Cl_r hold to a tenth.
+   * (lifting line, series of 120 terms), and tail and fin add one; the lifting surface damps 13 %
+   * less than the line at AR 6 (R.S. Swanson and E.L. Priddy, NACA ARR L5F23, 1945, re-read) and a
+   * little nearer to it at 8. Yaw due to roll, a difference of two larger terms, and the rule for
+   * Cl_r hold to a tenth.
    */
   @ParameterizedTest
   @CsvSource(useHeadersInDisplayName = true, textBlock = GEOMETRY)
@@ -62,16 +66,15 @@ class OwnAeroplanesValidationTest {
     Aeroplane aeroplane = scenario.data().aeroplane();
     double ar = aspectRatio(aeroplane);
     double ellipse = -slope / 8 * ar / (ar + 2 * slope / Math.PI);
-    assertThat(value(scenario, Coefficient.CL_P) / ellipse).isBetween(1.03, 1.11);
+    assertThat(value(scenario, Coefficient.CL_P) / ellipse).isBetween(0.89, 0.98);
 
     Fin tail = Fin.of(aeroplane, fin, finSpan, arm, up, turn);
     double lift = liftCoefficient(scenario);
     double tilt = -lift / 8 * (1 - 3 * slope / (Math.PI * ar + 2 * slope));
-    // the swirl behind the rolling wing takes half of the fin's sidewash
-    assertThat(value(scenario, Coefficient.CN_P) - tail.force() * tail.arm() * tail.height())
+    assertThat(value(scenario, Coefficient.CN_P) - 2 * tail.force() * tail.arm() * tail.height())
         .isCloseTo(tilt, within(0.1 * lift / 8));
     assertThat(value(scenario, Coefficient.CL_R) - 2 * tail.force() * tail.arm() * tail.height())
-        .isCloseTo(lift / 4, Percentage.withPercentage(10));
+        .isCloseTo(lift / 4, Percentage.withPercentage(12.5));
   }
 
   /**
@@ -94,22 +97,26 @@ class OwnAeroplanesValidationTest {
     }
   }
 
-  /** Derivatives of three figures, so 1 %; the wing damps yaw by up to a tenth of the fin. */
+  /**
+   * The fin's slope rises by half of M², up to 5 % at the racer's Mach 0.33, less for its low
+   * aspect ratio, and its arm turns by the last half degree of incidence: 3 %. The wing damps yaw
+   * by up to a tenth of the fin.
+   */
   @ParameterizedTest
   @CsvSource(useHeadersInDisplayName = true, textBlock = GEOMETRY)
   void fin(
       String name, double slope, double fin, double finSpan, double arm, double up, double turn) {
     Scenario scenario = Shipped.scenario(name);
     Fin tail = Fin.of(scenario.data().aeroplane(), fin, finSpan, arm, up, turn);
-    Percentage figures = Percentage.withPercentage(1);
+    Percentage figures = Percentage.withPercentage(3);
     assertThat(value(scenario, Coefficient.CY_R)).isCloseTo(2 * tail.force() * tail.arm(), figures);
     assertThat(value(scenario, Coefficient.CN_DR) / value(scenario, Coefficient.CY_DR))
         .isCloseTo(-tail.arm(), figures);
     assertThat(value(scenario, Coefficient.CN_R) / (-2 * tail.force() * tail.arm() * tail.arm()))
         .isBetween(1.0, 1.12);
-    // the body takes a fifth to a half of the fin's stiffness from it
+    // the body takes a fifth to two thirds of the fin's stiffness from it
     assertThat(value(scenario, Coefficient.CN_BETA) / (tail.force() * tail.arm()))
-        .isBetween(0.5, 0.85);
+        .isBetween(0.33, 0.8);
   }
 
   /**
@@ -145,14 +152,23 @@ class OwnAeroplanesValidationTest {
         .isBetween(0.16, 0.21);
   }
 
-  /** The sets hold at the speed and height that are flown. */
+  /** Nothing is given: all follows from the shape, inside the range of the methods. */
   @ParameterizedTest
-  @CsvSource({"cragmerle-roll-entry", "cragmerle-torque-right", "mosspipit-roll-entry"})
-  void isFlownWhereItsDerivativesHold(String name) {
-    Scenario scenario = Shipped.scenario(name);
-    LateralDerivatives set = scenario.data().derivatives();
-    assertThat(scenario.condition()).isEqualTo(set.validAt().orElseThrow());
-    assertThat(set.source()).contains("Our own estimate for an invented aeroplane");
+  @CsvSource({
+    "tarnlark-cruise-roll-entry",
+    "tarnlark-approach-roll-entry",
+    "cragmerle-roll-entry",
+    "cragmerle-torque-right",
+    "mosspipit-roll-entry"
+  })
+  void derivativesFollowFromTheShape(String name) {
+    LateralDerivatives set = Shipped.scenario(name).data().derivatives();
+    for (Coefficient coefficient : Coefficient.values()) {
+      assertThat(set.origin(coefficient))
+          .as(coefficient.symbol())
+          .isEqualTo(coefficient == Coefficient.CY_DA ? Origin.ABSENT : Origin.ESTIMATED);
+      assertThat(set.estimate(coefficient).map(Estimate::extrapolated).orElse("")).isEmpty();
+    }
   }
 
   /** The two sides differ by twice what the added moment of the propeller does alone. */
