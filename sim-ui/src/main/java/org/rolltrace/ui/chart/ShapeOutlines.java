@@ -27,7 +27,6 @@ final class ShapeOutlines {
 
   private static final int ROUND = 24;
 
-  private final Geometry geometry;
   private final Wing wing;
   private final Optional<Ailerons> travel;
   private final Datum datum;
@@ -71,7 +70,6 @@ final class ShapeOutlines {
   }
 
   private ShapeOutlines(Geometry geometry, Optional<Ailerons> travel, Datum datum) {
-    this.geometry = geometry;
     this.datum = datum;
     this.wing = geometry.wing();
     this.travel = travel;

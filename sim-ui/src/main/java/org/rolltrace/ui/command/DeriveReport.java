@@ -55,8 +55,11 @@ final class DeriveReport extends TextReport {
     addDerivatives(report.base().data().derivatives());
     if (!report.methods().isEmpty()) {
       line("");
-      line("Methods of the estimates");
-      MethodsReport.add(this, report.methods());
+      line(
+          "Known errors of the estimates; derive --methods says what each computes, and after whom");
+      report
+          .methods()
+          .forEach(method -> wrapped(padded("  " + method.title(), 28), method.knownError()));
     }
     addFigures();
     addVariants();
