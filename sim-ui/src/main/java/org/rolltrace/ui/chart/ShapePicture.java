@@ -24,6 +24,9 @@ public final class ShapePicture {
   private static final double NAME_GAP = 26;
   private static final double HALF_SMALL = 4;
 
+  /** Names of what ends nearer to the middle than this part of the width stand level with it. */
+  private static final double NEAR = 0.5;
+
   /** Around the aeroplane, as a part of its span. */
   private static final double AIR = 0.03;
 
@@ -34,7 +37,7 @@ public final class ShapePicture {
   private final double scale;
   private final double reach;
 
-  private record View(List<List<Outline>> aeroplanes, AxisTitle axis, List<double[]> tips) {
+  private record View(List<List<Outline>> aeroplanes, AxisTitle axis) {
     /** The outlines of one, without those that lie on the ones of the base. */
     List<Outline> ownOf(int place) {
       return aeroplanes.get(place).stream()
@@ -112,30 +115,33 @@ public final class ShapePicture {
     ShapeOutlines.Datum datum =
         ShapeOutlines.Datum.of(drawn.get(0).derived().data().aeroplane().geometry().orElseThrow());
     List<List<Outline>> all = new ArrayList<>();
-    List<double[]> tips = new ArrayList<>();
     for (VariantStroke each : drawn) {
       Aeroplane aeroplane = each.derived().data().aeroplane();
       List<Outline> some =
           drafter.draft(aeroplane.geometry().orElseThrow(), aeroplane.ailerons(), datum);
       all.add(some);
-      tips.add(tip(some, aeroplane.span()));
     }
-    return new View(all, axis, tips);
+    return new View(all, axis);
   }
 
-  /** The middle of the right tip of the wing. */
-  private static double[] tip(List<Outline> outlines, double span) {
+  /** The middle of what reaches furthest to the right. */
+  private static double[] tip(List<Outline> outlines) {
+    double furthest =
+        outlines.stream()
+            .flatMapToDouble(outline -> Arrays.stream(outline.across()))
+            .max()
+            .orElse(0);
     double sum = 0;
     int count = 0;
     for (Outline outline : outlines) {
       for (int i = 0; i < outline.across().length; i++) {
-        if (outline.part() == Outline.Part.SURFACE && outline.across()[i] > 0.4999 * span) {
+        if (outline.across()[i] >= furthest * (1 - 1e-9)) {
           sum += outline.up()[i];
           count++;
         }
       }
     }
-    return new double[] {0.5 * span, count == 0 ? 0 : sum / count};
+    return new double[] {furthest, count == 0 ? 0 : sum / count};
   }
 
   private Sheet draw(View view) {
@@ -230,8 +236,12 @@ public final class ShapePicture {
         order.add(i);
       }
     }
-    order.sort(Comparator.comparingDouble(i -> yOf(view.tips().get(i)[1], high)));
-    double[] wanted = order.stream().mapToDouble(i -> yOf(view.tips().get(i)[1], high)).toArray();
+    List<double[]> tips = new ArrayList<>();
+    for (int i = 0; i < drawn.size(); i++) {
+      tips.add(tip(view.ownOf(i)));
+    }
+    order.sort(Comparator.comparingDouble(i -> yOf(tips.get(i)[1], high)));
+    double[] wanted = order.stream().mapToDouble(i -> yOf(tips.get(i)[1], high)).toArray();
     double[] heights = new double[wanted.length];
     Arrays.fill(heights, NAME_HEIGHT);
     double[] placed = Spread.apart(wanted, heights, TOP, TOP + height);
@@ -239,13 +249,12 @@ public final class ShapePicture {
     for (int k = 0; k < placed.length; k++) {
       VariantStroke each = drawn.get(order.get(k));
       Ink ink = each.stroke().ink();
-      marks.add(
-          new Mark.Line(
-              xOf(view.tips().get(order.get(k))[0]) + 3,
-              wanted[k],
-              end,
-              placed[k],
-              new Stroke(ink, 0.8, Dash.SOLID, 0.6)));
+      double[] tip = tips.get(order.get(k));
+      if (tip[0] > NEAR * reach) {
+        marks.add(
+            new Mark.Line(
+                xOf(tip[0]) + 3, wanted[k], end, placed[k], new Stroke(ink, 0.8, Dash.SOLID, 0.6)));
+      }
       marks.add(new Mark.Line(end, placed[k], end + NAME_GAP - 4, placed[k], each.stroke()));
       marks.add(
           new Mark.Label(

@@ -59,7 +59,7 @@ final class DeriveReport extends TextReport {
           "Known errors of the estimates; derive --methods says what each computes, and after whom");
       report
           .methods()
-          .forEach(method -> wrapped(padded("  " + method.title(), 28), method.knownError()));
+          .forEach(method -> wrapped(padded("  " + method.title(), 30), method.knownError()));
     }
     addFigures();
     addVariants();
