@@ -9,6 +9,8 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.regex.MatchResult;
+import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.rolltrace.core.run.Safety;
@@ -36,6 +38,39 @@ class DocumentsTest {
         .contains("```\n" + out + "```")
         .contains("```\n" + err + "```")
         .contains("```json\n" + read("scenarios/light-single-held-stick.json") + "```");
+  }
+
+  @Test
+  void theReadmeShowsTheTableThatDerivePrints() throws IOException {
+    StringWriter out = new StringWriter();
+    CommandLineProgram.run(
+        new String[] {"derive", "../scenarios/aeroplanes/tarnlark-trainer.json"},
+        new PrintWriter(out),
+        new PrintWriter(new StringWriter()),
+        file -> {});
+    String printed = out.toString();
+    String table = printed.substring(printed.indexOf("Derivatives, per rad"));
+    assertThat(read("README.md"))
+        .contains("derive scenarios/aeroplanes/tarnlark-trainer.json\n")
+        .contains("```\n" + table.substring(0, table.indexOf("\n\n") + 1) + "```");
+  }
+
+  @Test
+  void theReadmeNamesEveryCommandAndOptionOfDerive() throws IOException {
+    StringWriter out = new StringWriter();
+    CommandLineProgram.run(
+        new String[] {"derive", "--help"},
+        new PrintWriter(out),
+        new PrintWriter(new StringWriter()),
+        file -> {});
+    String readme = read("README.md");
+    assertThat(readme).contains("| `derive AEROPLANE` |").contains("| `fly SCENARIO` |");
+    Pattern.compile("--[a-z-]+")
+        .matcher(out.toString())
+        .results()
+        .map(MatchResult::group)
+        .filter(option -> !option.equals("--help") && !option.equals("--version"))
+        .forEach(option -> assertThat(readme).contains("`" + option));
   }
 
   @Test

@@ -30,6 +30,8 @@ public final class GeometryEstimate {
   private final double mach;
   private final WingEstimate wing;
   private final double aileronEffectiveness;
+  private final double swept;
+  private Optional<SpanLoading> aileronLoading = Optional.empty();
   private final Map<Coefficient, List<Estimate.Term>> terms = new EnumMap<>(Coefficient.class);
 
   private record Theory(WingEstimate.Theory kind, EstimateMethod method) {}
@@ -53,6 +55,11 @@ public final class GeometryEstimate {
         WingEstimate.of(geometry.wing(), geometry.ailerons(), theory, mach, liftCoefficient);
     this.aileronEffectiveness =
         ailerons.map(travel -> FlapFactor.left(0.25 * (travel.up() + travel.down()))).orElse(1.0);
+    // The lifting surface has the sweep already.
+    this.swept =
+        theory == WingEstimate.Theory.LIFTING_LINE
+            ? sweepFactor(geometry.wing().aspectRatio(), geometry.wing().meanSweep())
+            : 1;
     addWing(liftCoefficient);
     wing.aileron().ifPresent(thin -> ailerons.ifPresent(travel -> addAilerons(thin, travel)));
     geometry.body().ifPresent(this::addBody);
@@ -125,6 +132,25 @@ public final class GeometryEstimate {
         : Optional.empty();
   }
 
+  /**
+   * How the loads of the wing lie along its span, as they stand in the estimates: with what sweep
+   * and gaps take from them.
+   *
+   * @return the loads
+   */
+  public SpanLoads loads() {
+    return new SpanLoads(wing, swept, aileronLoading);
+  }
+
+  /**
+   * The theory of the wing.
+   *
+   * @return which one
+   */
+  public WingEstimate.Theory theory() {
+    return theory.kind();
+  }
+
   private void add(
       Coefficient coefficient,
       String part,
@@ -150,11 +176,6 @@ public final class GeometryEstimate {
     EstimateMethod method = theory.method();
     String beyond = beyondMach();
     double sweep = geometry.wing().meanSweep();
-    // The lifting surface has the sweep already.
-    double swept =
-        theory.kind() == WingEstimate.Theory.LIFTING_LINE
-            ? sweepFactor(geometry.wing().aspectRatio(), sweep)
-            : 1;
     add(Coefficient.CL_P, "wing", swept * wing.rollDamping(), method, beyond);
     add(Coefficient.CL_R, "wing", wing.rollWithYaw(), method, beyond);
     add(Coefficient.CL_BETA, "wing dihedral", swept * wing.dihedralEffect(), method, beyond);
@@ -198,11 +219,7 @@ public final class GeometryEstimate {
         0.5 * (travel.up() + travel.down()) > FlapFactor.LARGEST
             ? "aileron travel is beyond the charts of flap losses"
             : beyondMach();
-    double sweep = geometry.wing().meanSweep();
-    double swept =
-        theory.kind() == WingEstimate.Theory.LIFTING_LINE
-            ? sweepFactor(geometry.wing().aspectRatio(), sweep)
-            : 1;
+    aileronLoading = Optional.of(loading.times(swept));
     add(
         Coefficient.CL_DA,
         "ailerons",

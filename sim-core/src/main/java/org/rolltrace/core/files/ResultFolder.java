@@ -14,6 +14,8 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import org.rolltrace.core.run.DerivativeReport;
+import org.rolltrace.core.run.DerivedAeroplane;
 import org.rolltrace.core.run.RunResult;
 
 /**
@@ -49,6 +51,32 @@ public final class ResultFolder {
     Map<String, Content> contents = new LinkedHashMap<>();
     contents.put("history.csv", text(out -> HistoryCsv.write(result.history(), out)));
     contents.put("result.json", text(out -> ResultJson.write(result, producedBy, out)));
+    return write(folder, contents);
+  }
+
+  /**
+   * Writes {@code derivatives.json}, and {@code loadings.csv} for each aeroplane whose shape is
+   * known.
+   *
+   * @param folder made when it does not exist
+   * @param report what is written
+   * @param producedBy the program and its version
+   * @return the files written
+   * @throws UncheckedIOException when the folder or a file cannot be written; its message says what
+   *     to do
+   */
+  public static List<Path> write(Path folder, DerivativeReport report, String producedBy) {
+    Map<String, Content> contents = new LinkedHashMap<>();
+    contents.put("derivatives.json", text(out -> DerivativesJson.write(report, producedBy, out)));
+    for (DerivedAeroplane derived : report.all()) {
+      derived
+          .shape()
+          .ifPresent(
+              shape ->
+                  contents.put(
+                      LoadingsCsv.fileName(report, derived),
+                      text(out -> LoadingsCsv.write(shape.loads(), out))));
+    }
     return write(folder, contents);
   }
 

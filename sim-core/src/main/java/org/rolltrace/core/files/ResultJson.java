@@ -1,10 +1,6 @@
 package org.rolltrace.core.files;
 
-import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonGenerator;
-import com.fasterxml.jackson.core.StreamWriteFeature;
-import com.fasterxml.jackson.core.util.DefaultIndenter;
-import com.fasterxml.jackson.core.util.DefaultPrettyPrinter;
 import java.io.IOException;
 import java.io.Writer;
 import java.util.List;
@@ -16,9 +12,6 @@ import org.rolltrace.core.aeroplane.Propeller;
 import org.rolltrace.core.aeroplane.Rudder;
 import org.rolltrace.core.aeroplane.SurfaceDynamics;
 import org.rolltrace.core.atmosphere.FlightCondition;
-import org.rolltrace.core.derivatives.Coefficient;
-import org.rolltrace.core.derivatives.Estimate;
-import org.rolltrace.core.derivatives.LateralDerivatives;
 import org.rolltrace.core.flight.FlightEvent;
 import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.motion.LateralModes;
@@ -46,10 +39,12 @@ public final class ResultJson {
   private static final double NEUTRAL = 1e-9;
 
   private final JsonGenerator json;
+  private final ResultParts parts;
   private final RunResult result;
 
   private ResultJson(JsonGenerator json, RunResult result) {
     this.json = json;
+    this.parts = new ResultParts(json);
     this.result = result;
   }
 
@@ -62,18 +57,7 @@ public final class ResultJson {
    * @throws IOException when {@code out} fails
    */
   public static void write(RunResult result, String producedBy, Writer out) throws IOException {
-    DefaultPrettyPrinter printer =
-        new DefaultPrettyPrinter()
-            .withObjectIndenter(new DefaultIndenter("  ", "\n"))
-            .withArrayIndenter(new DefaultIndenter("  ", "\n"));
-    JsonFactory factory =
-        JsonFactory.builder().disable(StreamWriteFeature.AUTO_CLOSE_TARGET).build();
-    try (JsonGenerator json = factory.createGenerator(out)) {
-      json.setPrettyPrinter(printer);
-      new ResultJson(json, result).writeDocument(producedBy);
-    }
-    out.append('\n');
-    out.flush();
+    ResultParts.writeDocument(out, json -> new ResultJson(json, result).writeDocument(producedBy));
   }
 
   private void writeDocument(String producedBy) throws IOException {
@@ -84,32 +68,23 @@ public final class ResultJson {
     writeScenario(result.scenario());
     writeAeroplane(result.scenario().data().aeroplane());
     writeCondition(result.scenario().condition());
-    writeDerivatives(result.scenario().data().derivatives());
+    parts.writeDerivatives(result.scenario().data().derivatives());
     writeTrim(result.trim());
     writeModes();
     writeMeasures();
     writeEvents();
     json.writeArrayFieldStart("requirements");
     json.writeEndArray();
-    json.writeArrayFieldStart("cautions");
-    for (String caution : result.cautions()) {
-      json.writeString(caution);
-    }
-    json.writeEndArray();
+    parts.writeTexts("cautions", result.cautions());
     json.writeEndObject();
   }
 
   private void number(String name, double value) throws IOException {
-    if (!(Math.abs(value) <= Double.MAX_VALUE)) {
-      throw new IllegalStateException(name + " is " + value + "; expected a finite number");
-    }
-    json.writeNumberField(name, value);
+    parts.number(name, value);
   }
 
   private void number(String name, OptionalDouble value) throws IOException {
-    if (value.isPresent()) {
-      number(name, value.getAsDouble());
-    }
+    parts.number(name, value);
   }
 
   private void writeScenario(Scenario scenario) throws IOException {
@@ -271,18 +246,7 @@ public final class ResultJson {
 
   private void writeCondition(FlightCondition condition) throws IOException {
     json.writeObjectFieldStart("condition");
-    number("pressureAltitude", condition.pressureAltitude());
-    number("temperature", condition.temperature());
-    number("pressure", condition.pressure());
-    number("density", condition.density());
-    number("speedOfSound", condition.speedOfSound());
-    number("trueAirspeed", condition.trueAirspeed());
-    number("equivalentAirspeed", condition.equivalentAirspeed());
-    number("calibratedAirspeed", condition.calibratedAirspeed());
-    number("mach", condition.mach());
-    number("dynamicPressure", condition.dynamicPressure());
-    number("loadFactor", condition.loadFactor());
-    number("flightPathAngle", condition.flightPathAngle());
+    parts.writeAir(condition);
     number("liftCoefficient", result.liftCoefficient());
     writePower(result.scenario().propulsion());
     json.writeEndObject();
@@ -309,37 +273,6 @@ public final class ResultJson {
       number("thrust", propeller.thrust(share));
       number("rollMoment", propeller.rollMoment(share, 0));
       number("yawMoment", propeller.yawMoment(share));
-      json.writeEndObject();
-    }
-    json.writeEndArray();
-  }
-
-  private void writeDerivatives(LateralDerivatives derivatives) throws IOException {
-    json.writeObjectFieldStart("derivatives");
-    for (Coefficient coefficient : Coefficient.values()) {
-      json.writeObjectFieldStart(coefficient.symbol());
-      number("value", derivatives.value(coefficient));
-      json.writeStringField("origin", derivatives.origin(coefficient).word());
-      Optional<Estimate> estimate = derivatives.estimate(coefficient);
-      if (estimate.isPresent()) {
-        writeEstimate(estimate.get());
-      }
-      json.writeEndObject();
-    }
-    json.writeEndObject();
-  }
-
-  private void writeEstimate(Estimate estimate) throws IOException {
-    number("estimate", estimate.value());
-    json.writeArrayFieldStart("parts");
-    for (Estimate.Term term : estimate.terms()) {
-      json.writeStartObject();
-      json.writeStringField("part", term.part());
-      number("value", term.value());
-      json.writeStringField("method", term.method().title());
-      if (!term.extrapolated().isEmpty()) {
-        json.writeStringField("extrapolated", term.extrapolated());
-      }
       json.writeEndObject();
     }
     json.writeEndArray();

@@ -274,6 +274,19 @@
  *       fuselage take out again, 0 when absent</td></tr>
  * </table>
  *
+ * <h2>Derivatives, {@code rolltrace-derivatives/1}</h2>
+ *
+ * <p>Written only. {@code condition}: why this one ({@code basis}), with air and speeds, or a
+ * {@code reason} why there is none; {@code base}, and {@code variants} as a list, each with {@code
+ * name}, {@code figures} by name ({@code value}, {@code unit}, {@code definition}, or {@code
+ * reason}), {@code derivatives} by name ({@code value}, {@code origin}, and where there is one the
+ * {@code estimate} with its {@code parts}: {@code part}, {@code value}, {@code method}, {@code
+ * extrapolated}), {@code cautions}, and of a variant {@code differsIn} and {@code changes} by name
+ * ({@code base}, {@code variant}, {@code difference}, and {@code relative} to the size of the
+ * base); {@code methods} by name with {@code what}, {@code source} and {@code knownError}; {@code
+ * cautions} of all. {@code loadings} names the file of loads beside it: {@link
+ * org.rolltrace.core.files.LoadingsCsv}.
+ *
  * <h2>How reading goes</h2>
  *
  * <p>Bytes become text, text a tree of values that know their place, and a cursor walks each object

@@ -8,13 +8,9 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Collectors;
-import org.rolltrace.core.aeroplane.InertiaBasis;
 import org.rolltrace.core.aeroplane.Limits;
 import org.rolltrace.core.aeroplane.Propeller;
-import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
-import org.rolltrace.core.derivatives.LateralDerivatives;
-import org.rolltrace.core.derivatives.Origin;
 import org.rolltrace.core.flight.FlightEvent;
 import org.rolltrace.core.flight.Flown;
 import org.rolltrace.core.history.Channel;
@@ -48,8 +44,6 @@ final class Cautions {
   /** Propellers are kept below this (common practice). */
   private static final double LARGEST_TIP_MACH = 1;
 
-  private static final double LIFT_COEFFICIENT_AWAY = 0.1;
-  private static final double MACH_AWAY = 0.05;
   private static final double LOAD_FACTOR_AWAY = 0.05;
 
   private final Scenario scenario;
@@ -300,34 +294,8 @@ final class Cautions {
   }
 
   private void addDerivatives() {
-    LateralDerivatives derivatives = scenario.data().derivatives();
-    if (derivatives.hasGiven() && derivatives.source().isBlank()) {
-      add("the aeroplane file does not say where its derivatives are from");
-    }
-    addEstimates(derivatives);
-    Optional<FlightCondition> validAt = derivatives.validAt();
-    if (derivatives.hasGiven() && validAt.isEmpty()) {
-      add("the aeroplane file does not say at which condition its derivatives hold");
-    } else if (derivatives.hasGiven()) {
-      FlightCondition here = scenario.condition();
-      FlightCondition there = validAt.get();
-      boolean weightless = there.loadFactor() == 0;
-      double liftRatio =
-          here.loadFactor()
-              * there.dynamicPressure()
-              / (there.loadFactor() * here.dynamicPressure());
-      if (!weightless && !(Math.abs(liftRatio - 1) <= LIFT_COEFFICIENT_AWAY)) {
-        add(
-            "derivatives are flown off their condition: the lift coefficient is %.3g times that for"
-                + " which they hold",
-            liftRatio);
-      }
-      if (Math.abs(here.mach() - there.mach()) > MACH_AWAY) {
-        add(
-            "derivatives are flown off their condition: Mach %.2f instead of %.2f",
-            here.mach(), there.mach());
-      }
-    }
+    sentences.addAll(
+        DerivativeCautions.ofOrigin(scenario.data(), Optional.of(scenario.condition())));
     if (scenario.slip() == SlipTreatment.SETTLED
         && !(scenario.data().derivatives().value(Coefficient.CN_BETA) > 0)) {
       add("Cn_beta is not positive: sideslip does not settle, and settled slip is a guess");
@@ -352,25 +320,6 @@ final class Cautions {
       add(
           "sections of the wing are beyond their stall from %.2f s; their damping is a guess",
           stall.firstStalled());
-    }
-  }
-
-  private void addEstimates(LateralDerivatives derivatives) {
-    List<Coefficient> estimated = derivatives.of(Origin.ESTIMATED);
-    if (!estimated.isEmpty()) {
-      add(
-          "estimated from the shape and never checked in flight: %s",
-          !derivatives.hasGiven()
-              ? "all derivatives"
-              : estimated.stream().map(Coefficient::symbol).collect(Collectors.joining(", ")));
-    }
-    estimated.stream()
-        .map(coefficient -> derivatives.estimate(coefficient).orElseThrow().extrapolated())
-        .filter(words -> !words.isEmpty())
-        .distinct()
-        .forEach(words -> add("estimates are extrapolated: %s", words));
-    if (scenario.data().aeroplane().inertiaBasis() == InertiaBasis.RADII_OF_GYRATION) {
-      add("the moments of inertia are estimated by radii of gyration, a fifth either way");
     }
   }
 

@@ -79,6 +79,31 @@ public final class StripChart {
       double height,
       double left,
       double right) {
+    return draw(strips, ranges, window, new AxisTitle("Time", "s"), width, height, left, right);
+  }
+
+  /**
+   * Draws strips on a common axis of something else than time.
+   *
+   * @param strips from above, at least one
+   * @param ranges of the values, one a strip
+   * @param window what is seen of the common axis
+   * @param axis what it shows
+   * @param width of the sheet, px
+   * @param height of the sheet, px
+   * @param left margin, px: titles and figures stand there
+   * @param right margin, px: names of curves stand there
+   * @return the drawing
+   */
+  static Drawing draw(
+      List<Strip> strips,
+      List<ValueRange> ranges,
+      TimeWindow window,
+      AxisTitle axis,
+      double width,
+      double height,
+      double left,
+      double right) {
     int count = strips.size();
     if (count == 0 || ranges.size() != count) {
       throw new IllegalArgumentException(
@@ -106,11 +131,11 @@ public final class StripChart {
       areas.add(area);
       new StripDrawing(strips.get(i), area, width, marks).draw();
     }
-    addTimeAxis(areas.get(count - 1), marks);
+    addAxis(areas.get(count - 1), axis, marks);
     return new Drawing(new Sheet(width, height, marks), areas);
   }
 
-  private static void addTimeAxis(PlotArea lowest, List<Mark> marks) {
+  private static void addAxis(PlotArea lowest, AxisTitle axis, List<Mark> marks) {
     double base = lowest.y() + lowest.height() + 16;
     TimeWindow window = lowest.time();
     Ticks ticks = Ticks.ofTime(window, lowest.width());
@@ -124,14 +149,6 @@ public final class StripChart {
               TypeSize.SMALL,
               Ink.QUIET));
     }
-    marks.add(new Mark.Label(0, base, "Time", Anchor.START, TypeSize.NORMAL, Ink.TEXT));
-    marks.add(
-        new Mark.Label(
-            TypeWidths.of("Time ", TypeSize.NORMAL),
-            base,
-            "s",
-            Anchor.START,
-            TypeSize.SMALL,
-            Ink.QUIET));
+    axis.draw(0, base, marks);
   }
 }

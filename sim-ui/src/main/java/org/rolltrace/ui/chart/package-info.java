@@ -9,6 +9,11 @@
  * below each other, {@link org.rolltrace.ui.chart.WingTrace} the wing at even instants along the
  * path. Given the same width and margins, an instant stands at the same x in both.
  *
+ * <p>About derivatives there are two pages: {@link org.rolltrace.ui.chart.ShapePicture} has the
+ * aeroplane from above and from behind, to scale, {@link org.rolltrace.ui.chart.LoadingsPicture}
+ * the loads along the span. The base is unbroken and dark, each variant has a colour and dash of
+ * its own.
+ *
  * <p>Blue is the right side and vermillion the left one throughout: of a roll, of a wing tip.
  */
 package org.rolltrace.ui.chart;

@@ -14,7 +14,7 @@ import picocli.CommandLine.Command;
     description =
         "Roll dynamics of propeller aeroplanes: how an aeroplane enters a roll, settles,"
             + " coasts and comes back.",
-    subcommands = {FlyCommand.class, SchemaCommand.class},
+    subcommands = {FlyCommand.class, DeriveCommand.class, SchemaCommand.class},
     mixinStandardHelpOptions = true,
     versionProvider = Program.class,
     footer = {

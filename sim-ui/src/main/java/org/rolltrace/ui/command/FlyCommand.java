@@ -3,7 +3,6 @@ package org.rolltrace.ui.command;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.UncheckedIOException;
-import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import org.rolltrace.core.files.ResultFolder;
@@ -67,10 +66,10 @@ final class FlyCommand implements Callable<Integer> {
     PrintWriter out = spec.commandLine().getOut();
     PrintWriter err = spec.commandLine().getErr();
     FlightSettings settings = settings();
-    Path into = folder == null ? null : path(folder);
-    Path chartsInto = chartFolder == null ? null : path(chartFolder);
+    Path into = folder == null ? null : PathArgument.of(spec, folder);
+    Path chartsInto = chartFolder == null ? null : PathArgument.of(spec, chartFolder);
 
-    Scenario flown = ScenarioFile.read(path(scenario));
+    Scenario flown = ScenarioFile.read(PathArgument.of(spec, scenario));
     RunResult result = ScenarioRun.execute(flown, settings);
     if (into != null) {
       for (Path written : ResultFolder.write(into, result, Program.identity())) {
@@ -102,23 +101,6 @@ final class FlyCommand implements Callable<Integer> {
       return sampleRate == null ? settings : settings.withSampleRate(sampleRate);
     } catch (IllegalArgumentException outOfRange) {
       throw new CommandLine.ParameterException(spec.commandLine(), outOfRange.getMessage());
-    }
-  }
-
-  private Path path(String text) {
-    if (text.isBlank()) {
-      throw new CommandLine.ParameterException(
-          spec.commandLine(), "An empty path; expected the name of a file or folder.");
-    }
-    try {
-      return Path.of(text);
-    } catch (InvalidPathException noPath) {
-      throw new CommandLine.ParameterException(
-          spec.commandLine(),
-          "'"
-              + text
-              + "' is not a path on this system. Letters beyond ASCII in it need a locale that has"
-              + " them, such as LC_ALL=C.UTF-8.");
     }
   }
 

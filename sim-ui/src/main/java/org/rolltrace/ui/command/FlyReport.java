@@ -1,19 +1,14 @@
 package org.rolltrace.ui.command;
 
 import java.io.PrintWriter;
-import java.math.BigDecimal;
-import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Collectors;
 import org.rolltrace.core.aeroplane.Aeroplane;
-import org.rolltrace.core.aeroplane.InertiaBasis;
-import org.rolltrace.core.aeroplane.SurfaceDynamics;
 import org.rolltrace.core.atmosphere.FlightCondition;
 import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.derivatives.LateralDerivatives;
@@ -44,13 +39,11 @@ import org.rolltrace.core.run.Safety;
 import org.rolltrace.core.scenario.Scenario;
 
 /** A result as text in aligned columns, in the units that engineers read beside SI. */
-final class FlyReport {
+final class FlyReport extends TextReport {
   private static final int LABEL = 34;
   private static final int VALUE = 12;
-  private static final int WIDTH = 96;
 
   private final RunResult result;
-  private final StringBuilder text = new StringBuilder();
 
   FlyReport(RunResult result) {
     this.result = result;
@@ -68,7 +61,7 @@ final class FlyReport {
     addMeasures();
     line("");
     wrapped("", Safety.NOTICE);
-    out.print(text);
+    printTo(out);
   }
 
   private void addAeroplane(Scenario scenario) {
@@ -85,86 +78,11 @@ final class FlyReport {
                         "%.4g kg of the mass, %.4g m to the %s",
                         one.mass(), Math.abs(one.arm()), one.arm() < 0 ? "left" : "right")));
     row("  control travel", travel(aeroplane));
-    if (!scenario.data().derivatives().source().isBlank()) {
-      wrapped(padded("  derivatives from", 20), scenario.data().derivatives().source());
-    }
-    if (scenario.data().derivatives().hasGiven()) {
-      wrapped(padded("  given as", 20), scenario.data().derivatives().convention());
-    }
-  }
-
-  private static String sizeAndMass(Aeroplane aeroplane) {
-    StringBuilder words = new StringBuilder();
-    words.append(format("span %.4g m, area %.4g m2", aeroplane.span(), aeroplane.wingArea()));
-    aeroplane.mass().ifPresent(mass -> words.append(format(", mass %.5g kg", mass)));
-    words.append(format(", inertia in roll %.5g kg m2", aeroplane.inertia().roll()));
-    aeroplane.inertia().yaw().ifPresent(yaw -> words.append(format(", yaw %.5g kg m2", yaw)));
-    if (aeroplane.inertia().product() != 0) {
-      words.append(format(", product %.4g kg m2", aeroplane.inertia().product()));
-    }
-    if (aeroplane.inertiaBasis() != InertiaBasis.GIVEN) {
-      words.append(", ").append(aeroplane.inertiaBasis().words());
-    }
-    return words.toString();
-  }
-
-  private static String travel(Aeroplane aeroplane) {
-    String ailerons =
-        aeroplane
-            .ailerons()
-            .map(
-                a ->
-                    "ailerons "
-                        + plain(Math.toDegrees(a.up()))
-                        + " deg up, "
-                        + plain(Math.toDegrees(a.down()))
-                        + " deg down"
-                        + dynamics(a.dynamics()))
-            .orElse("no ailerons given");
-    String rudder =
-        aeroplane
-            .rudder()
-            .map(
-                r ->
-                    "rudder "
-                        + plain(Math.toDegrees(r.left()))
-                        + " deg left, "
-                        + plain(Math.toDegrees(r.right()))
-                        + " deg right"
-                        + dynamics(r.dynamics()))
-            .orElse("no rudder given");
-    return ailerons + "; " + rudder;
-  }
-
-  private static String dynamics(SurfaceDynamics dynamics) {
-    String words = "";
-    if (dynamics.rateLimit() < Double.POSITIVE_INFINITY) {
-      words += ", at most " + plain(Math.toDegrees(dynamics.rateLimit())) + " deg/s";
-    }
-    if (dynamics.lag() > 0) {
-      words += ", lag " + plain(dynamics.lag()) + " s";
-    }
-    return words;
+    addSource(scenario.data().derivatives());
   }
 
   private void addCondition(FlightCondition condition) {
-    row(
-        "  pressure altitude",
-        format(
-            "%.0f ft (%.0f m), %.1f K, density %.4f kg/m3",
-            Quantity.toUnit(condition.pressureAltitude(), "ft"),
-            condition.pressureAltitude(),
-            condition.temperature(),
-            condition.density()));
-    row(
-        "  airspeed",
-        format(
-            "%.1f kt true, %.1f kt equivalent, %.1f kt calibrated (%.2f m/s true), M %.3f",
-            Quantity.toUnit(condition.trueAirspeed(), "kt"),
-            Quantity.toUnit(condition.equivalentAirspeed(), "kt"),
-            Quantity.toUnit(condition.calibratedAirspeed(), "kt"),
-            condition.trueAirspeed(),
-            condition.mach()));
+    addAir(condition);
     OptionalDouble lift = result.liftCoefficient();
     row(
         "  load factor",
@@ -299,11 +217,6 @@ final class FlyReport {
     return "";
   }
 
-  /** As it would be written by hand: up to six figures, no zeros behind. */
-  private static String plain(double value) {
-    return new BigDecimal(value).round(new MathContext(6)).stripTrailingZeros().toPlainString();
-  }
-
   private void addDerivatives(LateralDerivatives derivatives) {
     line("");
     line("Derivatives, per rad and per pb/2V or rb/2V");
@@ -333,10 +246,6 @@ final class FlyReport {
                 + some.stream().map(Coefficient::symbol).collect(Collectors.joining(", ")));
       }
     }
-  }
-
-  private static String derivative(double value) {
-    return value == 0 || Math.abs(value) >= 1e-3 ? format("%.5f", value) : number(value);
   }
 
   private void addTrim() {
@@ -464,58 +373,7 @@ final class FlyReport {
     return (value > 0 ? "+" : "") + number(value) + " N m";
   }
 
-  /** Four figures, which is what the data behind them are worth at best. */
-  private static String number(double value) {
-    double size = Math.abs(value);
-    if (size == 0) {
-      return "0";
-    }
-    if (size < 1e-4 || size >= 1e6) {
-      return format("%.3e", value);
-    }
-    int decimals = (int) Math.max(0, Math.min(6, 3 - Math.floor(Math.log10(size))));
-    return format("%." + decimals + "f", value);
-  }
-
   private void two(String label, String value, String more) {
     line(("  " + padded(label, LABEL) + padded(value, VALUE + 8) + more).stripTrailing());
-  }
-
-  private void row(String label, String value) {
-    line(padded(label, 20) + value);
-  }
-
-  /** Breaks a text into lines that stand under each other behind a label. */
-  private void wrapped(String label, String words) {
-    StringBuilder row = new StringBuilder(label);
-    int start = label.length();
-    for (String word : words.split(" ", -1)) {
-      if (row.length() > start && row.length() + 1 + word.length() > WIDTH) {
-        line(row.toString());
-        row.setLength(0);
-        row.append(" ".repeat(start));
-      } else if (row.length() > start) {
-        row.append(' ');
-      }
-      row.append(word);
-    }
-    line(row.toString());
-  }
-
-  private static String padded(String words, int width) {
-    return words.length() >= width ? words + " " : words + " ".repeat(width - words.length());
-  }
-
-  /** Titles and names come from files: what would steer a terminal is not passed on to it. */
-  private void line(String words) {
-    for (int i = 0; i < words.length(); i++) {
-      char c = words.charAt(i);
-      text.append(Character.isISOControl(c) ? ' ' : c);
-    }
-    text.append('\n');
-  }
-
-  private static String format(String pattern, Object... values) {
-    return String.format(Locale.ROOT, pattern, values);
   }
 }
