@@ -60,7 +60,7 @@ class CommandLineProgramTest {
       delimiter = '|',
       value = {
         "multistep | stick multistep, 20 % right at 1 s, 3-2-1-1 units of 0.55 s, hand takes 0.15 s",
-        "ramp | stick ramp, 50 % right at 1 s, reached in 2 s",
+        "ramp | stick ramp, 25 % right at 1 s, reached in 2 s",
         "sweep | stick sweep, 10 % right at 1 s, logarithmic from 0.1 to 2 Hz in 25 s",
         "trace | column stick of traces/roll-and-back.csv times 1, from 0 s",
         "power-step | power step, 73 % more at 1 s, hand takes 0.5 s",
@@ -83,7 +83,7 @@ class CommandLineProgramTest {
         .contains("Trim, steady turn")
         .containsPattern("bank +-30\\.00 deg")
         .containsPattern("yaw rate +-5\\.07 deg/s")
-        .containsPattern("Time from 30 deg one way to 30 deg the other +1\\.788 s");
+        .containsPattern("Time from 30 deg one way to 30 deg the other +1\\.361 s");
     Answer fuel = run("fly", SCENARIOS.resolve("tarnlark-fuel-imbalance.json").toString());
     assertThat(fuel.out()).contains("on one side       20.00 kg of the mass, 1.450 m to the right");
     Answer primed =

@@ -268,7 +268,7 @@ class HandFlightModelTest {
     assertThat(session.problemProperty().get().message())
         .startsWith("first mend the value that cannot be used: \"10 m\" is a length");
 
-    session.undo();
+    session.open(SHIPPED.resolve("light-single-roll-entry.json")); // its derivatives are given
     session.edit(
         "take the controls away",
         document -> {
