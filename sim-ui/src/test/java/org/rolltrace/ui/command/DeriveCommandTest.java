@@ -151,7 +151,8 @@ class DeriveCommandTest {
     assertThat(answer.out()).isEmpty();
     assertThat(answer.err())
         .contains("changed.json:42: $.variants[\"larger fin\"].fin.area: ")
-        .contains("changed.json:42: $.variants[\"larger fin\"].fin.colour: unknown key");
+        .contains("changed.json:42: $.variants[\"larger fin\"].fin.colour: as variant")
+        .contains("unknown key \"colour\"");
   }
 
   static List<List<String>> bad() {
