@@ -6,6 +6,7 @@ import org.rolltrace.core.controls.ControlRun;
 import org.rolltrace.core.controls.SurfaceMode;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.Movement;
+import org.rolltrace.core.pilot.Stroke;
 
 /**
  * One control and its surface during a flight. A surface with a rate limit or a lag has its angle
@@ -21,6 +22,7 @@ final class SurfaceDrive {
   private final double trimPosition;
   private final double trimAngle;
   private final int stateIndex;
+  private Stroke stroke;
   private SurfaceMode mode = SurfaceMode.FOLLOWING;
   private boolean onStop;
 
@@ -39,6 +41,7 @@ final class SurfaceDrive {
     this.control = control;
     this.run = run;
     this.movement = movement;
+    this.stroke = movement;
     this.trimPosition = trimPosition;
     this.trimAngle = trimAngle;
     this.stateIndex = run.isPresent() && !run.get().dynamics().isDirect() ? nextState : -1;
@@ -82,24 +85,26 @@ final class SurfaceDrive {
     return onStop != before;
   }
 
-  private double wanted(double time) {
-    return trimPosition + movement.positionAt(time);
-  }
-
-  double position(double time) {
-    return ControlRun.atStops(wanted(time));
+  /** Where the hand wants the control, stops or not. */
+  double wanted(double time) {
+    return trimPosition + stroke.positionAt(time);
   }
 
   private double demand(double time) {
-    return run.isPresent() ? run.get().angleAt(wanted(time)) : trimAngle;
+    return demandFor(wanted(time));
+  }
+
+  private double demandFor(double wanted) {
+    return run.isPresent() ? run.get().angleAt(wanted) : trimAngle;
   }
 
   private double demandRate(double time) {
-    return run.orElseThrow().angleRateAt(wanted(time), movement.rateAt(time));
+    return run.orElseThrow().angleRateAt(wanted(time), stroke.rateAt(time));
   }
 
-  double angle(double time, double[] state) {
-    return hasState() ? state[stateIndex] : demand(time);
+  /** The angle of the surface, with the control wanted at a position. */
+  double angle(double wanted, double[] state) {
+    return hasState() ? state[stateIndex] : demandFor(wanted);
   }
 
   /** Puts the surface where the trimmed control holds it. */
@@ -111,6 +116,11 @@ final class SurfaceDrive {
 
   private SurfaceDynamics dynamics() {
     return run.orElseThrow().dynamics();
+  }
+
+  /** Comes to a stretch between two breakpoints. */
+  void enter(double start) {
+    stroke = movement.from(start);
   }
 
   boolean isSlewing() {

@@ -42,6 +42,15 @@ public final class FreeSlip extends LateralMotion {
   }
 
   @Override
+  public double rollAcceleration(
+      double[] state, double sideslip, double yawRate, double aileron, double rudder) {
+    double p = state[ROLL_RATE];
+    double moment = roll.at(sideslip, p, yawRate, aileron, rudder);
+    double yawing = yaw.at(sideslip, p, yawRate, aileron, rudder);
+    return (izz * moment + ixz * yawing) / determinant;
+  }
+
+  @Override
   public double sideslip(double time, double[] state, double aileron, double rudder) {
     return state[SIDESLIP];
   }

@@ -95,6 +95,13 @@ public final class SettledSlip extends LateralMotion {
   }
 
   @Override
+  public double rollAcceleration(
+      double[] state, double sideslip, double yawRate, double aileron, double rudder) {
+    return model().rollMoment().at(sideslip, state[ROLL_RATE], yawRate, aileron, rudder)
+        / rollInertia;
+  }
+
+  @Override
   public double[][] linearised() {
     double perBank = momentum * weightTurnPerBank();
     return new double[][] {
