@@ -54,7 +54,7 @@ public record ControlRun(double angleAtPlus, double angleAtMinus, SurfaceDynamic
    * @return the position, not beyond −1 or 1
    */
   public static double atStops(double position) {
-    return Math.max(-1, Math.min(1, position));
+    return position > 1 ? 1 : position < -1 ? -1 : position;
   }
 
   /**

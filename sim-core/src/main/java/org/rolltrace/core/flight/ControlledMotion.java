@@ -1,7 +1,6 @@
 package org.rolltrace.core.flight;
 
 import java.util.Optional;
-import org.hipparchus.ode.OrdinaryDifferentialEquation;
 import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.motion.LateralMotion;
 import org.rolltrace.core.motion.StalledRoll;
@@ -21,7 +20,6 @@ final class ControlledMotion {
   private final Optional<StalledRoll> stalled;
   private final AddedMoments withStall = new AddedMoments();
   private final int states;
-  private final double[] rates;
 
   ControlledMotion(FlightPlan plan, Movement stickMovement, Movement pedalMovement) {
     this.plan = plan;
@@ -49,7 +47,6 @@ final class ControlledMotion {
     next += power.states();
     this.stalled = plan.stalled();
     this.states = next;
-    this.rates = new double[states];
   }
 
   SurfaceDrive stick() {
@@ -88,16 +85,18 @@ final class ControlledMotion {
     double aileron = stick.angle(controlTime, state);
     double rudder = pedal.angle(controlTime, state);
     AddedMoments added = added(controlTime, state, aileron, rudder);
-    motion.rates(controlTime, state, aileron, rudder, added, rates);
+    double sideslip = motion.sideslip(controlTime, state, aileron, rudder, added);
+    double yawRate = motion.yawRate(controlTime, state, aileron, rudder, added);
     row[Channel.BANK.column()] = state[LateralMotion.BANK];
     row[Channel.ROLL_RATE.column()] = state[LateralMotion.ROLL_RATE];
-    row[Channel.YAW_RATE.column()] = motion.yawRate(controlTime, state, aileron, rudder, added);
-    row[Channel.SIDESLIP.column()] = motion.sideslip(controlTime, state, aileron, rudder, added);
+    row[Channel.YAW_RATE.column()] = yawRate;
+    row[Channel.SIDESLIP.column()] = sideslip;
     row[Channel.STICK.column()] = stick.position(controlTime);
     row[Channel.PEDAL.column()] = pedal.position(controlTime);
     row[Channel.AILERON.column()] = aileron;
     row[Channel.RUDDER.column()] = rudder;
-    row[Channel.ROLL_ACCELERATION.column()] = rates[LateralMotion.ROLL_RATE];
+    row[Channel.ROLL_ACCELERATION.column()] =
+        motion.rollAcceleration(state, sideslip, yawRate, aileron, rudder, added);
     row[Channel.POWER.column()] = power.power(controlTime, state);
     row[Channel.PROPELLER_ROLL_MOMENT.column()] = power.rollMoment();
     row[Channel.PROPELLER_YAW_MOMENT.column()] = power.yawMoment();
@@ -122,34 +121,27 @@ final class ControlledMotion {
   }
 
   /** The equations between two breakpoints; controls never pass {@code last}. */
-  OrdinaryDifferentialEquation until(double last) {
+  Equations until(double last) {
     return new Stretch(last);
   }
 
-  private final class Stretch implements OrdinaryDifferentialEquation {
+  private final class Stretch extends Equations {
     private final double last;
 
     Stretch(double last) {
+      super(states);
       this.last = last;
     }
 
     @Override
-    public int getDimension() {
-      return states;
-    }
-
-    @Override
-    public double[] computeDerivatives(double time, double[] state) {
+    void rates(double time, double[] state, double[] rates) {
       double within = Math.min(time, last);
-      double[] derivatives = new double[state.length];
       double aileron = stick.angle(within, state);
       double rudder = pedal.angle(within, state);
-      motion.rates(
-          within, state, aileron, rudder, added(within, state, aileron, rudder), derivatives);
-      stick.rate(within, state, derivatives);
-      pedal.rate(within, state, derivatives);
-      power.rate(within, state, derivatives);
-      return derivatives;
+      motion.rates(within, state, aileron, rudder, added(within, state, aileron, rudder), rates);
+      stick.rate(within, state, rates);
+      pedal.rate(within, state, rates);
+      power.rate(within, state, rates);
     }
   }
 }

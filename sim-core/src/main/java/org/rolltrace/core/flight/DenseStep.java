@@ -1,102 +1,124 @@
 package org.rolltrace.core.flight;
 
+import java.util.function.DoublePredicate;
+import org.hipparchus.ode.EquationsMapper;
 import org.hipparchus.ode.ODEStateAndDerivative;
-import org.hipparchus.ode.sampling.ODEStateInterpolator;
+import org.hipparchus.ode.sampling.AbstractODEStateInterpolator;
 
-/**
- * The dense output of one step as a polynomial that is cheap to evaluate many times.
- *
- * <p>The dense output of the method is a polynomial of degree 7 in θ = (t − t₀)/h whose values and
- * slopes at both ends are those of the step. So it is the cubic that has these, plus θ²(1 − θ)²
- * times another cubic, which four values inside the step fix. What comes out is the interpolator's
- * own value, to rounding.
- */
-final class DenseStep {
-  private static final double[] INSIDE = {0.2, 0.4, 0.6, 0.8};
+/** The dense output of one step: for each state a polynomial of degree 7 in the time. */
+final class DenseStep extends AbstractODEStateInterpolator {
+  /** How many coefficients a polynomial has. */
+  static final int TERMS = 8;
 
-  /** The coefficients of the cubics that are 1 at one of the inside points and 0 at the others. */
-  private static final double[][] LAGRANGE = lagrange();
+  private static final long serialVersionUID = 1;
 
-  private final int dimension;
-  private final double[][] inner;
-  private double start;
-  private double length;
-  private double[] from;
-  private double[] to;
-  private double[] slopeFrom;
-  private double[] slopeTo;
+  /** After these, a part of a second is known to 1e-11 s. */
+  private static final int HALVINGS = 36;
 
-  DenseStep(int dimension) {
-    this.dimension = dimension;
-    this.inner = new double[dimension][4];
+  private final double start;
+  private final double perLength;
+
+  /** The coefficients of the first state, then those of the next. */
+  private final double[] terms;
+
+  /** A whole step. */
+  DenseStep(
+      double[] terms,
+      ODEStateAndDerivative previous,
+      ODEStateAndDerivative current,
+      EquationsMapper mapper) {
+    this(terms, previous, current, previous, current, mapper);
   }
 
-  private static double[][] lagrange() {
-    double[][] cubics = new double[4][];
-    for (int k = 0; k < 4; k++) {
-      double[] cubic = {1, 0, 0, 0};
-      double scale = 1;
-      int degree = 0;
-      for (int m = 0; m < 4; m++) {
-        if (m != k) {
-          for (int i = ++degree; i > 0; i--) {
-            cubic[i] = cubic[i - 1] - INSIDE[m] * cubic[i];
-          }
-          cubic[0] *= -INSIDE[m];
-          scale *= INSIDE[k] - INSIDE[m];
-        }
-      }
-      for (int i = 0; i < 4; i++) {
-        cubic[i] /= scale;
-      }
-      cubics[k] = cubic;
+  private DenseStep(
+      double[] terms,
+      ODEStateAndDerivative wholePrevious,
+      ODEStateAndDerivative wholeCurrent,
+      ODEStateAndDerivative previous,
+      ODEStateAndDerivative current,
+      EquationsMapper mapper) {
+    super(true, wholePrevious, wholeCurrent, previous, current, mapper);
+    this.terms = terms;
+    this.start = wholePrevious.getTime();
+    this.perLength = 1 / (wholeCurrent.getTime() - start);
+  }
+
+  @Override
+  protected DenseStep create(
+      boolean forward,
+      ODEStateAndDerivative wholePrevious,
+      ODEStateAndDerivative wholeCurrent,
+      ODEStateAndDerivative previous,
+      ODEStateAndDerivative current,
+      EquationsMapper mapper) {
+    return new DenseStep(terms, wholePrevious, wholeCurrent, previous, current, mapper);
+  }
+
+  @Override
+  protected ODEStateAndDerivative computeInterpolatedStateAndDerivatives(
+      EquationsMapper mapper, double time, double theta, double gone, double left) {
+    double[] state = new double[mapper.getTotalDimension()];
+    double[] rates = new double[state.length];
+    for (int i = 0; i < state.length; i++) {
+      state[i] = value(terms, i, theta);
+      rates[i] = slope(i, theta) * perLength;
     }
-    return cubics;
+    return mapper.mapStateAndDerivative(time, state, rates);
   }
 
-  /** Takes the step that an interpolator stands for. */
-  void take(ODEStateInterpolator interpolator) {
-    ODEStateAndDerivative previous = interpolator.getPreviousState();
-    ODEStateAndDerivative current = interpolator.getCurrentState();
-    start = previous.getTime();
-    length = current.getTime() - start;
-    from = previous.getPrimaryState();
-    to = current.getPrimaryState();
-    slopeFrom = previous.getPrimaryDerivative();
-    slopeTo = current.getPrimaryDerivative();
-    for (int i = 0; i < dimension; i++) {
-      java.util.Arrays.fill(inner[i], 0);
+  /** The polynomial of a state at a share of the step. */
+  static double value(double[] terms, int state, double theta) {
+    int i = state * TERMS;
+    double low = terms[i] + theta * (terms[i + 1] + theta * (terms[i + 2] + theta * terms[i + 3]));
+    double high =
+        terms[i + 4] + theta * (terms[i + 5] + theta * (terms[i + 6] + theta * terms[i + 7]));
+    double square = theta * theta;
+    return low + square * square * high;
+  }
+
+  private double slope(int state, double theta) {
+    int first = state * TERMS;
+    double sum = 0;
+    for (int power = TERMS - 1; power > 0; power--) {
+      sum = sum * theta + power * terms[first + power];
     }
-    for (int k = 0; k < INSIDE.length; k++) {
-      double theta = INSIDE[k];
-      double bubble = theta * theta * (1 - theta) * (1 - theta);
-      double[] value = interpolator.getInterpolatedState(start + theta * length).getPrimaryState();
-      for (int i = 0; i < dimension; i++) {
-        double rest = (value[i] - hermite(i, theta)) / bubble;
-        for (int c = 0; c < 4; c++) {
-          inner[i][c] += rest * LAGRANGE[k][c];
-        }
-      }
-    }
+    return sum;
   }
 
-  private double hermite(int i, double theta) {
-    double rest = 1 - theta;
-    return from[i] * (1 + 2 * theta) * rest * rest
-        + length * slopeFrom[i] * theta * rest * rest
-        + to[i] * (3 - 2 * theta) * theta * theta
-        - length * slopeTo[i] * theta * theta * rest;
+  private double share(double time) {
+    return (time - start) * perLength;
   }
 
-  /** The state at an instant of the step. */
+  /** All states at an instant of the step. */
   void stateAt(double time, double[] state) {
-    double theta = (time - start) / length;
-    double rest = 1 - theta;
-    double bubble = theta * theta * rest * rest;
-    for (int i = 0; i < dimension; i++) {
-      double[] c = inner[i];
-      state[i] =
-          hermite(i, theta) + bubble * (c[0] + theta * (c[1] + theta * (c[2] + theta * c[3])));
+    double theta = share(time);
+    for (int i = 0; i < state.length; i++) {
+      state[i] = value(terms, i, theta);
     }
+  }
+
+  /** One state at an instant of the step. */
+  double at(int state, double time) {
+    return value(terms, state, share(time));
+  }
+
+  /** The rate of one state at an instant of the step. */
+  double rateAt(int state, double time) {
+    return slope(state, share(time)) * perLength;
+  }
+
+  /** When, in a part of the step, something ends that holds at its beginning. */
+  static double end(double from, double to, DoublePredicate holds) {
+    double low = from;
+    double high = to;
+    for (int i = 0; i < HALVINGS; i++) {
+      double middle = 0.5 * (low + high);
+      if (holds.test(middle)) {
+        low = middle;
+      } else {
+        high = middle;
+      }
+    }
+    return high;
   }
 }

@@ -5,14 +5,12 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.NavigableSet;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import java.util.TreeSet;
 import java.util.stream.DoubleStream;
 import org.hipparchus.exception.MathRuntimeException;
 import org.hipparchus.ode.ODEState;
 import org.hipparchus.ode.ODEStateAndDerivative;
 import org.hipparchus.ode.events.Action;
-import org.hipparchus.ode.nonstiff.DormandPrince853Integrator;
 import org.hipparchus.ode.sampling.ODEStateInterpolator;
 import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.history.TimeHistory;
@@ -29,16 +27,16 @@ public final class Flight {
   private static final int MOST_EVALUATIONS = 20_000_000;
   private static final int MOST_SAMPLES = 1_000_000;
 
-  /** Measures are read off at least this many samples a second, however few are asked for. */
-  private static final double LEAST_RATE = 100;
+  /** Room for samples where something breaks. */
+  private static final int BREAKS = 32;
+
+  /** Room for the samples of a usual outline; the history grows where it is not enough. */
+  private static final int OUTLINE_SAMPLES = 256;
 
   /** Events are looked for at least this often, s, and this many times in a stretch. */
   private static final double LOOK_EVERY = 0.05;
 
   private static final int LOOKS_PER_STRETCH = 16;
-
-  /** The roll rate that an aeroplane may gain while nobody looks at its bank, rad/s. */
-  private static final double QUICKEST_GAIN = 1;
 
   /** A state beyond this has left every range in which the equations mean something, rad, rad/s. */
   private static final double RANGE = 1e6;
@@ -47,27 +45,23 @@ public final class Flight {
   private static final double NANOSECOND = 1e-9;
 
   private final FlightPlan plan;
-  private final FlightSettings settings;
   private final ControlledMotion controlled;
   private final SurfaceDrive stick;
   private final SurfaceDrive pedal;
   private final PowerDrive power;
   private final Optional<PilotInput> leading;
-  private final DormandPrince853Integrator integrator;
+  private final LeanIntegrator integrator;
   private final TimeHistory.Recorder recorder;
   private final List<FlightEvent> events = new ArrayList<>();
-  private final List<Double> openCaptures;
+  private final BankCaptures captures;
   private final double[] sample;
   private final double[] row = new double[Channel.COUNT];
-  private final DenseStep step;
-  private OptionalDouble captureFrom = OptionalDouble.empty();
-  private final int samplesPerEven;
-  private int nextSample;
+  private boolean capturesToBegin;
+  private final SampleClock clock;
   private double reached;
 
-  private Flight(FlightPlan plan, FlightSettings settings) {
+  private Flight(FlightPlan plan, FlightSettings settings, SampleClock clock, int expectedSamples) {
     this.plan = plan;
-    this.settings = settings;
     this.leading = plan.programme().leading(plan.duration());
     this.controlled =
         new ControlledMotion(plan, plan.programme().stick(), plan.programme().pedal());
@@ -76,19 +70,17 @@ public final class Flight {
     this.power = controlled.power();
     int states = controlled.dimension();
     this.sample = new double[states];
-    this.step = new DenseStep(states);
     this.integrator =
-        new DormandPrince853Integrator(
+        new LeanIntegrator(
+            states,
             SMALLEST_STEP,
             LARGEST_STEP,
             settings.absoluteTolerance(),
             settings.relativeTolerance());
-    this.openCaptures = new ArrayList<>(plan.captures());
-    this.samplesPerEven = samplesPerEven(settings);
-    this.recorder =
-        TimeHistory.recorder(
-            settings.sampleRate(),
-            (int) (plan.duration() * settings.sampleRate() * samplesPerEven) + 32);
+    this.captures = new BankCaptures(plan.captures());
+    this.capturesToBegin = leading.isPresent();
+    this.clock = clock;
+    this.recorder = TimeHistory.recorder(settings.sampleRate(), expectedSamples);
   }
 
   /**
@@ -101,25 +93,32 @@ public final class Flight {
    *     history would be too long
    */
   public static Flown fly(FlightPlan plan, FlightSettings settings) {
-    if (plan.duration() * settings.sampleRate() * samplesPerEven(settings) > MOST_SAMPLES) {
-      throw new CalculationException(
-          "the history would have more than "
-              + MOST_SAMPLES
-              + " samples; shorten the duration or lower the sample rate");
+    EvenClock clock = new EvenClock(settings.sampleRate());
+    double samples = plan.duration() * clock.samplesPerSecond();
+    if (samples > MOST_SAMPLES) {
+      throw tooManySamples();
     }
-    return new Flight(plan, settings).run();
+    return new Flight(plan, settings, clock, (int) samples + BREAKS).run();
   }
 
-  private static int samplesPerEven(FlightSettings settings) {
-    return (int) Math.max(1, Math.ceil(LEAST_RATE / settings.sampleRate()));
+  /**
+   * Computes a manoeuvre with only as many samples as measures need: a few in each step of the
+   * integration.
+   *
+   * @param plan what is flown
+   * @param settings how finely; there are no even samples, so their rate does not matter
+   * @return its history and events
+   * @throws CalculationException as {@link #fly} does
+   */
+  public static Flown outline(FlightPlan plan, FlightSettings settings) {
+    return new Flight(plan, settings, new StepClock(), OUTLINE_SAMPLES).run();
   }
 
-  /** When the next sample is due; every {@code samplesPerEven}-th is exactly an even one. */
-  private double nextSampleTime() {
-    int even = nextSample / samplesPerEven;
-    return nextSample == even * samplesPerEven
-        ? even / settings.sampleRate()
-        : nextSample / (samplesPerEven * settings.sampleRate());
+  private static CalculationException tooManySamples() {
+    return new CalculationException(
+        "the history would have more than "
+            + MOST_SAMPLES
+            + " samples; shorten the duration or lower the sample rate");
   }
 
   private Flown run() {
@@ -145,16 +144,15 @@ public final class Flight {
   private double[] flyStretch(double start, double end, double[] state) {
     // At the end of the stretch a control that jumps there has not jumped yet.
     double last = Math.nextDown(end);
-    if (leading.isPresent() && captureFrom.isEmpty() && start > leadingStart() - NANOSECOND) {
-      captureFrom = OptionalDouble.of(state[LateralMotion.BANK]);
+    if (capturesToBegin && start > leading.orElseThrow().shape().start() - NANOSECOND) {
+      captures.begin(state[LateralMotion.BANK], Math.signum(leading.orElseThrow().shape().size()));
+      capturesToBegin = false;
     }
     begin(stick, start, state);
     begin(pedal, start, state);
     beginTravel(power.lever(), start);
     record(start, start, state);
-    if (nextSampleTime() <= start) {
-      nextSample++;
-    }
+    clock.pass(start);
 
     integrator.clearEventDetectors();
     integrator.clearStepHandlers();
@@ -163,7 +161,6 @@ public final class Flight {
     addDetectors(stick, look, last);
     addDetectors(pedal, look, last);
     addStop(power.lever(), look, last);
-    captureFrom.ifPresent(bank -> addCaptures(bank, look));
     integrator.addStepHandler(interpolator -> takeSamples(interpolator, end));
 
     double[] reachedState;
@@ -183,17 +180,12 @@ public final class Flight {
           failure);
     }
     record(end, last, reachedState);
-    if (nextSampleTime() <= end) {
-      nextSample++;
-    }
+    clock.pass(end);
     return reachedState;
   }
 
-  private double leadingStart() {
-    return leading.orElseThrow().shape().start();
-  }
-
   private void beginTravel(Travel travel, double time) {
+    travel.enter(time);
     if (travel.meetsOrLeavesStop(time)) {
       events.add(new FlightEvent.Stop(time, travel.control(), travel.isOnStop()));
     }
@@ -244,33 +236,10 @@ public final class Flight {
     }
   }
 
-  private void addCaptures(double fromBank, double look) {
-    double direction = Math.signum(leading.orElseThrow().shape().size());
-    for (double change : openCaptures) {
-      integrator.addEventDetector(
-          new EventAt(
-              (s, forward) -> Math.max(look, timeToReach(s, direction, fromBank, change)),
-              s -> direction * (s.getPrimaryState()[LateralMotion.BANK] - fromBank) - change,
-              (s, detector, increasing) -> {
-                if (increasing && openCaptures.remove(change)) {
-                  events.add(new FlightEvent.BankCapture(s.getTime(), change));
-                }
-                return Action.CONTINUE;
-              }));
-    }
-  }
-
-  /** A time in which the bank cannot have changed by what is left, whatever the controls do. */
-  private static double timeToReach(
-      ODEStateAndDerivative at, double direction, double fromBank, double change) {
-    double[] state = at.getPrimaryState();
-    double left = Math.abs(direction * (state[LateralMotion.BANK] - fromBank) - change);
-    return left / (2 * Math.abs(state[LateralMotion.ROLL_RATE]) + QUICKEST_GAIN);
-  }
-
   private void takeSamples(ODEStateInterpolator interpolator, double stretchEnd) {
     ODEStateAndDerivative current = interpolator.getCurrentState();
-    for (double value : current.getPrimaryState()) {
+    double[] state = current.getPrimaryState();
+    for (double value : state) {
       if (!(Math.abs(value) <= RANGE)) {
         throw new CalculationException(
             "the motion leaves the finite range after "
@@ -278,17 +247,22 @@ public final class Flight {
                 + " s: the aeroplane diverges; look at its modes, or shorten the duration");
       }
     }
-    double time = nextSampleTime();
-    if (time <= current.getTime() && time < stretchEnd) {
-      step.take(interpolator);
-      while (time <= current.getTime() && time < stretchEnd) {
-        step.stateAt(time, sample);
-        record(time, time, sample);
-        nextSample++;
-        time = nextSampleTime();
-      }
-    }
+    DenseStep step = (DenseStep) interpolator;
+    double from = interpolator.getPreviousState().getTime();
     reached = current.getTime();
+    clock.enter(from, reached);
+    if (recorder.size() > 2 * MOST_SAMPLES) {
+      throw tooManySamples();
+    }
+    while (clock.due() <= reached && clock.due() < stretchEnd) {
+      double time = clock.due();
+      step.stateAt(time, sample);
+      record(time, time, sample);
+      captures.look(step, from, time, sample, events);
+      from = time;
+      clock.advance();
+    }
+    captures.look(step, from, reached, state, events);
   }
 
   /** Takes a sample where a slope breaks: the largest roll acceleration is often just there. */

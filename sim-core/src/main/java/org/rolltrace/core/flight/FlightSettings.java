@@ -15,6 +15,12 @@ public record FlightSettings(
   /** 1e-9 relative, 1e-10 rad absolute, 100 samples a second. */
   public static final FlightSettings DEFAULT = new FlightSettings(1e-9, 1e-10, 100);
 
+  /**
+   * For the measures of many rolls: 1e-7 relative, 1e-8 rad absolute. Samples then are still within
+   * 5e-3 deg and deg/s of a run at 1e-12.
+   */
+  public static final FlightSettings OUTLINE = new FlightSettings(1e-7, 1e-8, 100);
+
   public FlightSettings {
     Check.inRange("relative tolerance", relativeTolerance, 1e-13, 1e-3);
     Check.inRange("absolute tolerance, rad,", absoluteTolerance, 1e-15, 1e-3);

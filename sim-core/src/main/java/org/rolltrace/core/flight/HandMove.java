@@ -1,6 +1,7 @@
 package org.rolltrace.core.flight;
 
 import org.rolltrace.core.pilot.Movement;
+import org.rolltrace.core.pilot.Stroke;
 
 /** A straight move of a hand that is made while it is flown: the last one is all there is. */
 final class HandMove implements Movement {
@@ -30,6 +31,11 @@ final class HandMove implements Movement {
   @Override
   public double rateAt(double time) {
     return rate;
+  }
+
+  @Override
+  public Stroke from(double start) {
+    return this;
   }
 
   @Override

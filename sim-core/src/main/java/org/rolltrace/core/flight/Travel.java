@@ -2,6 +2,7 @@ package org.rolltrace.core.flight;
 
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.Movement;
+import org.rolltrace.core.pilot.Stroke;
 
 /** Where the hand puts one control, between its stops. */
 final class Travel {
@@ -13,6 +14,7 @@ final class Travel {
   private final double start;
   private final double low;
   private final double high;
+  private Stroke stroke;
   private boolean onStop;
 
   /**
@@ -23,9 +25,15 @@ final class Travel {
   Travel(Control control, Movement movement, double start, double low, double high) {
     this.control = control;
     this.movement = movement;
+    this.stroke = movement;
     this.start = start;
     this.low = low;
     this.high = high;
+  }
+
+  /** Comes to a stretch between two breakpoints. */
+  void enter(double time) {
+    stroke = movement.from(time);
   }
 
   Control control() {
@@ -63,11 +71,11 @@ final class Travel {
 
   /** Where the hand wants it, stops or not. */
   double wanted(double time) {
-    return start + movement.positionAt(time);
+    return start + stroke.positionAt(time);
   }
 
   double wantedRate(double time) {
-    return movement.rateAt(time);
+    return stroke.rateAt(time);
   }
 
   double position(double time) {

@@ -10,11 +10,14 @@ public final class TimeHistory {
   private final double sampleRate;
   private final double[] times;
 
-  /** Row after row of all channels. */
-  private final double[] samples;
+  private final int size;
 
-  private TimeHistory(double sampleRate, double[] times, double[] samples) {
+  /** The samples of each channel at its column. */
+  private final double[][] samples;
+
+  private TimeHistory(double sampleRate, int size, double[] times, double[][] samples) {
     this.sampleRate = sampleRate;
+    this.size = size;
     this.times = times;
     this.samples = samples;
   }
@@ -34,7 +37,7 @@ public final class TimeHistory {
    * @return the number
    */
   public int size() {
-    return times.length;
+    return size;
   }
 
   /**
@@ -55,7 +58,7 @@ public final class TimeHistory {
    * @return the value in the channel's SI unit
    */
   public double value(Channel channel, int index) {
-    return samples[index * Channel.COUNT + channel.column()];
+    return samples[channel.column()][index];
   }
 
   /**
@@ -65,11 +68,25 @@ public final class TimeHistory {
    * @return a copy of the values, in the channel's SI unit
    */
   public double[] values(Channel channel) {
-    double[] values = new double[times.length];
-    for (int i = 0; i < values.length; i++) {
-      values[i] = value(channel, i);
+    return Arrays.copyOf(samples[channel.column()], size);
+  }
+
+  /**
+   * The largest sample of a channel, whatever its sign.
+   *
+   * @param channel the quantity
+   * @return 0 or more, in the channel's SI unit
+   */
+  public double largest(Channel channel) {
+    double[] values = samples[channel.column()];
+    double largest = 0;
+    for (int i = 0; i < size; i++) {
+      double value = Math.abs(values[i]);
+      if (value > largest) {
+        largest = value;
+      }
     }
-    return values;
+    return largest;
   }
 
   /**
@@ -80,7 +97,7 @@ public final class TimeHistory {
    */
   public int lastAt(double time) {
     int low = 0;
-    int high = times.length;
+    int high = size;
     while (high - low > 1) {
       int middle = (low + high) >>> 1;
       if (times[middle] <= time) {
@@ -99,10 +116,10 @@ public final class TimeHistory {
    * @return their indices
    */
   public int[] evenSamples() {
-    int[] indices = new int[times.length];
+    int[] indices = new int[size];
     int count = 0;
-    for (int i = 0; i < times.length; i++) {
-      boolean lastOfInstant = i + 1 == times.length || times[i + 1] > times[i];
+    for (int i = 0; i < size; i++) {
+      boolean lastOfInstant = i + 1 == size || times[i + 1] > times[i];
       if (times[i] == count / sampleRate && lastOfInstant) {
         indices[count++] = i;
       }
@@ -125,13 +142,13 @@ public final class TimeHistory {
   public static final class Recorder {
     private final double sampleRate;
     private double[] times;
-    private double[] samples;
+    private final double[][] samples;
     private int size;
 
     private Recorder(double sampleRate, int capacity) {
       this.sampleRate = sampleRate;
       this.times = new double[Math.max(capacity, 4)];
-      this.samples = new double[times.length * Channel.COUNT];
+      this.samples = new double[Channel.COUNT][times.length];
     }
 
     /**
@@ -157,10 +174,14 @@ public final class TimeHistory {
       }
       if (size == times.length) {
         times = Arrays.copyOf(times, 2 * size);
-        samples = Arrays.copyOf(samples, 2 * size * Channel.COUNT);
+        for (int i = 0; i < samples.length; i++) {
+          samples[i] = Arrays.copyOf(samples[i], 2 * size);
+        }
       }
       times[size] = time;
-      System.arraycopy(row, 0, samples, size * Channel.COUNT, Channel.COUNT);
+      for (int i = 0; i < samples.length; i++) {
+        samples[i][size] = row[i];
+      }
       size++;
     }
 
@@ -168,9 +189,8 @@ public final class TimeHistory {
       if (size == 0 || times[size - 1] != time) {
         return false;
       }
-      int start = (size - 1) * Channel.COUNT;
-      for (int i = 0; i < Channel.COUNT; i++) {
-        if (samples[start + i] != row[i]) {
+      for (int i = 0; i < samples.length; i++) {
+        if (samples[i][size - 1] != row[i]) {
           return false;
         }
       }
@@ -178,13 +198,21 @@ public final class TimeHistory {
     }
 
     /**
-     * The history so far.
+     * The number of samples so far.
+     *
+     * @return the number
+     */
+    public int size() {
+      return size;
+    }
+
+    /**
+     * The history so far; the recorder takes no more samples.
      *
      * @return the history
      */
     public TimeHistory finish() {
-      return new TimeHistory(
-          sampleRate, Arrays.copyOf(times, size), Arrays.copyOf(samples, size * Channel.COUNT));
+      return new TimeHistory(sampleRate, size, times, samples);
     }
   }
 }

@@ -2,7 +2,6 @@ package org.rolltrace.core.measures;
 
 import static org.rolltrace.core.measures.MeasureDefinition.BANK_COAST;
 
-import java.util.Locale;
 import java.util.OptionalDouble;
 import org.rolltrace.core.history.TimeHistory;
 
@@ -34,23 +33,15 @@ final class Coast {
       boolean fades = rate.value(i + 1) <= faded;
       boolean bottoms = rate.slope(i) < 0 && rate.slope(i + 1) >= 0;
       if (fades || bottoms) {
-        double end = fades ? rate.crossing(i, faded, rate.time(i)) : bottom(rate, i);
+        double end = fades ? rate.crossing(i, faded, rate.time(i)) : rate.turn(i);
         return Measure.of(
             BANK_COAST,
             bank.at(end) - bank.at(start),
-            String.format(
-                Locale.ROOT,
+            Remark.of(
                 "in %.2f s; roll rate left over %.2g deg/s",
-                end - start,
-                Math.toDegrees(side * rate.at(end))));
+                end - start, Math.toDegrees(side * rate.at(end))));
       }
     }
     return Measure.missing(BANK_COAST, "the roll rate has not faded by the end of the manoeuvre");
-  }
-
-  /** Where the slope, taken as straight between two samples, passes through zero. */
-  private static double bottom(Curve rate, int index) {
-    double share = rate.slope(index) / (rate.slope(index) - rate.slope(index + 1));
-    return rate.time(index) + share * (rate.time(index + 1) - rate.time(index));
   }
 }

@@ -66,7 +66,8 @@ final class Curve {
     return index + 1 < size() ? inInterval(index, time) : value(index);
   }
 
-  private double inInterval(int index, double time) {
+  /** The cubic between two samples at an instant. */
+  double inInterval(int index, double time) {
     double h = time(index + 1) - time(index);
     if (h <= 0) {
       return value(index + 1);
@@ -125,28 +126,59 @@ final class Curve {
       if (time(i) >= from) {
         best = Math.max(best, value(i));
       }
-      if (i + 1 < size() && slope(i) > 0 && slope(i + 1) < 0) {
-        best = Math.max(best, topInside(i, from, to));
+      if (i + 1 < size() && slope(i) > 0 && turnsIn(i)) {
+        best = Math.max(best, at(Math.max(from, Math.min(to, turn(i)))));
       }
     }
     return best;
   }
 
-  /** The top of the cubic between two samples, by golden section: it has one there. */
-  private double topInside(int index, double from, double to) {
-    double low = Math.max(time(index), from);
-    double high = Math.min(time(index + 1), to);
-    double ratio = 0.5 * (Math.sqrt(5) - 1);
-    for (int i = 0; i < HALVINGS && high > low; i++) {
-      double one = high - ratio * (high - low);
-      double two = low + ratio * (high - low);
-      if (inInterval(index, one) > inInterval(index, two)) {
-        high = two;
-      } else {
-        low = one;
+  /** Whether the slope changes its sign between two samples. */
+  boolean turnsIn(int index) {
+    return slope(index) * slope(index + 1) < 0 && time(index + 1) > time(index);
+  }
+
+  /** When the cubic between two samples turns, where its slope changes its sign. */
+  double turn(int index) {
+    double h = time(index + 1) - time(index);
+    if (h <= 0) {
+      return time(index);
+    }
+    double rise = value(index + 1) - value(index);
+    double first = h * slope(index);
+    double last = h * slope(index + 1);
+    double linear = 3 * rise - 2 * first - last;
+    double square = 3 * (first + last - 2 * rise);
+    double root = Math.copySign(Math.sqrt(linear * linear - square * first), first);
+    return time(index) + h * (first / (root - linear));
+  }
+
+  /** The largest slope from an instant on: of a sample, or of the cubic on either side of it. */
+  double steepest(double from) {
+    int first = indexAt(from);
+    int steepest = first;
+    for (int i = first; i < size(); i++) {
+      if (slope(i) > slope(steepest)) {
+        steepest = i;
       }
     }
-    return high > low ? inInterval(index, 0.5 * (low + high)) : value(index);
+    return Math.max(
+        steepest > first ? steepestInside(steepest - 1) : slope(steepest),
+        steepestInside(steepest));
+  }
+
+  private double steepestInside(int index) {
+    double steepest = slope(index);
+    if (index + 1 == size()) {
+      return steepest;
+    }
+    steepest = Math.max(steepest, slope(index + 1));
+    double h = time(index + 1) - time(index);
+    double rise = (value(index + 1) - value(index)) / h;
+    double linear = 3 * rise - 2 * slope(index) - slope(index + 1);
+    double square = 3 * (slope(index) + slope(index + 1) - 2 * rise);
+    boolean peaks = h > 0 && linear > 0 && linear + square < 0;
+    return peaks ? slope(index) - linear * linear / square : steepest;
   }
 
   /** The mean over [from, to], from &lt; to. */

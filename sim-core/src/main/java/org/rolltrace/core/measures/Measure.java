@@ -8,15 +8,15 @@ import org.rolltrace.core.quantity.Check;
  *
  * @param definition what it is
  * @param value in the unit of the definition; empty when it could not be had
- * @param remark the reason when there is no value; else what the reader should know beside it, or
+ * @param beside the reason when there is no value; else what the reader should know beside it, or
  *     nothing
  */
-public record Measure(MeasureDefinition definition, OptionalDouble value, String remark) {
+public record Measure(MeasureDefinition definition, OptionalDouble value, Remark beside) {
 
   public Measure {
     if (value.isPresent()) {
       Check.finite(definition.name(), value.getAsDouble());
-    } else if (remark.isBlank()) {
+    } else if (beside.pattern().isBlank()) {
       throw new IllegalArgumentException(
           definition.name() + " has neither a value nor a reason; expected one of them");
     }
@@ -30,7 +30,7 @@ public record Measure(MeasureDefinition definition, OptionalDouble value, String
    * @return the measure
    */
   public static Measure of(MeasureDefinition definition, double value) {
-    return new Measure(definition, OptionalDouble.of(value), "");
+    return new Measure(definition, OptionalDouble.of(value), Remark.NONE);
   }
 
   /**
@@ -42,7 +42,11 @@ public record Measure(MeasureDefinition definition, OptionalDouble value, String
    * @return the measure
    */
   public static Measure of(MeasureDefinition definition, double value, String remark) {
-    return new Measure(definition, OptionalDouble.of(value), remark);
+    return of(definition, value, Remark.of(remark));
+  }
+
+  static Measure of(MeasureDefinition definition, double value, Remark beside) {
+    return new Measure(definition, OptionalDouble.of(value), beside);
   }
 
   /**
@@ -53,6 +57,19 @@ public record Measure(MeasureDefinition definition, OptionalDouble value, String
    * @return the measure
    */
   public static Measure missing(MeasureDefinition definition, String reason) {
+    return missing(definition, Remark.of(reason));
+  }
+
+  static Measure missing(MeasureDefinition definition, Remark reason) {
     return new Measure(definition, OptionalDouble.empty(), reason);
+  }
+
+  /**
+   * The reason when there is no value; else what the reader should know beside it.
+   *
+   * @return a sentence, or nothing
+   */
+  public String remark() {
+    return beside.text();
   }
 }

@@ -4,10 +4,8 @@ import static org.rolltrace.core.measures.MeasureDefinition.*;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.Mode;
 import org.rolltrace.core.motion.SteadyState;
@@ -32,6 +30,8 @@ final class RollEntry {
 
   /** A turn that drifts by more than this before the control moves is not steady. */
   private static final double BANK_AGREES_WITHIN = Math.toRadians(0.1);
+
+  private static final String WINDOW = "from %.2f to %.2f s, at banks from %.0f to %.0f deg";
 
   private static final String ALREADY_ROLLING =
       "the roll rate is at that level already when the control first moves";
@@ -106,7 +106,7 @@ final class RollEntry {
       measures.add(timeToBankChange(degrees, input.start()));
     }
     measures.add(bankToBank(input, direction));
-    measures.add(rollAcceleration(input, direction));
+    measures.add(rollAcceleration(rate, input, direction));
     measures.add(helix(HELIX_ANGLE_PEAK, peak));
     measures.add(helix(HELIX_ANGLE_STEADY, steady));
     measures.add(tipIncidence(helix(HELIX_ANGLE_PEAK, peak)));
@@ -123,7 +123,7 @@ final class RollEntry {
     if (!(roll.root() < 0)) {
       return Measure.missing(
           ROLL_MODE_TIME_CONSTANT,
-          format("the roll is not damped: its root is %.4g 1/s", roll.root()));
+          Remark.of("the roll is not damped: its root is %.4g 1/s", roll.root()));
     }
     return switch (manoeuvre.slip()) {
       case FREE -> Measure.of(ROLL_MODE_TIME_CONSTANT, roll.timeConstant());
@@ -148,21 +148,25 @@ final class RollEntry {
       return Measure.missing(STEADY_ROLL_RATE, "no held stick in this scenario");
     }
     if (timeConstant.value().isEmpty()) {
-      return Measure.missing(STEADY_ROLL_RATE, timeConstant.remark());
+      return Measure.missing(STEADY_ROLL_RATE, timeConstant.beside());
     }
     double tau = timeConstant.value().getAsDouble();
     double length = hold.get().length();
     double end = hold.get().to();
     double window = Math.max(tau, LEAST_SHARE_OF_HOLD * length);
-    String change = "";
+    Remark notReached =
+        Remark.of(
+            "not reached: the stick is held for %.3g s, %.2g time constants", length, length / tau);
     if (length >= HOLD_FOR_STEADY * tau) {
       double mean = rate.mean(end - window, end);
       double relative = rate.spread(end - window, end) / Math.abs(mean);
       if (relative < STEADY_CHANGE) {
         return Measure.of(
-            STEADY_ROLL_RATE, direction * mean, "mean " + windowWords(end - window, end));
+            STEADY_ROLL_RATE, direction * mean, withWindow("mean " + WINDOW, end - window, end));
       }
-      change = format("the roll rate still changes by %.2g %% at the end", 100 * relative);
+      notReached =
+          Remark.of(
+              "not reached: the roll rate still changes by %.2g %% at the end", 100 * relative);
     }
     OptionalDouble period = manoeuvre.dutchRollPeriod();
     if (period.isPresent() && length >= HOLD_FOR_MEAN * tau && length >= period.getAsDouble()) {
@@ -172,28 +176,29 @@ final class RollEntry {
       return Measure.of(
           STEADY_ROLL_RATE,
           direction * mean,
-          format(
-              "mean over the last dutch-roll period of the free equations, %s; it swings by"
-                  + " ±%.2g deg/s",
-              windowWords(from, end), Math.toDegrees(swing)));
+          withWindow(
+              "mean over the last dutch-roll period of the free equations, "
+                  + WINDOW
+                  + "; it swings by ±%.2g deg/s",
+              from,
+              end,
+              Math.toDegrees(swing)));
     }
-    return Measure.missing(
-        STEADY_ROLL_RATE,
-        change.isEmpty()
-            ? format(
-                "not reached: the stick is held for %.3g s, %.2g time constants",
-                length, length / tau)
-            : "not reached: " + change);
+    return Measure.missing(STEADY_ROLL_RATE, notReached);
   }
 
   /**
    * Where a mean was taken: the bank there shows how far the weight and the turn take part in it.
    */
-  private String windowWords(double from, double to) {
+  private Remark withWindow(String pattern, double from, double to, Double... further) {
     Curve bank = Curve.ofBank(manoeuvre.history(), 1, 0);
-    return format(
-        "from %.2f to %.2f s, at banks from %.0f to %.0f deg",
-        from, to, Math.toDegrees(bank.at(from)), Math.toDegrees(bank.at(to)));
+    List<Object> values = new ArrayList<>();
+    values.add(from);
+    values.add(to);
+    values.add(Math.toDegrees(bank.at(from)));
+    values.add(Math.toDegrees(bank.at(to)));
+    values.addAll(List.of(further));
+    return new Remark(pattern, values);
   }
 
   private static Measure responseTimeConstant(
@@ -215,20 +220,21 @@ final class RollEntry {
     if (rate.time(last) > release) {
       last--;
     }
-    int index = last;
-    while (index >= 0
-        && rate.time(index) >= input.start()
-        && within(rate.value(index), low, high)) {
-      index--;
-    }
-    if (index == last) {
+    if (!within(rate.value(last), low, high)) {
       return Measure.missing(SETTLING_TIME, "not settled by the release or the end");
     }
-    if (index < 0 || rate.time(index) < input.start()) {
-      return Measure.of(SETTLING_TIME, 0);
+    for (int i = last - 1; i >= 0 && rate.time(i) >= input.start(); i--) {
+      // what lies between two samples may be outside although they are not
+      double from = rate.turnsIn(i) ? rate.turn(i) : rate.time(i);
+      for (double out : new double[] {from, rate.time(i)}) {
+        double value = rate.inInterval(i, out);
+        if (!within(value, low, high)) {
+          double bound = value < low ? low : high;
+          return Measure.of(SETTLING_TIME, rate.crossing(i, bound, out) - input.start());
+        }
+      }
     }
-    double bound = rate.value(index) < low ? low : high;
-    return Measure.of(SETTLING_TIME, rate.crossing(index, bound, rate.time(index)) - input.start());
+    return Measure.of(SETTLING_TIME, 0);
   }
 
   private static boolean within(double value, double low, double high) {
@@ -272,13 +278,8 @@ final class RollEntry {
         .orElse(Measure.missing(TIME_BANK_TO_BANK_30, "not reached in this manoeuvre"));
   }
 
-  private Measure rollAcceleration(InputShape input, double direction) {
-    double best = Double.NEGATIVE_INFINITY;
-    for (int i = 0; i < manoeuvre.history().size(); i++) {
-      if (manoeuvre.history().time(i) >= input.start()) {
-        best = Math.max(best, direction * manoeuvre.history().value(Channel.ROLL_ACCELERATION, i));
-      }
-    }
+  private static Measure rollAcceleration(Curve rate, InputShape input, double direction) {
+    double best = rate.steepest(input.start());
     return best > 0
         ? Measure.of(ROLL_ACCELERATION, direction * best)
         : Measure.missing(ROLL_ACCELERATION, "it never accelerates in the commanded direction");
@@ -287,16 +288,12 @@ final class RollEntry {
   private Measure helix(MeasureDefinition definition, Measure rate) {
     return rate.value().isPresent()
         ? Measure.of(definition, rate.value().getAsDouble() * manoeuvre.halfSpanOverSpeed())
-        : Measure.missing(definition, rate.remark());
+        : Measure.missing(definition, rate.beside());
   }
 
   private static Measure tipIncidence(Measure helix) {
     return helix.value().isPresent()
         ? Measure.of(TIP_INCIDENCE, Math.atan(helix.value().getAsDouble()))
-        : Measure.missing(TIP_INCIDENCE, helix.remark());
-  }
-
-  private static String format(String pattern, Object... values) {
-    return String.format(Locale.ROOT, pattern, values);
+        : Measure.missing(TIP_INCIDENCE, helix.beside());
   }
 }

@@ -3,7 +3,6 @@ package org.rolltrace.core.measures;
 import static org.rolltrace.core.measures.MeasureDefinition.*;
 
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.rolltrace.core.history.TimeHistory;
@@ -81,17 +80,17 @@ final class WingsLevelReturn {
     if (doubled.isPresent()) {
       return Measure.missing(
           RETURN_TIME_TO_HALF,
-          format("diverging: the bank doubles in %.3g s", doubled.getAsDouble() - start));
+          Remark.of("diverging: the bank doubles in %.3g s", doubled.getAsDouble() - start));
     }
     Optional<Mode.Aperiodic> spiral = manoeuvre.modes().spiral();
     if (last > size && spiral.isPresent() && spiral.get().root() > 0) {
       return Measure.missing(
           RETURN_TIME_TO_HALF,
-          format("diverging: the spiral doubles in %.3g s", spiral.get().timeToHalfOrDouble()));
+          Remark.of("diverging: the spiral doubles in %.3g s", spiral.get().timeToHalfOrDouble()));
     }
     return Measure.missing(
         RETURN_TIME_TO_HALF,
-        format(
+        Remark.of(
             "not reached in %.3g s: the bank is then %.3g deg; lengthen the duration",
             end - start, Math.toDegrees(last)));
   }
@@ -101,7 +100,7 @@ final class WingsLevelReturn {
     if (Math.abs(bank.value(last)) > LEVEL) {
       return Measure.missing(
           RETURN_TIME_TO_FIVE_DEGREES,
-          format(
+          Remark.of(
               "not reached in %.3g s: the bank is then %.3g deg",
               end - start, Math.toDegrees(bank.value(last))));
     }
@@ -123,9 +122,5 @@ final class WingsLevelReturn {
       least = Math.min(least, bank.value(i));
     }
     return least;
-  }
-
-  private static String format(String pattern, Object... values) {
-    return String.format(Locale.ROOT, pattern, values);
   }
 }

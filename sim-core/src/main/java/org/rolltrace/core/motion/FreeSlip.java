@@ -50,6 +50,20 @@ public final class FreeSlip extends LateralMotion {
   }
 
   @Override
+  public double rollAcceleration(
+      double[] state,
+      double sideslip,
+      double yawRate,
+      double aileron,
+      double rudder,
+      AddedMoments added) {
+    double p = state[ROLL_RATE];
+    double moment = roll.at(sideslip, p, yawRate, aileron, rudder) + added.roll();
+    double yawing = yaw.at(sideslip, p, yawRate, aileron, rudder) + added.yaw();
+    return (izz * moment + ixz * yawing) / determinant;
+  }
+
+  @Override
   public double sideslip(
       double time, double[] state, double aileron, double rudder, AddedMoments added) {
     return state[SIDESLIP];

@@ -13,8 +13,16 @@ import org.rolltrace.core.propeller.AddedMoments;
  */
 public final class HeldSlip extends LateralMotion {
   private final LinearLoad roll;
+  private final LinearLoad yaw;
   private final double rollInertia;
+
+  /** kg m²; NaN when not known. */
+  private final double yawInertia;
+
   private final HeldSideslip held;
+
+  /** Whether the ball stays in the middle, and nothing has to be looked up. */
+  private final boolean centred;
 
   /** q̄ S CY_β/(m V), 1/s; 0 where no slip is held and the mass need not be known. */
   private final double turnPerSlip;
@@ -22,8 +30,11 @@ public final class HeldSlip extends LateralMotion {
   HeldSlip(LateralModel model, HeldSideslip held) {
     super(model);
     this.roll = model.rollMoment();
+    this.yaw = model.yawMoment();
     this.rollInertia = model.inertia().roll();
+    this.yawInertia = model.inertia().yaw().orElse(Double.NaN);
     this.held = held;
+    this.centred = held.isNone();
     if (!held.isNone() && model.mass().isEmpty()) {
       throw new IllegalArgumentException("a slip held against time needs the mass");
     }
@@ -49,20 +60,33 @@ public final class HeldSlip extends LateralMotion {
     double yawRate = yawRate(time, state, aileron, rudder, added);
     rates[BANK] = bankRate(state[BANK], state[ROLL_RATE], yawRate);
     rates[ROLL_RATE] =
-        (roll.at(held.at(time), state[ROLL_RATE], yawRate, aileron, rudder) + added.roll())
-            / rollInertia;
+        rollAcceleration(
+            state, sideslip(time, state, aileron, rudder, added), yawRate, aileron, rudder, added);
+  }
+
+  @Override
+  public double rollAcceleration(
+      double[] state,
+      double sideslip,
+      double yawRate,
+      double aileron,
+      double rudder,
+      AddedMoments added) {
+    return (roll.at(sideslip, state[ROLL_RATE], yawRate, aileron, rudder) + added.roll())
+        / rollInertia;
   }
 
   @Override
   public double sideslip(
       double time, double[] state, double aileron, double rudder, AddedMoments added) {
-    return held.at(time);
+    return centred ? 0 : held.at(time);
   }
 
   @Override
   public double yawRate(
       double time, double[] state, double aileron, double rudder, AddedMoments added) {
-    return weightTurn(state[BANK]) + turnPerSlip * held.at(time) - held.rateAt(time);
+    double turn = weightTurn(state[BANK]);
+    return centred ? turn : turn + turnPerSlip * held.at(time) - held.rateAt(time);
   }
 
   @Override
@@ -77,28 +101,31 @@ public final class HeldSlip extends LateralMotion {
    * The rudder angle that the yawing moments need for the slip to stay what it is held at; where
    * its slope breaks, without the blow that would take.
    *
-   * @param time s
    * @param state bank and roll rate
+   * @param sideslip β, rad
+   * @param yawRate r that goes with it, rad/s
+   * @param rollAcceleration ṗ that goes with it, rad/s²
    * @param aileron δa, rad
-   * @param rudder the rudder angle flown, which enters the roll, rad
    * @param added moments beside those of the model
    * @return δr, rad; NaN when yaw inertia or rudder power is not known
    */
   public double rudderToHold(
-      double time, double[] state, double aileron, double rudder, AddedMoments added) {
-    LinearLoad yaw = model().yawMoment();
-    if (model().inertia().yaw().isEmpty() || yaw.perRudder() == 0) {
+      double[] state,
+      double sideslip,
+      double yawRate,
+      double rollAcceleration,
+      double aileron,
+      AddedMoments added) {
+    if (Double.isNaN(yawInertia) || yaw.perRudder() == 0) {
       return Double.NaN;
     }
-    double[] rates = new double[2];
-    rates(time, state, aileron, rudder, added, rates);
+    double bank = state[BANK];
+    double sideslipRate = centred ? 0 : weightTurn(bank) + turnPerSlip * sideslip - yawRate;
     double yawAcceleration =
-        weightTurnPerBank() * Math.cos(state[BANK]) * rates[BANK] + turnPerSlip * held.rateAt(time);
-    double needed =
-        model().inertia().yaw().getAsDouble() * yawAcceleration
-            - model().inertia().product() * rates[ROLL_RATE];
-    double yawRate = yawRate(time, state, aileron, rudder, added);
-    double others = yaw.at(held.at(time), state[ROLL_RATE], yawRate, aileron, 0) + added.yaw();
+        weightTurnPerBank() * Math.cos(bank) * bankRate(bank, state[ROLL_RATE], yawRate)
+            + turnPerSlip * sideslipRate;
+    double needed = yawInertia * yawAcceleration - model().inertia().product() * rollAcceleration;
+    double others = yaw.at(sideslip, state[ROLL_RATE], yawRate, aileron, 0) + added.yaw();
     return (needed - others) / yaw.perRudder();
   }
 }

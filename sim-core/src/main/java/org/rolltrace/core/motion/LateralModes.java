@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
-import java.util.stream.IntStream;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.linear.EigenDecompositionNonSymmetric;
 import org.hipparchus.linear.MatrixUtils;
@@ -80,31 +79,28 @@ public record LateralModes(
     return roots;
   }
 
-  /** The determinant of λI − A without one state's row and column. */
+  /**
+   * The determinant of λI − A without one state's row and column: the characteristic polynomial of
+   * what is left of A.
+   */
   private static Complex minorWithout(int state, double[][] a, Complex root) {
-    int[] kept = IntStream.range(0, a.length).filter(i -> i != state).toArray();
-    return expanded(kept, 0, (1 << kept.length) - 1, a, root);
+    if (a.length == 2) {
+      return root.subtract(a[1 - state][1 - state]);
+    }
+    int i = state == 0 ? 1 : 0;
+    int j = state <= 1 ? 2 : 1;
+    int k = state <= 2 ? 3 : 2;
+    double trace = a[i][i] + a[j][j] + a[k][k];
+    double pairs = minor(a, i, j, i, j) + minor(a, i, k, i, k) + minor(a, j, k, j, k);
+    double determinant =
+        a[i][i] * minor(a, j, k, j, k)
+            - a[i][j] * minor(a, j, k, i, k)
+            + a[i][k] * minor(a, j, k, i, j);
+    return root.subtract(trace).multiply(root).add(pairs).multiply(root).subtract(determinant);
   }
 
-  /** A determinant by expansion: of the kept rows from one on, and the columns still open. */
-  private static Complex expanded(int[] kept, int row, int open, double[][] a, Complex root) {
-    if (row == kept.length) {
-      return Complex.ONE;
-    }
-    Complex sum = Complex.ZERO;
-    boolean even = true;
-    for (int c = 0; c < kept.length; c++) {
-      if ((open & (1 << c)) != 0) {
-        Complex entry = Complex.valueOf(-a[kept[row]][kept[c]]);
-        if (row == c) {
-          entry = entry.add(root);
-        }
-        Complex part = entry.multiply(expanded(kept, row + 1, open & ~(1 << c), a, root));
-        sum = even ? sum.add(part) : sum.subtract(part);
-        even = !even;
-      }
-    }
-    return sum;
+  private static double minor(double[][] a, int row, int otherRow, int column, int otherColumn) {
+    return a[row][column] * a[otherRow][otherColumn] - a[row][otherColumn] * a[otherRow][column];
   }
 
   /**

@@ -155,6 +155,25 @@ public abstract sealed class LateralMotion permits HeldSlip, SettledSlip, FreeSl
       double time, double[] state, double aileron, double rudder, AddedMoments added);
 
   /**
+   * The roll acceleration that goes with a state.
+   *
+   * @param state as for {@link #rates}
+   * @param sideslip β that goes with it, rad
+   * @param yawRate r that goes with it, rad/s
+   * @param aileron δa, rad
+   * @param rudder δr, rad
+   * @param added moments beside those of the model
+   * @return ṗ, rad/s²
+   */
+  public abstract double rollAcceleration(
+      double[] state,
+      double sideslip,
+      double yawRate,
+      double aileron,
+      double rudder,
+      AddedMoments added);
+
+  /**
    * The dimensional constants.
    *
    * @return the constants

@@ -111,6 +111,19 @@ public final class SettledSlip extends LateralMotion {
   }
 
   @Override
+  public double rollAcceleration(
+      double[] state,
+      double sideslip,
+      double yawRate,
+      double aileron,
+      double rudder,
+      AddedMoments added) {
+    return (model().rollMoment().at(sideslip, state[ROLL_RATE], yawRate, aileron, rudder)
+            + added.roll())
+        / rollInertia;
+  }
+
+  @Override
   public double[][] linearised() {
     double perBank = momentum * weightTurnPerBank();
     return new double[][] {

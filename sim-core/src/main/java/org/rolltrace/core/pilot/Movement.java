@@ -1,7 +1,7 @@
 package org.rolltrace.core.pilot;
 
 /** A position against time that is smooth between its breakpoints. */
-public interface Movement {
+public interface Movement extends Stroke {
 
   /** A control that stays where it is trimmed. */
   Movement NONE = StraightMoves.of(0, new double[0], new double[0]);
@@ -12,6 +12,7 @@ public interface Movement {
    * @param time s
    * @return fraction of travel, to be added to the trimmed position
    */
+  @Override
   double positionAt(double time);
 
   /**
@@ -20,7 +21,17 @@ public interface Movement {
    * @param time s
    * @return fraction of travel per second
    */
+  @Override
   double rateAt(double time);
+
+  /**
+   * The movement from an instant to the next breakpoint, which is quicker to look up than the
+   * whole.
+   *
+   * @param start s
+   * @return the movement from start on, up to the breakpoint after it
+   */
+  Stroke from(double start);
 
   /**
    * The instants at which the position or its rate jumps.

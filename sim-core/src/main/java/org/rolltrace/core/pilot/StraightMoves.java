@@ -109,6 +109,14 @@ final class StraightMoves implements Movement {
   }
 
   @Override
+  public Stroke from(double start) {
+    int piece = pieceAt(start);
+    return piece < 0
+        ? StraightStroke.REST
+        : new StraightStroke(starts[piece], from[piece], rate[piece]);
+  }
+
+  @Override
   public double positionAt(double time) {
     int piece = pieceAt(time);
     return piece < 0 ? 0 : from[piece] + rate[piece] * (time - starts[piece]);

@@ -30,6 +30,11 @@ final class SummedMovement implements Movement {
   }
 
   @Override
+  public Stroke from(double start) {
+    return this;
+  }
+
+  @Override
   public double[] breakpoints() {
     return Arrays.stream(parts)
         .flatMapToDouble(part -> DoubleStream.of(part.breakpoints()))

@@ -163,6 +163,11 @@ public record SweepInput(
     }
 
     @Override
+    public Stroke from(double time) {
+      return this;
+    }
+
+    @Override
     public double[] breakpoints() {
       double run = start + duration;
       return run < end ? new double[] {start, run, end} : new double[] {start, end};

@@ -48,11 +48,17 @@ final class Cautions {
 
   private final Scenario scenario;
   private final Flown flown;
+  private final double stick;
+  private final double bank;
+  private final double rate;
   private final List<String> sentences = new ArrayList<>();
 
   private Cautions(Scenario scenario, Flown flown) {
     this.scenario = scenario;
     this.flown = flown;
+    this.stick = largest(Channel.STICK);
+    this.bank = largest(Channel.BANK);
+    this.rate = largest(Channel.ROLL_RATE);
   }
 
   static List<String> of(
@@ -100,7 +106,6 @@ final class Cautions {
   private void addOwnLimits() {
     Limits limits = scenario.data().aeroplane().limits();
     double speed = scenario.condition().calibratedAirspeed();
-    double stick = largest(Channel.STICK);
     if (exceeds(speed, limits.manoeuvringSpeed()) && stick >= FULL_TRAVEL) {
       add(
           "full stick at %.1f kt CAS, above the manoeuvring speed of %.1f kt",
@@ -119,13 +124,11 @@ final class Cautions {
           "load factor %.2f is above the rolling limit of %.2f",
           scenario.condition().loadFactor(), limits.rollingLoadFactor().getAsDouble());
     }
-    double rate = largest(Channel.ROLL_RATE);
     if (exceeds(rate, limits.rollRate())) {
       add(
           "roll rate of %.1f deg/s is above the aeroplane's limit of %.1f deg/s",
           Math.toDegrees(rate), Math.toDegrees(limits.rollRate().getAsDouble()));
     }
-    double bank = largest(Channel.BANK);
     if (exceeds(bank, limits.bank())) {
       add(
           "bank of %.1f deg is above the aeroplane's limit of %.1f deg",
@@ -159,8 +162,8 @@ final class Cautions {
   }
 
   private void addStops() {
-    addStop("stick", Channel.STICK);
-    addStop("pedal", Channel.PEDAL);
+    addStop("stick", Channel.STICK, stick);
+    addStop("pedal", Channel.PEDAL, largest(Channel.PEDAL));
     flown.events().stream()
         .filter(FlightEvent.RateLimit.class::isInstance)
         .map(FlightEvent.RateLimit.class::cast)
@@ -173,7 +176,10 @@ final class Cautions {
                     event.control().word(), event.time()));
   }
 
-  private void addStop(String control, Channel channel) {
+  private void addStop(String control, Channel channel, double largest) {
+    if (largest < FULL_TRAVEL) {
+      return;
+    }
     for (int i = 0; i < flown.history().size(); i++) {
       if (Math.abs(flown.history().value(channel, i)) >= FULL_TRAVEL) {
         add("the %s is on its stop from %.2f s", control, flown.history().time(i));
@@ -257,7 +263,6 @@ final class Cautions {
       add("Mach %.3f is above 0.7; the model has no compressibility beyond given values", mach);
     }
     addCoupling(model);
-    double bank = largest(Channel.BANK);
     List<String> why = new ArrayList<>();
     if (bank > LARGEST_BANK_AT_CONSTANT_SPEED) {
       why.add(format("the bank reaches %.0f deg", Math.toDegrees(bank)));
@@ -284,7 +289,6 @@ final class Cautions {
       return;
     }
     double frequency = Math.sqrt(stiffness / yawInertia.getAsDouble());
-    double rate = largest(Channel.ROLL_RATE);
     if (rate > frequency) {
       add(
           "roll rate of %.0f deg/s is above the natural frequency in yaw, %.0f deg/s: roll coupling,"
@@ -337,11 +341,7 @@ final class Cautions {
   }
 
   private double largest(Channel channel) {
-    double largest = 0;
-    for (int i = 0; i < flown.history().size(); i++) {
-      largest = Math.max(largest, Math.abs(flown.history().value(channel, i)));
-    }
-    return largest;
+    return flown.history().largest(channel);
   }
 
   private void add(String pattern, Object... values) {

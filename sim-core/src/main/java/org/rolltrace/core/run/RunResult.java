@@ -41,6 +41,11 @@ public record RunResult(
     cautions = List.copyOf(cautions);
   }
 
+  RunResult withMeasures(List<Measure> others) {
+    return new RunResult(
+        scenario, settings, trim, modes, modesRemark, history, events, others, cautions);
+  }
+
   /**
    * A measure by its name.
    *

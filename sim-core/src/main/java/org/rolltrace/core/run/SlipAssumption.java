@@ -4,13 +4,11 @@ import static org.rolltrace.core.measures.MeasureDefinition.FREE_SLIP_BANK_DIFFE
 import static org.rolltrace.core.measures.MeasureDefinition.FREE_SLIP_ROLL_RATE_DIFFERENCE;
 import static org.rolltrace.core.measures.MeasureDefinition.PEDAL_TO_HOLD_SLIP;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.rolltrace.core.controls.ControlRun;
 import org.rolltrace.core.flight.Flight;
 import org.rolltrace.core.flight.FlightPlan;
-import org.rolltrace.core.flight.FlightSettings;
 import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.history.TimeHistory;
 import org.rolltrace.core.measures.Measure;
@@ -26,23 +24,7 @@ import org.rolltrace.core.scenario.Scenario;
 final class SlipAssumption {
   private SlipAssumption() {}
 
-  static List<Measure> measures(
-      Scenario scenario,
-      LateralMotion motion,
-      FreeModes free,
-      TimeHistory history,
-      FlightSettings settings) {
-    List<Measure> measures = new ArrayList<>();
-    if (motion instanceof HeldSlip held) {
-      measures.add(pedalToHold(scenario, held, history));
-    }
-    if (scenario.slip() != SlipTreatment.FREE) {
-      measures.addAll(distanceFromFree(scenario, motion, free, history, settings));
-    }
-    return measures;
-  }
-
-  private static Measure pedalToHold(Scenario scenario, HeldSlip held, TimeHistory history) {
+  static Measure pedalToHold(Scenario scenario, HeldSlip held, TimeHistory history) {
     Optional<ControlRun> run = scenario.data().aeroplane().rudder().map(ControlRun::of);
     if (run.isEmpty()) {
       return Measure.missing(PEDAL_TO_HOLD_SLIP, "the aeroplane gives no rudder travel");
@@ -59,10 +41,11 @@ final class SlipAssumption {
           history.value(Channel.PROPELLER_YAW_MOMENT, i) - steady.yaw());
       double rudder =
           held.rudderToHold(
-              history.time(i),
               state,
+              history.value(Channel.SIDESLIP, i),
+              history.value(Channel.YAW_RATE, i),
+              history.value(Channel.ROLL_ACCELERATION, i),
               history.value(Channel.AILERON, i),
-              history.value(Channel.RUDDER, i),
               added);
       if (Double.isNaN(rudder)) {
         return Measure.missing(
@@ -77,26 +60,24 @@ final class SlipAssumption {
         Math.abs(largest) > 1 ? "more than the travel: the slip cannot be held" : "");
   }
 
-  private static List<Measure> distanceFromFree(
-      Scenario scenario,
-      LateralMotion motion,
-      FreeModes free,
-      TimeHistory history,
-      FlightSettings settings) {
-    if (free.modes().isEmpty()) {
-      return unknown(free.remark());
+  static List<Measure> distanceFromFree(RunResult result) {
+    Scenario scenario = result.scenario();
+    if (result.modes().isEmpty()) {
+      return unknown(result.modesRemark());
     }
     if (!scenario.programme().heldSideslip().isNone()) {
       return unknown("a slip held against time has no counterpart in free slip");
     }
+    TimeHistory history = result.history();
     TimeHistory other;
     try {
       FlightPlan plan =
           ScenarioRun.plan(
               scenario,
-              LateralMotion.of(SlipTreatment.FREE, motion.model()),
+              LateralMotion.of(
+                  SlipTreatment.FREE, ScenarioRun.model(scenario, scenario.propeller())),
               ScenarioRun.trim(scenario, SlipTreatment.FREE));
-      other = Flight.fly(plan, settings).history();
+      other = Flight.fly(plan, result.settings()).history();
     } catch (CalculationException noAnswer) {
       return unknown("with free slip there is no answer: " + noAnswer.getMessage());
     }

@@ -10,10 +10,10 @@ import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.motion.StalledRoll;
 
 /** When sections of the wing stalled, and when it no longer damped. */
-record StallMeasure(double firstStalled, double dampingLost) {
+record StallMeasure(boolean isKnown, double firstStalled, double dampingLost) {
 
   /** Of a wing that is never beyond its stall, or of which none is known. */
-  static final StallMeasure NONE = new StallMeasure(Double.NaN, Double.NaN);
+  static final StallMeasure NONE = new StallMeasure(false, Double.NaN, Double.NaN);
 
   static StallMeasure of(Optional<StalledRoll> stalled, TimeHistory history) {
     if (stalled.isEmpty()) {
@@ -28,15 +28,15 @@ record StallMeasure(double firstStalled, double dampingLost) {
       if (stalled.get().moment(rollRate, yawRate, sideslip, aileron) != 0) {
         first = Double.isNaN(first) ? history.time(i) : first;
         if (stalled.get().isDampingLost(rollRate, yawRate, sideslip, aileron)) {
-          return new StallMeasure(first, history.time(i));
+          return new StallMeasure(true, first, history.time(i));
         }
       }
     }
-    return new StallMeasure(first, Double.NaN);
+    return new StallMeasure(true, first, Double.NaN);
   }
 
-  List<Measure> measures(Optional<StalledRoll> stalled) {
-    if (stalled.isEmpty()) {
+  List<Measure> measures() {
+    if (!isKnown) {
       return List.of();
     }
     return List.of(

@@ -226,8 +226,9 @@ class ResultWritingTest {
   @Test
   void aSlipHeldAgainstTimeReportsItsPedalAndNoFreeSlipToCompareWith() {
     RunResult result =
-        ScenarioRun.execute(
-            ScenarioFile.read(Path.of("..", "scenarios", "tarnlark-held-sideslip.json")));
+        ScenarioRun.compareWithFreeSlip(
+            ScenarioRun.execute(
+                ScenarioFile.read(Path.of("..", "scenarios", "tarnlark-held-sideslip.json"))));
     // Held at 5 deg, Cn_beta/Cn_dr of the file give -0.0816/-0.0735 · 5 deg of rudder of 25 deg:
     // 22 % of the pedal, left for a wind from the right; leading in and out change it by the rest.
     assertThat(result.measure("pedalToHoldSlip").orElseThrow().value().orElseThrow())

@@ -137,7 +137,8 @@ class SlipTreatmentTest {
     double[] x = {0.5, 0.4};
     double[] rates = new double[2];
     held.rates(0, x, 0.1, 0, rates);
-    double rudder = held.rudderToHold(0, x, 0.1, 0, new AddedMoments());
+    double rudder =
+        held.rudderToHold(x, 0, held.yawRate(0, x, 0.1, 0), rates[1], 0.1, new AddedMoments());
     double r = held.yawRate(0, x, 0.1, 0);
     double yawAcceleration = 9.80665 / m.speed() * Math.cos(0.5) * 0.4;
     double n = m.yawMoment().at(0, 0.4, r, 0.1, rudder);
@@ -188,7 +189,9 @@ class SlipTreatmentTest {
       double[] before = {x[0] - h * rates[0], x[1] - h * rates[1]};
       double yawAcceleration =
           (held.yawRate(t + h, after, 0.1, 0) - held.yawRate(t - h, before, 0.1, 0)) / (2 * h);
-      double rudder = held.rudderToHold(t, x, 0.1, 0, added);
+      double rudder =
+          held.rudderToHold(
+              x, held.sideslip(t, x, 0.1, 0), held.yawRate(t, x, 0.1, 0), rates[1], 0.1, added);
       double n =
           m.yawMoment().at(held.sideslip(t, x, 0, 0), 0.4, held.yawRate(t, x, 0, 0), 0.1, rudder)
               + 70;

@@ -70,7 +70,7 @@ final class FlyCommand implements Callable<Integer> {
     Path chartsInto = chartFolder == null ? null : PathArgument.of(spec, chartFolder);
 
     Scenario flown = ScenarioFile.read(PathArgument.of(spec, scenario));
-    RunResult result = ScenarioRun.execute(flown, settings);
+    RunResult result = ScenarioRun.compareWithFreeSlip(ScenarioRun.execute(flown, settings));
     if (into != null) {
       for (Path written : ResultFolder.write(into, result, Program.identity())) {
         err.println("wrote " + written);

@@ -23,7 +23,8 @@ record Outcome(List<FileFault> faults, String failure, Optional<RunResult> resul
       return new Outcome(check.faults(), "", Optional.empty());
     }
     try {
-      return new Outcome(List.of(), "", Optional.of(ScenarioRun.execute(check.scenario().get())));
+      RunResult flown = ScenarioRun.execute(check.scenario().get());
+      return new Outcome(List.of(), "", Optional.of(ScenarioRun.compareWithFreeSlip(flown)));
     } catch (CalculationException e) {
       return new Outcome(List.of(), e.getMessage(), Optional.empty());
     }
