@@ -1,5 +1,6 @@
 package org.rolltrace.core.benchmark;
 
+import java.util.List;
 import java.util.concurrent.TimeUnit;
 import org.ejml.simple.SimpleMatrix;
 import org.openjdk.jmh.annotations.Benchmark;
@@ -12,6 +13,7 @@ import org.openjdk.jmh.annotations.Scope;
 import org.openjdk.jmh.annotations.Setup;
 import org.openjdk.jmh.annotations.State;
 import org.openjdk.jmh.annotations.Warmup;
+import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.motion.LateralModel;
 import org.rolltrace.core.motion.LateralMotion;
 import org.rolltrace.core.motion.SlipTreatment;
@@ -26,13 +28,14 @@ import org.rolltrace.core.testing.Shipped;
  * One 10 s roll entry of the light single, two breakpoints, 0.15 s of hand movement, 100 samples a
  * second, with trim, modes, all measures and cautions; beside it a hand-written Runge-Kutta of the
  * fourth order at equal accuracy and the exact linear step, both of which give the history alone.
+ * {@link BenchmarkRunner} prints the ratios.
  */
 @State(Scope.Benchmark)
 @BenchmarkMode(Mode.AverageTime)
 @OutputTimeUnit(TimeUnit.MICROSECONDS)
-@Warmup(iterations = 4, time = 2)
-@Measurement(iterations = 5, time = 2)
-@Fork(1)
+@Warmup(iterations = 4, time = 1)
+@Measurement(iterations = 5, time = 1)
+@Fork(2)
 public class RollEntryBenchmark {
   /** With this step the fourth-order method keeps every sample within 5e-3 deg/s, s. */
   private static final double FIXED_STEP = 0.01;
@@ -51,17 +54,7 @@ public class RollEntryBenchmark {
   @Setup
   public void prepare() {
     free = Shipped.scenario("light-single-roll-entry");
-    held =
-        new Scenario(
-            free.title(),
-            free.data(),
-            free.condition(),
-            free.propeller(),
-            SlipTreatment.HELD,
-            free.start(),
-            free.programme(),
-            free.duration(),
-            free.measures());
+    held = heldLike(free);
     LateralModel model =
         LateralModel.of(
             free.data().aeroplane(),
@@ -72,6 +65,20 @@ public class RollEntryBenchmark {
     stick = free.programme().stick();
     fullAileron = free.data().aeroplane().ailerons().orElseThrow().fullAngle();
     prepareLinearStep();
+  }
+
+  /** The same scenario with held slip. */
+  static Scenario heldLike(Scenario scenario) {
+    return new Scenario(
+        scenario.title(),
+        scenario.data(),
+        scenario.condition(),
+        scenario.propeller(),
+        SlipTreatment.HELD,
+        scenario.start(),
+        scenario.programme(),
+        scenario.duration(),
+        scenario.measures());
   }
 
   private void prepareLinearStep() {
@@ -107,10 +114,28 @@ public class RollEntryBenchmark {
     return ScenarioRun.execute(free);
   }
 
-  /** The whole run with held slip, which also flies with free slip to say how far it is from it. */
+  /** The whole run with held slip. */
   @Benchmark
   public RunResult held() {
     return ScenarioRun.execute(held);
+  }
+
+  /** Its measures only, with free slip. */
+  @Benchmark
+  public List<Measure> freeMeasures() {
+    return ScenarioRun.measure(free);
+  }
+
+  /** Its measures only, with held slip. */
+  @Benchmark
+  public List<Measure> heldMeasures() {
+    return ScenarioRun.measure(held);
+  }
+
+  /** The whole run with held slip, flown free once more to say how far it is from that. */
+  @Benchmark
+  public RunResult heldAgainstFree() {
+    return ScenarioRun.compareWithFreeSlip(ScenarioRun.execute(held));
   }
 
   /** The history alone, by the classical Runge-Kutta method at a fixed step. */

@@ -9,21 +9,27 @@ import static org.rolltrace.core.testing.Scenarios.pedal;
 import static org.rolltrace.core.testing.Scenarios.seaLevel;
 import static org.rolltrace.core.testing.Scenarios.stick;
 
+import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.LongStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.EnumSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.rolltrace.core.aeroplane.Aeroplane;
 import org.rolltrace.core.aeroplane.Inertia;
 import org.rolltrace.core.derivatives.Coefficient;
 import org.rolltrace.core.derivatives.LateralDerivatives;
+import org.rolltrace.core.files.ScenarioFile;
 import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.history.TimeHistory;
+import org.rolltrace.core.measures.Measure;
 import org.rolltrace.core.measures.MeasureOptions;
 import org.rolltrace.core.motion.CalculationException;
 import org.rolltrace.core.motion.Disturbance;
 import org.rolltrace.core.motion.SlipTreatment;
+import org.rolltrace.core.pilot.DoubletInput;
 import org.rolltrace.core.pilot.HoldInput;
 import org.rolltrace.core.pilot.PilotProgramme;
 import org.rolltrace.core.pilot.StepInput;
@@ -33,6 +39,7 @@ import org.rolltrace.core.scenario.Scenario;
 import org.rolltrace.core.scenario.Start;
 import org.rolltrace.core.testing.RandomAeroplane;
 import org.rolltrace.core.testing.Scenarios;
+import org.rolltrace.core.testing.Shipped;
 
 class ScenarioRunTest {
 
@@ -224,5 +231,73 @@ class ScenarioRunTest {
         .isThrownBy(
             () -> Scenarios.of(oneDegree(0.4, 8), seaLevel(50), SlipTreatment.HELD, duration))
         .withMessageContaining("duration is");
+  }
+
+  private static void haveTheSameMeasures(Scenario scenario) {
+    List<Measure> whole = ScenarioRun.execute(scenario).measures();
+    List<Measure> only = ScenarioRun.measure(scenario);
+    assertThat(only).hasSameSizeAs(whole);
+    for (int i = 0; i < whole.size(); i++) {
+      Measure expected = whole.get(i);
+      Measure found = only.get(i);
+      String name = expected.definition().name();
+      assertThat(found.definition()).isEqualTo(expected.definition());
+      assertThat(found.value().isPresent()).as(name).isEqualTo(expected.value().isPresent());
+      if (expected.value().isEmpty()) {
+        assertThat(found.remark()).isEqualTo(expected.remark());
+      } else {
+        double value = expected.value().getAsDouble();
+        // what a cubic over a quarter of a step leaves; the pedal is that of the nearest sample
+        double relative = name.equals("pedalToHoldSlip") ? 1e-3 : 1e-4;
+        assertThat(found.value().getAsDouble())
+            .as(name)
+            .isCloseTo(value, within(relative * Math.abs(value) + 2e-5));
+      }
+    }
+  }
+
+  @ParameterizedTest
+  @EnumSource(SlipTreatment.class)
+  void measuresOnlyAreThoseOfTheWholeRun(SlipTreatment slip) {
+    for (long seed = 0; seed < 40; seed++) {
+      RandomAeroplane any = RandomAeroplane.of(seed);
+      haveTheSameMeasures(
+          Scenarios.of(
+              any.data(), any.condition(), slip, 8, stick(new HoldInput(0.5, -0.8, 2.5, 0.15))));
+      haveTheSameMeasures(
+          Scenarios.of(
+              any.data(),
+              any.condition(),
+              slip,
+              6,
+              stick(new StepInput(0.5, 0.4, 0)),
+              pedal(new DoubletInput(1, 0.5, 1, 0.1))));
+    }
+  }
+
+  @Test
+  void measuresOnlyOfAllShippedScenarios() {
+    for (Path file : Shipped.scenarioFiles()) {
+      haveTheSameMeasures(ScenarioFile.read(file));
+    }
+  }
+
+  @Test
+  void measuresMayBeTakenInSeveralThreads() {
+    List<Scenario> scenarios =
+        LongStream.range(0, 60)
+            .mapToObj(RandomAeroplane::of)
+            .map(
+                any ->
+                    Scenarios.of(
+                        any.data(),
+                        any.condition(),
+                        SlipTreatment.FREE,
+                        5,
+                        stick(new StepInput(0.5, 0.4, 0.1))))
+            .toList();
+    List<List<Measure>> one = scenarios.stream().map(ScenarioRun::measure).toList();
+    List<List<Measure>> many = scenarios.parallelStream().map(ScenarioRun::measure).toList();
+    assertThat(many).isEqualTo(one);
   }
 }
