@@ -92,7 +92,8 @@ public final class ScenarioRun {
 
   /**
    * Only the measures of a scenario, for studies of many: those of {@link #execute(Scenario)}, to
-   * five figures, in half the time, without a history to keep. May be called from several threads.
+   * four figures (peak acceleration and pedal to three), in half the time, without a history to
+   * keep. May be called from several threads.
    *
    * @param scenario which aeroplane, in which condition, flown how
    * @return the measures in the order in which they are shown
