@@ -18,6 +18,9 @@ import org.rolltrace.core.files.ScenarioDocument;
 import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.quantity.Quantity;
 import org.rolltrace.core.run.RunResult;
+import org.rolltrace.ui.control.FieldTarget;
+import org.rolltrace.ui.control.PathField;
+import org.rolltrace.ui.control.Written;
 import org.rolltrace.ui.session.DeskSession;
 
 /** What is flown: condition, slip, start and duration, in one strip across the top. */

@@ -1,4 +1,4 @@
-package org.rolltrace.ui.manoeuvre;
+package org.rolltrace.ui.control;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
@@ -6,22 +6,38 @@ import java.math.RoundingMode;
 import java.util.Locale;
 
 /** Numbers as they are written into files by the mouse, and on the screen. */
-final class Written {
+public final class Written {
   private Written() {}
 
-  /** A number to some decimals, without zeros behind, as it would be typed. */
-  static String plain(double value, int decimals) {
+  /**
+   * A number to some decimals, without zeros behind, as it would be typed.
+   *
+   * @param value the number
+   * @param decimals at most so many
+   * @return the text
+   */
+  public static String plain(double value, int decimals) {
     BigDecimal rounded = BigDecimal.valueOf(value).setScale(decimals, RoundingMode.HALF_UP);
     return rounded.signum() == 0 ? "0" : rounded.stripTrailingZeros().toPlainString();
   }
 
-  /** A time as it would be typed. */
-  static String seconds(double value) {
+  /**
+   * A time as it would be typed.
+   *
+   * @param value s
+   * @return the text, to the millisecond
+   */
+  public static String seconds(double value) {
     return plain(value, 3) + " s";
   }
 
-  /** Four figures with a proper minus sign, for reading. */
-  static String reading(double value) {
+  /**
+   * Four figures with a proper minus sign, for reading.
+   *
+   * @param value the number
+   * @return the text
+   */
+  public static String reading(double value) {
     if (value == 0) {
       return "0";
     }

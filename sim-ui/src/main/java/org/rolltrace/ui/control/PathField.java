@@ -1,6 +1,7 @@
-package org.rolltrace.ui.manoeuvre;
+package org.rolltrace.ui.control;
 
 import java.util.Optional;
+import java.util.function.BinaryOperator;
 import javafx.application.Platform;
 import javafx.collections.ListChangeListener;
 import javafx.css.PseudoClass;
@@ -18,7 +19,7 @@ import org.rolltrace.ui.session.DeskSession;
  * A field for one value of the scenario. What is typed goes into the document at once, in any unit;
  * the fault that the reader finds there stands below the field.
  */
-final class PathField extends VBox {
+public final class PathField extends VBox {
   private static final PseudoClass SKINNED = PseudoClass.getPseudoClass("skinned");
   private static final PseudoClass FAULTY = PseudoClass.getPseudoClass("faulty");
 
@@ -30,11 +31,32 @@ final class PathField extends VBox {
   private final TextField field = new TextField();
   private final Tooltip hint = new Tooltip();
   private final Label fault = new Label();
+  private final BinaryOperator<ScenarioDocument> follow;
   private FieldTarget target;
   private boolean showing;
 
-  PathField(DeskSession session, FieldTarget target) {
+  /**
+   * A field.
+   *
+   * @param session what is edited
+   * @param target the value
+   */
+  public PathField(DeskSession session, FieldTarget target) {
+    this(session, target, (document, put) -> put);
+  }
+
+  /**
+   * A field whose changes bring others along.
+   *
+   * @param session what is edited
+   * @param target the value
+   * @param follow makes of the document with which the typing began, and of the same with what is
+   *     typed, the one with all that follows
+   */
+  public PathField(
+      DeskSession session, FieldTarget target, BinaryOperator<ScenarioDocument> follow) {
     this.session = session;
+    this.follow = follow;
     getStyleClass().add("path-field");
     label.getStyleClass().add("field-label");
     label.setLabelFor(field);
@@ -68,8 +90,12 @@ final class PathField extends VBox {
     session.faults().addListener((ListChangeListener<FileFault>) change -> showFault());
   }
 
-  /** Shows and changes another value from now on. */
-  final void retarget(FieldTarget newTarget) {
+  /**
+   * Shows and changes another value from now on.
+   *
+   * @param newTarget the value
+   */
+  public final void retarget(FieldTarget newTarget) {
     target = newTarget;
     label.setText(target.title());
     field.setId(target.id());
@@ -82,8 +108,12 @@ final class PathField extends VBox {
     showFault();
   }
 
-  /** Takes part in the layout, or not. */
-  final void setShown(boolean shown) {
+  /**
+   * Takes part in the layout, or not.
+   *
+   * @param shown whether it does
+   */
+  public final void setShown(boolean shown) {
     setVisible(shown);
     setManaged(shown);
   }
@@ -93,7 +123,10 @@ final class PathField extends VBox {
     if (showing || document == null || target.says(document, text)) {
       return;
     }
-    session.edit("change " + target.word(), target.id(), edited -> target.put(edited, text));
+    session.editFromStart(
+        "change " + target.word(),
+        target.id(),
+        start -> follow.apply(start, target.put(start, text)));
   }
 
   /** Shows the document's text, unless it is what the user is typing. */
@@ -110,7 +143,14 @@ final class PathField extends VBox {
   }
 
   private void showFault() {
-    Optional<String> message = session.faultAt(target.path()).or(this::missingOneOfSeveral);
+    ScenarioDocument document = session.documentProperty().get();
+    Optional<String> message =
+        document == null
+            ? Optional.empty()
+            : target.pathsIn(document).stream()
+                .flatMap(path -> session.faultAt(path).stream())
+                .findFirst()
+                .or(this::missingOneOfSeveral);
     pseudoClassStateChanged(FAULTY, message.isPresent());
     fault.setText(message.orElse(""));
     fault.setVisible(message.isPresent());

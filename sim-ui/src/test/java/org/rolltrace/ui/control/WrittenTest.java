@@ -1,4 +1,4 @@
-package org.rolltrace.ui.manoeuvre;
+package org.rolltrace.ui.control;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
