@@ -195,4 +195,29 @@ sealed interface JsonNode {
     return group.with(
         index, without(group.items().get(index).value(), path.subList(1, path.size())));
   }
+
+  /** An object as another one changes it: as {@link Variants} does it while reading. */
+  static Group merged(Group base, Group changes) {
+    Group merged = base;
+    for (Item change : changes.items()) {
+      JsonPath.Step step = new JsonPath.Step(change.key(), -1);
+      int index = merged.indexOf(step);
+      boolean isThere = index < merged.items().size();
+      JsonNode there = isThere ? merged.items().get(index).value() : null;
+      if (change.value().equals(new Bare("null"))) {
+        merged = isThere ? merged.without(index) : merged;
+      } else if (there instanceof Group inner
+          && change.value() instanceof Group deeper
+          && !inner.isList()
+          && !deeper.isList()) {
+        merged = merged.with(index, merged(inner, deeper));
+      } else {
+        merged =
+            isThere
+                ? merged.with(index, change.value())
+                : merged.withAdded(change.key(), change.value());
+      }
+    }
+    return merged;
+  }
 }

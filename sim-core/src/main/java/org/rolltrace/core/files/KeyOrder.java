@@ -11,6 +11,7 @@ final class KeyOrder {
           "name",
           "note",
           "aeroplane",
+          "variant",
           "condition",
           "pressureAltitude",
           "temperatureOffset",

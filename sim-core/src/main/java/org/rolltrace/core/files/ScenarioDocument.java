@@ -11,6 +11,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
+import java.util.function.BiFunction;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
@@ -37,6 +38,8 @@ public final class ScenarioDocument {
 
   private static final String HELD_SLIP = "$.heldSlip";
 
+  private static final JsonPath.Step VARIANTS = new JsonPath.Step(Variants.KEY, -1);
+
   /** What a hand flies. */
   private static final List<String> HANDS = List.of(Control.STICK.word(), Control.PEDAL.word());
 
@@ -54,6 +57,12 @@ public final class ScenarioDocument {
 
   /** Texts of trace files that are in no file yet, by their names here. */
   private final Map<String, String> carried;
+
+  /** The aeroplane that flies, as it was when it was last asked for; made again when not. */
+  private volatile Flown flown;
+
+  /** An aeroplane, and what the chosen variant makes of it. */
+  private record Flown(JsonNode.Group base, JsonNode.Group merged) {}
 
   private ScenarioDocument(
       Path file, JsonNode.Group root, NamedAeroplane named, Map<String, String> carried) {
@@ -181,9 +190,11 @@ public final class ScenarioDocument {
    * @return the edited document
    */
   public ScenarioDocument withNumber(String path, String digits) {
-    return with(
-        path,
-        NUMBER.matcher(digits).matches() ? new JsonNode.Bare(digits) : new JsonNode.Text(digits));
+    return with(path, number(digits));
+  }
+
+  private static JsonNode number(String digits) {
+    return NUMBER.matcher(digits).matches() ? new JsonNode.Bare(digits) : new JsonNode.Text(digits);
   }
 
   /**
@@ -212,9 +223,7 @@ public final class ScenarioDocument {
   public ScenarioDocument withNumbers(String path, String numbers) {
     List<JsonNode.Item> items = new ArrayList<>();
     for (String digits : numbers.strip().split("\\s*[,\\s-]\\s*", -1)) {
-      JsonNode number =
-          NUMBER.matcher(digits).matches() ? new JsonNode.Bare(digits) : new JsonNode.Text(digits);
-      items.add(new JsonNode.Item("", number, false));
+      items.add(new JsonNode.Item("", number(digits), false));
     }
     return with(path, new JsonNode.Group(true, items, false));
   }
@@ -560,22 +569,206 @@ public final class ScenarioDocument {
   }
 
   /**
-   * A value of the aeroplane, wherever it stands.
+   * A value of the aeroplane that flies, wherever it stands: that of the variant, if the scenario
+   * picks one.
    *
    * @param path from the aeroplane on, such as {@code inertia.roll}
    * @return as {@link #text}; empty also when the aeroplane file cannot be read
    */
   public Optional<String> aeroplaneText(String path) {
+    return aeroplaneNode(path).flatMap(ScenarioDocument::written);
+  }
+
+  /**
+   * Whether the aeroplane that flies has something.
+   *
+   * @param path from the aeroplane on, such as {@code fin}
+   * @return false also when the aeroplane file cannot be read
+   */
+  public boolean aeroplaneHas(String path) {
+    return aeroplaneNode(path).isPresent();
+  }
+
+  /**
+   * How many elements a list of the aeroplane that flies has.
+   *
+   * @param path from the aeroplane on, such as {@code wing.panels}
+   * @return 0 also when there is no such list
+   */
+  public int aeroplaneCount(String path) {
+    return aeroplaneNode(path)
+        .map(node -> node instanceof JsonNode.Group group && group.isList() ? group : null)
+        .map(list -> list.items().size())
+        .orElse(0);
+  }
+
+  private Optional<JsonNode> aeroplaneNode(String path) {
+    return aeroplane().flatMap(group -> JsonNode.find(merged(group), JsonPath.steps("$." + path)));
+  }
+
+  /** The base, wherever it stands. */
+  private Optional<JsonNode.Group> aeroplane() {
     Optional<String> name = aeroplaneName();
     if (name.isEmpty()) {
-      return text(AEROPLANE + "." + path);
+      return group(AEROPLANE, false);
     }
     try {
-      return JsonNode.find(named.object(file, name.get()), JsonPath.steps("$." + path))
-          .flatMap(ScenarioDocument::written);
+      return Optional.of(named.object(file, name.get()));
     } catch (FileFaultsException e) {
       return Optional.empty(); // its faults are among those of the check
     }
+  }
+
+  // An equal aeroplane that is another object is rare, and then merged anew.
+  @SuppressWarnings("ReferenceEquality")
+  private JsonNode.Group merged(JsonNode.Group base) {
+    Flown last = flown;
+    if (last == null || last.base() != base) {
+      Optional<JsonNode.Group> changes = variantOf(base).map(steps -> changes(base, steps));
+      last = new Flown(base, changes.map(patch -> JsonNode.merged(base, patch)).orElse(base));
+      flown = last;
+    }
+    return last.merged();
+  }
+
+  private static JsonNode.Group changes(JsonNode.Group base, List<JsonPath.Step> variant) {
+    return (JsonNode.Group) JsonNode.find(base, variant).orElseThrow();
+  }
+
+  /** From an aeroplane to what the chosen variant changes; empty when none is, or there is none. */
+  private Optional<List<JsonPath.Step>> variantOf(JsonNode.Group base) {
+    return text("$.variant")
+        .map(name -> List.of(VARIANTS, new JsonPath.Step(name, -1)))
+        .filter(
+            steps ->
+                JsonNode.find(base, steps)
+                    .filter(node -> node instanceof JsonNode.Group group && !group.isList())
+                    .isPresent());
+  }
+
+  /**
+   * The variants of the aeroplane, wherever it stands.
+   *
+   * @return their names, in their order; none when there are none, or the file cannot be read
+   */
+  public List<String> variants() {
+    return aeroplane()
+        .flatMap(base -> JsonNode.find(base, List.of(VARIANTS)))
+        .map(
+            node ->
+                node instanceof JsonNode.Group all && !all.isList()
+                    ? all.items().stream().map(JsonNode.Item::key).distinct().toList()
+                    : List.<String>of())
+        .orElse(List.of());
+  }
+
+  /**
+   * The variant that the scenario picks.
+   *
+   * @return its name; empty when it picks none, or one that there is not
+   */
+  public Optional<String> variant() {
+    return aeroplane().flatMap(this::variantOf).map(steps -> steps.get(1).key());
+  }
+
+  /**
+   * The places at which a value of the aeroplane that flies may stand: of the base, and when a
+   * variant flies, of what that changes.
+   *
+   * @param path from the aeroplane on, such as {@code inertia.roll}
+   * @return paths as faults name them
+   */
+  public List<String> aeroplanePaths(String path) {
+    String ofBase = AEROPLANE + "." + path;
+    return variant()
+        .map(
+            name ->
+                List.of(
+                    ofBase, JsonValue.Place.memberPath(AEROPLANE + ".variants", name) + "." + path))
+        .orElse(List.of(ofBase));
+  }
+
+  /**
+   * The same with another text in the scenario's own copy of the aeroplane. While a variant flies,
+   * the change is the variant's, and the base stays.
+   *
+   * @param path from the aeroplane on, such as {@code wing.panels[0].to}
+   * @param text as in {@link #with(String, String)}
+   * @return the edited document
+   * @throws FileFaultsException if the aeroplane file cannot be read as a JSON object
+   */
+  public ScenarioDocument withAeroplane(String path, String text) {
+    return withAeroplane(path, new JsonNode.Text(text));
+  }
+
+  /**
+   * The same with another number in the scenario's own copy of the aeroplane, as {@link
+   * #withAeroplane(String, String)} has a text.
+   *
+   * @param path from the aeroplane on, such as {@code ailerons.chordShare}
+   * @param digits as in {@link #withNumber}
+   * @return the edited document
+   * @throws FileFaultsException if the aeroplane file cannot be read as a JSON object
+   */
+  public ScenarioDocument withAeroplaneNumber(String path, String digits) {
+    return withAeroplane(path, number(digits));
+  }
+
+  private ScenarioDocument withAeroplane(String path, JsonNode value) {
+    return reshaped(path, (from, steps) -> JsonNode.with(from, steps, value));
+  }
+
+  /**
+   * The same without something in the scenario's own copy of the aeroplane. While a variant flies,
+   * it is the variant that does without, and the base stays.
+   *
+   * @param path from the aeroplane on, such as {@code fin}; it may lead nowhere
+   * @return the edited document
+   * @throws FileFaultsException if the aeroplane file cannot be read as a JSON object
+   */
+  public ScenarioDocument withoutAeroplane(String path) {
+    List<JsonPath.Step> steps = JsonPath.steps("$." + path);
+    ScenarioDocument inside = withAeroplaneInline();
+    boolean ofBase =
+        inside
+            .group(AEROPLANE, false)
+            .filter(base -> inside.variantOf(base).isPresent())
+            .flatMap(base -> JsonNode.find(base, steps))
+            .isPresent();
+    boolean inList = steps.stream().anyMatch(JsonPath.Step::isIndex);
+    return ofBase && !inList
+        ? inside.withAeroplane(path, new JsonNode.Bare("null"))
+        : inside.reshaped(path, JsonNode::without);
+  }
+
+  private ScenarioDocument reshaped(
+      String path, BiFunction<JsonNode, List<JsonPath.Step>, JsonNode> change) {
+    ScenarioDocument inside = withAeroplaneInline();
+    List<JsonPath.Step> steps = JsonPath.steps("$." + path);
+    List<JsonPath.Step> at = new ArrayList<>(JsonPath.steps(AEROPLANE));
+    JsonNode from = inside.root;
+    Optional<JsonNode.Group> base = inside.group(AEROPLANE, false);
+    Optional<List<JsonPath.Step>> variant = base.flatMap(inside::variantOf);
+    if (variant.isPresent()) {
+      at.addAll(variant.get());
+      // A variant has a list as a whole or not at all.
+      for (int i = 0; i < steps.size(); i++) {
+        List<JsonPath.Step> list = steps.subList(0, i);
+        if (steps.get(i).isIndex() && JsonNode.find(from, joined(at, list)).isEmpty()) {
+          Optional<JsonNode> ofBase = JsonNode.find(base.get(), list);
+          if (ofBase.isPresent()) {
+            from = JsonNode.with(from, joined(at, list), ofBase.get());
+          }
+        }
+      }
+    }
+    return inside.of(change.apply(from, joined(at, steps)));
+  }
+
+  private static List<JsonPath.Step> joined(List<JsonPath.Step> one, List<JsonPath.Step> other) {
+    List<JsonPath.Step> steps = new ArrayList<>(one);
+    steps.addAll(other);
+    return steps;
   }
 
   /**

@@ -475,6 +475,88 @@ class ScenarioDocumentTest {
     assertThat(paths(edited)).containsExactly("$.inputs[3].pattern[1]");
   }
 
+  private static final String SHAPED =
+      """
+      {
+        "format": "rolltrace-scenario/1", "title": "Shaped",
+        "aeroplane": {
+          "mass": "790 kg",
+          "wing": { "panels": [
+            { "from": "0 m", "to": "4.5 m", "innerChord": "1.6 m", "outerChord": "1.1 m", "dihedral": "5 deg" } ] },
+          "ailerons": { "up": "20 deg", "down": "15 deg", "from": "2.5 m", "to": "4.3 m", "chordShare": 0.25 },
+          "body": { "length": "6.5 m", "width": "1.1 m", "height": "1.2 m" },
+          "variants": {
+            "clipped \u201ctips\u201d": { "wing": { "panels": [
+              { "from": "0 m", "to": "4.1 m", "innerChord": "1.6 m", "outerChord": "1.15 m", "dihedral": "5 deg" } ] },
+              "ailerons": { "to": "4 m" } },
+            "heavy": { "mass": "900 kg" }
+          }
+        },
+        "condition": { "pressureAltitude": "0 m", "trueAirspeed": "50 m/s" },
+        "slip": "held", "inputs": [], "duration": "4 s"
+      }
+      """;
+
+  private static final String CLIPPED = "clipped \u201ctips\u201d";
+
+  private ScenarioDocument shaped() {
+    return ScenarioDocument.ofText(SHAPED, directory);
+  }
+
+  @Test
+  void valuesOfTheAeroplaneAreThoseOfTheChosenVariant() {
+    ScenarioDocument base = shaped();
+    ScenarioDocument clipped = base.with("$.variant", CLIPPED);
+
+    assertThat(base.variants()).containsExactly(CLIPPED, "heavy");
+    assertThat(base.variant()).isEmpty();
+    assertThat(clipped.variant()).contains(CLIPPED);
+    assertThat(base.aeroplaneText("wing.panels[0].to")).contains("4.5 m");
+    assertThat(clipped.aeroplaneText("wing.panels[0].to")).contains("4.1 m");
+    assertThat(clipped.aeroplaneText("ailerons.to")).contains("4 m");
+    assertThat(clipped.aeroplaneText("ailerons.from")).as("of the base").contains("2.5 m");
+    assertThat(clipped.aeroplaneCount("wing.panels")).isEqualTo(1);
+    assertThat(clipped.aeroplaneHas("fin")).isFalse();
+    // The reader merges by itself; both must see the same wing.
+    assertThat(scenario(clipped).data().aeroplane().span()).isEqualTo(8.2);
+    ScenarioDocument none = base.with("$.variant", "none such");
+    assertThat(none.variant()).isEmpty();
+    assertThat(none.aeroplaneText("mass")).contains("790 kg");
+  }
+
+  @Test
+  void changesWhileAVariantFliesAreTheVariants() {
+    ScenarioDocument heavy = shaped().with("$.variant", "heavy");
+
+    ScenarioDocument wider = heavy.withAeroplane("wing.panels[0].to", "5 m");
+    assertThat(scenario(wider).data().aeroplane().span()).isEqualTo(10);
+    assertThat(wider.text("$.aeroplane.variants.heavy.wing.panels[0].outerChord"))
+        .as("a list is a variant's as a whole")
+        .contains("1.1 m");
+    assertThat(scenario(wider.without("$.variant")).data().aeroplane().span()).isEqualTo(9);
+    ScenarioDocument share = heavy.withAeroplaneNumber("ailerons.chordShare", "0.3");
+    assertThat(share.aeroplaneText("ailerons.chordShare")).contains("0.3");
+    assertThat(share.without("$.variant").aeroplaneText("ailerons.chordShare")).contains("0.25");
+    ScenarioDocument bare = heavy.withoutAeroplane("ailerons");
+    assertThat(bare.aeroplaneHas("ailerons")).isFalse();
+    assertThat(bare.without("$.variant").aeroplaneHas("ailerons")).isTrue();
+    ScenarioDocument lighter = heavy.withAeroplane("mass", "nothing");
+    assertThat(paths(lighter)).containsExactly("$.aeroplane.variants.heavy.mass");
+    assertThat(lighter.aeroplanePaths("mass"))
+        .containsExactly("$.aeroplane.mass", "$.aeroplane.variants.heavy.mass");
+  }
+
+  @Test
+  void changesWithoutAVariantAreTheBases() {
+    ScenarioDocument wider = shaped().withAeroplane("wing.panels[0].to", "5 m");
+    assertThat(wider.text("$.aeroplane.wing.panels[0].to")).contains("5 m");
+    assertThat(wider.withoutAeroplane("ailerons").aeroplaneHas("ailerons")).isFalse();
+    assertThat(wider.aeroplanePaths("mass")).containsExactly("$.aeroplane.mass");
+    ScenarioDocument clipped =
+        shaped().with("$.variant", CLIPPED).withAeroplane("ailerons.to", "3.9 kg");
+    assertThat(clipped.aeroplanePaths("ailerons.to")).containsAll(paths(clipped));
+  }
+
   /** Quick enough to be done while somebody types. */
   @Test
   void anEditWithItsCheckCostsLittle() {

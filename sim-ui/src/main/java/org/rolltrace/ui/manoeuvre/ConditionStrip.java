@@ -18,6 +18,9 @@ import org.rolltrace.core.files.ScenarioDocument;
 import org.rolltrace.core.motion.SlipTreatment;
 import org.rolltrace.core.quantity.Quantity;
 import org.rolltrace.core.run.RunResult;
+import org.rolltrace.ui.control.FieldTarget;
+import org.rolltrace.ui.control.PathField;
+import org.rolltrace.ui.control.Written;
 import org.rolltrace.ui.session.DeskSession;
 
 /** What is flown: condition, slip, start and duration, in one strip across the top. */
@@ -90,7 +93,7 @@ final class ConditionStrip extends FlowPane {
   private boolean showing;
 
   ConditionStrip(DeskSession session) {
-    super(8, 6);
+    super(6, 6);
     this.session = session;
     getStyleClass().add("condition-strip");
     speed = new PathField(session, speedTarget(Speed.TRUE));
@@ -108,7 +111,7 @@ final class ConditionStrip extends FlowPane {
             new PathField(
                 session,
                 FieldTarget.quantity(
-                    "$.title", "Scenario", "title", "", "Title of the scenario", 10)),
+                    "$.title", "Scenario", "title", "", "Title of the scenario", 8)),
             new PathField(
                 session,
                 FieldTarget.quantity(

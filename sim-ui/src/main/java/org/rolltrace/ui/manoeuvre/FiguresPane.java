@@ -7,6 +7,8 @@ import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.VBox;
 import org.rolltrace.core.derivatives.Coefficient;
+import org.rolltrace.ui.control.FieldTarget;
+import org.rolltrace.ui.control.PathField;
 import org.rolltrace.ui.session.DeskSession;
 
 /** The figures of the aeroplane: size, mass, controls, derivatives, limits. */
@@ -72,11 +74,16 @@ final class FiguresPane extends ScrollPane {
     if (document == null) {
       return "";
     }
-    return document.aeroplaneIsInline()
-        ? "The scenario's own copy."
-        : "From "
-            + document.text("$.aeroplane").orElse("")
-            + ". The first change makes the scenario's own copy; the file stays as it is.";
+    String place =
+        document.aeroplaneIsInline()
+            ? "The scenario's own copy."
+            : "From "
+                + document.text("$.aeroplane").orElse("")
+                + ". The first change makes the scenario's own copy; the file stays as it is.";
+    return document
+        .variant()
+        .map(name -> place + " Variant " + name + ": changes are its own.")
+        .orElse(place);
   }
 
   private static Label heading(String words) {

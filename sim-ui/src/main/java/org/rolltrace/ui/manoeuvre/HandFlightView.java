@@ -23,6 +23,7 @@ import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.ui.chart.Palette;
 import org.rolltrace.ui.chart.RearView;
+import org.rolltrace.ui.control.CanvasPainter;
 
 /** The workplace while a hand flies: what happens above, aeroplane, stick and pedals below. */
 final class HandFlightView extends VBox {

@@ -12,6 +12,7 @@ import org.rolltrace.core.history.Channel;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.ui.chart.HandDrawing;
 import org.rolltrace.ui.chart.Palette;
+import org.rolltrace.ui.control.CanvasPainter;
 
 /** A control that the mouse holds while its button is down. */
 final class HandPane extends Region {

@@ -18,6 +18,8 @@ import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
 import org.rolltrace.core.files.ScenarioDocument;
 import org.rolltrace.core.pilot.Control;
+import org.rolltrace.ui.control.FieldTarget;
+import org.rolltrace.ui.control.PathField;
 import org.rolltrace.ui.session.DeskSession;
 
 /** The selected input as typed values, and the buttons that add and remove inputs. */

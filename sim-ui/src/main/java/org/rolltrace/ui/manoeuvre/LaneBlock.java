@@ -15,6 +15,7 @@ import org.rolltrace.core.pilot.RampInput;
 import org.rolltrace.core.pilot.SweepInput;
 import org.rolltrace.core.pilot.TraceInput;
 import org.rolltrace.ui.chart.TimeWindow;
+import org.rolltrace.ui.control.Written;
 
 /**
  * An input as a block on its lane, and what dragging does to it. Times are kept to a hundredth of a

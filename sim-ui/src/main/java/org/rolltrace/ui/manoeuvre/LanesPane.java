@@ -26,6 +26,7 @@ import org.rolltrace.ui.chart.StripChart;
 import org.rolltrace.ui.chart.Stroke;
 import org.rolltrace.ui.chart.TimeWindow;
 import org.rolltrace.ui.chart.TypeSize;
+import org.rolltrace.ui.control.CanvasPainter;
 
 /**
  * What the hand did: stick and pedal lanes, and one of the power where it moves, with their inputs

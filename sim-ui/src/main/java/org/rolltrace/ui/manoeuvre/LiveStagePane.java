@@ -17,6 +17,7 @@ import org.rolltrace.ui.chart.StripChart;
 import org.rolltrace.ui.chart.TimeWindow;
 import org.rolltrace.ui.chart.ValueRange;
 import org.rolltrace.ui.chart.WingTrace;
+import org.rolltrace.ui.control.CanvasPainter;
 
 /** What happens while a hand flies: the wing trace and the strips of the last seconds. */
 final class LiveStagePane extends Region {

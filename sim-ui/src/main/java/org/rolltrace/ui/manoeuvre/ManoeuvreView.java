@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
 import javafx.beans.property.ObjectProperty;
+import javafx.event.EventHandler;
 import javafx.geometry.Pos;
 import javafx.scene.control.Button;
 import javafx.scene.control.ToggleButton;
@@ -17,6 +18,7 @@ import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import org.rolltrace.ui.chart.Palette;
+import org.rolltrace.ui.control.CautionsPane;
 import org.rolltrace.ui.session.DeskSession;
 
 /**
@@ -30,7 +32,7 @@ public final class ManoeuvreView extends BorderPane {
   private static final double READINGS = 322;
 
   /** Below this width the figures of the aeroplane take the place of the readings, px. */
-  private static final double NARROW = 1080;
+  private static final double NARROW = 1032;
 
   private final ManoeuvreModel model;
   private final FiguresPane figures;
@@ -86,11 +88,15 @@ public final class ManoeuvreView extends BorderPane {
     conditions = new ConditionStrip(session);
     setTop(conditions);
     model.hand().flyingProperty().addListener((property, before, now) -> fly(now));
+    EventHandler<KeyEvent> keys = handFlight::key;
     sceneProperty()
         .addListener(
             (property, before, now) -> {
+              if (before != null) {
+                before.removeEventFilter(KeyEvent.ANY, keys);
+              }
               if (now != null) {
-                now.addEventFilter(KeyEvent.ANY, handFlight::key);
+                now.addEventFilter(KeyEvent.ANY, keys);
               }
             });
     showFigures.setId("show-figures");

@@ -11,6 +11,7 @@ import org.rolltrace.core.motion.LateralModes;
 import org.rolltrace.core.motion.Mode;
 import org.rolltrace.core.quantity.Quantity;
 import org.rolltrace.core.run.RunResult;
+import org.rolltrace.ui.control.Written;
 
 /**
  * One line of the readings, in the unit in which it is read.

@@ -17,6 +17,8 @@ import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
 import org.rolltrace.core.files.FileFault;
 import org.rolltrace.core.files.ScenarioDocument;
+import org.rolltrace.ui.control.FieldTarget;
+import org.rolltrace.ui.control.PathField;
 import org.rolltrace.ui.session.DeskSession;
 
 /** What else a scenario says: the state it starts from, a sideslip held against time, a note. */

@@ -34,6 +34,7 @@ import org.rolltrace.ui.chart.Stroke;
 import org.rolltrace.ui.chart.TypeSize;
 import org.rolltrace.ui.chart.ValueRange;
 import org.rolltrace.ui.chart.WingTrace;
+import org.rolltrace.ui.control.CanvasPainter;
 
 /**
  * What happened: the wing trace above, the strips below it; what the hands did is in the lanes. The

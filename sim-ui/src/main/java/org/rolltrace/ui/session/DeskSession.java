@@ -331,6 +331,20 @@ public final class DeskSession {
     }
   }
 
+  /**
+   * Edits the document as part of a gesture, as {@link #edit(String, String, UnaryOperator)} does,
+   * but always from the document with which the gesture began, so that what is rounded on the way
+   * does not add up.
+   *
+   * @param word what is done, for people
+   * @param mergeKey what it is done to
+   * @param change makes the edited document of the one with which the gesture began
+   */
+  public void editFromStart(String word, String mergeKey, UnaryOperator<ScenarioDocument> change) {
+    ScenarioDocument start = history.beginning(word, mergeKey).orElse(document.get());
+    edit(word, mergeKey, present -> change.apply(start));
+  }
+
   private Optional<ScenarioDocument> apply(String word, UnaryOperator<ScenarioDocument> change) {
     ScenarioDocument present = document.get();
     if (present == null) {
@@ -534,6 +548,33 @@ public final class DeskSession {
   public void keepGhost() {
     if (result.get() != null) {
       ghost.set(result.get());
+    }
+  }
+
+  /**
+   * Flies another document than the present one and keeps its result to compare with. One that
+   * cannot be flown leaves a problem, and what was kept before.
+   *
+   * @param what it is, for people
+   * @param change makes the other document
+   */
+  public void keepGhostOf(String what, UnaryOperator<ScenarioDocument> change) {
+    if (document.get() == null) {
+      return;
+    }
+    Outcome outcome;
+    try {
+      outcome = Outcome.of(change.apply(document.get()));
+    } catch (FileFaultsException e) {
+      problem.set(new Problem("Not kept: " + what, e.getMessage()));
+      return;
+    }
+    if (outcome.result().isPresent()) {
+      ghost.set(outcome.result().get());
+    } else {
+      String reason =
+          outcome.faults().isEmpty() ? outcome.failure() : outcome.faults().get(0).toString();
+      problem.set(new Problem("Not kept: " + what, reason));
     }
   }
 

@@ -58,6 +58,13 @@ final class EditHistory {
     undone.clear();
   }
 
+  /** The document with which a gesture began; empty when it is not going on or has led back. */
+  Optional<ScenarioDocument> beginning(String word, String key) {
+    return gesture.equals(Optional.of(word + "\n" + key)) && gestureHasStep
+        ? Optional.of(done.getLast().document())
+        : Optional.empty();
+  }
+
   private void push(String word, ScenarioDocument before) {
     undone.clear();
     done.addLast(new Step(word, before));

@@ -12,6 +12,8 @@ import org.rolltrace.core.files.ScenarioDocument;
 import org.rolltrace.core.pilot.Control;
 import org.rolltrace.core.pilot.DoubletInput;
 import org.rolltrace.core.pilot.HoldInput;
+import org.rolltrace.ui.control.Written;
+import org.rolltrace.ui.session.OpenSession;
 
 /** Expected texts are worked out by hand from the shipped scenarios named in each test. */
 class LaneBlockTest {

@@ -13,6 +13,7 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.rolltrace.ui.chart.TimeWindow;
 import org.rolltrace.ui.session.DeskSession;
+import org.rolltrace.ui.session.OpenSession;
 
 class ManoeuvreModelTest {
   /** Rounding of times of some 10 s. */

@@ -1,4 +1,4 @@
-package org.rolltrace.ui.manoeuvre;
+package org.rolltrace.ui.control;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
@@ -49,6 +49,18 @@ class WrittenTest {
   })
   void readingsHaveFourFiguresAndAProperMinus(double value, String expected) {
     assertThat(Written.reading(value)).isEqualTo(expected);
+  }
+
+  @ParameterizedTest
+  @CsvSource({
+    "-0.4318, 4, \u22120.4318",
+    "-0.00712345, 4, \u22120.0071",
+    "0, 4, 0",
+    "-0.00001, 4, 0.0000",
+    "0.2, 4, 0.2000"
+  })
+  void columnsHaveFixedDecimals(double value, int decimals, String expected) {
+    assertThat(Written.fixed(value, decimals)).isEqualTo(expected);
   }
 
   private static LongStream seeds() {

@@ -1,4 +1,4 @@
-package org.rolltrace.ui.manoeuvre;
+package org.rolltrace.ui.control;
 
 import javafx.geometry.VPos;
 import javafx.scene.canvas.GraphicsContext;
@@ -16,8 +16,9 @@ import org.rolltrace.ui.chart.Stroke;
 import org.rolltrace.ui.chart.TypeSize;
 
 /** Paints the drawings that window and paper share onto a canvas. */
-final class CanvasPainter {
-  static final String FAMILY = "DejaVu Sans";
+public final class CanvasPainter {
+  /** The family of type. */
+  public static final String FAMILY = "DejaVu Sans";
 
   /** What places may be off by, px. */
   private static final double ROUNDING = 1e-6;
@@ -25,7 +26,13 @@ final class CanvasPainter {
   private final GraphicsContext canvas;
   private final Palette palette;
 
-  CanvasPainter(GraphicsContext canvas, Palette palette) {
+  /**
+   * A painter.
+   *
+   * @param canvas what it paints on
+   * @param palette the colours
+   */
+  public CanvasPainter(GraphicsContext canvas, Palette palette) {
     this.canvas = canvas;
     this.palette = palette;
     canvas.setLineCap(StrokeLineCap.ROUND);
@@ -33,20 +40,39 @@ final class CanvasPainter {
     canvas.setTextBaseline(VPos.BASELINE);
   }
 
-  static Color colour(Palette palette, Ink ink, double opacity) {
+  /**
+   * A colour.
+   *
+   * @param palette the colours of all inks
+   * @param ink the role
+   * @param opacity 0 to 1
+   * @return the colour
+   */
+  public static Color colour(Palette palette, Ink ink, double opacity) {
     int rgb = palette.rgb(ink);
     return Color.rgb((rgb >> 16) & 0xff, (rgb >> 8) & 0xff, rgb & 0xff, opacity);
   }
 
-  /** Paints a sheet with its upper left corner at a point. */
-  void paint(Sheet sheet, double x, double y) {
+  /**
+   * Paints a sheet.
+   *
+   * @param sheet the drawing
+   * @param x of its upper left corner, px
+   * @param y of its upper left corner, px
+   */
+  public void paint(Sheet sheet, double x, double y) {
     canvas.save();
     canvas.translate(x, y);
     sheet.marks().forEach(this::paint);
     canvas.restore();
   }
 
-  void paint(Mark mark) {
+  /**
+   * Paints a mark.
+   *
+   * @param mark the mark
+   */
+  public void paint(Mark mark) {
     if (mark instanceof Mark.Line line) {
       stroke(line.stroke());
       canvas.strokeLine(line.x1(), line.y1(), line.x2(), line.y2());
@@ -141,7 +167,13 @@ final class CanvasPainter {
     canvas.fillText(label.text(), label.x(), label.y());
   }
 
-  static Font font(TypeSize size) {
+  /**
+   * The type of a size.
+   *
+   * @param size the size
+   * @return the font
+   */
+  public static Font font(TypeSize size) {
     return Font.font(FAMILY, size.pixels());
   }
 

@@ -1,4 +1,4 @@
-package org.rolltrace.ui.manoeuvre;
+package org.rolltrace.ui.control;
 
 import java.util.ArrayList;
 import java.util.List;
@@ -10,11 +10,16 @@ import org.rolltrace.core.run.Safety;
 import org.rolltrace.ui.session.DeskSession;
 
 /** The limits that the result met, and what it may be used for: always in sight. */
-final class CautionsPane extends VBox {
+public final class CautionsPane extends VBox {
   private final DeskSession session;
   private List<String> shown = List.of();
 
-  CautionsPane(DeskSession session) {
+  /**
+   * A pane.
+   *
+   * @param session whose result is shown
+   */
+  public CautionsPane(DeskSession session) {
     super(4);
     this.session = session;
     setId("cautions");

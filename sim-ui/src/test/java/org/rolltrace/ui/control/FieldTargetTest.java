@@ -1,4 +1,4 @@
-package org.rolltrace.ui.manoeuvre;
+package org.rolltrace.ui.control;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
@@ -11,6 +11,7 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.rolltrace.core.files.ScenarioDocument;
 import org.rolltrace.ui.session.DeskSession;
+import org.rolltrace.ui.session.OpenSession;
 
 class FieldTargetTest {
   private final ScenarioDocument document = OpenSession.document("light-single-roll-entry");
