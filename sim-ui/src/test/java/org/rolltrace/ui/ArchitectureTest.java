@@ -89,10 +89,35 @@ class ArchitectureTest {
   static final ArchRule MODELS_KNOW_NO_NODES =
       noClasses()
           .that()
-          .resideInAPackage("org.rolltrace.ui.manoeuvre..")
+          .resideInAnyPackage("org.rolltrace.ui.manoeuvre..", "org.rolltrace.ui.build..")
           .and()
           .haveSimpleNameEndingWith("Model")
           .should()
           .dependOnClassesThat()
           .resideInAnyPackage("javafx.scene..", "javafx.stage..", "javafx.application..");
+
+  @ArchTest
+  static final ArchRule WORKPLACES_KNOW_NOT_EACH_OTHER =
+      noClasses()
+          .that()
+          .resideInAPackage("org.rolltrace.ui.build..")
+          .should()
+          .dependOnClassesThat()
+          .resideInAnyPackage(
+              "org.rolltrace.ui.manoeuvre..",
+              "org.rolltrace.ui.desk..",
+              "java.awt..",
+              "javax.swing..");
+
+  @ArchTest
+  static final ArchRule CONTROLS_KNOW_NO_WORKPLACE =
+      noClasses()
+          .that()
+          .resideInAPackage("org.rolltrace.ui.control..")
+          .should()
+          .dependOnClassesThat()
+          .resideInAnyPackage(
+              "org.rolltrace.ui.build..",
+              "org.rolltrace.ui.manoeuvre..",
+              "org.rolltrace.ui.desk..");
 }

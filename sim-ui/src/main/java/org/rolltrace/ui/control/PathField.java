@@ -2,12 +2,16 @@ package org.rolltrace.ui.control;
 
 import java.util.Optional;
 import java.util.function.BinaryOperator;
+import java.util.function.Function;
 import javafx.application.Platform;
 import javafx.collections.ListChangeListener;
 import javafx.css.PseudoClass;
+import javafx.geometry.BoundingBox;
+import javafx.geometry.Bounds;
 import javafx.geometry.Point2D;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
 import javafx.scene.control.Tooltip;
 import javafx.scene.layout.VBox;
@@ -32,6 +36,7 @@ public final class PathField extends VBox {
   private final Tooltip hint = new Tooltip();
   private final Label fault = new Label();
   private final BinaryOperator<ScenarioDocument> follow;
+  private final Function<ScenarioDocument, Optional<String>> implied;
   private FieldTarget target;
   private boolean showing;
 
@@ -55,8 +60,25 @@ public final class PathField extends VBox {
    */
   public PathField(
       DeskSession session, FieldTarget target, BinaryOperator<ScenarioDocument> follow) {
+    this(session, target, follow, document -> Optional.empty());
+  }
+
+  /**
+   * A field that shows what follows from other values where nothing is written.
+   *
+   * @param session what is edited
+   * @param target the value
+   * @param follow as in the other constructor
+   * @param implied the text that follows; empty when none does
+   */
+  public PathField(
+      DeskSession session,
+      FieldTarget target,
+      BinaryOperator<ScenarioDocument> follow,
+      Function<ScenarioDocument, Optional<String>> implied) {
     this.session = session;
     this.follow = follow;
+    this.implied = implied;
     getStyleClass().add("path-field");
     label.getStyleClass().add("field-label");
     label.setLabelFor(field);
@@ -120,7 +142,7 @@ public final class PathField extends VBox {
 
   private void typed(String text) {
     ScenarioDocument document = session.documentProperty().get();
-    if (showing || document == null || target.says(document, text)) {
+    if (showing || document == null || says(document, text)) {
       return;
     }
     session.editFromStart(
@@ -129,17 +151,32 @@ public final class PathField extends VBox {
         start -> follow.apply(start, target.put(start, text)));
   }
 
+  private Optional<String> textIn(ScenarioDocument document) {
+    return target.textIn(document).or(() -> implied.apply(document));
+  }
+
+  private boolean says(ScenarioDocument document, String text) {
+    return target.says(document, text)
+        || (target.textIn(document).isEmpty() && implied.apply(document).equals(Optional.of(text)));
+  }
+
   /** Shows the document's text, unless it is what the user is typing. */
   private void show() {
     ScenarioDocument document = session.documentProperty().get();
-    String text = document == null ? "" : target.textIn(document).orElse("");
-    boolean shown =
-        document == null ? field.getText().isEmpty() : target.says(document, field.getText());
+    boolean shown = document == null ? field.getText().isEmpty() : isShown(document);
     if (!shown) {
       showing = true;
-      field.setText(text);
+      field.setText(document == null ? "" : textIn(document).orElse(""));
       showing = false;
     }
+  }
+
+  /** A field that is being emptied stays empty, also where something follows without it. */
+  private boolean isShown(ScenarioDocument document) {
+    if (field.getText().isEmpty()) {
+      return textIn(document).isEmpty() || (field.isFocused() && target.textIn(document).isEmpty());
+    }
+    return says(document, field.getText());
   }
 
   private void showFault() {
@@ -178,12 +215,29 @@ public final class PathField extends VBox {
     if (!fault.isVisible() || getScene() == null) {
       return;
     }
-    double width = Math.min(FAULT_WIDTH, fault.prefWidth(-1));
+    Bounds room = room();
+    double width =
+        Math.min(Math.min(FAULT_WIDTH, room.getWidth() - 2 * MARGIN), fault.prefWidth(-1));
     double height = fault.prefHeight(width);
     Point2D place = localToScene(0, field.getBoundsInParent().getMaxY() + 2);
-    double x = Math.min(0, getScene().getWidth() - MARGIN - width - place.getX());
-    boolean below = place.getY() + height + MARGIN < getScene().getHeight();
+    double x = Math.min(0, room.getMaxX() - MARGIN - width - place.getX());
+    boolean below = place.getY() + height + MARGIN < room.getMaxY();
     double y = below ? field.getBoundsInParent().getMaxY() + 2 : -height - 2;
     fault.resizeRelocate(x, y, width, height);
+  }
+
+  /** What of the scene the fault may cover: a pane that scrolls shows nothing outside itself. */
+  private Bounds room() {
+    for (Node node = getParent(); node != null; node = node.getParent()) {
+      if (node instanceof ScrollPane pane) {
+        Bounds whole = pane.localToScene(pane.getLayoutBounds());
+        return new BoundingBox(
+            whole.getMinX(),
+            whole.getMinY(),
+            pane.getViewportBounds().getWidth(), // without the scroll bar
+            whole.getHeight());
+      }
+    }
+    return new BoundingBox(0, 0, getScene().getWidth(), getScene().getHeight());
   }
 }

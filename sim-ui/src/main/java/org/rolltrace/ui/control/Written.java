@@ -49,4 +49,20 @@ public final class Written {
     int decimals = Math.max(0, Math.min(7, 4 - figures.precision() + figures.scale()));
     return String.format(Locale.ROOT, "%." + decimals + "f", figures).replace('-', '\u2212');
   }
+
+  /**
+   * A number to so many decimals with a proper minus sign, for columns.
+   *
+   * @param value the number
+   * @param decimals exactly so many; a number that is 0 has none
+   * @return the text
+   */
+  public static String fixed(double value, int decimals) {
+    if (value == 0) {
+      return "0";
+    }
+    String digits = String.format(Locale.ROOT, "%." + decimals + "f", value);
+    boolean zero = digits.chars().noneMatch(digit -> digit >= '1' && digit <= '9');
+    return zero ? digits.replace("-", "") : digits.replace('-', '\u2212');
+  }
 }

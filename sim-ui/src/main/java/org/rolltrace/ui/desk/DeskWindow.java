@@ -20,6 +20,7 @@ import javafx.scene.control.MenuBar;
 import javafx.scene.control.MenuItem;
 import javafx.scene.control.RadioMenuItem;
 import javafx.scene.control.SeparatorMenuItem;
+import javafx.scene.control.ToggleButton;
 import javafx.scene.control.ToggleGroup;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCombination;
@@ -30,6 +31,8 @@ import javafx.scene.layout.Priority;
 import javafx.stage.Screen;
 import javafx.stage.Stage;
 import javafx.stage.WindowEvent;
+import org.rolltrace.ui.build.BuildModel;
+import org.rolltrace.ui.build.BuildView;
 import org.rolltrace.ui.chart.Palette;
 import org.rolltrace.ui.dialog.Dialogs;
 import org.rolltrace.ui.manoeuvre.ManoeuvreModel;
@@ -38,13 +41,21 @@ import org.rolltrace.ui.session.DeskSession;
 import org.rolltrace.ui.session.Problem;
 import org.rolltrace.ui.session.RecoveryStore;
 
-/** The window: menus, the workplace, and the questions about unsaved work. */
+/**
+ * The window: menus, the rail of workplaces with one of them, and the questions about unsaved work.
+ */
 public final class DeskWindow {
   private static final double WIDTH = 1240;
   private static final double HEIGHT = 800;
 
   /** Where the space bar has no other meaning than to play and pause. */
   private static final Set<String> PLAYABLE = Set.of("stage", "lanes");
+
+  /** A line through a roll: level, over, level again. */
+  private static final String MANOEUVRE_SIGN = "M1 15 H5 C9 15 8 5 12 5 H19";
+
+  /** A tapered wing from above, with its body. */
+  private static final String BUILD_SIGN = "M0 9 L8 7 V3 H12 V7 L20 9 V12 H12 V17 H8 V12 H0 Z";
 
   private static final String UNDO = "Shortcut+Z";
   private static final String REDO = "Shortcut+Shift+Z";
@@ -59,6 +70,10 @@ public final class DeskWindow {
           Path.of(System.getProperty("user.home", ".")),
           () -> ShippedScenarios.folder(RecoveryStore.defaultFolder()));
   private final BorderPane root = new BorderPane();
+  private final HBox top;
+  private final MenuBar menus;
+  private final Workplace manoeuvre;
+  private final Workplace build;
   private final ObjectProperty<Palette> palette =
       new SimpleObjectProperty<>(this, "palette", Palette.LIGHT);
 
@@ -76,13 +91,30 @@ public final class DeskWindow {
     this.dialogs = new Dialogs(stage);
     this.model = new ManoeuvreModel(session);
     root.getStyleClass().add("desk");
-    ManoeuvreView manoeuvre = new ManoeuvreView(model, palette, dialogs::askTrace);
-    MenuBar menus = menus();
+    ManoeuvreView manoeuvreView = new ManoeuvreView(model, palette, dialogs::askTrace);
+    BuildView buildView = new BuildView(new BuildModel(session, model.windowProperty()), palette);
+    WorkplaceRail rail = new WorkplaceRail();
+    manoeuvre =
+        new Workplace(
+            manoeuvreView,
+            manoeuvreView.lookup("#stage"),
+            manoeuvreView.actions(),
+            rail.add(
+                "workplace-manoeuvre", "Manoeuvre", "Ctrl+1", MANOEUVRE_SIGN, this::showManoeuvre));
+    build =
+        new Workplace(
+            buildView,
+            buildView.lookup("#drawing"),
+            buildView.actions(),
+            rail.add("workplace-build", "Build", "Ctrl+2", BUILD_SIGN, this::showBuild));
+    rail.disableProperty().bind(model.hand().flyingProperty());
+    menus = menus();
     HBox.setHgrow(menus, Priority.ALWAYS);
-    HBox top = new HBox(menus, manoeuvre.actions());
+    top = new HBox();
     top.getStyleClass().add("top-row");
     root.setTop(top);
-    root.setCenter(manoeuvre);
+    root.setLeft(rail);
+    show(manoeuvre);
     Rectangle2D screen = Screen.getPrimary().getVisualBounds();
     Scene scene =
         new Scene(root, Math.min(WIDTH, screen.getWidth()), Math.min(HEIGHT, screen.getHeight()));
@@ -112,6 +144,38 @@ public final class DeskWindow {
     session
         .problemProperty()
         .addListener((property, before, now) -> Optional.ofNullable(now).ifPresent(this::tell));
+  }
+
+  /** A page of the window, with what has the keys first. */
+  private record Workplace(Node page, Node first, Node actions, ToggleButton button) {}
+
+  private void show(Workplace workplace) {
+    if (root.getCenter() == workplace.page()) {
+      return;
+    }
+    model.clock().pause();
+    session.endGesture();
+    top.getChildren().setAll(menus, workplace.actions());
+    root.setCenter(workplace.page());
+    workplace.button().setSelected(true);
+    workplace.first().requestFocus();
+  }
+
+  /** Shows the workplace of the manoeuvre. */
+  public void showManoeuvre() {
+    show(manoeuvre);
+  }
+
+  /** Shows the workplace of the shape, unless a hand flies. */
+  public void showBuild() {
+    if (!model.hand().flyingProperty().get()) {
+      show(build);
+    }
+  }
+
+  private void flyByHand() {
+    showManoeuvre();
+    model.hand().begin();
   }
 
   private String windowTitle() {
@@ -189,7 +253,7 @@ public final class DeskWindow {
     redo.disableProperty().bind(session.canRedoProperty().not().or(model.hand().flyingProperty()));
     redo.textProperty().bind(Bindings.concat("Redo: ", session.redoWordProperty()));
     Menu edit = new Menu("Edit", null, undo, redo);
-    MenuItem fly = item("Fly by hand", "Shortcut+F", model.hand()::begin);
+    MenuItem fly = item("Fly by hand", "Shortcut+F", this::flyByHand);
     fly.disableProperty().bind(model.hand().flyingProperty());
     MenuItem stop = item("End the flight", "Esc", model.hand()::stop);
     stop.disableProperty().bind(model.hand().flyingProperty().not());
@@ -204,10 +268,15 @@ public final class DeskWindow {
     light.setSelected(true);
     light.setOnAction(event -> useDark(false));
     dark.setOnAction(event -> useDark(true));
+    MenuItem toBuild = item("Build", "Shortcut+2", this::showBuild);
+    toBuild.disableProperty().bind(model.hand().flyingProperty());
     Menu view =
         new Menu(
             "View",
             null,
+            item("Manoeuvre", "Shortcut+1", this::showManoeuvre),
+            toBuild,
+            new SeparatorMenuItem(),
             light,
             dark,
             new SeparatorMenuItem(),
@@ -263,7 +332,8 @@ public final class DeskWindow {
     Node focused = stage.getScene().getFocusOwner();
     boolean free = focused == null || PLAYABLE.contains(String.valueOf(focused.getId()));
     boolean flying = model.hand().flyingProperty().get(); // then space begins the flight
-    if (event.getCode() == KeyCode.SPACE && free && !flying) {
+    boolean seen = root.getCenter() == manoeuvre.page();
+    if (event.getCode() == KeyCode.SPACE && seen && free && !flying) {
       model.clock().toggle();
       event.consume();
     }

@@ -93,7 +93,7 @@ final class ConditionStrip extends FlowPane {
   private boolean showing;
 
   ConditionStrip(DeskSession session) {
-    super(8, 6);
+    super(6, 6);
     this.session = session;
     getStyleClass().add("condition-strip");
     speed = new PathField(session, speedTarget(Speed.TRUE));
@@ -111,7 +111,7 @@ final class ConditionStrip extends FlowPane {
             new PathField(
                 session,
                 FieldTarget.quantity(
-                    "$.title", "Scenario", "title", "", "Title of the scenario", 10)),
+                    "$.title", "Scenario", "title", "", "Title of the scenario", 8)),
             new PathField(
                 session,
                 FieldTarget.quantity(

@@ -51,6 +51,18 @@ class WrittenTest {
     assertThat(Written.reading(value)).isEqualTo(expected);
   }
 
+  @ParameterizedTest
+  @CsvSource({
+    "-0.4318, 4, \u22120.4318",
+    "-0.00712345, 4, \u22120.0071",
+    "0, 4, 0",
+    "-0.00001, 4, 0.0000",
+    "0.2, 4, 0.2000"
+  })
+  void columnsHaveFixedDecimals(double value, int decimals, String expected) {
+    assertThat(Written.fixed(value, decimals)).isEqualTo(expected);
+  }
+
   private static LongStream seeds() {
     return LongStream.range(0, 50);
   }

@@ -12,6 +12,7 @@ import javafx.application.Application;
 import javafx.application.Platform;
 import javafx.embed.swing.SwingFXUtils;
 import javafx.geometry.Rectangle2D;
+import javafx.scene.control.Button;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.image.WritableImage;
 import javafx.scene.robot.Robot;
@@ -31,6 +32,9 @@ import org.rolltrace.ui.task.Background;
 public final class WindowPictures extends Application {
   private static final Duration SETTLE = Duration.millis(1500);
   private static final Path SCENARIOS = Path.of("scenarios").toAbsolutePath();
+
+  private static final Path SHAPED =
+      Path.of("sim-ui", "src", "test", "resources", "shaped", "roll-entry.json").toAbsolutePath();
 
   private final Deque<Shot> shots = new ArrayDeque<>();
   private Background runner;
@@ -126,9 +130,61 @@ public final class WindowPictures extends Application {
                   figures(false);
                   session.open(SCENARIOS.resolve("tarnlark-wing-drop.json"));
                 }));
+        addBuild(suffix);
       }
     }
     next();
+  }
+
+  /** The workplace of the shape; it ends where it began. */
+  private void addBuild(String suffix) {
+    shots.add(
+        new Shot(
+            "build-" + suffix,
+            () -> {
+              session.open(SHAPED);
+              window.showBuild();
+            }));
+    shots.add(
+        new Shot(
+            "build-variant-" + suffix,
+            () -> {
+              session.keepGhost();
+              session.edit("choose variant", d -> d.with("$.variant", "clipped tips"));
+            }));
+    shots.add(
+        new Shot(
+            "build-given-" + suffix,
+            () ->
+                session.edit(
+                    "give",
+                    d ->
+                        d.withAeroplaneNumber("derivatives.values.Cl_p", "-0.4")
+                            .withAeroplaneNumber("derivatives.values.Cn_da", "-0.004"))));
+    shots.add(
+        new Shot(
+            "build-fault-" + suffix,
+            () -> {
+              session.dropGhost();
+              session.open(SHAPED);
+              session.edit("spoil", d -> d.withAeroplane("ailerons.to", "5 m"));
+              session.edit("spoil", d -> d.withAeroplane("span", "9 kg"));
+            }));
+    shots.add(
+        new Shot(
+            "build-no-shape-" + suffix,
+            () -> session.open(SCENARIOS.resolve("light-single-roll-entry.json"))));
+    shots.add(
+        new Shot(
+            "build-start-" + suffix,
+            () -> ((Button) stage.getScene().lookup("#give-shape")).fire()));
+    for (String name : List.of("tarnlark-cruise", "cragmerle-clipped", "mosspipit")) {
+      shots.add(
+          new Shot(
+              "build-" + name + "-" + suffix,
+              () -> session.open(SCENARIOS.resolve(name + "-roll-entry.json"))));
+    }
+    shots.add(new Shot("back-" + suffix, window::showManoeuvre));
   }
 
   private void figures(boolean shown) {

@@ -19,4 +19,11 @@ public final class OpenSession {
     session.open(SHIPPED.resolve(name + ".json"));
     return session;
   }
+
+  /** An aeroplane with a shape and variants. */
+  public static DeskSession shaped(Path recovery) {
+    DeskSession session = new DeskSession(new SameThread(), new RecoveryStore(recovery));
+    session.open(Path.of("src", "test", "resources", "shaped", "roll-entry.json"));
+    return session;
+  }
 }
