@@ -20,10 +20,10 @@ import org.rolltrace.core.quantity.Quantity;
  *
  * <p>A shape says where tail and fin are from the centre of gravity, not where that is on the wing,
  * nor where the body begins: drawn are a centre of gravity on the quarter-chord line of the mean
- * chord, and a body that ends with the tail.
+ * chord, and a body that ends with the tail, or a boom behind one that is too short for that.
  */
 public final class ShapeDrawing {
-  /** Above this the drawing is too small to be read, px. */
+  /** A smaller drawing could not be read, px. */
   public static final double LEAST = 120;
 
   private static final Stroke OUTLINE = Stroke.of(Ink.WING, 1.6);
@@ -48,6 +48,9 @@ public final class ShapeDrawing {
   private static final double WIDEST = 0.3;
 
   private static final double TAIL = 0.16;
+
+  /** How much of its length a body reaches ahead of the wing at least. */
+  private static final double AHEAD = 0.2;
 
   /** Where the aerodynamic centre of a fin is, from its root, by its span. */
   private static final double FIN_CENTRE = 0.42;
@@ -146,6 +149,10 @@ public final class ShapeDrawing {
     private final double centre;
 
     private final double front;
+
+    /** The nose of the body, where there is one. */
+    private final double bodyFront;
+
     private final double back;
     private final double top;
     private final double bottom;
@@ -172,9 +179,13 @@ public final class ShapeDrawing {
         low = Math.min(low, corner[1]);
       }
       double tail = Math.max(tailEnd(), most);
+      double nose = 0;
       if (shape.body().isPresent()) {
         Body body = shape.body().get();
-        least = Math.min(least, tail - body.length());
+        // A pod is too short to end with the tail: it carries the wing, and a boom the tail.
+        double root = leadingEdge(0, wing.panels().get(0).innerChord());
+        nose = Math.min(tail - body.length(), root - AHEAD * body.length());
+        least = Math.min(least, nose);
         high = Math.max(high, 0.5 * body.height());
         low = Math.min(low, -0.5 * body.height());
       }
@@ -187,6 +198,7 @@ public final class ShapeDrawing {
         high = Math.max(high, shape.tailplane().get().height());
       }
       front = least;
+      bodyFront = nose;
       back = tail;
       top = high;
       bottom = low;
@@ -400,7 +412,13 @@ public final class ShapeDrawing {
       double angle = 2 * Math.PI * i / count;
       double half = 0.5 * body.width() * breadth(0.5 * (1 - Math.cos(angle)));
       xs[i] = x(Math.sin(angle) < 0 ? -half : half);
-      ys[i] = above(outline.back - body.length() * 0.5 * (1 + Math.cos(angle)));
+      ys[i] = above(outline.bodyFront + body.length() * 0.5 * (1 - Math.cos(angle)));
+    }
+    double end = outline.bodyFront + body.length();
+    if (end < outline.back) {
+      marks.add(
+          new Mark.Line(
+              0.5 * width, above(end), 0.5 * width, above(outline.back), Stroke.of(Ink.WING, 3)));
     }
     marks.add(new Mark.Area(xs, ys, Ink.GROUND, 1));
     marks.add(new Mark.Area(xs, ys, Ink.WING, 0.06));

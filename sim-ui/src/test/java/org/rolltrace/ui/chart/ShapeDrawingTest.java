@@ -123,6 +123,35 @@ class ShapeDrawingTest {
     }
   }
 
+  /** A pod of 1 m or so, with the tail more than that behind it. */
+  @Test
+  void aBodyThatIsTooShortForTheTailCarriesTheWingAndHasABoom() {
+    Geometry survey =
+        AeroplaneFile.read(Path.of("..", "scenarios", "aeroplanes", "mosspipit-survey.json"))
+            .aeroplane()
+            .geometry()
+            .orElseThrow();
+    ShapeDrawing.Drawing drawing = draw(survey, Optional.empty());
+    List<Mark.Area> areas =
+        drawing.sheet().marks().stream()
+            .filter(Mark.Area.class::isInstance)
+            .map(Mark.Area.class::cast)
+            .toList();
+    double nose = top(areas.stream().filter(area -> area.ink() == Ink.GROUND).findFirst());
+    double wing = top(areas.stream().filter(area -> area.opacity() == 0.1).findFirst());
+    assertThat(nose).isLessThan(wing);
+    assertThat(drawing.sheet().marks())
+        .anyMatch(
+            mark ->
+                mark instanceof Mark.Line line
+                    && line.stroke().equals(Stroke.of(Ink.WING, 3))
+                    && line.y2() > line.y1());
+  }
+
+  private static double top(Optional<Mark.Area> area) {
+    return Arrays.stream(area.orElseThrow().y()).min().orElseThrow();
+  }
+
   @Test
   void aSheetTooSmallIsRefused() {
     assertThatThrownBy(
